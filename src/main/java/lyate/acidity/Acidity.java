@@ -1,0 +1,70 @@
+package lyate.acidity;
+
+import java.util.List;
+import java.util.Locale;
+import lyate.stock.Medium;
+
+/**
+ * The pKa of one site in one medium, with everything it rests on.
+ *
+ * @param pKa           pKa of the site as it stands in the molecule, statistical factors included
+ * @param sigma         standard uncertainty, pKa units
+ * @param medium        the solvent whose scale this is
+ * @param basis         how it was obtained
+ * @param contributions for an estimate: what it adds up from, class value first; empty for a measured value
+ * @param missing       what the estimate could not account for, in words
+ * @param relatives     nearest measured relatives
+ * @param source        citation or method
+ */
+public record Acidity(double pKa, double sigma, Medium medium, Basis basis, List<Contribution> contributions,
+                      List<String> missing, List<Relative> relatives, String source) {
+
+    /** How a value was obtained. */
+    public enum Basis {
+        MEASURED, ESTIMATED, TRANSFERRED;
+
+        /** The word used in output. */
+        public String word() {
+            return name().toLowerCase(Locale.ROOT);
+        }
+    }
+
+    /** Which effect on acidity a contribution stands for. */
+    public enum Effect { ATOM, ORBITAL, RESONANCE, INDUCTION, CHARGE, HYDROGEN_BOND, STERICS, STATISTICS, RELATIVES, MEDIUM }
+
+    /**
+     * One term of an estimate.
+     *
+     * @param text   for example {@code 4-NO2, sigma minus 1.24}
+     * @param effect the kind of effect
+     * @param value  pKa units it adds
+     * @param atoms  atoms it comes from
+     */
+    public record Contribution(String text, Effect effect, double value, List<Integer> atoms) {
+        public Contribution {
+            atoms = List.copyOf(atoms);
+        }
+    }
+
+    /**
+     * A measured compound close to the one asked for.
+     *
+     * @param smiles     its structure
+     * @param site       label of its site
+     * @param pKa        its measured value
+     * @param similarity 0 to 1
+     * @param source     citation
+     */
+    public record Relative(String smiles, String site, double pKa, double similarity, String source) {}
+
+    public Acidity {
+        contributions = List.copyOf(contributions);
+        missing = List.copyOf(missing);
+        relatives = List.copyOf(relatives);
+    }
+
+    /** A value taken from a table. */
+    public static Acidity measured(double pKa, double sigma, Medium medium, String source) {
+        return new Acidity(pKa, sigma, medium, Basis.MEASURED, List.of(), List.of(), List.of(), source);
+    }
+}

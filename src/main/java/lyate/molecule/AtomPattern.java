@@ -1,0 +1,46 @@
+package lyate.molecule;
+
+import org.openscience.cdk.isomorphism.DfPattern;
+import org.openscience.cdk.isomorphism.matchers.QueryAtomContainer;
+import org.openscience.cdk.silent.SilentChemObjectBuilder;
+import org.openscience.cdk.smarts.Smarts;
+import org.openscience.cdk.smarts.SmartsResult;
+
+/**
+ * A SMARTS pattern that describes one atom and its surroundings: the first atom of the pattern is that atom.
+ * Compiled once; safe to share between threads.
+ */
+public final class AtomPattern {
+
+    private final String smarts;
+    private final DfPattern pattern;
+
+    private AtomPattern(String smarts, DfPattern pattern) {
+        this.smarts = smarts;
+        this.pattern = pattern;
+    }
+
+    /**
+     * Compiles a pattern (Daylight SMARTS, Daylight aromaticity).
+     *
+     * @throws MoleculeException with a caret under the place where the pattern stops making sense
+     */
+    public static AtomPattern compile(String smarts) throws MoleculeException {
+        QueryAtomContainer query = new QueryAtomContainer(SilentChemObjectBuilder.getInstance());
+        SmartsResult result = Smarts.parseToResult(query, smarts);
+        if (!result.ok()) {
+            throw new MoleculeException(result.getMessage() + "\n" + result.displayErrorLocation());
+        }
+        return new AtomPattern(smarts, DfPattern.findSubstructure(query));
+    }
+
+    /** Whether the pattern fits with its first atom on {@code atom}. */
+    public boolean matches(Molecule molecule, int atom) {
+        return pattern.matchesRoot(molecule.container().getAtom(atom));
+    }
+
+    /** The pattern as written. */
+    public String smarts() {
+        return smarts;
+    }
+}

@@ -1,0 +1,36 @@
+package lyate.review;
+
+import java.util.List;
+import java.util.Map;
+
+/**
+ * What becomes of a step, and why.
+ *
+ * @param step            what was asked
+ * @param verdict         the answer
+ * @param probability     probability of that verdict, 0 to 1
+ * @param probabilities   probability of every verdict that is possible
+ * @param intendedSite    label of the site judged
+ * @param firstSite       label of the site whose proton goes first; {@code solvent}, {@code water} or {@code none}
+ * @param workingBase     the base that is really in the flask, in words
+ * @param logK            log10 K at the intended site against the working base
+ * @param intendedPercent share of the intended protons taken at equilibrium
+ * @param otherPercent    highest share taken at any other site of the substrate
+ * @param transfers       every donor, most acidic first
+ * @param findings        most severe first
+ * @param explanation     which numbers and which rule gave the verdict, and what would change it
+ * @param assumptions     what was assumed where the step said nothing
+ */
+public record Review(Step step, Verdict verdict, double probability, Map<Verdict, Double> probabilities,
+                     String intendedSite, String firstSite, String workingBase, double logK,
+                     double intendedPercent, double otherPercent, List<Transfer> transfers,
+                     List<Finding> findings, List<String> explanation, List<String> assumptions) {
+
+    public Review {
+        probabilities = Map.copyOf(probabilities);
+        transfers = List.copyOf(transfers);
+        findings = List.copyOf(findings);
+        explanation = List.copyOf(explanation);
+        assumptions = List.copyOf(assumptions);
+    }
+}

@@ -1,0 +1,24 @@
+package lyate.review;
+
+import java.util.Optional;
+import lyate.molecule.Molecule;
+import lyate.stock.Base;
+import lyate.stock.Solvent;
+
+/**
+ * One deprotonation as somebody means to run it.
+ *
+ * @param id                    name of the row
+ * @param substrate             what is to lose a proton
+ * @param intendedSite          label of the atom meant, for example {@code C3}; empty: the most acidic one
+ * @param base                  what is to take it
+ * @param equivalents           moles of base per mole of substrate
+ * @param solvent               what they are in
+ * @param temperatureCelsius    temperature of the deprotonation
+ * @param concentrationMolar    substrate, mol/L
+ * @param waterPpm              water in the solvent, mass ppm
+ * @param partner               electrophile or additive in the same flask
+ */
+public record Step(String id, Molecule substrate, Optional<String> intendedSite, Base base, double equivalents,
+                   Solvent solvent, double temperatureCelsius, double concentrationMolar, double waterPpm,
+                   Optional<Molecule> partner) {}

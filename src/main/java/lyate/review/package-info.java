@@ -1,0 +1,2 @@
+/** Judges a deprotonation step; start with {@link lyate.review.Reviewer}. */
+package lyate.review;

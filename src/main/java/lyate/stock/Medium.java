@@ -1,0 +1,14 @@
+package lyate.stock;
+
+/**
+ * A solvent in which a pKa scale exists. Two pKa values are compared only within one medium.
+ *
+ * @param id the solvent's id in {@code solvents.csv}, for example {@code water}
+ */
+public record Medium(String id) {
+
+    public static final Medium WATER = new Medium("water");
+    public static final Medium DMSO = new Medium("dmso");
+    public static final Medium ACETONITRILE = new Medium("mecn");
+    public static final Medium THF = new Medium("thf");
+}
