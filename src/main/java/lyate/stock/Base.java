@@ -21,20 +21,37 @@ import java.util.OptionalDouble;
  * @param nucleophilicity    {@code none}, {@code low}, {@code medium} or {@code high}
  * @param form               for example {@code solution}
  * @param stock              how it is usually sold or made, for example {@code 2.5 M in hexanes}
+ * @param strength           strength of that stock as a number, where it is not the pure substance
  * @param molarMass          g/mol of the formula given
  * @param density            g/mL of the liquid or the stock solution at 20 to 25 degrees C
- * @param gas                what it gives off on protonation; empty for nothing
+ * @param gas                gas given off as its first stage is protonated, for example {@code hydrogen}; empty for none
+ * @param highestTemperatures degrees C up to which it is usually kept, by solvent id
  * @param notes              remarks for the user
+ * @param source             citation for form, stock and density; each pKa has its own
  */
 public record Base(String id, String name, List<String> aliases, BaseFamily family, String smiles, String conjugateAcid,
                    String counterIon, Map<Medium, KnownPKa> pKas, List<KnownPKa> furtherStages, int protonsPerFormula,
-                   String nucleophilicity, String form, String stock, double molarMass, OptionalDouble density,
-                   String gas, String notes) {
+                   String nucleophilicity, String form, String stock, Optional<Strength> strength, double molarMass,
+                   OptionalDouble density, String gas, Map<String, Double> highestTemperatures, String notes,
+                   String source) implements Named {
+
+    /**
+     * How much base a stock holds.
+     *
+     * @param value number in the unit
+     * @param unit  mol per litre, or percent by mass
+     */
+    public record Strength(double value, Unit unit) {
+
+        /** Units a strength is given in. */
+        public enum Unit { MOL_PER_LITRE, MASS_PERCENT }
+    }
 
     public Base {
         aliases = List.copyOf(aliases);
         pKas = Map.copyOf(pKas);
         furtherStages = List.copyOf(furtherStages);
+        highestTemperatures = Map.copyOf(highestTemperatures);
     }
 
     /** pKa of the conjugate acid in a medium, where known. */

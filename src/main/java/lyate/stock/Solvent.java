@@ -29,7 +29,8 @@ import java.util.OptionalDouble;
 public record Solvent(String id, String name, List<String> aliases, String smiles, Kind kind, Medium scale,
                       Map<Medium, KnownPKa> donorPKas, double boilingPoint, OptionalDouble meltingPoint,
                       double density, OptionalDouble permittivity, OptionalDouble heatCapacity, double molarMass,
-                      OptionalDouble typicalWaterPpm, OptionalDouble saturationPpm, String notes, String source) {
+                      OptionalDouble typicalWaterPpm, OptionalDouble saturationPpm, String notes, String source)
+        implements Named {
 
     /** How a solvent treats ions and protons. */
     public enum Kind { PROTIC, DIPOLAR_APROTIC, LOW_POLARITY }

@@ -1,0 +1,69 @@
+package lyate.stock;
+
+import java.util.List;
+import lyate.table.TableException;
+import lyate.table.TableFolders;
+
+/**
+ * Everything on the shelf, loaded once and passed in. Immutable; safe to share between threads.
+ *
+ * <p>Things are found by id, name, alias or abbreviation; case, accents, spaces and punctuation do not count.
+ */
+public final class Stockroom {
+
+    private final Shelf<Base> bases;
+    private final Shelf<Solvent> solvents;
+
+    private Stockroom(Shelf<Base> bases, Shelf<Solvent> solvents) {
+        this.bases = bases;
+        this.solvents = solvents;
+    }
+
+    /**
+     * Loads the shelf tables.
+     *
+     * @throws TableException naming file, line and column of every bad cell, and both rows where two share a name
+     */
+    public static Stockroom load(TableFolders folders) {
+        return new Stockroom(new Shelf<>("base", "bases.csv", new BaseTable(folders).read()),
+                new Shelf<>("solvent", "solvents.csv", SolventTable.read(folders)));
+    }
+
+    /** Every base, in the order of the table. */
+    public List<Base> bases() {
+        return bases.all();
+    }
+
+    /** Every solvent, in the order of the table. */
+    public List<Solvent> solvents() {
+        return solvents.all();
+    }
+
+    /**
+     * The base of that name.
+     *
+     * @throws UnknownNameException with the nearest known names
+     */
+    public Base base(String name) throws UnknownNameException {
+        return bases.find(name);
+    }
+
+    /**
+     * The solvent of that name.
+     *
+     * @throws UnknownNameException with the nearest known names
+     */
+    public Solvent solvent(String name) throws UnknownNameException {
+        return solvents.find(name);
+    }
+
+    /** At most {@code limit} bases that a text typed so far may mean, likeliest first. */
+    public List<Base> searchBases(String text, int limit) {
+        return bases.search(text, limit);
+    }
+
+    /** At most {@code limit} solvents that a text typed so far may mean, likeliest first. */
+    public List<Solvent> searchSolvents(String text, int limit) {
+        return solvents.search(text, limit);
+    }
+}
