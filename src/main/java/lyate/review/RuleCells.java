@@ -1,0 +1,92 @@
+package lyate.review;
+
+import java.util.ArrayList;
+import java.util.Arrays;
+import java.util.List;
+import java.util.Locale;
+import java.util.Optional;
+import java.util.OptionalDouble;
+import java.util.Set;
+import java.util.stream.Collectors;
+import lyate.stock.Base;
+import lyate.stock.Medium;
+import lyate.stock.Solvent;
+import lyate.stock.Stockroom;
+import lyate.table.Column;
+import lyate.table.NearestNames;
+import lyate.table.Row;
+import lyate.table.TableProblem;
+
+/** The cells that every table of rules has, and the checks that go beyond the schema. */
+final class RuleCells {
+
+    /** The severity word of a row that keeps an earlier, more general row quiet. */
+    static final String SILENT = "silent";
+
+    private final Set<String> baseWords;
+    private final Set<String> solventWords;
+    private final List<TableProblem> problems;
+
+    RuleCells(Stockroom stockroom, List<TableProblem> problems) {
+        this.baseWords = stockroom.bases().stream().flatMap(base -> List.of(base.id(), base.family().id()).stream())
+                .collect(Collectors.toSet());
+        this.solventWords = stockroom.solvents().stream().map(Solvent::id).collect(Collectors.toSet());
+        Arrays.stream(Solvent.Kind.values()).map(Surroundings::word).forEach(solventWords::add);
+        this.problems = problems;
+    }
+
+    static Column kind() {
+        return Column.word("kind", Arrays.stream(FindingKind.values()).map(FindingKind::code).toArray(String[]::new));
+    }
+
+    static Column severity() {
+        return Column.word("severity", "stop", "caution", "note", SILENT);
+    }
+
+    static FindingKind kind(Row row) {
+        return FindingKind.valueOf(row.text("kind").toUpperCase(Locale.ROOT).replace('-', '_'));
+    }
+
+    /** Severity of the row, or empty for a silent one. */
+    static Optional<Finding.Severity> severity(Row row) {
+        String word = row.text("severity");
+        return word.equals(SILENT) ? Optional.empty() : Optional.of(Finding.Severity.valueOf(word.toUpperCase(Locale.ROOT)));
+    }
+
+    Surroundings surroundings(Row row) {
+        return new Surroundings(known(row, "solvents", solventWords), row.number("temperature_from"), row.number("temperature_to"));
+    }
+
+    BaseCondition families(Row row) {
+        return new BaseCondition(known(row, "bases", baseWords), "", Optional.empty(),
+                OptionalDouble.empty(), OptionalDouble.empty());
+    }
+
+    BaseCondition base(Row row) {
+        boolean limited = row.has("pka_at_least") || row.has("pka_at_most");
+        if (limited != row.has("pka_scale")) {
+            problems.add(row.problem("pka_scale", limited ? "water or dmso beside a strength limit" : "a strength limit beside the scale"));
+        }
+        return new BaseCondition(known(row, "bases", baseWords), row.text("nucleophilicity"),
+                row.has("pka_scale") ? Optional.of(new Medium(row.text("pka_scale"))) : Optional.empty(),
+                row.number("pka_at_least"), row.number("pka_at_most"));
+    }
+
+    private List<String> known(Row row, String column, Set<String> words) {
+        List<String> found = new ArrayList<>(row.list(column));
+        for (String entry : found) {
+            String word = entry.startsWith("!") ? entry.substring(1) : entry;
+            if (!words.contains(word)) {
+                problems.add(row.problem(column, "known ids instead of " + word + ", nearest: "
+                        + String.join(", ", NearestNames.of(word, words, 3))));
+            }
+        }
+        return found;
+    }
+
+    /** A sentence of a table with the names of the step put in. */
+    static String fill(String sentence, Base base, Solvent solvent) {
+        String filled = sentence.replace("{base}", base.name()).replace("{solvent}", solvent.name());
+        return filled.substring(0, 1).toUpperCase(Locale.ROOT) + filled.substring(1);
+    }
+}
