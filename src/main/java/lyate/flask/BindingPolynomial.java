@@ -184,6 +184,17 @@ final class BindingPolynomial {
         return weighted(lostShare[member], shares);
     }
 
+    /** Index within the holder of the place that changes most between two numbers of protons. */
+    int mostChanged(int few, int many) {
+        int most = 0;
+        for (int member = 1; member < members.length; member++) {
+            if (heldShare[member][many] - heldShare[member][few] > heldShare[most][many] - heldShare[most][few]) {
+                most = member;
+            }
+        }
+        return members[most];
+    }
+
     private double weighted(double[] conditional, double[] shares) {
         double sum = 0;
         for (int held = 0; held <= members.length; held++) {

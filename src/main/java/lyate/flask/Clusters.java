@@ -11,9 +11,9 @@ import java.util.stream.IntStream;
  * microstates.
  *
  * <p>Up to {@value #LARGEST} coupled places nothing is lost. Beyond that the most strongly coupled places stay together
- * and a coupling that crosses clusters is charged in full to the less acidic of its two places: it loses its proton
- * second and so meets the charge the first one left. That is exact where the two pKa values lie far apart, and wrong by
- * at most the statistical log10 2 in each step where they coincide and the coupling is strong.
+ * and a weaker coupling that crosses clusters is charged in full to the less acidic of its two places: it loses its
+ * proton second and so meets the charge the first one left. That is exact where the two pKa values lie far apart; where
+ * they do not, a cut coupling misplaces a pKa by at most its own size.
  */
 final class Clusters {
 
@@ -76,6 +76,19 @@ final class Clusters {
 
     private List<BindingPolynomial> polynomials() {
         double[] pKas = pKas(holder);
+        chargeCutCouplings(pKas);
+        List<BindingPolynomial> polynomials = new ArrayList<>();
+        for (int cluster = 0; cluster < clusterOf.length; cluster++) {
+            int wanted = cluster;
+            int[] members = IntStream.range(0, clusterOf.length).filter(place -> clusterOf[place] == wanted).toArray();
+            if (members.length > 0) {
+                polynomials.add(BindingPolynomial.of(holder, members, pKas));
+            }
+        }
+        return List.copyOf(polynomials);
+    }
+
+    private void chargeCutCouplings(double[] pKas) {
         double[] own = pKas.clone();
         for (Coupling coupling : holder.couplings()) {
             if (clusterOf[coupling.first()] != clusterOf[coupling.second()]) {
@@ -83,16 +96,6 @@ final class Clusters {
                 pKas[firstIsWeaker ? coupling.first() : coupling.second()] += coupling.raise();
             }
         }
-        List<BindingPolynomial> polynomials = new ArrayList<>();
-        for (int cluster = 0; cluster < clusterOf.length; cluster++) {
-            int wanted = cluster;
-            int[] members = IntStream.range(0, clusterOf.length)
-                    .filter(place -> clusterOf[place] == wanted).toArray();
-            if (members.length > 0) {
-                polynomials.add(BindingPolynomial.of(holder, members, pKas));
-            }
-        }
-        return List.copyOf(polynomials);
     }
 
     private static double[] pKas(ProtonHolder holder) {

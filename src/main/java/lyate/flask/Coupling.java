@@ -16,7 +16,7 @@ public record Coupling(int first, int second, double raise) {
         }
         if (!(Math.abs(raise) <= ProtonPlace.PKA_LIMIT)) {
             throw new IllegalArgumentException("places " + first + " and " + second + " are coupled by " + raise
-                    + " pKa units, expected a number from -100 to 100");
+                    + " pKa units, expected a number from -200 to 200");
         }
     }
 }

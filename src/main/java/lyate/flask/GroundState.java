@@ -1,7 +1,5 @@
 package lyate.flask;
 
-import java.util.ArrayList;
-import java.util.Comparator;
 import java.util.List;
 
 /**
@@ -15,22 +13,19 @@ import java.util.List;
  */
 record GroundState(int[] held, double excess, double guess) {
 
-    /** Taking up protons {@code few} + 1 to {@code many} of one species. */
-    private record Uptake(int species, int few, int many, double level, DoubleDouble protons) {}
-
     static GroundState of(List<Species> species, DoubleDouble protons) {
-        List<Uptake> uptakes = strongestFirst(species);
+        List<Uptake> uptakes = Uptake.strongestFirst(species);
         int[] held = new int[species.size()];
         DoubleDouble left = protons;
         for (int index = 0; index < uptakes.size(); index++) {
-            Uptake uptake = uptakes.get(index);
             if (left.isZero()) {
                 return new GroundState(held, 0, index == 0 ? Double.POSITIVE_INFINITY
-                        : between(uptakes.get(index - 1), uptake));
+                        : between(species, uptakes.get(index - 1), uptakes.get(index)));
             }
-            DoubleDouble missing = left.minus(uptake.protons());
+            Uptake uptake = uptakes.get(index);
+            DoubleDouble missing = left.minus(DoubleDouble.product(species.get(uptake.species()).amount(), uptake.protons()));
             if (missing.value() < 0) {
-                return partly(uptakes, index, held, left.value(), -missing.value());
+                return partly(species, uptakes, index, held, left.value(), -missing.value());
             }
             held[uptake.species()] = uptake.many();
             left = missing;
@@ -39,49 +34,24 @@ record GroundState(int[] held, double excess, double guess) {
     }
 
     /** The protons run out within one uptake. */
-    private static GroundState partly(List<Uptake> uptakes, int index, int[] held, double taken, double room) {
+    private static GroundState partly(List<Species> species, List<Uptake> uptakes, int index, int[] held, double taken,
+                                      double room) {
         Uptake uptake = uptakes.get(index);
-        double guess = uptake.level() + Math.log10(room / taken) / (uptake.many() - uptake.few());
+        double guess = uptake.level() + Math.log10(room / taken) / uptake.protons();
         if (index > 0) {
-            guess = Math.min(guess, Math.max(uptake.level(), between(uptakes.get(index - 1), uptake)));
+            guess = Math.min(guess, Math.max(uptake.level(), between(species, uptakes.get(index - 1), uptake)));
         }
         if (index + 1 < uptakes.size()) {
-            guess = Math.max(guess, Math.min(uptake.level(), between(uptake, uptakes.get(index + 1))));
+            guess = Math.max(guess, Math.min(uptake.level(), between(species, uptake, uptakes.get(index + 1))));
         }
         boolean mostlyRoom = taken <= room;
         held[uptake.species()] = mostlyRoom ? uptake.few() : uptake.many();
         return new GroundState(held, mostlyRoom ? taken : -room, guess);
     }
 
-    private static double between(Uptake stronger, Uptake weaker) {
-        return (stronger.level() + weaker.level()
-                + Math.log10(weaker.protons().value() / stronger.protons().value())) / 2;
-    }
-
-    private static List<Uptake> strongestFirst(List<Species> species) {
-        List<Uptake> uptakes = new ArrayList<>();
-        for (int index = 0; index < species.size(); index++) {
-            BindingPolynomial polynomial = species.get(index).polynomial();
-            int few = 0;
-            while (few < polynomial.capacity()) {
-                int many = nextCorner(polynomial, few);
-                uptakes.add(new Uptake(index, few, many, polynomial.levelBetween(few, many),
-                        DoubleDouble.product(species.get(index).amount(), many - few)));
-                few = many;
-            }
-        }
-        uptakes.sort(Comparator.comparingDouble(uptake -> -uptake.level()));
-        return uptakes;
-    }
-
-    /** The number of protons taken up next as the level falls; more than one at once where they help one another. */
-    private static int nextCorner(BindingPolynomial polynomial, int few) {
-        int best = few + 1;
-        for (int many = few + 2; many <= polynomial.capacity(); many++) {
-            if (polynomial.levelBetween(few, many) >= polynomial.levelBetween(few, best)) {
-                best = many;
-            }
-        }
-        return best;
+    /** Level at which the full one has lost as many protons as the empty one has gained. */
+    private static double between(List<Species> species, Uptake full, Uptake empty) {
+        return (full.level() + empty.level() + Math.log10(
+                species.get(empty.species()).amount() / species.get(full.species()).amount())) / 2;
     }
 }

@@ -16,11 +16,11 @@ public record ProtonPlace(String label, double pKa, int after) {
     public static final int ANY_ORDER = -1;
 
     /** The pKa values that can be handled reach from minus this to this. */
-    public static final double PKA_LIMIT = 100;
+    public static final double PKA_LIMIT = 200;
 
     public ProtonPlace {
         if (!(Math.abs(pKa) <= PKA_LIMIT)) {
-            throw new IllegalArgumentException(label + ": pKa " + pKa + ", expected a number from -100 to 100");
+            throw new IllegalArgumentException(label + ": pKa " + pKa + ", expected a number from -200 to 200");
         }
     }
 

@@ -1,0 +1,75 @@
+package lyate.flask;
+
+import java.util.Comparator;
+import java.util.LinkedHashMap;
+import java.util.Map;
+import java.util.function.Function;
+import java.util.stream.IntStream;
+import org.hipparchus.distribution.continuous.NormalDistribution;
+import org.hipparchus.random.SobolSequenceGenerator;
+
+/**
+ * Carries the uncertainty of pKa values to whatever is concluded from them: the conclusion is drawn again at a fixed set
+ * of points that fill the space of possible errors evenly (Sobol points through the normal quantile), and the shares of
+ * the answers are their probabilities. Same answer on every run, machine and thread.
+ */
+public final class UncertaintyPropagation {
+
+    /** Points that settle a probability to about 0.01. */
+    public static final int DEFAULT_POINTS = 512;
+
+    private final int points;
+
+    /** With {@link #DEFAULT_POINTS} points. */
+    public UncertaintyPropagation() {
+        this(DEFAULT_POINTS);
+    }
+
+    /**
+     * With that many points.
+     *
+     * @param points a power of two, for the points to lie evenly
+     */
+    public UncertaintyPropagation(int points) {
+        if (Integer.bitCount(points) != 1 || points < 1) {
+            throw new IllegalArgumentException(points + " points, expected a power of two");
+        }
+        this.points = points;
+    }
+
+    /**
+     * The probability of every outcome.
+     *
+     * @param outcome what is concluded if every pKa is shifted by the given amounts; called once per point
+     * @return outcomes that occur, most probable first; sums to 1
+     */
+    public <L> Map<L, Double> probabilities(PKaErrors errors, Function<double[], L> outcome) {
+        double[] sizes = errors.sizes();
+        int[] largestFirst = IntStream.range(0, sizes.length).filter(source -> sizes[source] > 0).boxed()
+                .sorted(Comparator.comparingDouble(source -> -sizes[source])).mapToInt(source -> source).toArray();
+        if (largestFirst.length == 0) {
+            return Map.of(outcome.apply(new double[errors.own().size()]), 1.0);
+        }
+        // The first Sobol coordinates are the most even ones: they go to the largest errors.
+        SobolSequenceGenerator sobol = new SobolSequenceGenerator(largestFirst.length);
+        NormalDistribution normal = new NormalDistribution();
+        Map<L, Integer> counts = new LinkedHashMap<>();
+        for (int point = 0; point < points; point++) {
+            double[] even = sobol.nextVector();
+            double[] deviations = new double[sizes.length];
+            for (int coordinate = 0; coordinate < largestFirst.length; coordinate++) {
+                // Half a cell further, so that each point stands for the middle of its cell and none lies at 0.
+                deviations[largestFirst[coordinate]] = normal.inverseCumulativeProbability(even[coordinate] + 0.5 / points);
+            }
+            counts.merge(outcome.apply(errors.shifts(deviations)), 1, Integer::sum);
+        }
+        return shares(counts);
+    }
+
+    private <L> Map<L, Double> shares(Map<L, Integer> counts) {
+        Map<L, Double> shares = new LinkedHashMap<>();
+        counts.entrySet().stream().sorted(Map.Entry.<L, Integer>comparingByValue().reversed())
+                .forEach(entry -> shares.put(entry.getKey(), entry.getValue() / (double) points));
+        return shares;
+    }
+}
