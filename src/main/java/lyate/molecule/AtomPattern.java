@@ -1,6 +1,7 @@
 package lyate.molecule;
 
 import org.openscience.cdk.isomorphism.DfPattern;
+import org.openscience.cdk.isomorphism.matchers.QueryAtom;
 import org.openscience.cdk.isomorphism.matchers.QueryAtomContainer;
 import org.openscience.cdk.silent.SilentChemObjectBuilder;
 import org.openscience.cdk.smarts.Smarts;
@@ -13,10 +14,12 @@ import org.openscience.cdk.smarts.SmartsResult;
 public final class AtomPattern {
 
     private final String smarts;
+    private final RootFilter filter;
     private final DfPattern pattern;
 
-    private AtomPattern(String smarts, DfPattern pattern) {
+    private AtomPattern(String smarts, RootFilter filter, DfPattern pattern) {
         this.smarts = smarts;
+        this.filter = filter;
         this.pattern = pattern;
     }
 
@@ -26,17 +29,27 @@ public final class AtomPattern {
      * @throws MoleculeException with a caret under the place where the pattern stops making sense
      */
     public static AtomPattern compile(String smarts) throws MoleculeException {
+        QueryAtomContainer query = parse(smarts);
+        if (query.isEmpty()) {
+            throw new MoleculeException("the pattern is empty");
+        }
+        NestedPatterns.compile(query);
+        RootFilter filter = RootFilter.of(((QueryAtom) query.getAtom(0)).getExpression());
+        return new AtomPattern(smarts, filter, DfPattern.findSubstructure(query));
+    }
+
+    private static QueryAtomContainer parse(String smarts) throws MoleculeException {
         QueryAtomContainer query = new QueryAtomContainer(SilentChemObjectBuilder.getInstance());
         SmartsResult result = Smarts.parseToResult(query, smarts);
         if (!result.ok()) {
-            throw new MoleculeException(result.getMessage() + "\n" + result.displayErrorLocation());
+            throw new MoleculeException(result.getMessage() + SmilesError.caret(smarts, result.getPosition()));
         }
-        return new AtomPattern(smarts, DfPattern.findSubstructure(query));
+        return query;
     }
 
     /** Whether the pattern fits with its first atom on {@code atom}. */
     public boolean matches(Molecule molecule, int atom) {
-        return pattern.matchesRoot(molecule.container().getAtom(atom));
+        return filter.admits(molecule.rootCode(atom)) && pattern.matchesRoot(molecule.container().getAtom(atom));
     }
 
     /** The pattern as written. */

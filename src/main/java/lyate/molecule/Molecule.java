@@ -6,6 +6,7 @@ import java.util.OptionalInt;
 import org.openscience.cdk.interfaces.IAtom;
 import org.openscience.cdk.interfaces.IAtomContainer;
 import org.openscience.cdk.interfaces.IBond;
+import org.openscience.cdk.interfaces.IStereoElement;
 
 /**
  * One molecule, perceived once and never changed: rings, aromaticity, hydrogens and symmetry are settled.
@@ -21,16 +22,24 @@ public final class Molecule {
     private final int[] inputNumbers;
     private final long[] symmetryClasses;
     private final int[][] neighbours;
+    private final int[] rootCodes;
+    private final long quickHash;
+    private final List<IAtomContainer> others;
     private final List<String> counterIons;
     private final List<String> warnings;
+    /** Written when first asked for; threads that meet here write the same text twice, which does no harm. */
+    private String canonicalKey;
 
-    Molecule(String input, Perception perceived, List<String> counterIons, List<String> warnings) {
+    Molecule(String input, Perception perceived, List<IAtomContainer> others, List<String> warnings) {
         this.input = input;
         this.container = perceived.container();
         this.inputNumbers = perceived.inputNumbers();
         this.symmetryClasses = perceived.symmetryClasses();
         this.neighbours = perceived.neighbours();
-        this.counterIons = List.copyOf(counterIons);
+        this.rootCodes = perceived.rootCodes();
+        this.quickHash = perceived.quickHash();
+        this.others = List.copyOf(others);
+        this.counterIons = others.stream().map(SmilesWriter::full).toList();
         this.warnings = List.copyOf(warnings);
     }
 
@@ -126,11 +135,64 @@ public final class Molecule {
     public List<Integer> stereocentres() {
         List<Integer> centres = new ArrayList<>();
         container.stereoElements().forEach(element -> {
-            if (element.getFocus() instanceof IAtom focus) {
-                centres.add(focus.getIndex());
+            if (element.getConfigClass() == IStereoElement.Tetrahedral) {
+                centres.add(((IAtom) element.getFocus()).getIndex());
             }
         });
         return centres.stream().sorted().toList();
+    }
+
+    /** Bonds on the shortest path between two atoms. */
+    public int distance(int from, int to) {
+        return distances(from)[to];
+    }
+
+    /** Bonds on the shortest path from one atom to every atom, by index. */
+    public int[] distances(int from) {
+        return Paths.distances(neighbours, from);
+    }
+
+    /** Size of the smallest ring through the atom; 0 where it is in none. */
+    public int smallestRing(int atom) {
+        return inRing(atom) ? Paths.smallestRing(neighbours, atom) : 0;
+    }
+
+    /** Canonical SMILES of the substrate, configuration and isotopes included; reading it gives the same molecule. */
+    public String smiles() {
+        return SmilesWriter.full(container);
+    }
+
+    /** Canonical SMILES of the substrate without configuration and isotopes: equal for equal constitutions. */
+    public String canonicalKey() {
+        if (canonicalKey == null) {
+            canonicalKey = SmilesWriter.constitution(container);
+        }
+        return canonicalKey;
+    }
+
+    /** A number that is equal wherever {@link #canonicalKey()} is, and rarely elsewhere; costs nothing to ask for. */
+    public long quickHash() {
+        return quickHash;
+    }
+
+    /** Whether two substrates have the same constitution; configuration and isotopes do not count. */
+    public boolean sameConstitution(Molecule other) {
+        return quickHash == other.quickHash && canonicalKey().equals(other.canonicalKey());
+    }
+
+    /** Sum formula of the substrate in the order of Hill, its charge at the end. */
+    public String formula() {
+        return Composition.formula(container);
+    }
+
+    /** g/mol of the substrate alone, natural isotopes. */
+    public double molarMass() {
+        return Composition.molarMass(container);
+    }
+
+    /** g/mol of everything that was given: what is weighed. */
+    public double molarMassWithCounterIons() {
+        return molarMass() + others.stream().mapToDouble(Composition::molarMass).sum();
     }
 
     /** SMILES of the components that are not the substrate, in input order. */
@@ -141,6 +203,11 @@ public final class Molecule {
     /** What was changed or assumed while reading, in words. */
     public List<String> warnings() {
         return warnings;
+    }
+
+    /** What {@link RootFilter} looks at. */
+    int rootCode(int atom) {
+        return rootCodes[atom];
     }
 
     /** The prepared toolkit molecule, for this package alone; nobody may change it. */

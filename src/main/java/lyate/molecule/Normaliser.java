@@ -2,40 +2,44 @@ package lyate.molecule;
 
 import java.util.ArrayList;
 import java.util.List;
-import org.openscience.cdk.graph.ConnectivityChecker;
 import org.openscience.cdk.interfaces.IAtom;
 import org.openscience.cdk.interfaces.IAtomContainer;
-import org.openscience.cdk.tools.manipulator.AtomContainerManipulator;
 
 /** Turns whatever was read into the one form the program works with, and refuses in words what it cannot use. */
 final class Normaliser {
 
-    private static final String INPUT_NUMBER = "lyate.inputNumber";
+    private final Normalisations variants;
 
-    private final String input;
-
-    Normaliser(String input) {
-        this.input = input;
+    Normaliser(Normalisations variants) {
+        this.variants = variants;
     }
 
-    Molecule normalise(IAtomContainer read) throws MoleculeException {
-        if (read.isEmpty()) {
-            throw new MoleculeException("there is no atom in it");
+    /**
+     * @param input what the user gave
+     * @param read  every atom of it in input order; changed by this method
+     * @param notes what reading already assumed, in words
+     */
+    Molecule normalise(String input, IAtomContainer read, List<String> notes) throws MoleculeException {
+        List<String> warnings = new ArrayList<>(notes);
+        InputNumbers.assign(read);
+        Refusals.check(read);
+        Hydrogens.fold(read, warnings);
+        Metals.split(read, warnings);
+        List<IAtom> odd = Valence.oddAtoms(read);
+        variants.apply(read, odd, warnings);
+        Components components = Components.of(read);
+        checkSubstrate(components.substrate(), odd);
+        return new Molecule(input, Perception.of(components.substrate(), warnings), components.counterIons(), warnings);
+    }
+
+    private static void checkSubstrate(IAtomContainer substrate, List<IAtom> odd) throws MoleculeException {
+        if (substrate.getAtomCount() > Refusals.MOST_HEAVY_ATOMS) {
+            throw Refusals.tooLarge(substrate.getAtomCount());
         }
-        for (int i = 0; i < read.getAtomCount(); i++) {
-            read.getAtom(i).setProperty(INPUT_NUMBER, i + 1);
-        }
-        IAtomContainer substrate = null;
-        List<String> counterIons = new ArrayList<>();
-        for (IAtomContainer part : ConnectivityChecker.partitionIntoMolecules(AtomContainerManipulator.suppressHydrogens(read))) {
-            if (substrate == null || part.getAtomCount() > substrate.getAtomCount()) {
-                substrate = part;
+        for (IAtom atom : odd) {
+            if (substrate.contains(atom)) {
+                Valence.check(atom);
             }
         }
-        int[] inputNumbers = new int[substrate.getAtomCount()];
-        for (IAtom atom : substrate.atoms()) {
-            inputNumbers[atom.getIndex()] = atom.getProperty(INPUT_NUMBER);
-        }
-        return new Molecule(input, Perception.of(substrate, inputNumbers), counterIons, List.of());
     }
 }

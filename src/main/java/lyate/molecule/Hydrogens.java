@@ -1,0 +1,57 @@
+package lyate.molecule;
+
+import java.util.ArrayList;
+import java.util.List;
+import org.openscience.cdk.CDKConstants;
+import org.openscience.cdk.interfaces.IAtom;
+import org.openscience.cdk.interfaces.IAtomContainer;
+import org.openscience.cdk.interfaces.IStereoElement;
+import org.openscience.cdk.tools.manipulator.AtomContainerManipulator;
+
+/** Hydrogens drawn as atoms become a count on the atom they are bound to. */
+final class Hydrogens {
+
+    private Hydrogens() {}
+
+    /**
+     * Folds every drawn hydrogen into its heavy atom; deuterium and tritium count as hydrogen.
+     *
+     * @throws MoleculeException for a hydrogen with more than one bond
+     */
+    static void fold(IAtomContainer molecule, List<String> warnings) throws MoleculeException {
+        boolean drawn = false;
+        boolean isotope = false;
+        for (IAtom atom : molecule.atoms()) {
+            if (atom.getAtomicNumber() == 1) {
+                if (atom.getBondCount() > 1) {
+                    throw new MoleculeException(InputNumbers.label(atom) + " has " + atom.getBondCount()
+                            + " bonds; bridging hydrogens cannot be judged", InputNumbers.of(atom));
+                }
+                isotope |= atom.getMassNumber() != null;
+                atom.setMassNumber(null);
+                atom.setMapIdx(0);
+                drawn = true;
+            }
+        }
+        if (isotope) {
+            warnings.add("deuterium and tritium are counted as hydrogen");
+        }
+        if (drawn) {
+            molecule.removeProperty(CDKConstants.CTAB_SGROUPS);
+            AtomContainerManipulator.suppressHydrogens(molecule);
+            forgetLostCentres(molecule);
+        }
+    }
+
+    /** A centre told apart only by an isotope of hydrogen is none any more. */
+    private static void forgetLostCentres(IAtomContainer molecule) {
+        List<IStereoElement> kept = new ArrayList<>();
+        for (IStereoElement<?, ?> element : molecule.stereoElements()) {
+            boolean lost = element.getFocus() instanceof IAtom focus && focus.getImplicitHydrogenCount() > 1;
+            if (!lost) {
+                kept.add(element);
+            }
+        }
+        molecule.setStereoElements(kept);
+    }
+}

@@ -1,0 +1,36 @@
+package lyate.molecule;
+
+import org.openscience.cdk.interfaces.IAtom;
+import org.openscience.cdk.interfaces.IAtomContainer;
+import org.openscience.cdk.isomorphism.matchers.Expr;
+import org.openscience.cdk.isomorphism.matchers.QueryAtom;
+import org.openscience.cdk.silent.SilentChemObjectBuilder;
+
+/** The toolkit compiles {@code $(...)} on first use; done beforehand, a pattern never changes while threads share it. */
+final class NestedPatterns {
+
+    private NestedPatterns() {}
+
+    /** Compiles every nested pattern of a query. */
+    static void compile(IAtomContainer query) {
+        IAtom probe = SilentChemObjectBuilder.getInstance().newAtomContainer().newAtom(6, 4);
+        for (IAtom atom : query.atoms()) {
+            compile(((QueryAtom) atom).getExpression(), probe);
+        }
+    }
+
+    private static void compile(Expr expression, IAtom probe) {
+        switch (expression.type()) {
+            case AND, OR -> {
+                compile(expression.left(), probe);
+                compile(expression.right(), probe);
+            }
+            case NOT -> compile(expression.left(), probe);
+            case RECURSIVE -> {
+                compile(expression.subquery());
+                expression.matches(probe);
+            }
+            default -> { }
+        }
+    }
+}
