@@ -1,0 +1,62 @@
+package lyate.molecule;
+
+import java.awt.Color;
+import java.awt.geom.PathIterator;
+import java.awt.geom.Rectangle2D;
+import java.util.Locale;
+
+/** Writes a drawing as scalable vector graphics (SVG 1.1). */
+public final class MoleculeSvg {
+
+    private static final double MARGIN = 0.3;
+
+    private MoleculeSvg() {}
+
+    /**
+     * A complete {@code <svg>} element.
+     *
+     * @param bondLength width of one bond in px
+     */
+    public static String write(MoleculeDrawing drawing, DrawingColours colours, double bondLength) {
+        Rectangle2D box = drawing.bounds();
+        double width = box.getWidth() + 2 * MARGIN;
+        double height = box.getHeight() + 2 * MARGIN;
+        StringBuilder svg = new StringBuilder(String.format(Locale.ROOT,
+                "<svg xmlns=\"http://www.w3.org/2000/svg\" width=\"%.1f\" height=\"%.1f\" viewBox=\"%.3f %.3f %.3f %.3f\">%n",
+                width * bondLength, height * bondLength, box.getX() - MARGIN, box.getY() - MARGIN, width, height));
+        for (DrawingMark mark : drawing.marks()) {
+            String colour = hex(colours.of(mark.atomicNumber()));
+            String style = mark.filled() ? "fill=\"" + colour + "\"" : String.format(Locale.ROOT,
+                    "fill=\"none\" stroke=\"%s\" stroke-width=\"%.3f\" stroke-linecap=\"round\" stroke-linejoin=\"round\"",
+                    colour, mark.strokeWidth());
+            svg.append("<path ").append(style).append(" d=\"").append(path(mark)).append("\"/>\n");
+        }
+        return svg.append("</svg>\n").toString();
+    }
+
+    private static String path(DrawingMark mark) {
+        StringBuilder text = new StringBuilder();
+        double[] p = new double[6];
+        for (PathIterator i = mark.shape().getPathIterator(null); !i.isDone(); i.next()) {
+            int kind = i.currentSegment(p);
+            text.append("MLQCZ".charAt(kind));
+            for (int k = 0; k < numbers(kind); k++) {
+                text.append(String.format(Locale.ROOT, k == 0 ? "%.3f" : " %.3f", p[k]));
+            }
+        }
+        return text.toString();
+    }
+
+    private static int numbers(int kind) {
+        return switch (kind) {
+            case PathIterator.SEG_MOVETO, PathIterator.SEG_LINETO -> 2;
+            case PathIterator.SEG_QUADTO -> 4;
+            case PathIterator.SEG_CUBICTO -> 6;
+            default -> 0;
+        };
+    }
+
+    private static String hex(Color colour) {
+        return String.format(Locale.ROOT, "#%06x", colour.getRGB() & 0xffffff);
+    }
+}
