@@ -1,0 +1,159 @@
+package lyate.window;
+
+import java.awt.BorderLayout;
+import java.awt.Dimension;
+import java.awt.Font;
+import java.awt.Rectangle;
+import java.util.EnumSet;
+import java.util.List;
+import java.util.Set;
+import java.util.function.Consumer;
+import javax.swing.BorderFactory;
+import javax.swing.JComponent;
+import javax.swing.JLabel;
+import javax.swing.JPanel;
+import javax.swing.JScrollPane;
+import javax.swing.Scrollable;
+import javax.swing.UIManager;
+import lyate.review.Finding;
+import lyate.review.FindingKind;
+import lyate.review.Review;
+
+/** The verdict, then the findings by severity; what can hurt people stands apart at the foot, always open. */
+final class FindingsPanel extends JPanel {
+
+    private static final Set<FindingKind> SAFETY = EnumSet.of(FindingKind.GAS_EVOLVED, FindingKind.HEAT_RELEASED,
+            FindingKind.THERMAL_HAZARD, FindingKind.PYROPHORIC);
+    private static final String WHO_DECIDES = "This is not a risk assessment. The safety data sheets, the local rules and a qualified person decide.";
+
+    private final Theme theme;
+    private final Consumer<List<Integer>> highlight;
+    private final Column column = new Column();
+    private final Column safety = new Column();
+    private final JScrollPane safetyScroll;
+    private Review review;
+
+    FindingsPanel(Theme theme, Consumer<List<Integer>> highlight) {
+        super(new BorderLayout());
+        this.theme = theme;
+        this.highlight = highlight;
+        add(scroll(column));
+        safetyScroll = scroll(safety);
+        add(safetyScroll, BorderLayout.SOUTH);
+        theme.onChange(this::rebuild);
+        getAccessibleContext().setAccessibleName("Findings");
+    }
+
+    void show(Review next) {
+        review = next;
+        rebuild();
+    }
+
+    private void rebuild() {
+        if (review == null) {
+            return;
+        }
+        column.removeAll();
+        safety.removeAll();
+        column.setLayout(new StackLayout(theme.space("hair")));
+        safety.setLayout(new StackLayout(theme.space("hair")));
+        column.setBackground(theme.color("line.soft"));
+        safety.setBackground(theme.color("line.soft"));
+        column.add(new VerdictHeader(review, theme.palette()));
+        List<Finding> chemistry = review.findings().stream().filter(finding -> !SAFETY.contains(finding.kind())).toList();
+        if (!review.explanation().isEmpty()) {
+            column.add(section("Why, and what would change it"));
+            column.add(lines(review.explanation()));
+        }
+        column.add(section(chemistry.isEmpty() ? "No findings" : "Findings"));
+        for (Finding finding : chemistry) {
+            column.add(new FindingRow(finding, review.step().substrate(), theme, finding.severity() == Finding.Severity.STOP, highlight));
+        }
+        if (!review.assumptions().isEmpty()) {
+            column.add(section("Assumed"));
+            column.add(lines(review.assumptions()));
+        }
+        showSafety(review.findings().stream().filter(finding -> SAFETY.contains(finding.kind())).toList());
+        column.revalidate();
+        column.repaint();
+        revalidate();
+    }
+
+    private void showSafety(List<Finding> hazards) {
+        safetyScroll.setVisible(!hazards.isEmpty());
+        safety.add(section("Safety"));
+        hazards.forEach(hazard -> safety.add(new FindingRow(hazard, review.step().substrate(), theme, false, highlight)));
+        safety.add(lines(List.of(WHO_DECIDES)));
+    }
+
+    private JLabel section(String title) {
+        JLabel label = new JLabel(title);
+        label.setFont(UIManager.getFont("Label.font").deriveFont(Font.BOLD));
+        label.setForeground(theme.color("ink.soft"));
+        label.setOpaque(true);
+        label.setBackground(theme.color("ground.soft"));
+        int gap = theme.space("gap");
+        label.setBorder(BorderFactory.createEmptyBorder(gap / 2, gap, gap / 2, gap));
+        return label;
+    }
+
+    private JPanel lines(List<String> sentences) {
+        JPanel panel = new JPanel(new StackLayout(theme.space("small")));
+        int gap = theme.space("gap");
+        panel.setBorder(BorderFactory.createEmptyBorder(gap, gap, gap, gap));
+        panel.setBackground(theme.color("ground"));
+        for (String sentence : sentences) {
+            WrappedText text = new WrappedText(sentence);
+            text.setForeground(theme.color("ink"));
+            panel.add(text);
+        }
+        return panel;
+    }
+
+    private static JScrollPane scroll(JComponent content) {
+        JScrollPane scroll = new JScrollPane(content, JScrollPane.VERTICAL_SCROLLBAR_AS_NEEDED, JScrollPane.HORIZONTAL_SCROLLBAR_NEVER);
+        scroll.setBorder(null);
+        scroll.getVerticalScrollBar().setUnitIncrement(UIManager.getFont("Label.font").getSize() * 2);
+        return scroll;
+    }
+
+    /** At most this share of the height goes to the safety notes before they scroll. */
+    @Override
+    public void doLayout() {
+        if (safetyScroll.isVisible()) {
+            safety.setSize(getWidth(), Math.max(1, safety.getHeight()));
+            int wanted = safety.getPreferredSize().height;
+            safetyScroll.setPreferredSize(new Dimension(getWidth(), Math.min(wanted, getHeight() * 2 / 5)));
+        }
+        super.doLayout();
+    }
+
+    /** A column that is as wide as what scrolls it. */
+    private static final class Column extends JPanel implements Scrollable {
+
+        @Override
+        public Dimension getPreferredScrollableViewportSize() {
+            return getPreferredSize();
+        }
+
+        @Override
+        public int getScrollableUnitIncrement(Rectangle visible, int orientation, int direction) {
+            return getFontMetrics(getFont()).getHeight();
+        }
+
+        @Override
+        public int getScrollableBlockIncrement(Rectangle visible, int orientation, int direction) {
+            return visible.height;
+        }
+
+        @Override
+        public boolean getScrollableTracksViewportWidth() {
+            return true;
+        }
+
+        @Override
+        public boolean getScrollableTracksViewportHeight() {
+            return false;
+        }
+    }
+}

@@ -1,0 +1,98 @@
+package lyate.window;
+
+import java.util.ArrayList;
+import java.util.Comparator;
+import java.util.List;
+import java.util.Locale;
+import java.util.Optional;
+import lyate.review.Transfer;
+import lyate.stock.Base;
+import lyate.stock.Medium;
+
+/**
+ * What stands on the acidity ladder. Pure function of a review.
+ *
+ * @param medium  whose pKa axis it is
+ * @param rungs   everything on it, ascending pKa
+ * @param basePKa level of the working base
+ * @param beyond  rungs too far away to be of interest, in words; empty where there are none
+ */
+record Ladder(Medium medium, List<Rung> rungs, double basePKa, String beyond) {
+
+    /** pKa units beyond the intended site and the base that are still shown. */
+    private static final double OF_INTEREST = 12;
+
+    Ladder {
+        rungs = List.copyOf(rungs);
+    }
+
+    static Optional<Ladder> of(Shown shown, List<Base> compared) {
+        Optional<Transfer> anchor = shown.intended().map(SiteTag::transfer).or(() -> shown.review().transfers().stream().findFirst());
+        return anchor.map(transfer -> of(shown, compared, transfer));
+    }
+
+    private static Ladder of(Shown shown, List<Base> compared, Transfer anchor) {
+        Medium medium = anchor.acidity().medium();
+        double basePKa = anchor.acidity().pKa() + anchor.logK();
+        List<Rung> all = new ArrayList<>();
+        shown.tags().sites().forEach(site -> all.add(rung(Rung.Kind.SITE, site.label(), site.transfer(), Optional.of(site), medium, basePKa)));
+        shown.review().transfers().stream().filter(transfer -> transfer.atoms().isEmpty())
+                .forEach(transfer -> all.add(other(shown, transfer, medium, basePKa)));
+        double sigma = Math.sqrt(Math.max(0, square(anchor.sigmaLogK()) - square(anchor.acidity().sigma())));
+        all.add(new Rung(Rung.Kind.BASE, shown.review().workingBase(), basePKa, sigma, Words.oneDecimal(basePKa), Optional.empty(), anchor.decidedBy()));
+        compared.forEach(base -> base.pKa(medium).ifPresent(known -> all.add(new Rung(Rung.Kind.COMPARED, base.name(), known.pKa(), known.sigma(),
+                Words.oneDecimal(known.pKa()), Optional.empty(), known.source()))));
+        double low = Math.min(basePKa, anchor.acidity().pKa()) - OF_INTEREST;
+        double high = Math.max(basePKa, anchor.acidity().pKa()) + OF_INTEREST;
+        List<Rung> near = all.stream().filter(rung -> rung.pKa() >= low && rung.pKa() <= high || rung.kind() == Rung.Kind.COMPARED)
+                .sorted(Comparator.comparingDouble(Rung::pKa)).toList();
+        return new Ladder(medium, near, basePKa, beyond(all, near, low, high));
+    }
+
+    private static Rung other(Shown shown, Transfer transfer, Medium medium, double basePKa) {
+        return switch (transfer.donor()) {
+            case "solvent" -> rung(Rung.Kind.SOLVENT, shown.review().step().solvent().name(), transfer, Optional.empty(), medium, basePKa);
+            case "water" -> rung(Rung.Kind.WATER, "water", transfer, Optional.empty(), medium, basePKa);
+            default -> rung(Rung.Kind.PARTNER, transfer.donor(), transfer, Optional.empty(), medium, basePKa);
+        };
+    }
+
+    /** A donor judged on another scale stands where its gap to the base is its log K, and says so. */
+    private static Rung rung(Rung.Kind kind, String name, Transfer transfer, Optional<SiteTag> site, Medium medium, double basePKa) {
+        boolean sameScale = transfer.acidity().medium().equals(medium);
+        double pKa = sameScale ? transfer.acidity().pKa() : basePKa - transfer.logK();
+        String text = Words.withSigma(transfer.acidity()) + (sameScale ? "" : " " + Words.medium(transfer.acidity().medium()));
+        return new Rung(kind, name, pKa, transfer.acidity().sigma(), text, site, transfer.decidedBy());
+    }
+
+    private static String beyond(List<Rung> all, List<Rung> near, double low, double high) {
+        long above = all.stream().filter(rung -> !near.contains(rung) && rung.pKa() > high).count();
+        long below = all.stream().filter(rung -> !near.contains(rung) && rung.pKa() < low).count();
+        List<String> words = new ArrayList<>();
+        if (above > 0) {
+            words.add(String.format(Locale.ROOT, "%d more above %.0f", above, high));
+        }
+        if (below > 0) {
+            words.add(String.format(Locale.ROOT, "%d more below %.0f", below, low));
+        }
+        return String.join(", ", words);
+    }
+
+    Optional<Rung> intended() {
+        return rungs.stream().filter(Rung::intended).findFirst();
+    }
+
+    /** Lowest value the axis must show. */
+    double low() {
+        return rungs.stream().mapToDouble(rung -> rung.pKa() - rung.sigma()).min().orElse(0);
+    }
+
+    /** Highest value the axis must show. */
+    double high() {
+        return rungs.stream().mapToDouble(rung -> rung.pKa() + rung.sigma()).max().orElse(14);
+    }
+
+    private static double square(double value) {
+        return value * value;
+    }
+}

@@ -1,0 +1,20 @@
+package lyate.window;
+
+import java.util.Optional;
+import lyate.molecule.MoleculeDrawing;
+import lyate.review.Review;
+
+/**
+ * What the panels show: a review, the drawing of its substrate, and the letters of its sites.
+ */
+record Shown(Review review, MoleculeDrawing drawing, SiteTags tags) {
+
+    Shown(Review review, MoleculeDrawing drawing) {
+        this(review, drawing, SiteTags.of(review));
+    }
+
+    /** The tag of the site that is meant. */
+    Optional<SiteTag> intended() {
+        return tags.labelled(review.intendedSite());
+    }
+}

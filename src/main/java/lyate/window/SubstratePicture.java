@@ -1,0 +1,120 @@
+package lyate.window;
+
+import java.awt.Dimension;
+import java.awt.Font;
+import java.awt.Graphics2D;
+import java.awt.RenderingHints;
+import java.awt.geom.AffineTransform;
+import java.awt.geom.Ellipse2D;
+import java.awt.geom.Line2D;
+import java.awt.geom.Point2D;
+import java.awt.geom.Rectangle2D;
+import java.util.ArrayList;
+import java.util.Comparator;
+import java.util.List;
+import java.util.Optional;
+import lyate.molecule.Molecule;
+import lyate.molecule.MoleculeDrawing;
+import lyate.window.TagPlacer.Placed;
+import lyate.window.TagPlacer.Wish;
+
+/** The substrate with its tags, laid out for one size and one view; painted on screen, tested and exported alike. */
+final class SubstratePicture {
+
+    private final Shown shown;
+    private final Palette palette;
+    private final TagPainter painter;
+    private final AffineTransform transform;
+    private final List<Point2D> atoms;
+    private final double ring;
+    private final List<Placed> placed;
+
+    /**
+     * @param view zoom and pan on top of the fit; identity for the whole molecule
+     */
+    SubstratePicture(Shown shown, Palette palette, Font font, Dimension size, AffineTransform view, Graphics2D measure) {
+        this.shown = shown;
+        this.palette = palette;
+        this.painter = new TagPainter(palette, font);
+        this.transform = fit(shown.drawing(), size, view, measure);
+        this.atoms = positions(shown.drawing());
+        this.ring = Math.min(palette.space("ring"), 0.33 * Math.sqrt(Math.abs(transform.getDeterminant())));
+        Rectangle2D area = new Rectangle2D.Double(palette.space("small"), palette.space("small"),
+                size.width - 2.0 * palette.space("small"), size.height - 2.0 * palette.space("small"));
+        this.placed = new TagPlacer(area, atoms, bonds(), ring + palette.space("small")).place(wishes(measure));
+    }
+
+    void paint(Graphics2D g, List<Integer> highlighted, Optional<SiteTag> focused) {
+        g.setRenderingHint(RenderingHints.KEY_ANTIALIASING, RenderingHints.VALUE_ANTIALIAS_ON);
+        g.setRenderingHint(RenderingHints.KEY_STROKE_CONTROL, RenderingHints.VALUE_STROKE_PURE);
+        g.setColor(palette.ground("caution"));
+        for (int atom : highlighted) {
+            double radius = ring * 1.5;
+            g.fill(new Ellipse2D.Double(atoms.get(atom).getX() - radius, atoms.get(atom).getY() - radius, 2 * radius, 2 * radius));
+        }
+        shown.drawing().paint(g, transform, palette.drawing());
+        for (Placed tag : placed) {
+            if (tag.full()) {
+                tag.tag().transfer().atoms().forEach(atom -> painter.paintRing(g, tag.tag(), atoms.get(atom), ring));
+            }
+            painter.paintLeader(g, tag.tag(), tag.box(), atoms.get(tag.tag().atom()), ring);
+        }
+        for (Placed tag : placed) {
+            painter.paintTag(g, tag.tag(), tag.box(), tag.full(), focused.filter(tag.tag()::equals).isPresent());
+        }
+    }
+
+    /** The site at a point: its tag, or the ring round one of its atoms. */
+    Optional<SiteTag> siteAt(Point2D point) {
+        for (Placed tag : placed) {
+            if (tag.box().contains(point)) {
+                return Optional.of(tag.tag());
+            }
+        }
+        return shown.tags().sites().stream()
+                .filter(site -> site.transfer().atoms().stream().anyMatch(atom -> atoms.get(atom).distance(point) <= ring * 1.2)).findFirst();
+    }
+
+    /** Where tags came to be. */
+    List<Placed> placed() {
+        return placed;
+    }
+
+    private static AffineTransform fit(MoleculeDrawing drawing, Dimension size, AffineTransform view, Graphics2D g) {
+        int roomX = 5 * g.getFontMetrics().getHeight();
+        int roomY = 2 * g.getFontMetrics().getHeight();
+        double width = Math.max(size.width / 2.0, size.width - 2.0 * roomX);
+        double height = Math.max(size.height / 2.0, size.height - 2.0 * roomY);
+        Rectangle2D area = new Rectangle2D.Double((size.width - width) / 2, (size.height - height) / 2, width, height);
+        AffineTransform transform = new AffineTransform(view);
+        transform.concatenate(drawing.fit(area, 4.0 * g.getFontMetrics().getHeight()));
+        return transform;
+    }
+
+    private List<Point2D> positions(MoleculeDrawing drawing) {
+        List<Point2D> positions = new ArrayList<>();
+        for (int atom = 0; atom < drawing.atomCount(); atom++) {
+            positions.add(transform.transform(drawing.position(atom), null));
+        }
+        return positions;
+    }
+
+    private List<Line2D> bonds() {
+        Molecule substrate = shown.review().step().substrate();
+        List<Line2D> bonds = new ArrayList<>();
+        for (int atom = 0; atom < substrate.atomCount(); atom++) {
+            for (int other : substrate.neighbours(atom)) {
+                if (other > atom) {
+                    bonds.add(new Line2D.Double(atoms.get(atom), atoms.get(other)));
+                }
+            }
+        }
+        return bonds;
+    }
+
+    /** The intended site first, then by acidity; sites out of reach ask for a letter only. */
+    private List<Wish> wishes(Graphics2D g) {
+        return shown.tags().sites().stream().sorted(Comparator.comparing((SiteTag tag) -> !tag.intended()))
+                .map(tag -> new Wish(tag, TagPainter.counts(tag) ? painter.fullSize(g, tag) : null, painter.letterSize(g, tag))).toList();
+    }
+}

@@ -1,0 +1,88 @@
+package lyate.window;
+
+import java.awt.BorderLayout;
+import java.awt.Font;
+import java.util.Comparator;
+import java.util.Map;
+import java.util.stream.Collectors;
+import javax.swing.BorderFactory;
+import javax.swing.JLabel;
+import javax.swing.JPanel;
+import javax.swing.UIManager;
+import lyate.review.Review;
+import lyate.review.Verdict;
+
+/** The verdict: shape, words, probability, what it means here, and what would change it. */
+final class VerdictHeader extends JPanel {
+
+    /** Other outcomes less likely than this are not worth a word. */
+    private static final double WORTH_A_WORD = 0.05;
+
+    VerdictHeader(Review review, Palette palette) {
+        super(new BorderLayout(palette.space("wide"), palette.space("small")));
+        int gap = palette.space("wide");
+        setBackground(palette.ground(VerdictIcon.accent(review.verdict())));
+        setBorder(BorderFactory.createEmptyBorder(gap, gap, gap, gap));
+        Font plain = UIManager.getFont("Label.font");
+        JLabel icon = new JLabel(new VerdictIcon(review.verdict(), palette, (int) (plain.getSize2D() * 2.4)));
+        icon.setVerticalAlignment(JLabel.TOP);
+        add(icon, BorderLayout.WEST);
+
+        JPanel words = new JPanel(new StackLayout(palette.space("small")));
+        words.setOpaque(false);
+        words.add(title(review, palette, plain));
+        WrappedText meaning = new WrappedText(Words.sentence(review.verdict().meaning()) + ".");
+        meaning.setForeground(palette.color("ink"));
+        words.add(meaning);
+        WrappedText facts = new WrappedText(facts(review));
+        facts.setForeground(palette.color("ink"));
+        words.add(facts);
+        String others = others(review);
+        if (!others.isEmpty()) {
+            WrappedText rest = new WrappedText(others);
+            rest.setForeground(palette.color("ink.soft"));
+            words.add(rest);
+        }
+        add(words);
+    }
+
+    private static JPanel title(Review review, Palette palette, Font plain) {
+        JLabel name = new JLabel(name(review.verdict()));
+        name.setFont(plain.deriveFont(Font.BOLD, plain.getSize2D() * 1.5f));
+        name.setForeground(palette.color(VerdictIcon.accent(review.verdict())));
+        JLabel probability = new JLabel(probability(review.probability()));
+        probability.setFont(plain.deriveFont(plain.getSize2D() * 1.15f));
+        probability.setForeground(palette.color("ink"));
+        JPanel line = new JPanel(new BorderLayout());
+        line.setOpaque(false);
+        line.add(name, BorderLayout.WEST);
+        line.add(probability, BorderLayout.EAST);
+        line.getAccessibleContext().setAccessibleName("Verdict: " + name.getText() + ", " + probability.getText());
+        return line;
+    }
+
+    /** The verdict as a heading, for example {@code Wrong site}. */
+    static String name(Verdict verdict) {
+        return Words.sentence(verdict.code().replace('-', ' '));
+    }
+
+    private static String probability(double probability) {
+        return "probability " + (probability > 0.99 ? "> 99 %" : Math.round(probability * 100) + " %");
+    }
+
+    private static String facts(Review review) {
+        String first = review.firstSite().equals(review.intendedSite()) ? "The proton at " + review.intendedSite() + " goes first"
+                : "Meant: " + review.intendedSite() + ". First to go: " + review.firstSite();
+        return first + ". log K at " + review.intendedSite() + " " + Words.signed(review.logK()) + " with " + review.workingBase() + "; taken there "
+                + Words.percent(review.intendedPercent()) + ", elsewhere at most " + Words.percent(review.otherPercent()) + ".";
+    }
+
+    private static String others(Review review) {
+        String text = review.probabilities().entrySet().stream()
+                .filter(entry -> entry.getKey() != review.verdict() && entry.getValue() >= WORTH_A_WORD)
+                .sorted(Map.Entry.<Verdict, Double>comparingByValue(Comparator.reverseOrder()))
+                .map(entry -> name(entry.getKey()).toLowerCase(java.util.Locale.ROOT) + " " + Math.round(entry.getValue() * 100) + " %")
+                .collect(Collectors.joining(", "));
+        return text.isEmpty() ? "" : "Otherwise: " + text + ".";
+    }
+}
