@@ -1,6 +1,7 @@
 package lyate.molecule;
 
 import java.awt.BasicStroke;
+import java.awt.Color;
 import java.awt.Graphics2D;
 import java.awt.Shape;
 import java.awt.geom.AffineTransform;
@@ -63,6 +64,15 @@ public final class MoleculeDrawing {
         transform.scale(scale, scale);
         transform.translate(-bounds.getCenterX(), -bounds.getCenterY());
         return transform;
+    }
+
+    /** Paints a seam of one colour round the atom symbols, so that they stay readable over what was painted before. */
+    public void paintSeam(Graphics2D graphics, AffineTransform transform, Color ground, double width) {
+        Graphics2D own = (Graphics2D) graphics.create();
+        own.setColor(ground);
+        own.setStroke(new BasicStroke((float) (2 * width), BasicStroke.CAP_ROUND, BasicStroke.JOIN_ROUND));
+        marks.stream().filter(DrawingMark::filled).forEach(mark -> own.draw(transform.createTransformedShape(mark.shape())));
+        own.dispose();
     }
 
     /** Paints onto {@code graphics}, which is left as it was. */

@@ -10,13 +10,13 @@ import java.awt.event.MouseEvent;
 import java.util.List;
 import java.util.Optional;
 import java.util.function.Consumer;
-import javax.swing.JComponent;
+import javax.swing.JPanel;
 import javax.swing.ToolTipManager;
 import javax.swing.UIManager;
 import lyate.stock.Base;
 
 /** The acidity ladder; arrow keys walk its rungs, a click or Enter on a site makes it the intended one. */
-final class AcidityLadder extends JComponent {
+final class AcidityLadder extends JPanel {
 
     private final Theme theme;
     private final Consumer<String> onSite;

@@ -34,16 +34,21 @@ final class FindingRow extends JPanel {
         icon.setVerticalAlignment(JLabel.TOP);
         icon.getAccessibleContext().setAccessibleName(finding.severity().word());
 
-        JLabel kind = new JLabel(Words.sentence(finding.severity().word()) + ": " + finding.kind().code().replace('-', ' '));
+        WrappedText kind = text(Words.sentence(finding.severity().word()) + ": " + finding.kind().code().replace('-', ' '),
+                palette, finding.severity().word());
         kind.setFont(plain.deriveFont(Font.BOLD));
-        kind.setForeground(palette.color(finding.severity().word()));
         more = new JButton();
         more.putClientProperty("JButton.buttonType", "borderless");
+        more.putClientProperty("FlatLaf.styleClass", "small");
+        more.putClientProperty("FlatLaf.style", "margin: 0,4,0,4; minimumWidth: 0");
         more.addActionListener(event -> setOpen(!isOpen()));
         JPanel head = new JPanel(new BorderLayout());
         head.setOpaque(false);
         head.add(kind);
-        head.add(more, BorderLayout.EAST);
+        JPanel corner = new JPanel(new BorderLayout());
+        corner.setOpaque(false);
+        corner.add(more, BorderLayout.NORTH);
+        head.add(corner, BorderLayout.EAST);
 
         details = details(finding, substrate, palette);
         JPanel body = new JPanel(new StackLayout(palette.space("small")));

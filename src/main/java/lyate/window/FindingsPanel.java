@@ -3,6 +3,7 @@ package lyate.window;
 import java.awt.BorderLayout;
 import java.awt.Dimension;
 import java.awt.Font;
+import java.awt.Point;
 import java.awt.Rectangle;
 import java.util.EnumSet;
 import java.util.List;
@@ -30,6 +31,7 @@ final class FindingsPanel extends JPanel {
     private final Consumer<List<Integer>> highlight;
     private final Column column = new Column();
     private final Column safety = new Column();
+    private final JScrollPane columnScroll;
     private final JScrollPane safetyScroll;
     private Review review;
 
@@ -37,7 +39,8 @@ final class FindingsPanel extends JPanel {
         super(new BorderLayout());
         this.theme = theme;
         this.highlight = highlight;
-        add(scroll(column));
+        columnScroll = scroll(column);
+        add(columnScroll);
         safetyScroll = scroll(safety);
         add(safetyScroll, BorderLayout.SOUTH);
         theme.onChange(this::rebuild);
@@ -53,6 +56,7 @@ final class FindingsPanel extends JPanel {
         if (review == null) {
             return;
         }
+        Point position = columnScroll.getViewport().getViewPosition();
         column.removeAll();
         safety.removeAll();
         column.setLayout(new StackLayout(theme.space("hair")));
@@ -77,6 +81,8 @@ final class FindingsPanel extends JPanel {
         column.revalidate();
         column.repaint();
         revalidate();
+        validate();
+        columnScroll.getViewport().setViewPosition(position);
     }
 
     private void showSafety(List<Finding> hazards) {

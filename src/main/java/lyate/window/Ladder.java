@@ -39,8 +39,8 @@ record Ladder(Medium medium, List<Rung> rungs, double basePKa, String beyond) {
         shown.review().transfers().stream().filter(transfer -> transfer.atoms().isEmpty())
                 .forEach(transfer -> all.add(other(shown, transfer, medium, basePKa)));
         double sigma = Math.sqrt(Math.max(0, square(anchor.sigmaLogK()) - square(anchor.acidity().sigma())));
-        all.add(new Rung(Rung.Kind.BASE, shown.review().workingBase(), basePKa, sigma, Words.oneDecimal(basePKa), Optional.empty(), anchor.decidedBy()));
-        compared.forEach(base -> base.pKa(medium).ifPresent(known -> all.add(new Rung(Rung.Kind.COMPARED, base.name(), known.pKa(), known.sigma(),
+        all.add(new Rung(Rung.Kind.BASE, workingBase(shown), basePKa, sigma, Words.oneDecimal(basePKa), Optional.empty(), anchor.decidedBy()));
+        compared.forEach(base -> base.pKa(medium).ifPresent(known -> all.add(new Rung(Rung.Kind.COMPARED, StockWords.shortName(base), known.pKa(), known.sigma(),
                 Words.oneDecimal(known.pKa()), Optional.empty(), known.source()))));
         double low = Math.min(basePKa, anchor.acidity().pKa()) - OF_INTEREST;
         double high = Math.max(basePKa, anchor.acidity().pKa()) + OF_INTEREST;
@@ -49,9 +49,15 @@ record Ladder(Medium medium, List<Rung> rungs, double basePKa, String beyond) {
         return new Ladder(medium, near, basePKa, beyond(all, near, low, high));
     }
 
+    /** The abbreviation where the base in the flask is the one that was chosen. */
+    private static String workingBase(Shown shown) {
+        Base base = shown.review().step().base();
+        return shown.review().workingBase().equals(base.name()) ? StockWords.shortName(base) : shown.review().workingBase();
+    }
+
     private static Rung other(Shown shown, Transfer transfer, Medium medium, double basePKa) {
         return switch (transfer.donor()) {
-            case "solvent" -> rung(Rung.Kind.SOLVENT, shown.review().step().solvent().name(), transfer, Optional.empty(), medium, basePKa);
+            case "solvent" -> rung(Rung.Kind.SOLVENT, StockWords.shortName(shown.review().step().solvent()), transfer, Optional.empty(), medium, basePKa);
             case "water" -> rung(Rung.Kind.WATER, "water", transfer, Optional.empty(), medium, basePKa);
             default -> rung(Rung.Kind.PARTNER, transfer.donor(), transfer, Optional.empty(), medium, basePKa);
         };

@@ -22,7 +22,6 @@ final class LadderPicture {
     private final Font font;
     private final FontMetrics metrics;
     private final LadderAxis axis;
-    private final double axisX;
     private final double leftRail;
     private final double rightRail;
     private final int width;
@@ -37,10 +36,12 @@ final class LadderPicture {
         this.width = size.width;
         int line = metrics.getHeight();
         this.axis = LadderAxis.around(ladder.low(), ladder.high(), 2.6 * line, size.height - 1.9 * line);
-        double pill = metrics.stringWidth("log K +00.0") + 2.0 * palette.space("gap");
-        this.leftRail = size.width / 2.0 - pill * 0.75;
-        this.axisX = leftRail + pill + 1.4 * line;
-        this.rightRail = axisX + 1.8 * line;
+        double apart = palette.space("margin") + metrics.stringWidth("log K +00.0") + 4.0 * palette.space("gap") + metrics.stringWidth("00");
+        double left = widest(ladder.rungs().stream().filter(Rung::left).toList(), measure);
+        double right = widest(ladder.rungs().stream().filter(rung -> !rung.left()).toList(), measure);
+        double spare = (size.width - left - apart - right) / 2;
+        this.leftRail = Math.max(left, left + spare);
+        this.rightRail = leftRail + apart;
         this.marks = new LadderMarks(palette);
         this.labels = LadderLabel.place(ladder.rungs(), axis, line + palette.space("small"),
                 axis.top() - line, axis.bottom() + line * 0.9);
@@ -64,7 +65,7 @@ final class LadderPicture {
         Optional<Rung> mark = ladder.rungs().stream()
                 .filter(rung -> Math.hypot(point.getX() - railOf(rung), point.getY() - axis.y(rung.pKa())) < reach)
                 .min(Comparator.comparingDouble(rung -> Math.abs(point.getY() - axis.y(rung.pKa()))));
-        return mark.or(() -> labels.stream().filter(label -> label.rung().left() == point.getX() < axisX)
+        return mark.or(() -> labels.stream().filter(label -> label.rung().left() == point.getX() < rightRail)
                 .filter(label -> Math.abs(label.y() - point.getY()) < reach).map(LadderLabel::rung).findFirst());
     }
 
@@ -80,22 +81,21 @@ final class LadderPicture {
         g.setColor(palette.color("line.soft"));
         g.setStroke(new BasicStroke(palette.space("hair")));
         g.draw(new Line2D.Double(leftRail, axis.top(), leftRail, axis.bottom()));
-        g.draw(new Line2D.Double(rightRail, axis.top(), rightRail, axis.bottom()));
         g.setColor(palette.color("ink.soft"));
-        g.draw(new Line2D.Double(axisX, axis.top(), axisX, axis.bottom()));
+        g.draw(new Line2D.Double(rightRail, axis.top(), rightRail, axis.bottom()));
         int step = axis.tickStep(metrics.getHeight() * 1.5);
         for (int value = (int) axis.low(); value <= axis.high(); value++) {
             double tick = value % step == 0 ? palette.space("small") : palette.space("tiny");
-            g.draw(new Line2D.Double(axisX - tick, axis.y(value), axisX, axis.y(value)));
+            g.draw(new Line2D.Double(rightRail - tick, axis.y(value), rightRail, axis.y(value)));
             if (value % step == 0) {
                 String text = Words.whole(value);
-                g.drawString(text, (float) (axisX - palette.space("gap") - metrics.stringWidth(text)), (float) (axis.y(value) + metrics.getAscent() * 0.38));
+                g.drawString(text, (float) (rightRail - palette.space("gap") - metrics.stringWidth(text)), (float) (axis.y(value) + metrics.getAscent() * 0.38));
             }
         }
         Font bold = font.deriveFont(Font.BOLD);
         g.setFont(bold);
         g.setColor(palette.color("ink"));
-        centred(g, "pKa in " + Words.medium(ladder.medium()), axisX, metrics.getAscent() + palette.space("small"));
+        centred(g, "pKa in " + Words.medium(ladder.medium()), rightRail - palette.space("margin"), metrics.getAscent() + palette.space("small"));
         g.setFont(font);
         g.setColor(palette.color("ink.soft"));
         g.drawString("stronger acid", palette.space("gap"), (float) (axis.bottom() + metrics.getHeight() * 1.5));
@@ -149,7 +149,7 @@ final class LadderPicture {
         Rung rung = label.rung();
         double side = rung.left() ? -1 : 1;
         double bend = railOf(rung) + side * palette.space("wide");
-        double end = railOf(rung) + side * (palette.space("wide") + palette.space("margin"));
+        double end = railOf(rung) + side * leader();
         g.setColor(palette.color("line"));
         g.setStroke(new BasicStroke(palette.space("hair")));
         Path2D leader = new Path2D.Double();
@@ -158,9 +158,19 @@ final class LadderPicture {
         leader.lineTo(end, label.y());
         g.draw(leader);
         double room = (rung.left() ? end : width - end) - 2.0 * palette.space("small");
-        LadderText text = LadderText.fitted(rung, metrics, font, g, room);
+        LadderText text = LadderText.fitted(rung, font, g, room);
         double x = rung.left() ? end - palette.space("small") - text.width() : end + palette.space("small");
         text.paint(g, palette, x, label.y() + metrics.getAscent() * 0.38, focused);
+    }
+
+    /** Room for the longest label of a rail, leader line included. */
+    private double widest(List<Rung> rungs, Graphics2D g) {
+        double text = rungs.stream().mapToDouble(rung -> LadderText.fitted(rung, font, g, Double.POSITIVE_INFINITY).width()).max().orElse(0);
+        return text + leader() + 2.0 * palette.space("small") + palette.space("gap");
+    }
+
+    private double leader() {
+        return palette.space("wide") + palette.space("margin");
     }
 
     private void centred(Graphics2D g, String text, double x, double baseline) {

@@ -1,7 +1,6 @@
 package lyate.window;
 
 import java.awt.Font;
-import java.awt.FontMetrics;
 import java.awt.Graphics2D;
 
 /**
@@ -19,18 +18,24 @@ record LadderText(String name, String value, Font bold, Font plain, double nameW
 
     private static final String DOTS = "\u2026";
 
-    static LadderText fitted(Rung rung, FontMetrics metrics, Font font, Graphics2D g, double room) {
+    /** The fullest form that fits: name and value with uncertainty, without it, then a shortened name. */
+    static LadderText fitted(Rung rung, Font font, Graphics2D g, double room) {
         Font bold = font.deriveFont(Font.BOLD);
-        FontMetrics boldMetrics = g.getFontMetrics(bold);
-        String value = "  " + rung.text();
-        double valueWidth = metrics.stringWidth(value);
-        String whole = rung.site().map(site -> site.letter() + "  ").orElse("") + rung.name();
-        String name = whole;
-        while (name.length() > 2 && boldMetrics.stringWidth(name) + valueWidth > room) {
-            name = name.substring(0, name.endsWith(DOTS) ? name.length() - 2 : name.length() - 1) + DOTS;
+        String name = rung.site().map(site -> site.letter() + "  ").orElse("") + rung.name();
+        LadderText whole = of(rung, name, "  " + rung.text(), bold, font, g);
+        if (whole.width() <= room) {
+            return whole;
         }
-        double nameWidth = boldMetrics.stringWidth(name);
-        return new LadderText(name, value, bold, font, nameWidth, nameWidth + valueWidth, rung.accent());
+        LadderText shorter = of(rung, name, "  " + Words.oneDecimal(rung.pKa()), bold, font, g);
+        for (int letters = name.length() - 1; shorter.width() > room && letters > 1; letters--) {
+            shorter = of(rung, name.substring(0, letters).strip() + DOTS, shorter.value(), bold, font, g);
+        }
+        return shorter;
+    }
+
+    private static LadderText of(Rung rung, String name, String value, Font bold, Font plain, Graphics2D g) {
+        double nameWidth = g.getFontMetrics(bold).stringWidth(name);
+        return new LadderText(name, value, bold, plain, nameWidth, nameWidth + g.getFontMetrics(plain).stringWidth(value), rung.accent());
     }
 
     void paint(Graphics2D g, Palette palette, double x, double baseline, boolean focused) {

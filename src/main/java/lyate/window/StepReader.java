@@ -9,6 +9,7 @@ import lyate.molecule.MoleculeReader;
 import lyate.review.Step;
 import lyate.stock.Base;
 import lyate.stock.Solvent;
+import lyate.stock.Stockroom;
 import lyate.stock.UnknownNameException;
 
 /** Turns typed text into a step, or says by field what stands in the way. Pure; safe to share between threads. */
@@ -20,11 +21,11 @@ final class StepReader {
     private static final Range WATER = new Range(0, 1e6);
 
     private final MoleculeReader molecules;
-    private final Shelf shelf;
+    private final Stockroom stockroom;
 
-    StepReader(MoleculeReader molecules, Shelf shelf) {
+    StepReader(MoleculeReader molecules, Stockroom stockroom) {
         this.molecules = molecules;
-        this.shelf = shelf;
+        this.stockroom = stockroom;
     }
 
     StepReading read(StepText text) {
@@ -62,7 +63,7 @@ final class StepReader {
     private Base base(String name, Map<StepField, String> problems) {
         try {
             if (!name.isEmpty()) {
-                return shelf.base(name);
+                return stockroom.base(name);
             }
             problems.put(StepField.BASE, "choose a base");
         } catch (UnknownNameException e) {
@@ -74,7 +75,7 @@ final class StepReader {
     private Solvent solvent(String name, Map<StepField, String> problems) {
         try {
             if (!name.isEmpty()) {
-                return shelf.solvent(name);
+                return stockroom.solvent(name);
             }
             problems.put(StepField.SOLVENT, "choose a solvent");
         } catch (UnknownNameException e) {

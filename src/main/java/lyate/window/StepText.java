@@ -14,7 +14,7 @@ record StepText(Map<StepField, String> fields, String site) {
     StepText {
         Map<StepField, String> all = new EnumMap<>(StepField.class);
         for (StepField field : StepField.values()) {
-            all.put(field, fields.getOrDefault(field, "").strip());
+            all.put(field, trimmed(fields.getOrDefault(field, "")));
         }
         fields = Map.copyOf(all);
     }
@@ -29,6 +29,11 @@ record StepText(Map<StepField, String> fields, String site) {
                 StepField.TEMPERATURE, "0",
                 StepField.CONCENTRATION, "0.3",
                 StepField.WATER, "100"), "N7");
+    }
+
+    /** Blanks at the ends say nothing, except in a molfile, whose first lines may be empty. */
+    private static String trimmed(String text) {
+        return text.contains("\n") ? text : text.strip();
     }
 
     String get(StepField field) {

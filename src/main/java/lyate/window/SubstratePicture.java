@@ -13,6 +13,7 @@ import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
 import java.util.Optional;
+import lyate.molecule.DrawingMark;
 import lyate.molecule.Molecule;
 import lyate.molecule.MoleculeDrawing;
 import lyate.window.TagPlacer.Placed;
@@ -38,10 +39,10 @@ final class SubstratePicture {
         this.painter = new TagPainter(palette, font);
         this.transform = fit(shown.drawing(), size, view, measure);
         this.atoms = positions(shown.drawing());
-        this.ring = Math.min(palette.space("ring"), 0.33 * Math.sqrt(Math.abs(transform.getDeterminant())));
+        this.ring = Math.min(palette.space("ring"), 0.4 * Math.sqrt(Math.abs(transform.getDeterminant())));
         Rectangle2D area = new Rectangle2D.Double(palette.space("small"), palette.space("small"),
                 size.width - 2.0 * palette.space("small"), size.height - 2.0 * palette.space("small"));
-        this.placed = new TagPlacer(area, atoms, bonds(), ring + palette.space("small")).place(wishes(measure));
+        this.placed = new TagPlacer(area, atoms, bonds(), symbols(), ring + palette.space("small")).place(wishes(measure));
     }
 
     void paint(Graphics2D g, List<Integer> highlighted, Optional<SiteTag> focused) {
@@ -52,13 +53,14 @@ final class SubstratePicture {
             double radius = ring * 1.5;
             g.fill(new Ellipse2D.Double(atoms.get(atom).getX() - radius, atoms.get(atom).getY() - radius, 2 * radius, 2 * radius));
         }
-        shown.drawing().paint(g, transform, palette.drawing());
         for (Placed tag : placed) {
             if (tag.full()) {
                 tag.tag().transfer().atoms().forEach(atom -> painter.paintRing(g, tag.tag(), atoms.get(atom), ring));
             }
             painter.paintLeader(g, tag.tag(), tag.box(), atoms.get(tag.tag().atom()), ring);
         }
+        shown.drawing().paintSeam(g, transform, palette.color("ground"), palette.space("tiny"));
+        shown.drawing().paint(g, transform, palette.drawing());
         for (Placed tag : placed) {
             painter.paintTag(g, tag.tag(), tag.box(), tag.full(), focused.filter(tag.tag()::equals).isPresent());
         }
@@ -110,6 +112,12 @@ final class SubstratePicture {
             }
         }
         return bonds;
+    }
+
+    /** Boxes of the atom symbols. */
+    private List<Rectangle2D> symbols() {
+        return shown.drawing().marks().stream().filter(DrawingMark::filled)
+                .map(mark -> transform.createTransformedShape(mark.shape()).getBounds2D()).toList();
     }
 
     /** The intended site first, then by acidity; sites out of reach ask for a letter only. */

@@ -13,12 +13,12 @@ import java.awt.geom.AffineTransform;
 import java.util.List;
 import java.util.Optional;
 import java.util.function.Consumer;
-import javax.swing.JComponent;
+import javax.swing.JPanel;
 import javax.swing.ToolTipManager;
 import javax.swing.UIManager;
 
 /** The substrate; a click on a tag, or arrow keys and Enter, set the intended site. Wheel zooms, drag pans, double click fits. */
-final class SubstrateView extends JComponent {
+final class SubstrateView extends JPanel {
 
     private static final double ZOOM_STEP = 1.15;
     private static final double LEAST_ZOOM = 0.5;

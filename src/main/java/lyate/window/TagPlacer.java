@@ -15,9 +15,11 @@ import java.util.Optional;
  * @param area  where tags may be
  * @param atoms atom positions
  * @param bonds bond lines
+ * @param symbols boxes of atom symbols
  * @param ring  radius kept clear round atoms
  */
-record TagPlacer(Rectangle2D area, List<Point2D> atoms, List<Line2D> bonds, double ring) {
+record TagPlacer(Rectangle2D area, List<Point2D> atoms, List<Line2D> bonds, List<Rectangle2D> symbols,
+                 double ring) {
 
     private static final int DIRECTIONS = 24;
     private static final double[] REACH = {0.15, 0.7, 1.5, 2.6, 4.2};
@@ -95,7 +97,8 @@ record TagPlacer(Rectangle2D area, List<Point2D> atoms, List<Line2D> bonds, doub
     private boolean isFree(Rectangle2D box, List<Placed> placed) {
         double clear = ring * 0.75;
         boolean offAtoms = atoms.stream().noneMatch(atom -> distance(box, atom) < clear);
-        return offAtoms && placed.stream().noneMatch(other -> grown(other.box(), ring / 6).intersects(box));
+        boolean offSymbols = symbols.stream().noneMatch(box::intersects);
+        return offAtoms && offSymbols && placed.stream().noneMatch(other -> grown(other.box(), ring / 6).intersects(box));
     }
 
     private long crossings(Rectangle2D box) {

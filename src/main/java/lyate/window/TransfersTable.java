@@ -63,6 +63,8 @@ final class TransfersTable extends JPanel {
     }
 
     private final class Cell extends DefaultTableCellRenderer {
+        private final int gap = getFont().getSize() / 2;
+
         Cell(int alignment) {
             setHorizontalAlignment(alignment);
         }
@@ -71,6 +73,7 @@ final class TransfersTable extends JPanel {
         public Component getTableCellRendererComponent(JTable owner, Object value, boolean selected, boolean focused, int row, int column) {
             int modelColumn = owner.convertColumnIndexToModel(column);
             super.getTableCellRendererComponent(owner, model.text(modelColumn, value), selected, focused, row, column);
+            setBorder(BorderFactory.createEmptyBorder(0, gap, 0, gap));
             setFont(owner.getFont().deriveFont(model.isIntended(owner.convertRowIndexToModel(row)) ? Font.BOLD : Font.PLAIN));
             setToolTipText(modelColumn == TransfersModel.Column.DECIDED.ordinal() ? String.valueOf(value) : null);
             return this;

@@ -2,6 +2,7 @@ package lyate.window;
 
 import java.awt.Dimension;
 import java.awt.Insets;
+import java.awt.Rectangle;
 import javax.swing.JTextArea;
 import javax.swing.UIManager;
 
@@ -27,6 +28,10 @@ final class WrappedText extends JTextArea {
         setBorder(null);
         plainFont();
     }
+
+    /** Text that is set or resized must not scroll itself into view. */
+    @Override
+    public void scrollRectToVisible(Rectangle area) {}
 
     private void plainFont() {
         setFont(UIManager.getFont("Label.font"));

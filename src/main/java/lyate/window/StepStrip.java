@@ -1,0 +1,110 @@
+package lyate.window;
+
+import java.awt.GridBagConstraints;
+import java.awt.GridBagLayout;
+import java.awt.Insets;
+import java.util.ArrayList;
+import java.util.EnumMap;
+import java.util.List;
+import java.util.Map;
+import java.util.function.Consumer;
+import javax.swing.BorderFactory;
+import javax.swing.JPanel;
+import lyate.molecule.Molecule;
+import lyate.review.Step;
+import lyate.stock.Stockroom;
+
+/** The row of fields at the top; tells its listener the step as typed after every edit. */
+final class StepStrip extends JPanel {
+
+    private static final int HITS = 40;
+
+    private final Map<StepField, FieldBox> boxes = new EnumMap<>(StepField.class);
+    private final Map<StepField, Suggestions> suggestions = new EnumMap<>(StepField.class);
+    private final Consumer<StepText> onEdit;
+    private StepText text;
+
+    StepStrip(Theme theme, Stockroom stockroom, StepText first, Consumer<StepText> onEdit) {
+        super(new GridBagLayout());
+        this.onEdit = onEdit;
+        this.text = first;
+        for (StepField field : StepField.values()) {
+            int width = theme.space(field == StepField.SUBSTRATE ? "strip.substrate" : field.isNumber() ? "strip.number" : "strip.name");
+            boxes.put(field, new FieldBox(field, theme, width, this::edited));
+        }
+        boxes.get(StepField.SUBSTRATE).field().setTransferHandler(new StructureDrop(boxes.get(StepField.SUBSTRATE).field()));
+        suggestions.put(StepField.BASE, new Suggestions(boxes.get(StepField.BASE).field(), theme,
+                typed -> stockroom.searchBases(typed, HITS).stream().map(StockWords::hit).toList()));
+        suggestions.put(StepField.SOLVENT, new Suggestions(boxes.get(StepField.SOLVENT).field(), theme,
+                typed -> stockroom.searchSolvents(typed, HITS).stream().map(StockWords::hit).toList()));
+        int margin = theme.space("wide");
+        setBorder(BorderFactory.createEmptyBorder(theme.space("gap"), margin, theme.space("small"), margin));
+        for (StepField field : StepField.values()) {
+            boolean last = field == StepField.PARTNER;
+            double weight = field == StepField.SUBSTRATE ? 5 : field.isNumber() ? 0.4 : 2;
+            add(boxes.get(field), new GridBagConstraints(field.ordinal(), 0, 1, 1, weight, 0, GridBagConstraints.NORTH,
+                    GridBagConstraints.HORIZONTAL, new Insets(0, 0, 0, last ? 0 : theme.space("gap")), 0, 0));
+        }
+        fill();
+    }
+
+    StepText text() {
+        return text;
+    }
+
+    /** Shows another step without telling the listener. */
+    void show(StepText next) {
+        text = next;
+        fill();
+    }
+
+    private void fill() {
+        boxes.forEach((field, box) -> box.setQuietly(text.get(field)));
+    }
+
+    private void edited(FieldBox box) {
+        StepText next = text.with(box.kind(), box.text());
+        text = box.kind() == StepField.SUBSTRATE ? next.withSite("") : next;
+        Suggestions offers = suggestions.get(box.kind());
+        if (offers != null) {
+            offers.offer();
+        }
+        onEdit.accept(text);
+    }
+
+    /** Says below each field what is wrong with it, or what it was understood as. */
+    void report(Outcome outcome) {
+        boxes.forEach((field, box) -> {
+            String problem = outcome.problems().get(field);
+            if (problem != null) {
+                box.line().problem(problem);
+            } else {
+                box.line().hint(outcome.shown().map(shown -> understood(field, shown.review().step())).orElse(""));
+            }
+        });
+    }
+
+    private static String understood(StepField field, Step step) {
+        return switch (field) {
+            case SUBSTRATE -> remarks(step.substrate());
+            case BASE -> StockWords.pKas(step.base());
+            case SOLVENT -> StockWords.line(step.solvent());
+            case PARTNER -> step.partner().map(StepStrip::remarks).orElse("");
+            default -> "";
+        };
+    }
+
+    private static String remarks(Molecule molecule) {
+        List<String> remarks = new ArrayList<>();
+        remarks.add(molecule.atomCount() + (molecule.atomCount() == 1 ? " heavy atom" : " heavy atoms"));
+        if (!molecule.counterIons().isEmpty()) {
+            remarks.add("beside it: " + String.join(", ", molecule.counterIons()));
+        }
+        remarks.addAll(molecule.warnings());
+        return String.join("; ", remarks);
+    }
+
+    FieldBox box(StepField field) {
+        return boxes.get(field);
+    }
+}

@@ -1,0 +1,54 @@
+package lyate.window;
+
+import java.util.Comparator;
+import java.util.List;
+import java.util.Locale;
+import java.util.Map;
+import java.util.stream.Collectors;
+import lyate.stock.Base;
+import lyate.stock.KnownPKa;
+import lyate.stock.Medium;
+import lyate.stock.Named;
+import lyate.stock.Solvent;
+import lyate.window.Suggestions.Hit;
+
+/** How things on the shelf are described where they are chosen. */
+final class StockWords {
+
+    private static final List<Medium> ORDER = List.of(Medium.WATER, Medium.DMSO, Medium.ACETONITRILE, Medium.THF);
+
+    private static final int LABEL_LETTERS = 8;
+
+    private StockWords() {}
+
+    /** A name too long for a label gives way to the first abbreviation. */
+    static String shortName(Named thing) {
+        boolean tooLong = thing.name().length() > LABEL_LETTERS && !thing.aliases().isEmpty();
+        return tooLong ? thing.aliases().get(0) : thing.name();
+    }
+
+    static Hit hit(Base base) {
+        return new Hit(base.name(), String.join(", ", base.aliases()), pKas(base));
+    }
+
+    static Hit hit(Solvent solvent) {
+        return new Hit(solvent.name(), String.join(", ", solvent.aliases()), boiling(solvent));
+    }
+
+    /** For example {@code pKaH 35.3 DMSO}: the strongest claim first would be a choice, so every known scale is named. */
+    static String pKas(Base base) {
+        String values = base.pKas().entrySet().stream()
+                .sorted(Comparator.comparingInt((Map.Entry<Medium, KnownPKa> entry) -> ORDER.indexOf(entry.getKey()) < 0 ? ORDER.size() : ORDER.indexOf(entry.getKey())))
+                .map(entry -> Words.oneDecimal(entry.getValue().pKa()) + " " + Words.medium(entry.getKey())).collect(Collectors.joining(", "));
+        return values.isEmpty() ? "pKaH not known" : "pKaH " + values;
+    }
+
+    private static String boiling(Solvent solvent) {
+        return String.format(Locale.ROOT, "bp %.0f \u00b0C", solvent.boilingPoint()).replace("-", "\u2212");
+    }
+
+    /** The line below the solvent field. */
+    static String line(Solvent solvent) {
+        return boiling(solvent) + ", scale: " + Words.medium(solvent.scale());
+    }
+}

@@ -1,0 +1,120 @@
+package lyate.window;
+
+import java.awt.BorderLayout;
+import java.awt.CardLayout;
+import java.util.Optional;
+import javax.swing.BorderFactory;
+import javax.swing.JComponent;
+import javax.swing.JPanel;
+import javax.swing.JSplitPane;
+import lyate.molecule.MoleculeReader;
+import lyate.review.Reviewer;
+import lyate.stock.Stockroom;
+
+/** All parts of the window put together: fields above, pictures and findings in the middle, the drawer below. */
+final class Workbench extends JPanel implements AutoCloseable {
+
+    private static final String PICTURES = "pictures";
+    private static final String EMPTY = "empty";
+
+    private final StepStrip strip;
+    private final SubstrateView substrate;
+    private final AcidityLadder ladder;
+    private final FindingsPanel findings;
+    private final Drawer drawer;
+    private final StepPresenter presenter;
+    private final CardLayout cards = new CardLayout();
+    private final JPanel middle = new JPanel(cards);
+    private Optional<Shown> shown = Optional.empty();
+
+    Workbench(Theme theme, Stockroom stockroom, Reviewer reviewer, StepText first) {
+        super(new BorderLayout());
+        presenter = new StepPresenter(new StepReader(new MoleculeReader(), stockroom), reviewer, this::receive);
+        strip = new StepStrip(theme, stockroom, first, presenter::submit);
+        substrate = new SubstrateView(theme, this::intend);
+        ladder = new AcidityLadder(theme, this::intend);
+        findings = new FindingsPanel(theme, substrate::highlight);
+        drawer = new Drawer(theme, substrate::highlight, this::intend);
+        middle.add(pictures(theme), PICTURES);
+        middle.add(new EmptyView(theme, example -> open(strip.text().with(StepField.SUBSTRATE, example).withSite(""))), EMPTY);
+        add(strip, BorderLayout.NORTH);
+        add(middle);
+        presenter.submit(first);
+    }
+
+    private JComponent pictures(Theme theme) {
+        JSplitPane right = split(JSplitPane.HORIZONTAL_SPLIT, new Pane("Acidity ladder", ladder, theme), new Pane("Findings", findings, theme), 0.58);
+        JSplitPane top = split(JSplitPane.HORIZONTAL_SPLIT, new Pane("Substrate", substrate, theme), right, 0.38);
+        return split(JSplitPane.VERTICAL_SPLIT, top, drawer, 0.74);
+    }
+
+    private static JSplitPane split(int orientation, JComponent first, JComponent second, double share) {
+        JSplitPane split = new JSplitPane(orientation, true, first, second) {
+            private boolean placed;
+
+            @Override
+            public void doLayout() {
+                if (!placed && getWidth() > 0 && getHeight() > 0) {
+                    placed = true;
+                    setDividerLocation(share);
+                }
+                super.doLayout();
+            }
+        };
+        split.setResizeWeight(share);
+        split.setBorder(BorderFactory.createEmptyBorder());
+        return split;
+    }
+
+    /** Opens a step in the fields and reviews it. */
+    void open(StepText step) {
+        strip.show(step);
+        presenter.submit(step);
+    }
+
+    /** Makes a site the intended one. */
+    void intend(String site) {
+        open(strip.text().withSite(site));
+    }
+
+    private void receive(Outcome outcome) {
+        strip.report(outcome);
+        if (outcome.text().get(StepField.SUBSTRATE).isEmpty()) {
+            shown = Optional.empty();
+            cards.show(middle, EMPTY);
+            return;
+        }
+        outcome.shown().ifPresent(this::show);
+    }
+
+    private void show(Shown next) {
+        shown = Optional.of(next);
+        substrate.show(next);
+        ladder.show(next);
+        findings.show(next.review());
+        drawer.show(next);
+        cards.show(middle, PICTURES);
+    }
+
+    /** What is on screen now. */
+    Optional<Shown> shown() {
+        return shown;
+    }
+
+    StepStrip strip() {
+        return strip;
+    }
+
+    SubstrateView substrate() {
+        return substrate;
+    }
+
+    AcidityLadder ladder() {
+        return ladder;
+    }
+
+    @Override
+    public void close() {
+        presenter.close();
+    }
+}

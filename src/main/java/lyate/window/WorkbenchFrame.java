@@ -1,0 +1,102 @@
+package lyate.window;
+
+import com.formdev.flatlaf.util.UIScale;
+import java.awt.BorderLayout;
+import java.awt.Dimension;
+import java.awt.Frame;
+import java.awt.event.WindowAdapter;
+import java.awt.event.WindowEvent;
+import java.util.concurrent.ExecutionException;
+import java.util.function.Supplier;
+import javax.swing.JFrame;
+import javax.swing.JLabel;
+import javax.swing.JOptionPane;
+import javax.swing.SwingConstants;
+import javax.swing.SwingUtilities;
+import javax.swing.SwingWorker;
+
+/** The window of the program. For the event thread. */
+public final class WorkbenchFrame extends JFrame {
+
+    private final transient WindowMemory memory;
+    private final transient Theme theme;
+    private transient Workbench bench;
+
+    private WorkbenchFrame(WindowMemory memory) {
+        super("Lyate");
+        this.memory = memory;
+        this.theme = new Theme(memory.isDark());
+        theme.install();
+        UIScale.setZoomFactor(memory.zoom());
+        setIconImages(AppIcon.images());
+        setDefaultCloseOperation(DISPOSE_ON_CLOSE);
+        addWindowListener(new WindowAdapter() {
+            @Override
+            public void windowClosed(WindowEvent event) {
+                leave();
+            }
+        });
+        place();
+    }
+
+    /** Shows the window at once and loads the engine behind it. */
+    static void open(Supplier<Engine> loader, WindowMemory memory) {
+        SwingUtilities.invokeLater(() -> {
+            WorkbenchFrame frame = new WorkbenchFrame(memory);
+            JLabel wait = new JLabel("Reading the tables \u2026", SwingConstants.CENTER);
+            frame.add(wait);
+            frame.setVisible(true);
+            new SwingWorker<Engine, Void>() {
+                @Override
+                protected Engine doInBackground() {
+                    return loader.get();
+                }
+
+                @Override
+                protected void done() {
+                    try {
+                        frame.fill(get());
+                    } catch (ExecutionException e) {
+                        JOptionPane.showMessageDialog(frame, e.getCause().getMessage(), "The tables could not be read", JOptionPane.ERROR_MESSAGE);
+                        frame.dispose();
+                    } catch (InterruptedException e) {
+                        Thread.currentThread().interrupt();
+                    }
+                }
+            }.execute();
+        });
+    }
+
+    private void fill(Engine engine) {
+        getContentPane().removeAll();
+        bench = new Workbench(theme, engine.stockroom(), engine.reviewer(), StepText.demo());
+        setJMenuBar(new WindowMenu(new WindowCommands(this, bench, theme, memory), theme.palette().dark()));
+        add(bench, BorderLayout.CENTER);
+        revalidate();
+        repaint();
+    }
+
+    private void place() {
+        setMinimumSize(new Dimension(theme.space("window.width") / 2, theme.space("window.height") / 2));
+        memory.bounds().ifPresentOrElse(this::setBounds, () -> {
+            setSize(theme.space("window.width"), theme.space("window.height"));
+            setLocationRelativeTo(null);
+        });
+        if (Boolean.parseBoolean(memory.get("maximised", "false"))) {
+            setExtendedState(Frame.MAXIMIZED_BOTH);
+        }
+    }
+
+    @Override
+    public void dispose() {
+        memory.remember(this);
+        super.dispose();
+    }
+
+    private void leave() {
+        if (bench != null) {
+            bench.close();
+        }
+        memory.save();
+    }
+}

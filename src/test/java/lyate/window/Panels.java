@@ -1,0 +1,25 @@
+package lyate.window;
+
+import lyate.molecule.MoleculeDrawing;
+import lyate.molecule.MoleculeReader;
+import lyate.review.Review;
+import lyate.review.ReviewException;
+import lyate.stock.Stockroom;
+import lyate.table.TableFolders;
+
+/** What panel tests have in common. */
+final class Panels {
+
+    private Panels() {}
+
+    /** What the window would show for a typed step, judged by the invented reviewer. */
+    static Shown shown(StepText text) {
+        try {
+            Review review = new InventedReviewer().review(new StepReader(new MoleculeReader(), Stockroom.load(TableFolders.packaged()))
+                    .read(text).step().orElseThrow());
+            return new Shown(review, MoleculeDrawing.of(review.step().substrate()));
+        } catch (ReviewException e) {
+            throw new AssertionError(e);
+        }
+    }
+}

@@ -1,0 +1,66 @@
+package lyate.window;
+
+import com.formdev.flatlaf.util.UIScale;
+import java.awt.Dimension;
+import java.awt.image.BufferedImage;
+import java.io.IOException;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.util.concurrent.atomic.AtomicReference;
+import javax.imageio.ImageIO;
+import javax.swing.JFrame;
+import javax.swing.SwingUtilities;
+import lyate.stock.Stockroom;
+import lyate.table.TableFolders;
+
+/** Writes pictures of the window in its states; needs a display. Argument: the folder to write to. */
+final class Screenshots {
+
+    private final Path folder;
+    private final Stockroom stockroom = Stockroom.load(TableFolders.packaged());
+
+    private Screenshots(Path folder) {
+        this.folder = folder;
+    }
+
+    public static void main(String[] arguments) throws Exception {
+        Screenshots screenshots = new Screenshots(Files.createDirectories(Path.of(arguments[0])));
+        StepText demo = StepText.demo();
+        screenshots.take("light", false, 1, 1500, 920, demo);
+        screenshots.take("dark", true, 1, 1500, 920, demo);
+        screenshots.take("empty", false, 1, 1500, 920, demo.with(StepField.SUBSTRATE, ""));
+        screenshots.take("double", false, 2, 2400, 1500, demo);
+        System.exit(0);
+    }
+
+    private void take(String name, boolean dark, float zoom, int width, int height, StepText step) throws Exception {
+        AtomicReference<JFrame> frame = new AtomicReference<>();
+        AtomicReference<Workbench> bench = new AtomicReference<>();
+        SwingUtilities.invokeAndWait(() -> {
+            Theme theme = new Theme(dark);
+            theme.install();
+            UIScale.setZoomFactor(zoom);
+            bench.set(new Workbench(theme, stockroom, new InventedReviewer(), step));
+            frame.set(new JFrame(name));
+            frame.get().setContentPane(bench.get());
+            frame.get().setSize(new Dimension(width, height));
+            frame.get().setVisible(true);
+        });
+        Thread.sleep(1200);
+        SwingUtilities.invokeAndWait(() -> write(name, frame.get()));
+        SwingUtilities.invokeAndWait(() -> {
+            bench.get().close();
+            frame.get().dispose();
+        });
+    }
+
+    private void write(String name, JFrame frame) {
+        BufferedImage image = new BufferedImage(frame.getContentPane().getWidth(), frame.getContentPane().getHeight(), BufferedImage.TYPE_INT_RGB);
+        frame.getContentPane().paint(image.createGraphics());
+        try {
+            ImageIO.write(image, "png", folder.resolve(name + ".png").toFile());
+        } catch (IOException e) {
+            throw new IllegalStateException(e);
+        }
+    }
+}

@@ -1,0 +1,114 @@
+package lyate.window;
+
+import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertFalse;
+import static org.junit.jupiter.api.Assertions.assertTrue;
+import static org.junit.jupiter.api.Assumptions.assumeFalse;
+
+import java.awt.GraphicsEnvironment;
+import java.util.concurrent.Callable;
+import java.util.concurrent.FutureTask;
+import java.util.function.Predicate;
+import javax.swing.JFrame;
+import javax.swing.SwingUtilities;
+import lyate.review.Verdict;
+import lyate.stock.Stockroom;
+import lyate.table.TableFolders;
+import org.junit.jupiter.api.AfterEach;
+import org.junit.jupiter.api.BeforeEach;
+import org.junit.jupiter.api.Test;
+
+/** Drives the real window; needs a display, for example Xvfb. */
+class WorkbenchTest {
+
+    private JFrame frame;
+    private Workbench bench;
+
+    @BeforeEach
+    void openWindow() throws Exception {
+        assumeFalse(GraphicsEnvironment.isHeadless(), "the window needs a display");
+        onEventThread(() -> {
+            Theme theme = new Theme(false);
+            theme.install();
+            bench = new Workbench(theme, Stockroom.load(TableFolders.packaged()), new InventedReviewer(), StepText.demo());
+            frame = new JFrame();
+            frame.setContentPane(bench);
+            frame.setSize(1500, 920);
+            frame.setVisible(true);
+            return null;
+        });
+        waitFor(bench -> bench.shown().isPresent());
+    }
+
+    @AfterEach
+    void closeWindow() throws Exception {
+        if (frame != null) {
+            onEventThread(() -> {
+                bench.close();
+                frame.dispose();
+                return null;
+            });
+        }
+    }
+
+    @Test
+    void opensOnAStepThatShowsAConflict() throws Exception {
+        assertEquals(Verdict.WRONG_SITE, onEventThread(() -> bench.shown().orElseThrow().review().verdict()));
+    }
+
+    @Test
+    void typingAnotherBaseReviewsTheStepAnew() throws Exception {
+        type(StepField.BASE, "LDA");
+        waitFor(bench -> bench.shown().orElseThrow().review().step().base().id().equals("lda"));
+    }
+
+    @Test
+    void halfATextLeavesTheLastPictureAndSaysWhatIsWrong() throws Exception {
+        type(StepField.SUBSTRATE, "O=C(C1CC");
+        waitFor(bench -> bench.strip().box(StepField.SUBSTRATE).line().isProblem());
+        assertEquals("O=C(C1CCC1)Nc1ccc(C)c(O)c1", onEventThread(() -> bench.shown().orElseThrow().review().step().substrate().input()));
+        type(StepField.SUBSTRATE, "CCO");
+        waitFor(bench -> bench.shown().orElseThrow().review().step().substrate().input().equals("CCO"));
+        assertFalse(onEventThread(() -> bench.strip().box(StepField.SUBSTRATE).line().isProblem()));
+    }
+
+    @Test
+    void ofManyKeystrokesOnlyTheLastIsShown() throws Exception {
+        String text = "CCCCCCCCO";
+        for (int length = 1; length <= text.length(); length++) {
+            type(StepField.SUBSTRATE, text.substring(0, length));
+        }
+        waitFor(bench -> bench.shown().orElseThrow().review().step().substrate().input().equals(text));
+    }
+
+    @Test
+    void choosingASiteMakesItTheIntendedOne() throws Exception {
+        onEventThread(() -> {
+            bench.intend("O14");
+            return null;
+        });
+        waitFor(bench -> bench.shown().orElseThrow().review().intendedSite().equals("O14"));
+        assertTrue(onEventThread(() -> bench.shown().orElseThrow().intended().orElseThrow().intended()));
+    }
+
+    private void type(StepField field, String text) throws Exception {
+        onEventThread(() -> {
+            bench.strip().box(field).field().setText(text);
+            return null;
+        });
+    }
+
+    private void waitFor(Predicate<Workbench> condition) throws Exception {
+        long end = System.nanoTime() + 10_000_000_000L;
+        while (!onEventThread(() -> condition.test(bench))) {
+            assertTrue(System.nanoTime() < end, "the window did not get there in 10 s");
+            Thread.sleep(10);
+        }
+    }
+
+    private static <T> T onEventThread(Callable<T> task) throws Exception {
+        FutureTask<T> future = new FutureTask<>(task);
+        SwingUtilities.invokeAndWait(future);
+        return future.get();
+    }
+}
