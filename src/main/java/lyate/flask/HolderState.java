@@ -30,6 +30,11 @@ public final class HolderState {
         }
     }
 
+    /** A holder at a proton level that something else sets: a buffer, the pH of a work-up. */
+    public static HolderState at(ProtonHolder holder, double level) {
+        return new HolderState(holder, Clusters.of(holder), level);
+    }
+
     /** What this is the state of. */
     public ProtonHolder holder() {
         return holder;
@@ -52,6 +57,27 @@ public final class HolderState {
             sum += fraction;
         }
         return sum;
+    }
+
+    /**
+     * Fraction of the molecules by number of protons they hold, 0 to all places.
+     *
+     * @return a new array, one longer than the number of places
+     */
+    public double[] shareByProtons() {
+        double[] all = {1};
+        double[] shares = new double[Clusters.LARGEST + 1];
+        for (BindingPolynomial cluster : clusters) {
+            cluster.sharesAt(level, shares);
+            double[] combined = new double[all.length + cluster.capacity()];
+            for (int before = 0; before < all.length; before++) {
+                for (int here = 0; here <= cluster.capacity(); here++) {
+                    combined[before + here] += all[before] * shares[here];
+                }
+            }
+            all = combined;
+        }
+        return all;
     }
 
     /**

@@ -98,6 +98,13 @@ class BalanceInvariantsTest {
             HolderState state = ProtonBalance.solve(flask).of("molecule");
             int places = holder.places().size();
             assertEquals(1, IntStream.range(0, 1 << places).mapToDouble(state::microstate).sum(), ROUNDING, flask::toString);
+            double[] byProtons = state.shareByProtons();
+            for (int count = 0; count <= places; count++) {
+                int protons = count;
+                double sum = IntStream.range(0, 1 << places).filter(held -> Integer.bitCount(held) == protons)
+                        .mapToDouble(state::microstate).sum();
+                assertEquals(sum, byProtons[count], ROUNDING, flask::toString);
+            }
             for (int place = 0; place < places; place++) {
                 int bit = 1 << place;
                 double sum = IntStream.range(0, 1 << places).filter(held -> (held & bit) != 0).mapToDouble(state::microstate).sum();
