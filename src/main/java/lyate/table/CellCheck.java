@@ -18,6 +18,6 @@ final class CellCheck {
     }
 
     private static boolean isNumber(String cell) {
-        return cell.matches("[-+]?(\\d+\\.?\\d*|\\.\\d+)([eE][-+]?\\d+)?");
+        return cell.matches("[-+]?(\\d+\\.?\\d*|\\.\\d+)([eE][-+]?\\d+)?") && Double.isFinite(Double.parseDouble(cell));
     }
 }

@@ -8,14 +8,19 @@ import java.util.OptionalDouble;
 /**
  * One row whose cells already passed the schema.
  *
- * @param file  file the row stands in
- * @param line  1-based line on which the row begins
- * @param cells trimmed cell text by column name, empty text for an empty cell
+ * @param source file the row stands in
+ * @param line    1-based line on which the row begins
+ * @param cells  trimmed cell text by column name, empty text for an empty cell
  */
-public record Row(String file, int line, Map<String, String> cells) {
+public record Row(TableText source, int line, Map<String, String> cells) {
 
     public Row {
         cells = Map.copyOf(cells);
+    }
+
+    /** Name of the file the row stands in. */
+    public String file() {
+        return source.file();
     }
 
     /** The row's unique name. */
@@ -27,7 +32,7 @@ public record Row(String file, int line, Map<String, String> cells) {
     public String text(String column) {
         String cell = cells.get(column);
         if (cell == null) {
-            throw new IllegalArgumentException("no column " + column + " in " + file + "; there are " + cells.keySet());
+            throw new IllegalArgumentException("no column " + column + " in " + file() + "; there are " + cells.keySet());
         }
         return cell;
     }
@@ -49,6 +54,6 @@ public record Row(String file, int line, Map<String, String> cells) {
 
     /** A problem with one cell of this row, for checks that go beyond the schema. */
     public TableProblem problem(String column, String expected) {
-        return new TableProblem(file, line, column, text(column), expected);
+        return source.problem(line, column, text(column), expected);
     }
 }

@@ -33,7 +33,7 @@ public record Table(Schema schema, List<Row> rows) {
         List<TableProblem> problems = new ArrayList<>();
         Map<String, Row> rows = new LinkedHashMap<>();
         for (TableFolders.Source source : sources) {
-            for (Row row : new TableParser(schema, source.name(), problems).parse(source.text())) {
+            for (Row row : new TableParser(schema, TableText.of(source.name(), source.text()), problems).parse()) {
                 rows.put(row.id(), row);
             }
         }

@@ -1,13 +1,13 @@
 package lyate.table;
 
-import java.io.IOException;
 import java.io.StringReader;
+import java.io.IOException;
+import java.io.UncheckedIOException;
 import java.util.ArrayList;
 import java.util.HashMap;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
-import org.apache.commons.csv.CSVException;
 import org.apache.commons.csv.CSVFormat;
 import org.apache.commons.csv.CSVParser;
 import org.apache.commons.csv.CSVRecord;
@@ -19,65 +19,77 @@ final class TableParser {
             .setCommentMarker('#').setIgnoreEmptyLines(true).setTrim(true).get();
 
     private final Schema schema;
-    private final String file;
+    private final TableText source;
     private final List<TableProblem> problems;
+    private final Map<String, Integer> lineOfId = new HashMap<>();
 
-    TableParser(Schema schema, String file, List<TableProblem> problems) {
+    TableParser(Schema schema, TableText source, List<TableProblem> problems) {
         this.schema = schema;
-        this.file = file;
+        this.source = source;
         this.problems = problems;
     }
 
     /** The rows that passed; the others are in the problems. */
-    List<Row> parse(String text) {
-        checkVersion(text);
-        List<String> lines = text.lines().toList();
+    List<Row> parse() {
+        checkVersion();
         List<Row> rows = new ArrayList<>();
-        Map<String, Integer> lineOfId = new HashMap<>();
-        try (CSVParser parser = CSVParser.builder().setReader(new StringReader(text)).setFormat(FORMAT).get()) {
-            List<String> header = null;
-            long lineBefore = 0;
+        List<String> header = null;
+        int linesRead = 0;
+        try (CSVParser parser = CSVParser.builder().setReader(new StringReader(text())).setFormat(FORMAT).get()) {
             for (CSVRecord csv : parser) {
-                int line = firstLine(lines, lineBefore);
-                lineBefore = parser.getCurrentLineNumber();
-                if (header == null) {
+                int line = firstLine(linesRead);
+                linesRead = (int) parser.getCurrentLineNumber();
+                if (csv.size() == 1 && csv.get(0).isBlank()) {
+                    continue;
+                }
+                if (header != null) {
+                    read(csv, header, line, rows);
+                } else if (checkHeader(csv.toList(), line)) {
                     header = csv.toList();
-                    if (!checkHeader(header, line)) {
-                        return rows;
-                    }
                 } else {
-                    read(csv, header, line, lineOfId, rows);
+                    return rows;
                 }
             }
-            if (header == null) {
-                problem(0, "", "no header line", "a header line with " + columnNames());
-            }
-        } catch (CSVException e) {
-            problem(0, "", e.getMessage(), "well-formed CSV (RFC 4180)");
-        } catch (IOException e) {
-            throw new IllegalStateException("reading from memory failed", e);
+        } catch (UncheckedIOException | IOException e) {
+            // Reading from memory fails for one reason only: the quotes are not in order.
+            int line = firstLine(linesRead);
+            problem(line, "", firstLetters(line), "well-formed CSV: every quoted cell closed, and nothing after its closing quote");
+            return rows;
+        }
+        if (header == null) {
+            problem(0, "", "no header line", "a header line with " + String.join(",", columnNames()));
         }
         return rows;
     }
 
-    private void checkVersion(String text) {
+    private String text() {
+        return String.join("\n", source.lines());
+    }
+
+    private void checkVersion() {
         String wanted = "# version: " + schema.version();
-        boolean stated = text.lines().takeWhile(line -> line.startsWith("#")).anyMatch(line -> line.strip().equals(wanted));
-        if (!stated) {
-            problem(1, "", text.lines().findFirst().orElse(""), "a line '" + wanted + "' among the leading # lines");
+        List<String> head = source.lines().stream().takeWhile(line -> line.startsWith("#") || line.isBlank()).toList();
+        if (head.stream().noneMatch(line -> line.strip().equals(wanted))) {
+            String found = head.stream().filter(line -> line.contains("version:")).findFirst().orElse("");
+            problem(Math.max(1, 1 + head.indexOf(found)), "", found, "a line '" + wanted + "' among the leading # lines");
         }
     }
 
     private boolean checkHeader(List<String> header, int line) {
-        List<String> missing = columnNames().stream().filter(name -> !header.contains(name)).toList();
-        List<String> unknown = header.stream().filter(name -> !columnNames().contains(name)).toList();
-        missing.forEach(name -> problem(line, name, "no such column", "a column " + name));
-        unknown.forEach(name -> problem(line, name, name,
-                "one of " + String.join(", ", NearestNames.of(name, columnNames(), 3))));
-        return missing.isEmpty() && unknown.isEmpty();
+        int before = problems.size();
+        for (String name : header) {
+            if (!columnNames().contains(name)) {
+                problem(line, name, name, "one of " + String.join(", ", NearestNames.of(name, columnNames(), 3)));
+            } else if (header.indexOf(name) != header.lastIndexOf(name)) {
+                problem(line, name, name, "every column once");
+            }
+        }
+        columnNames().stream().filter(name -> !header.contains(name))
+                .forEach(name -> problem(line, name, "no such column", "a column " + name));
+        return problems.size() == before;
     }
 
-    private void read(CSVRecord csv, List<String> header, int line, Map<String, Integer> lineOfId, List<Row> rows) {
+    private void read(CSVRecord csv, List<String> header, int line, List<Row> rows) {
         if (csv.size() != header.size()) {
             problem(line, "", csv.size() + " cells", header.size() + " cells, as in the header");
             return;
@@ -89,11 +101,12 @@ final class TableParser {
             cells.put(column.name(), cell);
             sound &= check(column, cell, line);
         }
-        Integer first = lineOfId.putIfAbsent(cells.get("id"), line);
+        String id = cells.get("id");
+        Integer first = id.isEmpty() ? null : lineOfId.putIfAbsent(id, line);
         if (first != null) {
-            problem(line, "id", cells.get("id"), "an id of its own (line " + first + " has the same)");
+            problem(line, "id", id, "an id of its own; line " + first + " has the same");
         } else if (sound) {
-            rows.add(new Row(file, line, cells));
+            rows.add(new Row(source, line, cells));
         }
     }
 
@@ -105,13 +118,19 @@ final class TableParser {
         return expected.isEmpty();
     }
 
-    /** Line on which the record begins that follows {@code lineBefore}: comments and blank lines lie between. */
-    private static int firstLine(List<String> lines, long lineBefore) {
-        int index = (int) lineBefore;
-        while (index < lines.size() && (lines.get(index).isBlank() || lines.get(index).startsWith("#"))) {
+    /** Number of the line on which the record begins that follows the lines already read: comments and blanks lie between. */
+    private int firstLine(int linesRead) {
+        List<String> lines = source.lines();
+        int index = linesRead;
+        while (index < lines.size() && (lines.get(index).isEmpty() || lines.get(index).startsWith("#"))) {
             index++;
         }
-        return index + 1;
+        return Math.min(index + 1, lines.size());
+    }
+
+    private String firstLetters(int line) {
+        String text = line >= 1 ? source.lines().get(line - 1) : "";
+        return text.substring(0, Math.min(text.length(), 40));
     }
 
     private List<String> columnNames() {
@@ -119,6 +138,6 @@ final class TableParser {
     }
 
     private void problem(int line, String column, String found, String expected) {
-        problems.add(new TableProblem(file, line, column, found, expected));
+        problems.add(source.problem(line, column, found, expected));
     }
 }

@@ -8,13 +8,20 @@ package lyate.table;
  * @param column   header of the column, empty where the whole row is meant
  * @param found    offending text
  * @param expected what should stand there
+ * @param excerpt  the line and its neighbours with a caret under the place; empty where there is none to show
  */
-public record TableProblem(String file, int line, String column, String found, String expected) {
+public record TableProblem(String file, int line, String column, String found, String expected, String excerpt) {
+
+    /** A problem without an excerpt. */
+    public TableProblem(String file, int line, String column, String found, String expected) {
+        this(file, line, column, found, expected, "");
+    }
 
     @Override
     public String toString() {
         String place = line > 0 ? file + ":" + line : file;
         String cell = column.isEmpty() ? "" : ": column " + column;
-        return place + cell + ": found '" + found + "', expected " + expected;
+        String message = place + cell + ": found '" + found + "', expected " + expected;
+        return excerpt.isEmpty() ? message : message + "\n" + excerpt;
     }
 }
