@@ -1,0 +1,61 @@
+package lyate.review;
+
+/**
+ * Turns one set of equilibrium constants into a verdict. Knows no molecule: a rule of numbers alone, so that the
+ * uncertainty of the numbers can be carried through it.
+ */
+final class VerdictRule {
+
+    /** log10 K from which a transfer counts as complete: K = 100 leaves 1 % at equal amounts squared away. */
+    static final double COMPLETE = 2;
+    /** log10 K up to which a transfer counts as not happening. */
+    static final double NONE = -2;
+    /** Two sites this many pKa units apart share the proton 95 : 5. */
+    static final double CLEAR = Math.log10(19);
+    /** Equivalents short of one that still count as one: weighing error and titre. */
+    private static final double DOSE_TOLERANCE = 0.2;
+
+    private VerdictRule() {}
+
+    /**
+     * One possible world.
+     *
+     * @param logK        log10 K of every substrate site against the working base
+     * @param intended    index of the intended site
+     * @param shift       by how much its pKa rises once all more acidic sites have lost their proton
+     * @param equivalents base per substrate
+     * @param levelled    whether the solvent made the working base out of the one added
+     */
+    record World(double[] logK, int intended, double shift, double equivalents, boolean levelled) {}
+
+    static Verdict judge(World world) {
+        double intended = world.logK()[world.intended()];
+        if (world.levelled() && intended < COMPLETE) {
+            return Verdict.LEVELLED;
+        }
+        int before = 0;
+        boolean rivalled = false;
+        for (int site = 0; site < world.logK().length; site++) {
+            double lead = world.logK()[site] - intended;
+            boolean reached = site != world.intended() && world.logK()[site] >= 0;
+            before += reached && lead > 0 ? 1 : 0;
+            rivalled |= reached && Math.abs(lead) < CLEAR && lead <= 0;
+        }
+        if (before > 0) {
+            return world.equivalents() < before + 1 - DOSE_TOLERANCE ? Verdict.WRONG_SITE
+                    : afterOthers(intended - world.shift());
+        }
+        if (intended <= NONE) {
+            return Verdict.TOO_WEAK;
+        }
+        return intended < COMPLETE || rivalled ? Verdict.PARTIAL : Verdict.SELECTIVE;
+    }
+
+    /** The more acidic protons are paid for; what is left of the base meets the intended one. */
+    private static Verdict afterOthers(double logK) {
+        if (logK <= NONE) {
+            return Verdict.WRONG_SITE;
+        }
+        return logK < COMPLETE ? Verdict.PARTIAL : Verdict.SELECTIVE;
+    }
+}
