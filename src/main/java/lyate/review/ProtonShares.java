@@ -1,0 +1,21 @@
+package lyate.review;
+
+import java.util.Map;
+
+/**
+ * Where the protons are at equilibrium, at the amounts of the step.
+ *
+ * @param percentTaken share of each substrate site that has lost its proton, by site label
+ * @param percentOfBaseSpentOnWater share of the base that moisture uses up
+ * @param percentOfSolventTaken share of the base that ends as the solvent's lyate ion
+ */
+record ProtonShares(Map<String, Double> percentTaken, double percentOfBaseSpentOnWater, double percentOfSolventTaken) {
+
+    ProtonShares {
+        percentTaken = Map.copyOf(percentTaken);
+    }
+
+    double percentTaken(Donor donor) {
+        return percentTaken.get(donor.label());
+    }
+}

@@ -1,0 +1,32 @@
+package lyate.review;
+
+import java.util.List;
+
+/**
+ * Everything that is known about a step once the numbers are in; what the finding rules look at.
+ *
+ * @param step            what was asked
+ * @param workingBase     the base that is really in the flask
+ * @param donors          substrate sites, the one whose proton goes first in front
+ * @param intended        the one meant, an element of {@code donors}
+ * @param shares          how the protons are shared out at equilibrium
+ * @param verdict         the verdict from the equilibria
+ */
+record Situation(Step step, WorkingBase workingBase, List<Donor> donors, Donor intended, ProtonShares shares,
+                 Verdict verdict) {
+
+    Situation {
+        donors = List.copyOf(donors);
+    }
+
+    /** Sites of the substrate that the base reaches before the intended one. */
+    List<Donor> before() {
+        return donors.stream().filter(donor -> donor != intended && donor.effectiveLogK() >= 0
+                && donor.effectiveLogK() > intended.effectiveLogK()).toList();
+    }
+
+    /** Protons the base takes per mole that was weighed in. */
+    double protonEquivalents() {
+        return step.equivalents() * step.base().protonsPerFormula();
+    }
+}
