@@ -8,12 +8,18 @@ import lyate.site.ProtonSite;
  * @param site       the site
  * @param label      its name, for example {@code C3}
  * @param comparison its pKa against the base's, on the scale that decides
- * @param advantage  pKa units by which kinetic control favours it over its rivals; 0 where equilibrium decides
+ * @param toTemperature 298.15 K divided by the temperature of the step: the isocoulombic factor on log K
+ * @param advantage  log10 units by which kinetic control favours it over its rivals; 0 where equilibrium decides
  */
-record Donor(ProtonSite site, String label, Comparison comparison, double advantage) {
+record Donor(ProtonSite site, String label, Comparison comparison, double toTemperature, double advantage) {
 
-    /** log10 K at 25 degrees C, kinetic advantage included. */
+    /** log10 K at the temperature of the step. */
+    double logK() {
+        return comparison.logK() * toTemperature;
+    }
+
+    /** log10 K with the kinetic advantage: what decides whose proton goes first. */
     double effectiveLogK() {
-        return comparison.logK() + advantage;
+        return logK() + advantage;
     }
 }

@@ -81,7 +81,7 @@ final class EquilibriumFindings {
         }
         return List.of(finding(STOP, FindingKind.TOO_WEAK, situation.intended(),
                 say("%s does not reach %s: log K is %.1f.", situation.step().base().name(), situation.intended().label(),
-                        situation.intended().comparison().logK()),
+                        situation.intended().logK()),
                 List.of(compared(situation.intended()), situation.intended().comparison().reason())));
     }
 
@@ -111,7 +111,7 @@ final class EquilibriumFindings {
     private static String compared(Donor donor) {
         return say("%s: pKa %.1f ± %.1f in %s against %.1f, log K %.1f", donor.label(), donor.comparison().donor().pKa(),
                 donor.comparison().donor().sigma(), donor.comparison().donor().medium().id(),
-                donor.comparison().acceptor().pKa(), donor.comparison().logK());
+                donor.comparison().acceptor().pKa(), donor.logK());
     }
 
     private static Finding finding(Severity severity, FindingKind kind, Donor donor, String sentence, List<String> evidence) {

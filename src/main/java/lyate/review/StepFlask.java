@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
 import lyate.flask.Coupling;
 import lyate.flask.Equilibrium;
 import lyate.flask.Flask;
@@ -38,34 +39,33 @@ final class StepFlask {
      *
      * @param donors   substrate sites, the first to go in front
      * @param couplings couplings between the first {@code MOST_PLACES} of them, by index
-     * @param logKWater log10 K of the working base against water
+     * @param logKWater log10 K of the working base against water at 25 degrees C
      */
-    static ProtonShares settle(Step step, WorkingBase base, List<Donor> donors, List<Coupling> couplings, double logKWater) {
+    static ProtonShares settle(Step step, WorkingBase base, List<Donor> donors, List<Coupling> couplings, Optional<Double> logKWater) {
         double kelvin = step.temperatureCelsius() + 273.15;
         double toTemperature = Flask.ROOM_KELVIN / kelvin;
         List<Donor> counted = donors.subList(0, Math.min(MOST_PLACES, donors.size()));
         double baseAmount = step.concentrationMolar() * step.equivalents() * step.base().protonsPerFormula();
         List<ProtonHolder> holders = new ArrayList<>();
-        holders.add(substrate(step.concentrationMolar(), counted, couplings, toTemperature));
+        holders.add(substrate(step.concentrationMolar(), counted, couplings));
         holders.add(ProtonHolder.base(BASE, baseAmount, REFERENCE));
-        holders.add(ProtonHolder.acid(WATER, waterMolar(step), placed(logKWater, toTemperature)));
+        logKWater.ifPresent(logK -> holders.add(ProtonHolder.acid(WATER, waterMolar(step), placed(logK * toTemperature))));
         if (!base.levelled()) {
             base.logKSolvent().ifPresent(logK ->
-                    holders.add(ProtonHolder.acid(SOLVENT, step.solvent().molarity(), placed(logK, toTemperature))));
+                    holders.add(ProtonHolder.acid(SOLVENT, step.solvent().molarity(), placed(logK * toTemperature))));
         }
         Equilibrium settled = ProtonBalance.solve(new Flask(holders, kelvin, step.solvent().scale().id()));
-        return shares(settled, donors, counted.size(), baseAmount, waterMolar(step));
+        return shares(settled, donors, counted.size(), baseAmount);
     }
 
-    private static ProtonHolder substrate(double amount, List<Donor> donors, List<Coupling> couplings, double toTemperature) {
+    private static ProtonHolder substrate(double amount, List<Donor> donors, List<Coupling> couplings) {
         List<ProtonPlace> places = donors.stream()
-                .map(donor -> new ProtonPlace(donor.label(), placed(donor.effectiveLogK(), toTemperature))).toList();
+                .map(donor -> new ProtonPlace(donor.label(), placed(donor.effectiveLogK()))).toList();
         return new ProtonHolder(SUBSTRATE, amount, places, couplings, places.size());
     }
 
-    /** Isocoulombic default: log K scales with 298.15 K / T. */
-    private static double placed(double logK, double toTemperature) {
-        double pKa = REFERENCE - logK * toTemperature;
+    private static double placed(double logK) {
+        double pKa = REFERENCE - logK;
         return Math.max(-ProtonPlace.PKA_LIMIT, Math.min(ProtonPlace.PKA_LIMIT, pKa));
     }
 
@@ -74,16 +74,18 @@ final class StepFlask {
         return step.waterPpm() * 1e-6 * 1000 * step.solvent().density() / WATER_MOLAR_MASS;
     }
 
-    private static ProtonShares shares(Equilibrium settled, List<Donor> donors, int counted, double baseAmount, double water) {
+    private static ProtonShares shares(Equilibrium settled, List<Donor> donors, int counted, double baseAmount) {
         Map<String, Double> taken = new LinkedHashMap<>();
         HolderState substrate = settled.of(SUBSTRATE);
         for (int i = 0; i < donors.size(); i++) {
             taken.put(donors.get(i).label(), i < counted ? 100 * substrate.deprotonated(i) : 0.0);
         }
-        double onWater = baseAmount > 0 ? 100 * Math.min(1, water * settled.of(WATER).deprotonated(0) / baseAmount) : 0;
-        boolean hasSolvent = settled.flask().holders().stream().anyMatch(holder -> holder.name().equals(SOLVENT));
-        double onSolvent = hasSolvent && baseAmount > 0
-                ? 100 * Math.min(1, settled.of(SOLVENT).holder().amount() * settled.of(SOLVENT).deprotonated(0) / baseAmount) : 0;
-        return new ProtonShares(taken, onWater, onSolvent);
+        return new ProtonShares(taken, spentOn(WATER, settled, baseAmount), spentOn(SOLVENT, settled, baseAmount));
+    }
+
+    private static double spentOn(String name, Equilibrium settled, double baseAmount) {
+        return settled.flask().holders().stream().filter(holder -> holder.name().equals(name))
+                .mapToDouble(holder -> holder.amount() * settled.of(name).deprotonated(0))
+                .map(taken -> baseAmount > 0 ? 100 * Math.min(1, taken / baseAmount) : 0).findFirst().orElse(0);
     }
 }

@@ -24,21 +24,26 @@ record WorkingBase(String name, Function<Medium, Optional<KnownPKa>> pKa, boolea
 
     static WorkingBase of(Base base, Solvent solvent, BaseStrength strength) {
         Function<Medium, Optional<KnownPKa>> asAdded = medium -> strength.pKa(base, medium);
-        Optional<Double> logK = againstSolvent(base, solvent, asAdded);
+        Optional<Double> logK = against(solvent, solvent, asAdded);
         if (logK.filter(value -> value >= LEVELLING_LOG_K).isEmpty()) {
             return new WorkingBase(base.name(), asAdded, base.family().strong(), false, logK);
         }
         return new WorkingBase("the lyate ion of " + solvent.name(), solvent::donorPKa, true, true, logK);
     }
 
-    private static Optional<Double> againstSolvent(Base base, Solvent solvent, Function<Medium, Optional<KnownPKa>> strength) {
-        Medium preferred = solvent.kind() == Solvent.Kind.PROTIC ? Medium.WATER : Medium.DMSO;
-        Medium other = preferred.equals(Medium.WATER) ? Medium.DMSO : Medium.WATER;
-        return difference(strength, solvent, preferred).or(() -> difference(strength, solvent, other));
+    /** log10 K at 25 degrees C against the most acidic proton of a liquid in the flask, where both are known. */
+    Optional<Double> logKAgainst(Solvent liquid, Solvent solvent) {
+        return against(liquid, solvent, pKa);
     }
 
-    private static Optional<Double> difference(Function<Medium, Optional<KnownPKa>> strength, Solvent solvent, Medium medium) {
+    private static Optional<Double> against(Solvent liquid, Solvent solvent, Function<Medium, Optional<KnownPKa>> strength) {
+        Medium preferred = solvent.kind() == Solvent.Kind.PROTIC ? Medium.WATER : Medium.DMSO;
+        Medium other = preferred.equals(Medium.WATER) ? Medium.DMSO : Medium.WATER;
+        return difference(strength, liquid, preferred).or(() -> difference(strength, liquid, other));
+    }
+
+    private static Optional<Double> difference(Function<Medium, Optional<KnownPKa>> strength, Solvent liquid, Medium medium) {
         return strength.apply(medium).flatMap(base ->
-                solvent.donorPKa(medium).map(donor -> base.pKa() - donor.pKa()));
+                liquid.donorPKa(medium).map(donor -> base.pKa() - donor.pKa()));
     }
 }

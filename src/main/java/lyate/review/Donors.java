@@ -1,0 +1,69 @@
+package lyate.review;
+
+import java.util.ArrayList;
+import java.util.Comparator;
+import java.util.List;
+import java.util.Optional;
+import java.util.OptionalInt;
+import lyate.acidity.AcidityEstimator;
+import lyate.flask.Flask;
+import lyate.molecule.Molecule;
+import lyate.site.ProtonSite;
+import lyate.site.Role;
+import lyate.site.SiteFinder;
+
+/** Sets the proton sites of a substrate against the working base. */
+final class Donors {
+
+    private final SiteFinder finder;
+    private final AcidityEstimator acidity;
+
+    Donors(SiteFinder finder, AcidityEstimator acidity) {
+        this.finder = finder;
+        this.acidity = acidity;
+    }
+
+    /**
+     * Every site that a scale has values for, the one whose proton goes first in front.
+     *
+     * @throws ReviewException where the substrate has no proton to give, or none with a known pKa
+     */
+    List<Donor> of(Step step, WorkingBase base) throws ReviewException {
+        Molecule substrate = step.substrate();
+        ScaleChoice scale = new ScaleChoice(step.solvent());
+        double toTemperature = Flask.ROOM_KELVIN / (step.temperatureCelsius() + 273.15);
+        List<Donor> donors = new ArrayList<>();
+        for (ProtonSite site : finder.sites(substrate, Role.ACID)) {
+            scale.compare(base.pKa(), base.strong(), medium -> acidity.acidity(substrate, site, medium), site.siteClass().family())
+                    .ifPresent(comparison -> donors.add(new Donor(site, substrate.label(site.atom()), comparison, toTemperature, 0)));
+        }
+        if (donors.isEmpty()) {
+            throw new ReviewException("the substrate has no proton whose pKa can be set against " + base.name());
+        }
+        donors.sort(Comparator.comparingDouble(Donor::effectiveLogK).reversed());
+        return donors;
+    }
+
+    /**
+     * The site the step means: the one named, else the one whose proton goes first.
+     *
+     * @throws ReviewException naming the label and the labels there are
+     */
+    static Donor intended(Step step, List<Donor> donors) throws ReviewException {
+        Optional<String> label = step.intendedSite();
+        if (label.isEmpty()) {
+            return donors.get(0);
+        }
+        OptionalInt atom = step.substrate().atomLabelled(label.get());
+        if (atom.isEmpty()) {
+            throw new ReviewException("the substrate has no atom " + label.get() + "; its proton sites are " + labels(donors));
+        }
+        return donors.stream().filter(donor -> donor.site().equivalent().contains(atom.getAsInt())).findFirst()
+                .orElseThrow(() -> new ReviewException("atom " + label.get() + " carries no hydrogen; the proton sites are "
+                        + labels(donors)));
+    }
+
+    private static String labels(List<Donor> donors) {
+        return String.join(", ", donors.stream().map(Donor::label).toList());
+    }
+}
