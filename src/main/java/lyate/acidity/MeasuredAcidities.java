@@ -68,16 +68,13 @@ public final class MeasuredAcidities {
      * @throws TableException for a bad cell, a structure that cannot be read, or a site it does not have
      */
     public static MeasuredAcidities load(TableFolders folders) {
-        List<TableProblem> problems = new ArrayList<>();
-        List<Value> values = new ArrayList<>();
         MoleculeReader reader = new MoleculeReader();
-        for (Row row : Table.read(SCHEMA, folders).rows()) {
-            read(row, reader, problems).ifPresent(values::add);
-        }
+        List<Reading> readings = Table.read(SCHEMA, folders).rows().parallelStream().map(row -> read(row, reader)).toList();
+        List<TableProblem> problems = readings.stream().flatMap(reading -> reading.problem().stream()).toList();
         if (!problems.isEmpty()) {
             throw new TableException(problems);
         }
-        return new MeasuredAcidities(values);
+        return new MeasuredAcidities(readings.stream().flatMap(reading -> reading.value().stream()).toList());
     }
 
     /** A table without a row. */
@@ -111,27 +108,33 @@ public final class MeasuredAcidities {
         return List.copyOf(found.values());
     }
 
-    private static Optional<Value> read(Row row, MoleculeReader reader, List<TableProblem> problems) {
-        try {
-            Molecule molecule = reader.read(row.text("smiles"));
-            Role role = row.text("role").equals(Role.ACID.word()) ? Role.ACID : Role.BASE;
-            OptionalInt atom = molecule.atomLabelled(row.text("site"));
-            if (atom.isEmpty() || role == Role.ACID && molecule.hydrogens(atom.getAsInt()) == 0) {
-                problems.add(row.problem("site", "an atom of " + row.text("smiles")
-                        + (role == Role.ACID ? " that carries hydrogen" : "") + ", for example O4"));
-                return Optional.empty();
-            }
-            if (row.number("sigma").getAsDouble() <= 0) {
-                problems.add(row.problem("sigma", "a number above zero"));
-                return Optional.empty();
-            }
-            Acidity acidity = Acidity.measured(row.number("pka").getAsDouble(), row.number("sigma").getAsDouble(),
-                    new Medium(row.text("medium")), row.text("source"));
-            return Optional.of(new Value(row, molecule, role, atom.getAsInt(),
-                    ProtonPlace.of(molecule, role, atom.getAsInt()), acidity));
-        } catch (MoleculeException e) {
-            problems.add(row.problem("smiles", "a structure (" + e.getMessage() + ")"));
-            return Optional.empty();
+    /** A row's value, or what is wrong with it. */
+    private record Reading(Optional<Value> value, Optional<TableProblem> problem) {
+
+        static Reading problem(Row row, String column, String expected) {
+            return new Reading(Optional.empty(), Optional.of(row.problem(column, expected)));
         }
+    }
+
+    private static Reading read(Row row, MoleculeReader reader) {
+        Molecule molecule;
+        try {
+            molecule = reader.read(row.text("smiles"));
+        } catch (MoleculeException e) {
+            return Reading.problem(row, "smiles", "a structure (" + e.getMessage() + ")");
+        }
+        Role role = row.text("role").equals(Role.ACID.word()) ? Role.ACID : Role.BASE;
+        OptionalInt atom = molecule.atomLabelled(row.text("site"));
+        if (atom.isEmpty() || role == Role.ACID && molecule.hydrogens(atom.getAsInt()) == 0) {
+            return Reading.problem(row, "site", "an atom of " + row.text("smiles")
+                    + (role == Role.ACID ? " that carries hydrogen" : "") + ", for example O4");
+        }
+        if (row.number("sigma").getAsDouble() <= 0) {
+            return Reading.problem(row, "sigma", "a number above zero");
+        }
+        Acidity acidity = Acidity.measured(row.number("pka").getAsDouble(), row.number("sigma").getAsDouble(),
+                new Medium(row.text("medium")), row.text("source"));
+        ProtonPlace place = ProtonPlace.of(molecule, role, atom.getAsInt());
+        return new Reading(Optional.of(new Value(row, molecule, role, atom.getAsInt(), place, acidity)), Optional.empty());
     }
 }
