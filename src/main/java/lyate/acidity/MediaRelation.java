@@ -36,7 +36,8 @@ public record MediaRelation(Medium from, Medium to, String family, double slope,
     /** What a pKa unit outside the fitted range adds to the uncertainty, pKa units (common practice). */
     private static final double EXTRAPOLATION = 0.15;
 
-    static MediaRelation of(Row row) {
+    /** The relation a row of the table states. */
+    public static MediaRelation of(Row row) {
         return new MediaRelation(new Medium(row.text("from")), new Medium(row.text("to")), row.text("family"),
                 value(row, "slope"), value(row, "intercept"), value(row, "standard_error"), (int) value(row, "n"),
                 value(row, "valid_from"), value(row, "valid_to"), row.text("source"));
