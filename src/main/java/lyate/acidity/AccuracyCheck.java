@@ -1,0 +1,157 @@
+package lyate.acidity;
+
+import java.io.IOException;
+import java.io.Reader;
+import java.util.ArrayList;
+import java.util.Comparator;
+import java.util.List;
+import java.util.Locale;
+import java.util.Map;
+import java.util.Optional;
+import java.util.TreeMap;
+import java.util.function.Function;
+import lyate.acidity.AccuracyReport.BadRow;
+import lyate.acidity.AccuracyReport.Comparison;
+import lyate.molecule.Molecule;
+import lyate.molecule.MoleculeException;
+import lyate.molecule.MoleculeReader;
+import lyate.site.ProtonSite;
+import lyate.site.Role;
+import lyate.site.SiteFinder;
+import lyate.stock.Medium;
+import org.apache.commons.csv.CSVFormat;
+import org.apache.commons.csv.CSVParser;
+import org.apache.commons.csv.CSVRecord;
+
+/**
+ * Compares what the program says with a CSV file of measured values. Columns {@code smiles}, {@code solvent} and
+ * {@code pka}; {@code site} (for example {@code O4}) and {@code role} ({@code acid} or {@code base}) may be left out or
+ * left empty, others are ignored. Without a site, the most acidic or most basic one of the role is compared; without a
+ * role it is the acid, unless only a base can be meant.
+ *
+ * @param finder    finds the sites
+ * @param estimator the values to be judged
+ * @param media     the medium meant by the text of a {@code solvent} cell; empty for an unknown one
+ */
+public record AccuracyCheck(SiteFinder finder, AcidityEstimator estimator, Function<String, Optional<Medium>> media) {
+
+    private static final CSVFormat FORMAT = CSVFormat.RFC4180.builder().setHeader().setSkipHeaderRecord(true)
+            .setCommentMarker('#').setIgnoreEmptyLines(true).setTrim(true).setIgnoreHeaderCase(true)
+            .setAllowMissingColumnNames(true).get();
+
+    /** Thrown within a row that cannot be compared. */
+    private static final class RowException extends Exception {
+
+        private static final long serialVersionUID = 1L;
+
+        RowException(String message) {
+            super(message);
+        }
+    }
+
+    /** A site and what is said of it. */
+    private record Stated(ProtonSite site, Acidity acidity) {}
+
+    /**
+     * Compares every row.
+     *
+     * @throws IOException              where the file cannot be read
+     * @throws IllegalArgumentException where a needed column is missing, named in words
+     */
+    public AccuracyReport check(Reader csv) throws IOException {
+        List<Comparison> comparisons = new ArrayList<>();
+        List<BadRow> badRows = new ArrayList<>();
+        try (CSVParser parser = CSVParser.builder().setReader(csv).setFormat(FORMAT).get()) {
+            checkHeader(parser.getHeaderNames());
+            for (CSVRecord row : parser) {
+                long line = parser.getCurrentLineNumber();
+                try {
+                    comparisons.add(compare(row, line));
+                } catch (RowException | MoleculeException e) {
+                    badRows.add(new BadRow(line, String.join(",", row.toList()), e.getMessage().lines().findFirst().orElse("")));
+                }
+            }
+        }
+        return new AccuracyReport(comparisons, badRows);
+    }
+
+    private static void checkHeader(List<String> header) {
+        List<String> lower = header.stream().map(name -> name.toLowerCase(Locale.ROOT)).toList();
+        for (String needed : List.of("smiles", "solvent", "pka")) {
+            if (!lower.contains(needed)) {
+                throw new IllegalArgumentException("the file has no column " + needed + "; it has " + String.join(", ", header));
+            }
+        }
+    }
+
+    private Comparison compare(CSVRecord row, long line) throws RowException, MoleculeException {
+        if (!row.isConsistent()) {
+            throw new RowException("found " + row.size() + " cells, expected as many as the header has");
+        }
+        double measured = number(row.get("pka"));
+        Medium medium = media.apply(row.get("solvent"))
+                .orElseThrow(() -> new RowException("column solvent: found '" + row.get("solvent") + "', expected a known solvent"));
+        Molecule molecule = new MoleculeReader().read(row.get("smiles"));
+        Stated stated = stated(molecule, optional(row, "site"), optional(row, "role"), medium);
+        return new Comparison(line, row.get("smiles"), molecule.label(stated.site().atom()),
+                stated.site().siteClass().name(), measured, stated.acidity());
+    }
+
+    private static double number(String text) throws RowException {
+        try {
+            double value = Double.parseDouble(text);
+            if (Double.isFinite(value)) {
+                return value;
+            }
+        } catch (NumberFormatException e) {
+            // reported below together with numbers that are not finite
+        }
+        throw new RowException("column pka: found '" + text + "', expected a number");
+    }
+
+    private static String optional(CSVRecord row, String column) {
+        return row.isMapped(column) ? row.get(column) : "";
+    }
+
+    private Stated stated(Molecule molecule, String label, String role, Medium medium) throws RowException {
+        List<ProtonSite> sites = finder.sites(molecule);
+        if (!label.isEmpty()) {
+            int atom = molecule.atomLabelled(label)
+                    .orElseThrow(() -> new RowException("column site: found '" + label + "', expected an atom such as O4"));
+            sites = sites.stream().filter(site -> site.equivalent().contains(atom)).toList();
+        }
+        Map<Role, Stated> extremes = extremes(molecule, sites, medium);
+        Role wanted = role(role, extremes);
+        Stated found = extremes.get(wanted);
+        if (found == null) {
+            throw new RowException("no pKa is stated for " + (label.isEmpty() ? "any " + wanted.word() + " site" : label
+                    + " as " + wanted.word()) + " in " + medium.id());
+        }
+        return found;
+    }
+
+    private static Role role(String text, Map<Role, Stated> extremes) throws RowException {
+        for (Role role : Role.values()) {
+            if (text.equalsIgnoreCase(role.word())) {
+                return role;
+            }
+        }
+        if (!text.isEmpty()) {
+            throw new RowException("column role: found '" + text + "', expected acid or base");
+        }
+        return extremes.containsKey(Role.ACID) || !extremes.containsKey(Role.BASE) ? Role.ACID : Role.BASE;
+    }
+
+    /** The most acidic acid site and the most basic base site. */
+    private Map<Role, Stated> extremes(Molecule molecule, List<ProtonSite> sites, Medium medium) {
+        Map<Role, Stated> extremes = new TreeMap<>();
+        for (Role role : Role.values()) {
+            Comparator<Stated> byPKa = Comparator.comparingDouble(stated -> stated.acidity().pKa());
+            sites.stream().filter(site -> site.role() == role)
+                    .flatMap(site -> estimator.acidity(molecule, site, medium).map(value -> new Stated(site, value)).stream())
+                    .min(role == Role.ACID ? byPKa : byPKa.reversed())
+                    .ifPresent(stated -> extremes.put(role, stated));
+        }
+        return extremes;
+    }
+}

@@ -1,0 +1,97 @@
+package lyate.acidity;
+
+import java.util.Comparator;
+import java.util.List;
+import java.util.Locale;
+import java.util.Optional;
+import java.util.stream.Stream;
+import lyate.acidity.Acidity.Basis;
+import lyate.acidity.Acidity.Contribution;
+import lyate.acidity.Acidity.Effect;
+import lyate.molecule.Molecule;
+import lyate.site.ProtonSite;
+import lyate.stock.Medium;
+import lyate.table.TableFolders;
+
+/**
+ * Puts a pKa on a proton site in a medium.
+ *
+ * <p>A value measured in that medium decides. Else the value measured in another medium and carried over is weighed
+ * against the estimate made in that medium, and the one with the smaller uncertainty is given; else an estimate made in
+ * water or DMSO is carried over. Where nothing is known the answer is empty, never zero. A solvent without a scale of its
+ * own is asked for by the medium that stands for it ({@code Solvent.scale()}). Immutable; safe to share between threads.
+ */
+public final class AcidityEstimator {
+
+    private static final List<Medium> ESTIMATED_IN = List.of(Medium.WATER, Medium.DMSO);
+
+    private final MeasuredAcidities measured;
+    private final MediaTransfer transfer;
+    private final List<SiteEstimate> estimates;
+
+    /** The first of {@code estimates} that answers wins. */
+    public AcidityEstimator(MeasuredAcidities measured, MediaTransfer transfer, List<SiteEstimate> estimates) {
+        this.measured = measured;
+        this.transfer = transfer;
+        this.estimates = List.copyOf(estimates);
+    }
+
+    /** The estimator of the tables in these folders. */
+    public static AcidityEstimator load(TableFolders folders) {
+        return new AcidityEstimator(MeasuredAcidities.load(folders), MediaTransfer.load(folders),
+                List.of(new ClassValueEstimate()));
+    }
+
+    /** The same without the table of measured values: what it says of a molecule nobody has measured. */
+    public AcidityEstimator withoutMeasured() {
+        return new AcidityEstimator(MeasuredAcidities.none(), transfer, estimates);
+    }
+
+    /** The pKa of the site in the medium, or empty where there is no way to know. */
+    public Optional<Acidity> acidity(Molecule molecule, ProtonSite site, Medium medium) {
+        List<Acidity> known = measured.inAnyMedium(molecule, site);
+        Optional<Acidity> here = known.stream().filter(acidity -> acidity.medium().equals(medium)).findFirst();
+        if (here.isPresent()) {
+            return here;
+        }
+        Optional<Acidity> carried = known.stream().map(acidity -> startOfRecipe(acidity, site))
+                .flatMap(acidity -> carry(acidity, site, medium)).min(Comparator.comparingDouble(Acidity::sigma));
+        Optional<Acidity> estimated = estimate(molecule, site, medium);
+        if (carried.isPresent() && estimated.isPresent()) {
+            return Optional.of(surer(carried.get(), estimated.get()));
+        }
+        return carried.or(() -> estimated).or(() -> estimateElsewhere(molecule, site, medium));
+    }
+
+    private Optional<Acidity> estimate(Molecule molecule, ProtonSite site, Medium medium) {
+        return estimates.stream().map(estimate -> estimate.estimate(molecule, site, medium))
+                .flatMap(Optional::stream).findFirst();
+    }
+
+    private Optional<Acidity> estimateElsewhere(Molecule molecule, ProtonSite site, Medium medium) {
+        return ESTIMATED_IN.stream().map(from -> estimate(molecule, site, from)).flatMap(Optional::stream)
+                .flatMap(acidity -> carry(acidity, site, medium)).min(Comparator.comparingDouble(Acidity::sigma));
+    }
+
+    private Stream<Acidity> carry(Acidity acidity, ProtonSite site, Medium medium) {
+        return transfer.carry(acidity, site.siteClass().family(), medium).stream();
+    }
+
+    /** A measured value is the first term of what is carried over, so that the terms add up to the pKa. */
+    private static Acidity startOfRecipe(Acidity acidity, ProtonSite site) {
+        Contribution value = new Contribution("measured in " + acidity.medium().id(), Effect.ATOM, acidity.pKa(),
+                List.of(site.atom()));
+        return new Acidity(acidity.pKa(), acidity.sigma(), acidity.medium(), Basis.MEASURED, List.of(value),
+                acidity.missing(), acidity.relatives(), acidity.source());
+    }
+
+    private static Acidity surer(Acidity carried, Acidity estimated) {
+        boolean carriedIsSurer = carried.sigma() <= estimated.sigma();
+        Acidity chosen = carriedIsSurer ? carried : estimated;
+        Acidity other = carriedIsSurer ? estimated : carried;
+        String why = String.format(Locale.ROOT, "; preferred to the %s value %.1f, whose uncertainty of %.1f is larger",
+                other.basis().word(), other.pKa(), other.sigma());
+        return new Acidity(chosen.pKa(), chosen.sigma(), chosen.medium(), chosen.basis(), chosen.contributions(),
+                chosen.missing(), chosen.relatives(), chosen.source() + why);
+    }
+}

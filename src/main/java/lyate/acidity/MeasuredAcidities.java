@@ -1,0 +1,140 @@
+package lyate.acidity;
+
+import static lyate.table.Column.number;
+import static lyate.table.Column.text;
+import static lyate.table.Column.word;
+
+import java.util.ArrayList;
+import java.util.HashMap;
+import java.util.HashSet;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import java.util.OptionalInt;
+import java.util.Set;
+import java.util.TreeMap;
+import lyate.molecule.Molecule;
+import lyate.molecule.MoleculeException;
+import lyate.molecule.MoleculeReader;
+import lyate.site.ProtonSite;
+import lyate.site.Role;
+import lyate.stock.Medium;
+import lyate.table.Row;
+import lyate.table.Schema;
+import lyate.table.Table;
+import lyate.table.TableException;
+import lyate.table.TableFolders;
+import lyate.table.TableProblem;
+
+/**
+ * The pKa values of {@code measured-acidities.csv}, found by structure and only at the site they were measured at.
+ * How the structure is drawn does not matter ({@link ProtonPlace}). Immutable; safe to share between threads.
+ */
+public final class MeasuredAcidities {
+
+    /** What {@code measured-acidities.csv} looks like. */
+    public static final Schema SCHEMA = Schema.of("measured-acidities.csv",
+            text("id"), text("name"), text("smiles"), text("site"), word("role", "acid", "base"), text("medium"),
+            number("pka"), number("sigma"), number("temperature_C").optional(), text("source"));
+
+    /**
+     * One row, matched and read.
+     *
+     * @param row      its table row
+     * @param molecule its structure
+     * @param role     whether the structure is the acid or its conjugate base
+     * @param atom     index of the site
+     * @param place    what it is found by
+     * @param acidity  its value
+     */
+    public record Value(Row row, Molecule molecule, Role role, int atom, ProtonPlace place, Acidity acidity) {}
+
+    private final List<Value> values;
+    private final Map<Long, List<Value>> byHash = new HashMap<>();
+    private final Set<Long> formulas = new HashSet<>();
+
+    /** Later values of the same proton in the same medium replace earlier ones. */
+    private MeasuredAcidities(List<Value> values) {
+        this.values = List.copyOf(values);
+        for (Value value : values) {
+            formulas.add(ProtonPlace.formula(value.molecule(), value.role()));
+            byHash.computeIfAbsent(value.place().hash(), key -> new ArrayList<>()).add(0, value);
+        }
+    }
+
+    /**
+     * Loads the table and reads its structures.
+     *
+     * @throws TableException for a bad cell, a structure that cannot be read, or a site it does not have
+     */
+    public static MeasuredAcidities load(TableFolders folders) {
+        MoleculeReader reader = new MoleculeReader();
+        List<Reading> readings = Table.read(SCHEMA, folders).rows().parallelStream().map(row -> read(row, reader)).toList();
+        List<TableProblem> problems = readings.stream().flatMap(reading -> reading.problem().stream()).toList();
+        if (!problems.isEmpty()) {
+            throw new TableException(problems);
+        }
+        return new MeasuredAcidities(readings.stream().flatMap(reading -> reading.value().stream()).toList());
+    }
+
+    /** A table without a row. */
+    public static MeasuredAcidities none() {
+        return new MeasuredAcidities(List.of());
+    }
+
+    /** Every row. */
+    public List<Value> values() {
+        return values;
+    }
+
+    /** The value measured for this proton in this medium. */
+    public Optional<Acidity> measured(Molecule molecule, ProtonSite site, Medium medium) {
+        return inAnyMedium(molecule, site).stream().filter(acidity -> acidity.medium().equals(medium)).findFirst();
+    }
+
+    /** The values measured for this proton, one per medium, ordered by the medium's id. */
+    public List<Acidity> inAnyMedium(Molecule molecule, ProtonSite site) {
+        return formulas.contains(ProtonPlace.formula(molecule, site.role()))
+                ? inAnyMedium(ProtonPlace.of(molecule, site.role(), site.atom())) : List.of();
+    }
+
+    private List<Acidity> inAnyMedium(ProtonPlace place) {
+        Map<String, Acidity> found = new TreeMap<>();
+        for (Value value : byHash.getOrDefault(place.hash(), List.of())) {
+            if (value.place().sameAs(place)) {
+                found.putIfAbsent(value.acidity().medium().id(), value.acidity());
+            }
+        }
+        return List.copyOf(found.values());
+    }
+
+    /** A row's value, or what is wrong with it. */
+    private record Reading(Optional<Value> value, Optional<TableProblem> problem) {
+
+        static Reading problem(Row row, String column, String expected) {
+            return new Reading(Optional.empty(), Optional.of(row.problem(column, expected)));
+        }
+    }
+
+    private static Reading read(Row row, MoleculeReader reader) {
+        Molecule molecule;
+        try {
+            molecule = reader.read(row.text("smiles"));
+        } catch (MoleculeException e) {
+            return Reading.problem(row, "smiles", "a structure (" + e.getMessage() + ")");
+        }
+        Role role = row.text("role").equals(Role.ACID.word()) ? Role.ACID : Role.BASE;
+        OptionalInt atom = molecule.atomLabelled(row.text("site"));
+        if (atom.isEmpty() || role == Role.ACID && molecule.hydrogens(atom.getAsInt()) == 0) {
+            return Reading.problem(row, "site", "an atom of " + row.text("smiles")
+                    + (role == Role.ACID ? " that carries hydrogen" : "") + ", for example O4");
+        }
+        if (row.number("sigma").getAsDouble() <= 0) {
+            return Reading.problem(row, "sigma", "a number above zero");
+        }
+        Acidity acidity = Acidity.measured(row.number("pka").getAsDouble(), row.number("sigma").getAsDouble(),
+                new Medium(row.text("medium")), row.text("source"));
+        ProtonPlace place = ProtonPlace.of(molecule, role, atom.getAsInt());
+        return new Reading(Optional.of(new Value(row, molecule, role, atom.getAsInt(), place, acidity)), Optional.empty());
+    }
+}

@@ -1,0 +1,121 @@
+package lyate.acidity;
+
+import java.util.ArrayList;
+import java.util.Comparator;
+import java.util.List;
+import java.util.Optional;
+import java.util.stream.Collectors;
+import java.util.stream.Stream;
+import lyate.acidity.Acidity.Basis;
+import lyate.acidity.Acidity.Contribution;
+import lyate.acidity.Acidity.Effect;
+import lyate.stock.Medium;
+import lyate.table.Row;
+import lyate.table.Table;
+import lyate.table.TableException;
+import lyate.table.TableFolders;
+import lyate.table.TableProblem;
+
+/**
+ * Carries pKa values from one medium to another along the straight lines of {@code media-transfer.csv}.
+ *
+ * <p>A relation of the acid's own family goes before the one for any acid, one step before two; the two steps of a
+ * chain meet in DMSO or in water. Each line serves both directions. Immutable; safe to share between threads.
+ */
+public final class MediaTransfer {
+
+    private static final List<Medium> HUBS = List.of(Medium.DMSO, Medium.WATER);
+
+    private final List<MediaRelation> relations;
+
+    public MediaTransfer(List<MediaRelation> relations) {
+        this.relations = Stream.concat(relations.stream(), relations.stream().map(MediaRelation::inverse)).toList();
+    }
+
+    /**
+     * Loads the table.
+     *
+     * @throws TableException for a bad cell, or a line that is flat or has no spread
+     */
+    public static MediaTransfer load(TableFolders folders) {
+        List<TableProblem> problems = new ArrayList<>();
+        List<MediaRelation> relations = new ArrayList<>();
+        for (Row row : Table.read(MediaRelation.SCHEMA, folders).rows()) {
+            MediaRelation relation = MediaRelation.of(row);
+            if (relation.slope() <= 0) {
+                problems.add(row.problem("slope", "a number above zero: acids keep their order"));
+            } else if (relation.standardError() <= 0) {
+                problems.add(row.problem("standard_error", "a number above zero"));
+            } else if (relation.validFrom() >= relation.validTo()) {
+                problems.add(row.problem("valid_to", "a number above valid_from"));
+            }
+            relations.add(relation);
+        }
+        if (!problems.isEmpty()) {
+            throw new TableException(problems);
+        }
+        return new MediaTransfer(relations);
+    }
+
+    /** Every relation, each in both directions. */
+    public List<MediaRelation> relations() {
+        return relations;
+    }
+
+    /**
+     * The value in another medium: error of the relation added in quadrature, basis {@code TRANSFERRED}, and one
+     * contribution that says by which relation. Empty where no relation exists; the value itself where it is there already.
+     */
+    public Optional<Acidity> carry(Acidity acidity, String family, Medium to) {
+        if (acidity.medium().equals(to)) {
+            return Optional.of(acidity);
+        }
+        return routes(acidity.medium(), to, family).stream()
+                .min(Comparator.comparing(MediaTransfer::makeshift).thenComparing(route -> carry(acidity, route).sigma()))
+                .map(route -> carry(acidity, route));
+    }
+
+    private List<List<MediaRelation>> routes(Medium from, Medium to, String family) {
+        List<List<MediaRelation>> routes = new ArrayList<>();
+        step(from, to, family).ifPresent(step -> routes.add(List.of(step)));
+        for (Medium hub : HUBS) {
+            if (!hub.equals(from) && !hub.equals(to)) {
+                step(from, hub, family).ifPresent(first ->
+                        step(hub, to, family).ifPresent(second -> routes.add(List.of(first, second))));
+            }
+        }
+        return routes;
+    }
+
+    /** The family's own relation, else the one for any acid. */
+    private Optional<MediaRelation> step(Medium from, Medium to, String family) {
+        return relations.stream()
+                .filter(row -> row.from().equals(from) && row.to().equals(to))
+                .filter(row -> row.family().equals(family) || row.family().equals(MediaRelation.ANY))
+                .min(Comparator.comparing(row -> row.family().equals(MediaRelation.ANY)));
+    }
+
+    /** One step before two, and two steps of the family before one for any acid. */
+    private static int makeshift(List<MediaRelation> route) {
+        return route.stream().mapToInt(step -> step.family().equals(MediaRelation.ANY) ? 3 : 1).sum();
+    }
+
+    private static Acidity carry(Acidity acidity, List<MediaRelation> route) {
+        double pKa = acidity.pKa();
+        double sigma = acidity.sigma();
+        List<String> missing = new ArrayList<>(acidity.missing());
+        for (MediaRelation step : route) {
+            if (step.distanceOutside(pKa) > 0) {
+                missing.add("the relation " + step + " is used outside the range it was fitted on");
+            }
+            sigma = Math.hypot(step.slope() * sigma, step.error(pKa));
+            pKa = step.convert(pKa);
+        }
+        String path = route.stream().map(MediaRelation::toString).collect(Collectors.joining(", then "));
+        List<Contribution> contributions = new ArrayList<>(acidity.contributions());
+        contributions.add(new Contribution("carried over: " + path, Effect.MEDIUM, pKa - acidity.pKa(), List.of()));
+        Medium to = route.get(route.size() - 1).to();
+        return new Acidity(pKa, sigma, to, Basis.TRANSFERRED, contributions, missing, acidity.relatives(),
+                acidity.source() + "; carried from " + acidity.medium().id() + " by " + path);
+    }
+}
