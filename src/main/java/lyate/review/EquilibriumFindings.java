@@ -8,6 +8,7 @@ import java.util.List;
 import java.util.Locale;
 import java.util.stream.Collectors;
 import lyate.review.Finding.Severity;
+import lyate.stock.Solvent;
 
 /** Findings that follow from the equilibria alone. */
 final class EquilibriumFindings {
@@ -59,7 +60,9 @@ final class EquilibriumFindings {
         if (situation.verdict() != Verdict.SELECTIVE || taken >= TAKEN_PERCENT) {
             return List.of();
         }
-        return List.of(finding(situation.protonEquivalents() < 0.5 ? NOTE : CAUTION, FindingKind.DOSE_SHORT, situation.intended(),
+        // A tenth of an equivalent is meant as a catalyst; a protic solvent's back reaction is the nature of the system.
+        boolean meant = situation.protonEquivalents() < 0.5 || situation.step().solvent().kind() == Solvent.Kind.PROTIC;
+        return List.of(finding(meant ? NOTE : CAUTION, FindingKind.DOSE_SHORT, situation.intended(),
                 say("%.2f equivalents take %.0f %% of %s; the equilibrium would allow more.",
                         situation.protonEquivalents(), taken, situation.intended().label()),
                 List.of(compared(situation.intended()))));
@@ -93,7 +96,7 @@ final class EquilibriumFindings {
         String logK = situation.workingBase().logKSolvent().map(value -> say("log K against the solvent %.1f", value))
                 .orElse("the solvent destroys it");
         return List.of(finding(severity, FindingKind.LEVELLED, situation.intended(),
-                say("%s takes the proton of %s first; what works afterwards is %s.", situation.step().base().name(),
+                say("%s meets %s first; what works afterwards is %s.", situation.step().base().name(),
                         situation.step().solvent().name(), situation.workingBase().name()), List.of(logK)));
     }
 

@@ -4,7 +4,6 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
 import java.util.Map;
-import lyate.flask.TransferThermodynamics;
 import lyate.review.VerdictRule.World;
 
 /** Puts what is known about a step into the words and numbers of a {@link Review}. */
@@ -13,11 +12,13 @@ final class ReviewWriter {
     private final Situation situation;
     private final World world;
     private final Map<Verdict, Double> probabilities;
+    private final List<Transfer> transfers;
 
-    ReviewWriter(Situation situation, World world, Map<Verdict, Double> probabilities) {
+    ReviewWriter(Situation situation, World world, Map<Verdict, Double> probabilities, List<Transfer> transfers) {
         this.situation = situation;
         this.world = world;
         this.probabilities = probabilities;
+        this.transfers = transfers;
     }
 
     Review write(List<Finding> findings) {
@@ -26,7 +27,7 @@ final class ReviewWriter {
                 probabilities.values().stream().mapToDouble(Double::doubleValue).max().orElse(0));
         return new Review(situation.step(), situation.verdict(), probability, probabilities, intended.label(), firstSite(),
                 situation.workingBase().name(), intended.logK(), situation.shares().percentTaken(intended),
-                highestOther(), transfers(), findings, explanation(), List.of());
+                highestOther(), transfers, findings, explanation(), List.of());
     }
 
     private String firstSite() {
@@ -40,18 +41,6 @@ final class ReviewWriter {
     private double highestOther() {
         return situation.donors().stream().filter(donor -> donor != situation.intended())
                 .mapToDouble(situation.shares()::percentTaken).max().orElse(0);
-    }
-
-    private List<Transfer> transfers() {
-        return situation.donors().stream().map(this::transfer).toList();
-    }
-
-    private Transfer transfer(Donor donor) {
-        Comparison comparison = donor.comparison();
-        double sigma = donor.toTemperature() * Math.hypot(comparison.donor().sigma(), comparison.acceptor().sigma());
-        double kelvin = situation.step().temperatureCelsius() + 273.15;
-        return new Transfer(donor.label(), donor.site().equivalent(), comparison.donor(), donor.logK(), sigma,
-                TransferThermodynamics.deltaGKiloJoule(donor.logK(), kelvin), situation.shares().percentTaken(donor), comparison.reason());
     }
 
     private List<String> explanation() {

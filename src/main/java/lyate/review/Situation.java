@@ -25,6 +25,12 @@ record Situation(Step step, WorkingBase workingBase, List<Donor> donors, Donor i
                 && donor.effectiveLogK() > intended.effectiveLogK()).toList();
     }
 
+    /** Whether the base meets a proton it takes: of the substrate, the solvent or moisture. */
+    boolean baseTakesProtons() {
+        return workingBase.levelled() || verdict == Verdict.SELECTIVE || verdict == Verdict.WRONG_SITE
+                || donors.stream().anyMatch(donor -> donor.logK() >= VerdictRule.COMPLETE);
+    }
+
     /** Protons the base takes per mole that was weighed in. */
     double protonEquivalents() {
         return step.equivalents() * step.base().protonsPerFormula();

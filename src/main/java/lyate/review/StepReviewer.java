@@ -1,8 +1,10 @@
 package lyate.review;
 
+import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
 import java.util.Map;
+import java.util.OptionalInt;
 import lyate.acidity.AcidityEstimator;
 import lyate.review.VerdictRule.World;
 import lyate.site.SiteClasses;
@@ -19,21 +21,72 @@ import lyate.table.TableFolders;
  */
 public final class StepReviewer implements Reviewer {
 
-    private final BaseStrength strength;
+    private final WorkingBases workingBases;
     private final Donors donors;
-    private final Solvent water;
     private final VerdictOdds odds = new VerdictOdds();
+    private final Solvent water;
+    private final SideReactions sideReactions;
+    private final BaseSolventRules solventRules;
+    private final BaseHazards hazards;
 
-    public StepReviewer(SiteFinder finder, AcidityEstimator acidity, Solvent water) {
-        this.strength = new BaseStrength(finder, acidity);
+    private StepReviewer(TableFolders folders, Stockroom stockroom, SiteFinder finder, AcidityEstimator acidity) {
+        this.solventRules = BaseSolventRules.load(folders, stockroom);
+        this.workingBases = new WorkingBases(new BaseStrength(finder, acidity), solventRules, stockroom);
         this.donors = new Donors(finder, acidity);
-        this.water = water;
+        this.water = waterOf(stockroom);
+        this.sideReactions = SideReactions.load(folders, stockroom);
+        this.hazards = BaseHazards.load(folders, stockroom);
     }
 
-    /** Loads the tables it needs. */
+    /**
+     * Loads the tables it needs.
+     *
+     * @throws lyate.table.TableException naming every bad cell
+     */
     public static StepReviewer load(TableFolders folders) {
-        return new StepReviewer(new SiteFinder(SiteClasses.load(folders)), AcidityEstimator.load(folders),
-                waterOf(Stockroom.load(folders)));
+        return new StepReviewer(folders, Stockroom.load(folders), new SiteFinder(SiteClasses.load(folders)),
+                AcidityEstimator.load(folders));
+    }
+
+    @Override
+    public Review review(Step step) throws ReviewException {
+        WorkingBase base = workingBases.of(step);
+        List<Donor> sites = donors.of(step, base);
+        Donor intended = Donors.intended(step, sites);
+        ProtonShares shares = StepFlask.settle(step, base, sites, List.of(), workingBases.logK(base, water, step.solvent()));
+        List<Transfer> transfers = new Transfers(step, shares).of(sites);
+        List<SideReaction> reactions = sideReactions(step, base, transfers, intended);
+
+        World world = World.of(step, base, sites, intended);
+        Map<Verdict, Double> probabilities = withSideReactions(odds.of(sites, world), reactions);
+        Situation situation = new Situation(step, base, sites, intended, shares, VerdictOdds.verdict(probabilities));
+        return new ReviewWriter(situation, world, probabilities, transfers).write(findings(situation, reactions));
+    }
+
+    private List<SideReaction> sideReactions(Step step, WorkingBase base, List<Transfer> transfers, Donor intended) {
+        return base.isDestroyed() ? List.of() : base.shelfBase().map(working -> sideReactions.of(step,
+                new SideReactionContext(working, transfers, OptionalInt.of(intended.site().atom())))).orElse(List.of());
+    }
+
+    /** A tabulated side reaction that wins turns every verdict but levelling into incompatible. */
+    private static Map<Verdict, Double> withSideReactions(Map<Verdict, Double> probabilities, List<SideReaction> reactions) {
+        double levelled = probabilities.getOrDefault(Verdict.LEVELLED, 0.0);
+        if (levelled == 1 || reactions.stream().noneMatch(SideReaction::wins)) {
+            return probabilities;
+        }
+        return levelled > 0 ? Map.of(Verdict.LEVELLED, levelled, Verdict.INCOMPATIBLE, 1 - levelled)
+                : Map.of(Verdict.INCOMPATIBLE, 1.0);
+    }
+
+    private List<Finding> findings(Situation situation, List<SideReaction> reactions) {
+        Step step = situation.step();
+        List<Finding> findings = new ArrayList<>();
+        EquilibriumFindings.rules().forEach(rule -> findings.addAll(rule.find(situation)));
+        reactions.forEach(reaction -> findings.add(reaction.finding()));
+        solventRules.of(step.base(), step.solvent(), step.temperatureCelsius()).forEach(effect -> findings.add(effect.finding()));
+        findings.addAll(hazards.of(step.base(), step.solvent(), step.temperatureCelsius(), situation.baseTakesProtons()));
+        findings.sort(Comparator.comparing(Finding::severity));
+        return findings;
     }
 
     private static Solvent waterOf(Stockroom stockroom) {
@@ -42,33 +95,5 @@ public final class StepReviewer implements Reviewer {
         } catch (UnknownNameException e) {
             throw new IllegalStateException("moisture needs a row for water in solvents.csv", e);
         }
-    }
-
-    @Override
-    public Review review(Step step) throws ReviewException {
-        WorkingBase base = WorkingBase.of(step.base(), step.solvent(), strength);
-        List<Donor> sites = donors.of(step, base);
-        Donor intended = Donors.intended(step, sites);
-        World world = world(step, base, sites, intended);
-        Map<Verdict, Double> probabilities = odds.of(sites, world);
-        Verdict verdict = likeliest(probabilities);
-        ProtonShares shares = StepFlask.settle(step, base, sites, List.of(), base.logKAgainst(water, step.solvent()));
-        Situation situation = new Situation(step, base, sites, intended, shares, verdict);
-        return new ReviewWriter(situation, world, probabilities).write(findings(situation));
-    }
-
-    private static World world(Step step, WorkingBase base, List<Donor> sites, Donor intended) {
-        double[] logK = sites.stream().mapToDouble(Donor::effectiveLogK).toArray();
-        return new World(logK, sites.indexOf(intended), 0, step.equivalents() * step.base().protonsPerFormula(), base.levelled());
-    }
-
-    private static Verdict likeliest(Map<Verdict, Double> probabilities) {
-        return probabilities.entrySet().stream().max(Map.Entry.comparingByValue())
-                .filter(entry -> entry.getValue() >= VerdictOdds.DECIDED).map(Map.Entry::getKey).orElse(Verdict.UNDECIDED);
-    }
-
-    private static List<Finding> findings(Situation situation) {
-        return EquilibriumFindings.rules().stream().flatMap(rule -> rule.find(situation).stream())
-                .sorted(Comparator.comparing(Finding::severity)).toList();
     }
 }

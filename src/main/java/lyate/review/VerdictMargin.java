@@ -32,7 +32,7 @@ final class VerdictMargin {
     private static World shifted(World world, double byLogK) {
         double[] logK = world.logK().clone();
         logK[world.intended()] += byLogK;
-        return new World(logK, world.intended(), world.shift(), world.equivalents(), world.levelled());
+        return world.withLogK(logK);
     }
 
     private static String say(double shift, String direction, String label, Verdict becomes) {

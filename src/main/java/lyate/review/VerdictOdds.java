@@ -28,12 +28,18 @@ final class VerdictOdds {
         return propagation.probabilities(errors(donors), shifts -> VerdictRule.judge(shifted(mean, shifts)));
     }
 
+    /** The most probable verdict, or {@link Verdict#UNDECIDED} where none is probable enough. */
+    static Verdict verdict(Map<Verdict, Double> probabilities) {
+        return probabilities.entrySet().stream().max(Map.Entry.comparingByValue())
+                .filter(entry -> entry.getValue() >= DECIDED).map(Map.Entry::getKey).orElse(Verdict.UNDECIDED);
+    }
+
     private static World shifted(World mean, double[] shifts) {
         double[] logK = mean.logK().clone();
         for (int i = 0; i < logK.length; i++) {
             logK[i] -= shifts[i];
         }
-        return new World(logK, mean.intended(), mean.shift(), mean.equivalents(), mean.levelled());
+        return mean.withLogK(logK);
     }
 
     private static PKaErrors errors(List<Donor> donors) {

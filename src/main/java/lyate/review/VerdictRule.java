@@ -1,5 +1,8 @@
 package lyate.review;
 
+import java.util.List;
+
+
 /**
  * Turns one set of equilibrium constants into a verdict. Knows no molecule: a rule of numbers alone, so that the
  * uncertainty of the numbers can be carried through it.
@@ -25,12 +28,26 @@ final class VerdictRule {
      * @param shift       by how much its pKa rises once all more acidic sites have lost their proton
      * @param equivalents base per substrate
      * @param levelled    whether the solvent made the working base out of the one added
+     * @param destroyed   whether it left none
      */
-    record World(double[] logK, int intended, double shift, double equivalents, boolean levelled) {}
+    record World(double[] logK, int intended, double shift, double equivalents, boolean levelled, boolean destroyed) {
+
+        /** The same world with other constants. */
+        World withLogK(double[] others) {
+            return new World(others, intended, shift, equivalents, levelled, destroyed);
+        }
+
+        /** The world in which every pKa is exactly its best value. */
+        static World of(Step step, WorkingBase base, List<Donor> sites, Donor intended) {
+            double[] logK = sites.stream().mapToDouble(Donor::effectiveLogK).toArray();
+            double equivalents = step.equivalents() * step.base().protonsPerFormula();
+            return new World(logK, sites.indexOf(intended), 0, equivalents, base.levelled(), base.isDestroyed());
+        }
+    }
 
     static Verdict judge(World world) {
         double intended = world.logK()[world.intended()];
-        if (world.levelled() && intended < COMPLETE) {
+        if (world.levelled() && (intended < COMPLETE || world.destroyed())) {
             return Verdict.LEVELLED;
         }
         int before = 0;

@@ -55,15 +55,20 @@ class VerdictRuleTest {
 
     @Test
     void aLyateIonThatStillSufficesIsSelective() {
-        assertEquals(Verdict.SELECTIVE, VerdictRule.judge(new World(new double[] {5}, 0, COUPLED, 1, true)));
+        assertEquals(Verdict.SELECTIVE, VerdictRule.judge(new World(new double[] {5}, 0, COUPLED, 1, true, false)));
     }
 
     @Test
     void aLyateIonThatDoesNotSufficeMeansTheBaseWasLevelled() {
-        assertEquals(Verdict.LEVELLED, VerdictRule.judge(new World(new double[] {1}, 0, COUPLED, 1, true)));
+        assertEquals(Verdict.LEVELLED, VerdictRule.judge(new World(new double[] {1}, 0, COUPLED, 1, true, false)));
+    }
+
+    @Test
+    void aBaseThatTheSolventDestroysTakesNothing() {
+        assertEquals(Verdict.LEVELLED, VerdictRule.judge(new World(new double[] {20}, 0, COUPLED, 1, true, true)));
     }
 
     private static Verdict judge(double equivalents, double... logKIntendedFirst) {
-        return VerdictRule.judge(new World(logKIntendedFirst, 0, COUPLED, equivalents, false));
+        return VerdictRule.judge(new World(logKIntendedFirst, 0, COUPLED, equivalents, false, false));
     }
 }
