@@ -10,16 +10,19 @@ import java.awt.event.MouseEvent;
 import java.util.List;
 import java.util.Optional;
 import java.util.function.Consumer;
+import java.util.stream.Stream;
 import javax.swing.JPanel;
 import javax.swing.ToolTipManager;
 import javax.swing.UIManager;
 import lyate.stock.Base;
+import lyate.stock.Medium;
 
 /** The acidity ladder; arrow keys walk its rungs, a click or Enter on a site makes it the intended one. */
 final class AcidityLadder extends JPanel {
 
     private final Theme theme;
     private final Consumer<String> onSite;
+    private final Consumer<Base> onBase;
     private Shown shown;
     private List<Base> compared = List.of();
     private Optional<Ladder> ladder = Optional.empty();
@@ -27,9 +30,10 @@ final class AcidityLadder extends JPanel {
     private Dimension pictureSize;
     private int focusedRung = -1;
 
-    AcidityLadder(Theme theme, Consumer<String> onSite) {
+    AcidityLadder(Theme theme, Consumer<String> onSite, Consumer<Base> onBase) {
         this.theme = theme;
         this.onSite = onSite;
+        this.onBase = onBase;
         setFocusable(true);
         setOpaque(true);
         Mouse mouse = new Mouse();
@@ -40,6 +44,7 @@ final class AcidityLadder extends JPanel {
         Keys.bind(this, "DOWN", () -> moveFocus(-1));
         Keys.bind(this, "ENTER", this::chooseFocused);
         Keys.bind(this, "SPACE", this::chooseFocused);
+        Keys.bind(this, "DELETE", () -> focused().flatMap(Rung::base).ifPresent(this::leaveOut));
         Keys.repaintOnFocus(this);
         theme.onChange(this::refresh);
         getAccessibleContext().setAccessibleName("Acidity ladder");
@@ -50,10 +55,28 @@ final class AcidityLadder extends JPanel {
         refresh();
     }
 
-    /** Shows further bases beside the one chosen. */
-    void compare(List<Base> bases) {
-        compared = List.copyOf(bases);
+    /** Shows a further base beside the one chosen; says why not where the axis has no value for it. */
+    Optional<String> compare(Base base) {
+        Optional<Medium> medium = ladder.map(Ladder::medium);
+        if (medium.isPresent() && base.pKa(medium.get()).isEmpty()) {
+            return Optional.of("No pKa of " + base.name() + " in " + Words.medium(medium.get()) + " is known.");
+        }
+        if (!compared.contains(base)) {
+            compared = Stream.concat(compared.stream(), Stream.of(base)).toList();
+            refresh();
+        }
+        return Optional.empty();
+    }
+
+    private void leaveOut(Base base) {
+        compared = compared.stream().filter(other -> !other.equals(base)).toList();
+        focusedRung = -1;
         refresh();
+    }
+
+    /** The bases shown beside the one chosen. */
+    List<Base> compared() {
+        return compared;
     }
 
     private void refresh() {
@@ -96,7 +119,16 @@ final class AcidityLadder extends JPanel {
     }
 
     private void chooseFocused() {
-        focused().flatMap(Rung::site).ifPresent(site -> onSite.accept(site.label()));
+        focused().ifPresent(this::choose);
+    }
+
+    /** A site becomes the intended one, a compared base the base. */
+    private void choose(Rung rung) {
+        rung.site().ifPresent(site -> onSite.accept(site.label()));
+        rung.base().ifPresent(base -> {
+            leaveOut(base);
+            onBase.accept(base);
+        });
     }
 
     private Optional<Rung> rungAt(MouseEvent event) {
@@ -120,13 +152,13 @@ final class AcidityLadder extends JPanel {
 
         @Override
         public void mouseClicked(MouseEvent event) {
-            rungAt(event).flatMap(Rung::site).ifPresent(site -> onSite.accept(site.label()));
+            rungAt(event).filter(rung -> rung.site().isPresent() || event.getClickCount() == 2).ifPresent(AcidityLadder.this::choose);
         }
 
         @Override
         public void mouseMoved(MouseEvent event) {
-            boolean site = rungAt(event).flatMap(Rung::site).isPresent();
-            setCursor(Cursor.getPredefinedCursor(site ? Cursor.HAND_CURSOR : Cursor.DEFAULT_CURSOR));
+            boolean active = rungAt(event).filter(rung -> rung.site().isPresent() || rung.base().isPresent()).isPresent();
+            setCursor(Cursor.getPredefinedCursor(active ? Cursor.HAND_CURSOR : Cursor.DEFAULT_CURSOR));
         }
     }
 }

@@ -10,7 +10,7 @@ import javax.swing.JTextField;
 import javax.swing.event.DocumentEvent;
 import javax.swing.event.DocumentListener;
 
-/** A field of the step strip: label above, text, one line below that hints or says what is wrong. */
+/** A field of the step strip: label above, text; what is said below it stands in the {@link HintRow}. */
 final class FieldBox extends JPanel {
 
     private final StepField kind;
@@ -24,7 +24,7 @@ final class FieldBox extends JPanel {
         super(new BorderLayout(0, theme.space("tiny")));
         this.kind = kind;
         this.width = width;
-        this.line = new HintLine(theme, text);
+        this.line = new HintLine(text);
         setOpaque(false);
         JLabel label = new JLabel(kind.label());
         label.setLabelFor(text);
@@ -63,7 +63,6 @@ final class FieldBox extends JPanel {
         });
         add(label, BorderLayout.NORTH);
         add(text);
-        add(line, BorderLayout.SOUTH);
     }
 
     StepField kind() {

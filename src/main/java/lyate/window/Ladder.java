@@ -39,9 +39,10 @@ record Ladder(Medium medium, List<Rung> rungs, double basePKa, String beyond) {
         shown.review().transfers().stream().filter(transfer -> transfer.atoms().isEmpty())
                 .forEach(transfer -> all.add(other(shown, transfer, medium, basePKa)));
         double sigma = Math.sqrt(Math.max(0, square(anchor.sigmaLogK()) - square(anchor.acidity().sigma())));
-        all.add(new Rung(Rung.Kind.BASE, workingBase(shown), basePKa, sigma, Words.oneDecimal(basePKa), Optional.empty(), anchor.decidedBy()));
+        all.add(new Rung(Rung.Kind.BASE, workingBase(shown), basePKa, sigma, Words.oneDecimal(basePKa), Optional.empty(),
+                Optional.empty(), anchor.decidedBy()));
         compared.forEach(base -> base.pKa(medium).ifPresent(known -> all.add(new Rung(Rung.Kind.COMPARED, StockWords.shortName(base), known.pKa(), known.sigma(),
-                Words.oneDecimal(known.pKa()), Optional.empty(), known.source()))));
+                Words.oneDecimal(known.pKa()), Optional.empty(), Optional.of(base), known.source()))));
         double low = Math.min(basePKa, anchor.acidity().pKa()) - OF_INTEREST;
         double high = Math.max(basePKa, anchor.acidity().pKa()) + OF_INTEREST;
         List<Rung> near = all.stream().filter(rung -> rung.pKa() >= low && rung.pKa() <= high || rung.kind() == Rung.Kind.COMPARED)
@@ -68,7 +69,7 @@ record Ladder(Medium medium, List<Rung> rungs, double basePKa, String beyond) {
         boolean sameScale = transfer.acidity().medium().equals(medium);
         double pKa = sameScale ? transfer.acidity().pKa() : basePKa - transfer.logK();
         String text = Words.withSigma(transfer.acidity()) + (sameScale ? "" : " " + Words.medium(transfer.acidity().medium()));
-        return new Rung(kind, name, pKa, transfer.acidity().sigma(), text, site, transfer.decidedBy());
+        return new Rung(kind, name, pKa, transfer.acidity().sigma(), text, site, Optional.empty(), transfer.decidedBy());
     }
 
     private static String beyond(List<Rung> all, List<Rung> near, double low, double high) {

@@ -24,6 +24,7 @@ final class LadderPicture {
     private final LadderAxis axis;
     private final double leftRail;
     private final double rightRail;
+    private final boolean brief;
     private final int width;
     private final List<LadderLabel> labels;
     private final LadderMarks marks;
@@ -37,10 +38,12 @@ final class LadderPicture {
         int line = metrics.getHeight();
         this.axis = LadderAxis.around(ladder.low(), ladder.high(), 2.6 * line, size.height - 1.9 * line);
         double apart = palette.space("margin") + metrics.stringWidth("log K +00.0") + 4.0 * palette.space("gap") + metrics.stringWidth("00");
-        double left = widest(ladder.rungs().stream().filter(Rung::left).toList(), measure);
-        double right = widest(ladder.rungs().stream().filter(rung -> !rung.left()).toList(), measure);
-        double spare = (size.width - left - apart - right) / 2;
-        this.leftRail = Math.max(left, left + spare);
+        List<Rung> sites = ladder.rungs().stream().filter(Rung::left).toList();
+        List<Rung> others = ladder.rungs().stream().filter(rung -> !rung.left()).toList();
+        this.brief = widest(sites, measure, false) + apart + widest(others, measure, false) > size.width;
+        double left = widest(sites, measure, brief);
+        double spare = (size.width - left - apart - widest(others, measure, brief)) / 2;
+        this.leftRail = left + Math.max(-left / 4, spare);
         this.rightRail = leftRail + apart;
         this.marks = new LadderMarks(palette);
         this.labels = LadderLabel.place(ladder.rungs(), axis, line + palette.space("small"),
@@ -56,7 +59,8 @@ final class LadderPicture {
         for (LadderLabel label : labels) {
             paintLabel(g, label, focused.filter(label.rung()::equals).isPresent());
         }
-        ladder.rungs().forEach(rung -> marks.paint(g, rung, railOf(rung), axis));
+        // The chosen base goes on top of the ones it is compared with.
+        ladder.rungs().stream().sorted(Comparator.comparing(rung -> rung.kind() == Rung.Kind.BASE)).forEach(rung -> marks.paint(g, rung, railOf(rung), axis));
     }
 
     /** The rung whose mark or label is at a point. */
@@ -158,14 +162,14 @@ final class LadderPicture {
         leader.lineTo(end, label.y());
         g.draw(leader);
         double room = (rung.left() ? end : width - end) - 2.0 * palette.space("small");
-        LadderText text = LadderText.fitted(rung, font, g, room);
+        LadderText text = LadderText.fitted(rung, font, g, room, brief);
         double x = rung.left() ? end - palette.space("small") - text.width() : end + palette.space("small");
         text.paint(g, palette, x, label.y() + metrics.getAscent() * 0.38, focused);
     }
 
     /** Room for the longest label of a rail, leader line included. */
-    private double widest(List<Rung> rungs, Graphics2D g) {
-        double text = rungs.stream().mapToDouble(rung -> LadderText.fitted(rung, font, g, Double.POSITIVE_INFINITY).width()).max().orElse(0);
+    private double widest(List<Rung> rungs, Graphics2D g, boolean brevity) {
+        double text = rungs.stream().mapToDouble(rung -> LadderText.fitted(rung, font, g, Double.POSITIVE_INFINITY, brevity).width()).max().orElse(0);
         return text + leader() + 2.0 * palette.space("small") + palette.space("gap");
     }
 

@@ -18,12 +18,12 @@ record LadderText(String name, String value, Font bold, Font plain, double nameW
 
     private static final String DOTS = "\u2026";
 
-    /** The fullest form that fits: name and value with uncertainty, without it, then a shortened name. */
-    static LadderText fitted(Rung rung, Font font, Graphics2D g, double room) {
+    /** The fullest form that fits: name and value with uncertainty, without it (always where {@code brief}), then a shortened name. */
+    static LadderText fitted(Rung rung, Font font, Graphics2D g, double room, boolean brief) {
         Font bold = font.deriveFont(Font.BOLD);
         String name = rung.site().map(site -> site.letter() + "  ").orElse("") + rung.name();
         LadderText whole = of(rung, name, "  " + rung.text(), bold, font, g);
-        if (whole.width() <= room) {
+        if (!brief && whole.width() <= room) {
             return whole;
         }
         LadderText shorter = of(rung, name, "  " + Words.oneDecimal(rung.pKa()), bold, font, g);

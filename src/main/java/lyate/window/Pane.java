@@ -13,16 +13,33 @@ final class Pane extends JPanel {
 
     private final JLabel heading;
     private final Theme theme;
+    private final String title;
 
     Pane(String title, JComponent content, Theme theme) {
+        this(title, content, null, theme);
+    }
+
+    /** @param tool what stands at the right of the heading; may be null */
+    Pane(String title, JComponent content, JComponent tool, Theme theme) {
         super(new BorderLayout());
         this.theme = theme;
+        this.title = title;
         heading = new JLabel(title);
         heading.setLabelFor(content);
-        add(heading, BorderLayout.NORTH);
+        JPanel top = new JPanel(new BorderLayout());
+        top.add(heading, BorderLayout.CENTER);
+        if (tool != null) {
+            top.add(tool, BorderLayout.EAST);
+        }
+        add(top, BorderLayout.NORTH);
         add(content);
         dress();
         theme.onChange(this::dress);
+    }
+
+    /** A remark behind the title; empty for none. */
+    void note(String words) {
+        heading.setText(words.isEmpty() ? title : title + "  \u2013  " + words);
     }
 
     private void dress() {

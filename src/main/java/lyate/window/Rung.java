@@ -1,6 +1,7 @@
 package lyate.window;
 
 import java.util.Optional;
+import lyate.stock.Base;
 
 /**
  * One entry of the acidity ladder.
@@ -11,9 +12,11 @@ import java.util.Optional;
  * @param sigma standard uncertainty; half the length of the bar
  * @param text  value as written
  * @param site  the substrate's site, for a site
+ * @param base  the stockroom's base, for a compared one
  * @param note  what to know about its place, for tooltips; may be empty
  */
-record Rung(Kind kind, String name, double pKa, double sigma, String text, Optional<SiteTag> site, String note) {
+record Rung(Kind kind, String name, double pKa, double sigma, String text, Optional<SiteTag> site,
+            Optional<Base> base, String note) {
 
     enum Kind { SITE, BASE, COMPARED, SOLVENT, WATER, PARTNER }
 

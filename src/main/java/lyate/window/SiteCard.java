@@ -1,5 +1,6 @@
 package lyate.window;
 
+import com.formdev.flatlaf.util.UIScale;
 import lyate.acidity.Acidity;
 import lyate.acidity.Acidity.Contribution;
 import lyate.acidity.Acidity.Relative;
@@ -13,7 +14,7 @@ final class SiteCard {
 
     static String html(Shown shown, SiteTag site) {
         Acidity acidity = site.transfer().acidity();
-        StringBuilder html = new StringBuilder("<html><div style='width:" + WIDTH + "px'><b>" + site.letter() + " &nbsp; "
+        StringBuilder html = new StringBuilder("<html><div style='width:" + UIScale.scale(WIDTH) + "px'><b>" + site.letter() + " &nbsp; "
                 + escape(site.label()) + "</b> &nbsp; pKa <b>" + site.value() + "</b> in " + escape(Words.medium(acidity.medium()))
                 + ", " + acidity.basis().word() + "<br>" + Words.percent(site.transfer().percentTaken()) + " taken by "
                 + escape(shown.review().workingBase()) + ", log K " + Words.signed(site.transfer().logK()));

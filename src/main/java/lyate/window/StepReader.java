@@ -1,5 +1,6 @@
 package lyate.window;
 
+import java.math.BigDecimal;
 import java.util.EnumMap;
 import java.util.Map;
 import java.util.Optional;
@@ -101,7 +102,7 @@ final class StepReader {
     /** Sane limits of a number, both included. */
     private record Range(double low, double high) {
         String words() {
-            return (low == (long) low ? "" + (long) low : "" + low) + " to " + (long) high;
+return BigDecimal.valueOf(low).stripTrailingZeros().toPlainString() + " to " + BigDecimal.valueOf(high).stripTrailingZeros().toPlainString();
         }
     }
 }

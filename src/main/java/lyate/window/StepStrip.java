@@ -22,6 +22,7 @@ final class StepStrip extends JPanel {
     private final Map<StepField, FieldBox> boxes = new EnumMap<>(StepField.class);
     private final Map<StepField, Suggestions> suggestions = new EnumMap<>(StepField.class);
     private final Consumer<StepText> onEdit;
+    private final HintRow hints;
     private StepText text;
 
     StepStrip(Theme theme, Stockroom stockroom, StepText first, Consumer<StepText> onEdit) {
@@ -34,9 +35,9 @@ final class StepStrip extends JPanel {
         }
         boxes.get(StepField.SUBSTRATE).field().setTransferHandler(new StructureDrop(boxes.get(StepField.SUBSTRATE).field()));
         suggestions.put(StepField.BASE, new Suggestions(boxes.get(StepField.BASE).field(), theme,
-                typed -> stockroom.searchBases(typed, HITS).stream().map(StockWords::hit).toList()));
+                typed -> stockroom.searchBases(typed, HITS).stream().map(StockWords::hit).toList(), () -> {}));
         suggestions.put(StepField.SOLVENT, new Suggestions(boxes.get(StepField.SOLVENT).field(), theme,
-                typed -> stockroom.searchSolvents(typed, HITS).stream().map(StockWords::hit).toList()));
+                typed -> stockroom.searchSolvents(typed, HITS).stream().map(StockWords::hit).toList(), () -> {}));
         int margin = theme.space("wide");
         setBorder(BorderFactory.createEmptyBorder(theme.space("gap"), margin, theme.space("small"), margin));
         for (StepField field : StepField.values()) {
@@ -45,6 +46,9 @@ final class StepStrip extends JPanel {
             add(boxes.get(field), new GridBagConstraints(field.ordinal(), 0, 1, 1, weight, 0, GridBagConstraints.NORTH,
                     GridBagConstraints.HORIZONTAL, new Insets(0, 0, 0, last ? 0 : theme.space("gap")), 0, 0));
         }
+        hints = new HintRow(theme, List.copyOf(boxes.values()));
+        add(hints, new GridBagConstraints(0, 1, StepField.values().length, 1, 1, 0, GridBagConstraints.NORTH,
+                GridBagConstraints.HORIZONTAL, new Insets(0, 0, 0, 0), 0, 0));
         fill();
     }
 
@@ -82,6 +86,7 @@ final class StepStrip extends JPanel {
                 box.line().hint(outcome.shown().map(shown -> understood(field, shown.review().step())).orElse(""));
             }
         });
+        hints.repaint();
     }
 
     private static String understood(StepField field, Step step) {

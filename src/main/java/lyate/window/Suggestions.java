@@ -34,9 +34,12 @@ final class Suggestions {
     private final DefaultListModel<Hit> hits = new DefaultListModel<>();
     private final JList<Hit> list = new JList<>(hits);
     private final JPopupMenu popup = new JPopupMenu();
+    private final Runnable onTake;
     private boolean taking;
 
-    Suggestions(JTextField field, Theme theme, Function<String, List<Hit>> search) {
+    /** @param onTake called once a hit's name is in the field */
+    Suggestions(JTextField field, Theme theme, Function<String, List<Hit>> search, Runnable onTake) {
+        this.onTake = onTake;
         this.field = field;
         this.theme = theme;
         this.search = search;
@@ -79,6 +82,14 @@ final class Suggestions {
         if (taking || !field.isFocusOwner()) {
             return;
         }
+        if (field.getText().isBlank()) {
+            popup.setVisible(false);
+        } else {
+            open();
+        }
+    }
+
+    private void open() {
         hits.clear();
         hits.addAll(search.apply(field.getText()));
         if (hits.isEmpty()) {
@@ -102,7 +113,7 @@ final class Suggestions {
 
     private void move(int by) {
         if (!popup.isVisible()) {
-            offer();
+            open();
             return;
         }
         int next = Math.floorMod(list.getSelectedIndex() + by, hits.size());
@@ -117,6 +128,7 @@ final class Suggestions {
             taking = true;
             field.setText(hit.name());
             taking = false;
+            onTake.run();
         }
     }
 

@@ -51,12 +51,12 @@ final class VerdictHeader extends JPanel {
         name.setFont(plain.deriveFont(Font.BOLD, plain.getSize2D() * 1.5f));
         name.setForeground(palette.color(VerdictIcon.accent(review.verdict())));
         JLabel probability = new JLabel(probability(review.probability()));
-        probability.setFont(plain.deriveFont(plain.getSize2D() * 1.15f));
+        probability.setFont(plain.deriveFont(Font.BOLD));
         probability.setForeground(palette.color("ink"));
-        JPanel line = new JPanel(new BorderLayout());
+        JPanel line = new JPanel(new StackLayout(0));
         line.setOpaque(false);
-        line.add(name, BorderLayout.WEST);
-        line.add(probability, BorderLayout.EAST);
+        line.add(name);
+        line.add(probability);
         line.getAccessibleContext().setAccessibleName("Verdict: " + name.getText() + ", " + probability.getText());
         return line;
     }

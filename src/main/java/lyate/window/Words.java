@@ -38,13 +38,13 @@ final class Words {
     /** A share in percent: whole numbers in the middle, more digits near the ends. */
     static String percent(double percent) {
         if (percent > 0 && percent < 0.1) {
-            return "< 0.1 %";
+            return "<\u00a00.1\u00a0%";
         }
         if (percent < 100 && percent > 99.9) {
-            return "> 99.9 %";
+            return ">\u00a099.9\u00a0%";
         }
         boolean nearAnEnd = percent > 0 && percent < 10 || percent > 90 && percent < 100;
-        return String.format(Locale.ROOT, nearAnEnd ? "%.1f %%" : "%.0f %%", percent);
+        return String.format(Locale.ROOT, nearAnEnd ? "%.1f\u00a0%%" : "%.0f\u00a0%%", percent);
     }
 
     /** An equilibrium constant, for example {@code 3×10⁸}. */

@@ -2,13 +2,16 @@ package lyate.window;
 
 import java.awt.BorderLayout;
 import java.awt.CardLayout;
+import java.math.BigDecimal;
 import java.util.Optional;
 import javax.swing.BorderFactory;
 import javax.swing.JComponent;
+import javax.swing.JOptionPane;
 import javax.swing.JPanel;
 import javax.swing.JSplitPane;
 import lyate.molecule.MoleculeReader;
 import lyate.review.Reviewer;
+import lyate.stock.Base;
 import lyate.stock.Stockroom;
 
 /** All parts of the window put together: fields above, pictures and findings in the middle, the drawer below. */
@@ -19,7 +22,9 @@ final class Workbench extends JPanel implements AutoCloseable {
 
     private final StepStrip strip;
     private final SubstrateView substrate;
+    private final Pane substratePane;
     private final AcidityLadder ladder;
+    private final CompareField compare;
     private final FindingsPanel findings;
     private final Drawer drawer;
     private final StepPresenter presenter;
@@ -32,9 +37,12 @@ final class Workbench extends JPanel implements AutoCloseable {
         presenter = new StepPresenter(new StepReader(new MoleculeReader(), stockroom), reviewer, this::receive);
         strip = new StepStrip(theme, stockroom, first, presenter::submit);
         substrate = new SubstrateView(theme, this::intend);
-        ladder = new AcidityLadder(theme, this::intend);
+        substratePane = new Pane("Substrate", substrate, theme);
+        ladder = new AcidityLadder(theme, this::intend, base -> open(strip.text().with(StepField.BASE, base.name())));
+        compare = new CompareField(theme, stockroom, this::compare);
         findings = new FindingsPanel(theme, substrate::highlight);
-        drawer = new Drawer(theme, substrate::highlight, this::intend);
+        drawer = new Drawer(theme, reviewer, substrate::highlight, this::intend,
+                equivalents -> open(strip.text().with(StepField.EQUIVALENTS, plain(equivalents))));
         middle.add(pictures(theme), PICTURES);
         middle.add(new EmptyView(theme, example -> open(strip.text().with(StepField.SUBSTRATE, example).withSite(""))), EMPTY);
         add(strip, BorderLayout.NORTH);
@@ -43,8 +51,8 @@ final class Workbench extends JPanel implements AutoCloseable {
     }
 
     private JComponent pictures(Theme theme) {
-        JSplitPane right = split(JSplitPane.HORIZONTAL_SPLIT, new Pane("Acidity ladder", ladder, theme), new Pane("Findings", findings, theme), 0.58);
-        JSplitPane top = split(JSplitPane.HORIZONTAL_SPLIT, new Pane("Substrate", substrate, theme), right, 0.38);
+        JSplitPane right = split(JSplitPane.HORIZONTAL_SPLIT, new Pane("Acidity ladder", ladder, compare, theme), new Pane("Findings", findings, theme), 0.58);
+        JSplitPane top = split(JSplitPane.HORIZONTAL_SPLIT, substratePane, right, 0.38);
         return split(JSplitPane.VERTICAL_SPLIT, top, drawer, 0.74);
     }
 
@@ -77,8 +85,17 @@ final class Workbench extends JPanel implements AutoCloseable {
         open(strip.text().withSite(site));
     }
 
+    private static String plain(double value) {
+        return BigDecimal.valueOf(value).stripTrailingZeros().toPlainString();
+    }
+
+    private void compare(Base base) {
+        ladder.compare(base).ifPresent(reason -> JOptionPane.showMessageDialog(this, reason, "Acidity ladder", JOptionPane.INFORMATION_MESSAGE));
+    }
+
     private void receive(Outcome outcome) {
         strip.report(outcome);
+        substratePane.note(outcome.shown().isEmpty() ? "the last step that could be read" : "");
         if (outcome.text().get(StepField.SUBSTRATE).isEmpty()) {
             shown = Optional.empty();
             cards.show(middle, EMPTY);
@@ -109,12 +126,17 @@ final class Workbench extends JPanel implements AutoCloseable {
         return substrate;
     }
 
+    Drawer drawer() {
+        return drawer;
+    }
+
     AcidityLadder ladder() {
         return ladder;
     }
 
     @Override
     public void close() {
+        drawer.close();
         presenter.close();
     }
 }

@@ -7,6 +7,8 @@ import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.concurrent.atomic.AtomicReference;
+import java.util.List;
+import java.util.function.Consumer;
 import javax.imageio.ImageIO;
 import javax.swing.JFrame;
 import javax.swing.SwingUtilities;
@@ -27,6 +29,14 @@ final class Screenshots {
         Screenshots screenshots = new Screenshots(Files.createDirectories(Path.of(arguments[0])));
         StepText demo = StepText.demo();
         screenshots.take("light", false, 1, 1500, 920, demo);
+        screenshots.take("dose", true, 1, 1500, 920, demo, bench -> bench.drawer().setSelectedIndex(1));
+        screenshots.take("error", false, 1, 1200, 760, demo, bench -> {
+            bench.strip().box(StepField.SUBSTRATE).field().setText("O=C(C1CCC1)Nc1ccc(C)c(O)c");
+            bench.strip().box(StepField.BASE).field().setText("LiHDMS");
+            bench.strip().box(StepField.CONCENTRATION).field().setText("much");
+        });
+        screenshots.take("compare", false, 1, 1500, 920, demo, bench -> List.of("lda", "kotbu", "dbu").forEach(id ->
+                bench.ladder().compare(screenshots.stockroom.bases().stream().filter(base -> base.id().equals(id)).findFirst().orElseThrow())));
         screenshots.take("dark", true, 1, 1500, 920, demo);
         screenshots.take("empty", false, 1, 1500, 920, demo.with(StepField.SUBSTRATE, ""));
         screenshots.take("double", false, 2, 2400, 1500, demo);
@@ -34,6 +44,10 @@ final class Screenshots {
     }
 
     private void take(String name, boolean dark, float zoom, int width, int height, StepText step) throws Exception {
+        take(name, dark, zoom, width, height, step, bench -> {});
+    }
+
+    private void take(String name, boolean dark, float zoom, int width, int height, StepText step, Consumer<Workbench> action) throws Exception {
         AtomicReference<JFrame> frame = new AtomicReference<>();
         AtomicReference<Workbench> bench = new AtomicReference<>();
         SwingUtilities.invokeAndWait(() -> {
@@ -46,7 +60,9 @@ final class Screenshots {
             frame.get().setSize(new Dimension(width, height));
             frame.get().setVisible(true);
         });
-        Thread.sleep(1200);
+        Thread.sleep(700);
+        SwingUtilities.invokeAndWait(() -> action.accept(bench.get()));
+        Thread.sleep(700);
         SwingUtilities.invokeAndWait(() -> write(name, frame.get()));
         SwingUtilities.invokeAndWait(() -> {
             bench.get().close();
