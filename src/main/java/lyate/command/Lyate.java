@@ -1,5 +1,8 @@
 package lyate.command;
 
+import lyate.table.TableFolders;
+import lyate.window.WorkbenchFrame;
+
 /** The program. */
 public final class Lyate {
 
@@ -7,6 +10,8 @@ public final class Lyate {
 
     /** Runs the command line, or opens the window where there are no arguments. */
     public static void main(String[] arguments) {
-        System.exit(0);
+        if (arguments.length == 0) {
+            WorkbenchFrame.open(TableFolders.packaged());
+        }
     }
 }

@@ -1,7 +1,9 @@
 package lyate.window;
 
 import lyate.review.Reviewer;
+import lyate.review.StepReviewer;
 import lyate.stock.Stockroom;
+import lyate.table.TableFolders;
 
 /**
  * What the window asks.
@@ -9,4 +11,10 @@ import lyate.stock.Stockroom;
  * @param stockroom what there is to choose from
  * @param reviewer  what judges a step
  */
-record Engine(Stockroom stockroom, Reviewer reviewer) {}
+record Engine(Stockroom stockroom, Reviewer reviewer) {
+
+    /** Loads the tables. */
+    static Engine load(TableFolders folders) {
+        return new Engine(Stockroom.load(folders), StepReviewer.load(folders));
+    }
+}

@@ -22,6 +22,9 @@ record Ladder(Medium medium, List<Rung> rungs, double basePKa, String beyond) {
     /** pKa units beyond the intended site and the base that are still shown. */
     private static final double OF_INTEREST = 12;
 
+    private static final double ROOM_KELVIN = 298.15;
+    private static final double ZERO_CELSIUS = 273.15;
+
     Ladder {
         rungs = List.copyOf(rungs);
     }
@@ -33,12 +36,15 @@ record Ladder(Medium medium, List<Rung> rungs, double basePKa, String beyond) {
 
     private static Ladder of(Shown shown, List<Base> compared, Transfer anchor) {
         Medium medium = anchor.acidity().medium();
-        double basePKa = anchor.acidity().pKa() + anchor.logK();
+        // log K is that at the temperature of the step; the axis holds pKa values, which are those of 298.15 K.
+        double toRoom = (shown.review().step().temperatureCelsius() + ZERO_CELSIUS) / ROOM_KELVIN;
+        double basePKa = anchor.acidity().pKa() + anchor.logK() * toRoom;
+        Scale scale = new Scale(medium, basePKa, toRoom);
         List<Rung> all = new ArrayList<>();
-        shown.tags().sites().forEach(site -> all.add(rung(Rung.Kind.SITE, site.label(), site.transfer(), Optional.of(site), medium, basePKa)));
+        shown.tags().sites().forEach(site -> all.add(rung(Rung.Kind.SITE, site.label(), site.transfer(), Optional.of(site), scale)));
         shown.review().transfers().stream().filter(transfer -> transfer.atoms().isEmpty())
-                .forEach(transfer -> all.add(other(shown, transfer, medium, basePKa)));
-        double sigma = Math.sqrt(Math.max(0, square(anchor.sigmaLogK()) - square(anchor.acidity().sigma())));
+                .forEach(transfer -> all.add(other(shown, transfer, scale)));
+        double sigma = Math.sqrt(Math.max(0, square(anchor.sigmaLogK() * toRoom) - square(anchor.acidity().sigma())));
         all.add(new Rung(Rung.Kind.BASE, workingBase(shown), basePKa, sigma, Words.oneDecimal(basePKa), Optional.empty(),
                 Optional.empty(), anchor.decidedBy()));
         compared.forEach(base -> base.pKa(medium).ifPresent(known -> all.add(new Rung(Rung.Kind.COMPARED, StockWords.shortName(base), known.pKa(), known.sigma(),
@@ -56,18 +62,18 @@ record Ladder(Medium medium, List<Rung> rungs, double basePKa, String beyond) {
         return shown.review().workingBase().equals(base.name()) ? StockWords.shortName(base) : shown.review().workingBase();
     }
 
-    private static Rung other(Shown shown, Transfer transfer, Medium medium, double basePKa) {
+    private static Rung other(Shown shown, Transfer transfer, Scale scale) {
         return switch (transfer.donor()) {
-            case "solvent" -> rung(Rung.Kind.SOLVENT, StockWords.shortName(shown.review().step().solvent()), transfer, Optional.empty(), medium, basePKa);
-            case "water" -> rung(Rung.Kind.WATER, "water", transfer, Optional.empty(), medium, basePKa);
-            default -> rung(Rung.Kind.PARTNER, transfer.donor(), transfer, Optional.empty(), medium, basePKa);
+            case "solvent" -> rung(Rung.Kind.SOLVENT, StockWords.shortName(shown.review().step().solvent()), transfer, Optional.empty(), scale);
+            case "water" -> rung(Rung.Kind.WATER, "water", transfer, Optional.empty(), scale);
+            default -> rung(Rung.Kind.PARTNER, transfer.donor(), transfer, Optional.empty(), scale);
         };
     }
 
     /** A donor judged on another scale stands where its gap to the base is its log K, and says so. */
-    private static Rung rung(Rung.Kind kind, String name, Transfer transfer, Optional<SiteTag> site, Medium medium, double basePKa) {
-        boolean sameScale = transfer.acidity().medium().equals(medium);
-        double pKa = sameScale ? transfer.acidity().pKa() : basePKa - transfer.logK();
+    private static Rung rung(Rung.Kind kind, String name, Transfer transfer, Optional<SiteTag> site, Scale scale) {
+        boolean sameScale = transfer.acidity().medium().equals(scale.medium());
+        double pKa = sameScale ? transfer.acidity().pKa() : scale.basePKa() - transfer.logK() * scale.toRoom();
         String text = Words.withSigma(transfer.acidity()) + (sameScale ? "" : " " + Words.medium(transfer.acidity().medium()));
         return new Rung(kind, name, pKa, transfer.acidity().sigma(), text, site, Optional.empty(), transfer.decidedBy());
     }
@@ -84,6 +90,9 @@ record Ladder(Medium medium, List<Rung> rungs, double basePKa, String beyond) {
         }
         return String.join(", ", words);
     }
+
+    /** The axis, the base on it, and the factor from log K at the step's temperature to pKa units at room temperature. */
+    private record Scale(Medium medium, double basePKa, double toRoom) {}
 
     Optional<Rung> intended() {
         return rungs.stream().filter(Rung::intended).findFirst();

@@ -57,7 +57,7 @@ final class SubstratePicture {
             if (tag.full()) {
                 tag.tag().transfer().atoms().forEach(atom -> painter.paintRing(g, tag.tag(), atoms.get(atom), ring));
             }
-            painter.paintLeader(g, tag.tag(), tag.box(), atoms.get(tag.tag().atom()), ring);
+            painter.paintLeader(g, tag.tag(), tag.box(), atoms.get(tag.tag().atom()), tag.full() ? ring : ring / 3);
         }
         shown.drawing().paintSeam(g, transform, palette.color("ground"), palette.space("tiny"));
         shown.drawing().paint(g, transform, palette.drawing());

@@ -60,7 +60,7 @@ final class TagPainter {
         double chip = full ? chipWidth(g, tag) : box.getWidth();
         Graphics2D inner = (Graphics2D) g.create();
         inner.clip(outline);
-        inner.setColor(accent(tag));
+        inner.setColor(counts(tag) ? accent(tag) : ground(tag));
         inner.fill(new Rectangle2D.Double(box.getX(), box.getY(), chip, box.getHeight()));
         inner.dispose();
         g.setColor(focused ? palette.color("focus") : accent(tag));
@@ -69,7 +69,7 @@ final class TagPainter {
         g.setFont(letterFont);
         FontMetrics metrics = g.getFontMetrics();
         float baseline = (float) (box.getCenterY() + (metrics.getAscent() - metrics.getDescent()) / 2.0);
-        g.setColor(palette.color("ground"));
+        g.setColor(palette.color(counts(tag) ? "ground" : "ink.soft"));
         g.drawString(tag.letter(), (float) (box.getX() + (chip - metrics.stringWidth(tag.letter())) / 2), baseline);
         if (full) {
             g.setFont(font);

@@ -14,6 +14,7 @@ import javax.swing.JOptionPane;
 import javax.swing.SwingConstants;
 import javax.swing.SwingUtilities;
 import javax.swing.SwingWorker;
+import lyate.table.TableFolders;
 
 /** The window of the program. For the event thread. */
 public final class WorkbenchFrame extends JFrame {
@@ -37,6 +38,11 @@ public final class WorkbenchFrame extends JFrame {
             }
         });
         place();
+    }
+
+    /** Opens the window of the program with the tables in these folders; may be called on any thread. */
+    public static void open(TableFolders folders) {
+        open(() -> Engine.load(folders), WindowMemory.ofUser());
     }
 
     /** Shows the window at once and loads the engine behind it. */
@@ -74,6 +80,11 @@ public final class WorkbenchFrame extends JFrame {
         add(bench, BorderLayout.CENTER);
         revalidate();
         repaint();
+    }
+
+    /** Whether a review is on screen. */
+    boolean reviewed() {
+        return bench != null && bench.shown().isPresent();
     }
 
     private void place() {

@@ -21,9 +21,9 @@ class LadderTest {
     private final Shown demo = Panels.shown(StepText.demo());
 
     @Test
-    void theGapBetweenSiteAndBaseOnTheAxisIsLogK() {
+    void theGapBetweenSiteAndBaseOnTheAxisIsLogKAtRoomTemperature() {
         Ladder ladder = Ladder.of(demo, List.of()).orElseThrow();
-        assertEquals(demo.review().logK(), ladder.basePKa() - ladder.intended().orElseThrow().pKa(), 1e-9);
+        assertEquals(demo.review().logK() * 273.15 / 298.15, ladder.basePKa() - ladder.intended().orElseThrow().pKa(), 1e-9);
     }
 
     @Test

@@ -19,7 +19,8 @@ import lyate.table.TableFolders;
 final class Screenshots {
 
     private final Path folder;
-    private final Stockroom stockroom = Stockroom.load(TableFolders.packaged());
+    private final Engine engine = Engine.load(TableFolders.packaged());
+    private final Stockroom stockroom = engine.stockroom();
 
     private Screenshots(Path folder) {
         this.folder = folder;
@@ -54,7 +55,7 @@ final class Screenshots {
             Theme theme = new Theme(dark);
             theme.install();
             UIScale.setZoomFactor(zoom);
-            bench.set(new Workbench(theme, stockroom, new InventedReviewer(), step));
+            bench.set(new Workbench(theme, stockroom, engine.reviewer(), step));
             frame.set(new JFrame(name));
             frame.get().setContentPane(bench.get());
             frame.get().setSize(new Dimension(width, height));
