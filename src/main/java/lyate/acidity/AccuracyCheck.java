@@ -19,6 +19,8 @@ import lyate.site.ProtonSite;
 import lyate.site.Role;
 import lyate.site.SiteFinder;
 import lyate.stock.Medium;
+import lyate.stock.Stockroom;
+import lyate.stock.UnknownNameException;
 import org.apache.commons.csv.CSVFormat;
 import org.apache.commons.csv.CSVParser;
 import org.apache.commons.csv.CSVRecord;
@@ -38,6 +40,17 @@ public record AccuracyCheck(SiteFinder finder, AcidityEstimator estimator, Funct
     private static final CSVFormat FORMAT = CSVFormat.RFC4180.builder().setHeader().setSkipHeaderRecord(true)
             .setCommentMarker('#').setIgnoreEmptyLines(true).setTrim(true).setIgnoreHeaderCase(true)
             .setAllowMissingColumnNames(true).get();
+
+    /** A check that finds solvents by any name the stockroom knows; each is judged in its own medium, never in a proxy. */
+    public static AccuracyCheck of(SiteFinder finder, AcidityEstimator estimator, Stockroom stockroom) {
+        return new AccuracyCheck(finder, estimator, name -> {
+            try {
+                return Optional.of(new Medium(stockroom.solvent(name).id()));
+            } catch (UnknownNameException e) {
+                return Optional.empty();
+            }
+        });
+    }
 
     /** Thrown within a row that cannot be compared. */
     private static final class RowException extends Exception {

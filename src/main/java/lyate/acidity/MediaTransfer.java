@@ -19,8 +19,8 @@ import lyate.table.TableProblem;
 /**
  * Carries pKa values from one medium to another along the straight lines of {@code media-transfer.csv}.
  *
- * <p>A relation of the acid's own family goes before the one for any acid, one step before two; the two steps of a
- * chain meet in DMSO or in water. Each line serves both directions. Immutable; safe to share between threads.
+ * <p>A value goes straight or in two steps that meet in DMSO or water: relations of the acid's own family before those
+ * for any acid, then the way that adds the least error. Each line serves both directions. Immutable; safe to share between threads.
  */
 public final class MediaTransfer {
 
@@ -71,7 +71,7 @@ public final class MediaTransfer {
             return Optional.of(acidity);
         }
         return routes(acidity.medium(), to, family).stream()
-                .min(Comparator.comparing(MediaTransfer::makeshift).thenComparing(route -> carry(acidity, route).sigma()))
+                .min(Comparator.comparingLong(MediaTransfer::makeshift).thenComparingDouble(route -> carry(acidity, route).sigma()))
                 .map(route -> carry(acidity, route));
     }
 
@@ -95,9 +95,9 @@ public final class MediaTransfer {
                 .min(Comparator.comparing(row -> row.family().equals(MediaRelation.ANY)));
     }
 
-    /** One step before two, and two steps of the family before one for any acid. */
-    private static int makeshift(List<MediaRelation> route) {
-        return route.stream().mapToInt(step -> step.family().equals(MediaRelation.ANY) ? 3 : 1).sum();
+    /** How many of its steps are not of the acid's own family. */
+    private static long makeshift(List<MediaRelation> route) {
+        return route.stream().filter(step -> step.family().equals(MediaRelation.ANY)).count();
     }
 
     private static Acidity carry(Acidity acidity, List<MediaRelation> route) {

@@ -9,9 +9,9 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
 import java.util.Optional;
-import java.util.OptionalDouble;
 import java.util.Set;
 import java.util.TreeSet;
+import java.util.stream.Collectors;
 import java.util.stream.Stream;
 import lyate.acidity.MeasuredAcidities;
 import lyate.acidity.MediaRelation;
@@ -20,6 +20,7 @@ import lyate.fit.LineFit.Point;
 import lyate.site.SiteClasses;
 import lyate.site.SiteFinder;
 import lyate.stock.Medium;
+import lyate.stock.Solvent;
 import lyate.stock.Stockroom;
 import lyate.table.Row;
 import lyate.table.Table;
@@ -32,7 +33,7 @@ import lyate.table.TableFolders;
  * the table. Published relations (rows whose source does not begin with "fitted") are kept as they are. Each line is
  * fitted in one direction, from water or DMSO, and read backwards for the other. The slope of a family with few members
  * is held near the slope common to the acids of the same charge; a family with fewer than three members takes their
- * common line. Deterministic.
+ * common line where that makes sense. Deterministic.
  *
  * <p>Usage: {@code java -cp target/lyate.jar lyate.fit.FitMediaTransfer FOLDER OUTPUT.csv}
  */
@@ -42,10 +43,14 @@ public final class FitMediaTransfer {
     private static final List<String> HUBS = List.of("water", "dmso");
     private static final List<String> CATIONIC = List.of("ammonium", "anilinium", "pyridinium", "oxonium");
     private static final List<String> NEUTRAL = List.of("carboxylic-acid", "phenol", "alcohol", "nh-acid", "sh-acid",
-            "ch-acid", "ch-acid-stabilised", "hydrocarbon", "ph-acid", "mineral-acid");
+            "ch-acid", "ch-acid-stabilised", "hydrocarbon", "ph-acid");
     private static final int ENOUGH = 3;
-    private static final double FAMILY_SPREAD = 0.15;
-    private static final double FREE_SPREAD = 0.5;
+    /** How far a slope may lie from 1 before looking at any acid. */
+    private static final double SLOPE_SPREAD = 0.4;
+    /** How far the slope of a family may lie from that of its group. */
+    private static final double FAMILY_SPREAD = 0.2;
+    /** A line with a larger error, pKa units, says nothing. */
+    private static final double LARGEST_ERROR = 4;
 
     private static final String HEADER = """
             # Straight lines between the pKa scales of two media, by family of acids: pKa(to) = slope x pKa(from) + intercept.
@@ -60,9 +65,11 @@ public final class FitMediaTransfer {
 
     private final List<Acid> acids;
     private final List<MediaRelation> published;
+    private final Set<String> protic;
 
-    private FitMediaTransfer(List<Acid> acids, List<MediaRelation> published) {
+    private FitMediaTransfer(List<Acid> acids, List<MediaRelation> published, Set<String> protic) {
         this.acids = acids;
+        this.protic = protic;
         this.published = published;
     }
 
@@ -71,18 +78,28 @@ public final class FitMediaTransfer {
             System.err.println("usage: lyate.fit.FitMediaTransfer FOLDER OUTPUT.csv");
             System.exit(2);
         }
-        TableFolders tables = TableFolders.packaged();
-        KnownAcids known = new KnownAcids(new SiteFinder(SiteClasses.load(tables)), Stockroom.load(tables));
+        String table = fit(TableFolders.packaged(), Path.of(arguments[0]), System.err);
+        Files.writeString(Path.of(arguments[1]), table, StandardCharsets.UTF_8);
+    }
+
+    /** The text of the table, fitted on the tables and the files of a folder; rows passed over are told to {@code log}. */
+    static String fit(TableFolders tables, Path folder, PrintStream log) throws IOException {
+        Stockroom stockroom = Stockroom.load(tables);
+        KnownAcids known = new KnownAcids(new SiteFinder(SiteClasses.load(tables)), stockroom);
         known.add(MeasuredAcidities.load(tables));
-        known.addFolder(Path.of(arguments[0]));
-        report(known, System.err);
-        String fitted = new FitMediaTransfer(known.all(), published(tables)).table();
-        Files.writeString(Path.of(arguments[1]), fitted, StandardCharsets.UTF_8);
+        known.addFolder(folder);
+        report(known, log);
+        return new FitMediaTransfer(known.all(), published(tables), protic(stockroom)).table();
     }
 
     private static void report(KnownAcids known, PrintStream out) {
         known.passedOver().forEach(out::println);
         out.printf(Locale.ROOT, "%d rows passed over, %d acids read%n", known.passedOver().size(), known.all().size());
+    }
+
+    private static Set<String> protic(Stockroom stockroom) {
+        return stockroom.solvents().stream().filter(solvent -> solvent.kind() == Solvent.Kind.PROTIC).map(Solvent::id)
+                .collect(Collectors.toSet());
     }
 
     private static List<MediaRelation> published(TableFolders tables) {
@@ -100,7 +117,8 @@ public final class FitMediaTransfer {
         published.forEach(relation -> text.append(line(relation)));
         for (String from : HUBS) {
             for (String to : mediaBeyond(from)) {
-                Stream.of(group(from, to, NEUTRAL), group(from, to, CATIONIC), any(from, to)).flatMap(List::stream)
+                Stream.of(neutral(from, to), cationic(from, to), any(from, to)).flatMap(List::stream)
+                        .filter(relation -> relation.standardError() <= LARGEST_ERROR)
                         .filter(relation -> published.stream().noneMatch(other -> sameLine(relation, other)))
                         .forEach(relation -> text.append(line(relation)));
             }
@@ -115,28 +133,45 @@ public final class FitMediaTransfer {
         return media;
     }
 
-    /** Lines of the families of one charge: their own where they have enough members, else the common one. */
-    private List<MediaRelation> group(String from, String to, List<String> families) {
-        List<Point> all = families.stream().flatMap(family -> points(from, to, family).stream()).toList();
-        List<MediaRelation> relations = new ArrayList<>();
-        if (all.size() < ENOUGH) {
-            return relations;
+    /** A common line of all neutral acids is drawn only between solvents that treat anions alike. */
+    private List<MediaRelation> neutral(String from, String to) {
+        List<MediaRelation> relations = new ArrayList<>(ownLines(from, to, NEUTRAL));
+        if (protic.contains(from) == protic.contains(to)) {
+            relations.addAll(commonLines(from, to, NEUTRAL, "neutral"));
         }
-        LineFit common = LineFit.through(all, 1, FREE_SPREAD);
-        double slope = commonSlope(from, to, families).orElse(common.slope());
-        for (String family : families) {
-            List<Point> own = points(from, to, family);
-            relations.add(own.size() >= ENOUGH
-                    ? relation(from, to, family, LineFit.through(own, slope, FAMILY_SPREAD), own,
-                            FITTED + " on acids of this family measured in both media")
-                    : relation(from, to, family, common, all, FITTED + " on all "
-                            + (families.equals(CATIONIC) ? "cationic" : "neutral") + " acids measured in both media, too few of this family"));
-        }
+        ownLine(from, to, "mineral-acid", commonSlope(from, to, NEUTRAL)).ifPresent(relations::add);
         return relations;
     }
 
-    /** The slope within families, each about its own mean. */
-    private OptionalDouble commonSlope(String from, String to, List<String> families) {
+    private List<MediaRelation> cationic(String from, String to) {
+        return Stream.concat(ownLines(from, to, CATIONIC).stream(), commonLines(from, to, CATIONIC, "cationic").stream()).toList();
+    }
+
+    private List<MediaRelation> ownLines(String from, String to, List<String> families) {
+        double slope = commonSlope(from, to, families);
+        return families.stream().flatMap(family -> ownLine(from, to, family, slope).stream()).toList();
+    }
+
+    private Optional<MediaRelation> ownLine(String from, String to, String family, double slope) {
+        List<Point> own = points(from, to, family);
+        return own.size() < ENOUGH ? Optional.empty() : Optional.of(relation(from, to, family,
+                LineFit.through(own, slope, FAMILY_SPREAD), own, FITTED + " on acids of this family measured in both media"));
+    }
+
+    /** The line through all acids of the group, for its families that have too few members. */
+    private List<MediaRelation> commonLines(String from, String to, List<String> families, String charge) {
+        List<Point> all = families.stream().flatMap(family -> points(from, to, family).stream()).toList();
+        if (all.size() < ENOUGH) {
+            return List.of();
+        }
+        LineFit common = LineFit.through(all, 1, SLOPE_SPREAD);
+        return families.stream().filter(family -> points(from, to, family).size() < ENOUGH)
+                .map(family -> relation(from, to, family, common, all, FITTED + " on all " + charge
+                        + " acids measured in both media because there are too few of this family")).toList();
+    }
+
+    /** The slope within families, each about its own mean; 1 where there is none to judge by. */
+    private double commonSlope(String from, String to, List<String> families) {
         List<Point> centred = new ArrayList<>();
         for (String family : families) {
             List<Point> own = points(from, to, family);
@@ -146,14 +181,13 @@ public final class FitMediaTransfer {
                 own.forEach(point -> centred.add(new Point(point.x() - x, point.y() - y)));
             }
         }
-        return centred.isEmpty() ? OptionalDouble.empty()
-                : OptionalDouble.of(LineFit.through(centred, 1, FREE_SPREAD).slope());
+        return centred.isEmpty() ? 1 : LineFit.through(centred, 1, SLOPE_SPREAD).slope();
     }
 
     private List<MediaRelation> any(String from, String to) {
         List<Point> all = acids.stream().flatMap(acid -> point(acid, from, to).stream()).toList();
         return all.size() < ENOUGH ? List.of() : List.of(relation(from, to, MediaRelation.ANY,
-                LineFit.through(all, 1, FREE_SPREAD), all, FITTED + " on all acids measured in both media"));
+                LineFit.through(all, 1, SLOPE_SPREAD), all, FITTED + " on all acids measured in both media"));
     }
 
     private List<Point> points(String from, String to, String family) {

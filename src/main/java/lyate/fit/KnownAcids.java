@@ -35,6 +35,8 @@ final class KnownAcids {
     private static final CSVFormat FORMAT = CSVFormat.RFC4180.builder().setHeader().setSkipHeaderRecord(true)
             .setCommentMarker('#').setIgnoreEmptyLines(true).setTrim(true).get();
 
+    private static final double LARGEST_SIGMA = 0.8;
+
     /** One proton: the family of its site and every value by medium id. */
     record Acid(ProtonPlace place, String family, Map<String, List<Double>> values) {
 
@@ -65,8 +67,12 @@ final class KnownAcids {
         return List.copyOf(passedOver);
     }
 
+    /** Adds the rows whose uncertainty is small enough to say something about a line; extrapolated values are not. */
     void add(MeasuredAcidities table) {
         for (MeasuredAcidities.Value value : table.values()) {
+            if (value.acidity().sigma() > LARGEST_SIGMA) {
+                continue;
+            }
             add(value.row().id(), value.molecule(), value.role(), value.atom(), value.acidity().medium().id(),
                     value.acidity().pKa());
         }

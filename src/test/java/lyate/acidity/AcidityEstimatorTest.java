@@ -1,0 +1,101 @@
+package lyate.acidity;
+
+import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertTrue;
+
+import java.util.List;
+import java.util.Optional;
+import lyate.acidity.Acidity.Basis;
+import lyate.acidity.Acidity.Contribution;
+import lyate.acidity.Acidity.Effect;
+import lyate.molecule.Molecule;
+import lyate.site.ProtonSite;
+import lyate.site.Role;
+import lyate.stock.Medium;
+import lyate.table.TableFolders;
+import org.junit.jupiter.api.Test;
+
+class AcidityEstimatorTest {
+
+    private static final MeasuredAcidities MEASURED = MeasuredAcidities.load(TableFolders.packaged());
+    private static final MediaTransfer TRANSFER = MediaTransfer.load(TableFolders.packaged());
+    private static final AcidityEstimator ESTIMATOR = new AcidityEstimator(MEASURED, TRANSFER, List.of(new ClassValueEstimate()));
+    private static final Medium NITROMETHANE = new Medium("nitromethane");
+
+    private static SiteEstimate always(double pKa, double sigma, Medium only) {
+        return (molecule, site, medium) -> medium.equals(only) ? Optional.of(new Acidity(pKa, sigma, medium, Basis.ESTIMATED,
+                List.of(new Contribution("made up", Effect.ATOM, pKa, List.of())), List.of(), List.of(), "made up")) : Optional.empty();
+    }
+
+    private static Optional<Acidity> acidity(AcidityEstimator estimator, String smiles, String label, Medium medium) {
+        Molecule molecule = Sites.molecule(smiles);
+        return estimator.acidity(molecule, Sites.site(molecule, label, Role.ACID), medium);
+    }
+
+    @Test
+    void theValueMeasuredInTheMediumDecides() {
+        Acidity acetic = acidity(ESTIMATOR, "CC(=O)O", "O4", Medium.DMSO).orElseThrow();
+        assertEquals(12.3, acetic.pKa());
+        assertEquals(Basis.MEASURED, acetic.basis());
+        assertEquals(List.of(), acetic.contributions());
+    }
+
+    @Test
+    void aValueMeasuredElsewhereIsCarriedAndSaysSo() {
+        Acidity acid = acidity(ESTIMATOR, "CCCCCCC(=O)O", "O9", NITROMETHANE).orElseThrow();
+        assertEquals(Basis.TRANSFERRED, acid.basis());
+        assertEquals(acid.pKa(), acid.contributions().stream().mapToDouble(Contribution::value).sum(), 1e-9);
+        assertEquals("measured in water", acid.contributions().get(0).text());
+    }
+
+    @Test
+    void theSurerOfCarriedValueAndEstimateIsGivenAndTheOtherNamed() {
+        AcidityEstimator vague = new AcidityEstimator(MEASURED, TRANSFER, List.of(always(30, 9, NITROMETHANE)));
+        AcidityEstimator sure = new AcidityEstimator(MEASURED, TRANSFER, List.of(always(30, 0.01, NITROMETHANE)));
+        Acidity carried = acidity(vague, "CCCCCCC(=O)O", "O9", NITROMETHANE).orElseThrow();
+        Acidity estimated = acidity(sure, "CCCCCCC(=O)O", "O9", NITROMETHANE).orElseThrow();
+        assertEquals(Basis.TRANSFERRED, carried.basis());
+        assertTrue(carried.source().contains("preferred to the estimated value 30.0"), carried.source());
+        assertEquals(Basis.ESTIMATED, estimated.basis());
+        assertTrue(estimated.source().contains("preferred to the transferred value"), estimated.source());
+    }
+
+    @Test
+    void anEstimateMadeInWaterIsCarriedWhereThereIsNoneInTheMedium() {
+        Acidity acid = acidity(ESTIMATOR, "CCCCCCCCCCCC(=O)O", "O14", Medium.ACETONITRILE).orElseThrow();
+        assertEquals(Basis.TRANSFERRED, acid.basis());
+        assertEquals(Medium.ACETONITRILE, acid.medium());
+        assertTrue(acid.contributions().get(0).text().startsWith("class value"), acid.contributions()::toString);
+    }
+
+    @Test
+    void theFirstEstimateThatAnswersWins() {
+        AcidityEstimator estimator = new AcidityEstimator(MeasuredAcidities.none(), TRANSFER,
+                List.of(always(20, 1, Medium.DMSO), always(5, 1, Medium.WATER), always(6, 0.1, Medium.WATER)));
+        assertEquals(5, acidity(estimator, "CC(=O)O", "O4", Medium.WATER).orElseThrow().pKa());
+    }
+
+    @Test
+    void withoutMeasuredTheTableIsIgnored() {
+        Acidity acetic = acidity(ESTIMATOR.withoutMeasured(), "CC(=O)O", "O4", Medium.WATER).orElseThrow();
+        assertEquals(8, acetic.pKa(), "the class value");
+        assertEquals(Basis.ESTIMATED, acetic.basis());
+    }
+
+    @Test
+    void missingIsMissing() {
+        AcidityEstimator estimator = new AcidityEstimator(MeasuredAcidities.none(), TRANSFER, List.of());
+        assertEquals(Optional.empty(), acidity(estimator, "CC(=O)O", "O4", Medium.WATER));
+    }
+
+    @Test
+    void acidAndConjugateBaseGiveTheSameValue() {
+        Molecule base = Sites.molecule("C1CCNCC1");
+        Molecule acid = Sites.molecule("C1CC[NH2+]CC1");
+        ProtonSite baseSite = Sites.site(base, "N4", Role.BASE, "ammonium");
+        ProtonSite acidSite = Sites.site(acid, "N4", Role.ACID, "ammonium");
+        for (Medium medium : List.of(Medium.WATER, Medium.DMSO, Medium.ACETONITRILE, NITROMETHANE, new Medium("meoh"))) {
+            assertEquals(ESTIMATOR.acidity(base, baseSite, medium), ESTIMATOR.acidity(acid, acidSite, medium), medium::id);
+        }
+    }
+}
