@@ -27,7 +27,7 @@ final class EquilibriumFindings {
     static List<FindingRule> rules() {
         return List.of(EquilibriumFindings::unintended, EquilibriumFindings::secondEquivalent,
                 EquilibriumFindings::doseShort, EquilibriumFindings::excess, EquilibriumFindings::tooWeak,
-                EquilibriumFindings::levelled, EquilibriumFindings::moisture);
+                EquilibriumFindings::levelled, EquilibriumFindings::moisture, EquilibriumFindings::slow);
     }
 
     private static List<Finding> unintended(Situation situation) {
@@ -109,6 +109,17 @@ final class EquilibriumFindings {
                 say("%.0f ppm of water in %s use up %.0f %% of the base.", situation.step().waterPpm(),
                         situation.step().solvent().name(), spent),
                 List.of(say("substrate at %.3g mol/L", situation.step().concentrationMolar()))));
+    }
+
+    private static List<Finding> slow(Situation situation) {
+        boolean carbon = situation.intended().site().siteClass().family().equals("ch-acid");
+        boolean takes = situation.intended().logK() >= VerdictRule.COMPLETE;
+        if (!carbon || !takes || situation.workingBase().levelled() || !situation.step().base().family().insoluble()) {
+            return List.of();
+        }
+        return List.of(finding(NOTE, FindingKind.SLOW_TRANSFER, situation.intended(),
+                say("%s is a solid and %s a C-H: the proton moves slowly, give it time and stirring.",
+                        situation.step().base().name(), situation.intended().label()), List.of(compared(situation.intended()))));
     }
 
     private static String compared(Donor donor) {

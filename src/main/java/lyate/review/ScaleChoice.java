@@ -52,7 +52,11 @@ final class ScaleChoice {
         boolean dmsoFirst = solvent.kind() != Kind.PROTIC && (strong || DMSO_FAMILIES.contains(family));
         Optional<Comparison> dmso = compareIn(Medium.DMSO, acceptor, donor, dmsoReason(strong));
         Optional<Comparison> water = compareIn(Medium.WATER, acceptor, donor, waterReason());
-        return dmsoFirst ? dmso.or(() -> water) : water.or(() -> dmso);
+        return dmsoFirst ? first(dmso, water) : first(water, dmso);
+    }
+
+    private static Optional<Comparison> first(Optional<Comparison> preferred, Optional<Comparison> other) {
+        return preferred.map(comparison -> comparison.withOther(other)).or(() -> other);
     }
 
     /** Whether the solvent has a scale of its own; water and DMSO have one for every class. */
@@ -67,7 +71,8 @@ final class ScaleChoice {
 
     private static Optional<Comparison> compareIn(Medium medium, Function<Medium, Optional<KnownPKa>> acceptor,
                                                   Function<Medium, Optional<Acidity>> donor, String reason) {
-        return acceptor.apply(medium).flatMap(base -> donor.apply(medium).map(acid -> new Comparison(acid, base, reason)));
+        return acceptor.apply(medium).flatMap(base -> donor.apply(medium)
+                .map(acid -> new Comparison(acid, base, reason, Optional.empty())));
     }
 
     private String dmsoReason(boolean strong) {

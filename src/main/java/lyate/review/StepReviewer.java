@@ -82,6 +82,7 @@ public final class StepReviewer implements Reviewer {
         Step step = situation.step();
         List<Finding> findings = new ArrayList<>();
         EquilibriumFindings.rules().forEach(rule -> findings.addAll(rule.find(situation)));
+        ScaleFindings.rules().forEach(rule -> findings.addAll(rule.find(situation)));
         reactions.forEach(reaction -> findings.add(reaction.finding()));
         solventRules.of(step.base(), step.solvent(), step.temperatureCelsius()).forEach(effect -> findings.add(effect.finding()));
         findings.addAll(hazards.of(step.base(), step.solvent(), step.temperatureCelsius(), situation.baseTakesProtons()));

@@ -20,7 +20,7 @@ final class Transfers {
 
     private Transfer transfer(Donor donor) {
         Comparison comparison = donor.comparison();
-        double sigma = donor.toTemperature() * Math.hypot(comparison.donor().sigma(), comparison.acceptor().sigma());
+        double sigma = donor.toTemperature() * comparison.sigmaLogK();
         double kelvin = step.temperatureCelsius() + 273.15;
         return new Transfer(donor.label(), donor.site().equivalent(), comparison.donor(), donor.logK(), sigma,
                 TransferThermodynamics.deltaGKiloJoule(donor.logK(), kelvin), shares.percentTaken(donor), comparison.reason());
