@@ -21,4 +21,17 @@ import lyate.stock.Solvent;
  */
 public record Step(String id, Molecule substrate, Optional<String> intendedSite, Base base, double equivalents,
                    Solvent solvent, double temperatureCelsius, double concentrationMolar, double waterPpm,
-                   Optional<Molecule> partner) {}
+                   Optional<Molecule> partner) {
+
+    /** The same step with another base. */
+    public Step withBase(Base other) {
+        return new Step(id, substrate, intendedSite, other, equivalents, solvent, temperatureCelsius, concentrationMolar,
+                waterPpm, partner);
+    }
+
+    /** The same step in another solvent, with that solvent's typical water. */
+    public Step withSolvent(Solvent other) {
+        return new Step(id, substrate, intendedSite, base, equivalents, other, temperatureCelsius, concentrationMolar,
+                other.typicalWaterPpm().orElse(waterPpm), partner);
+    }
+}

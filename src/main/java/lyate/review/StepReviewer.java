@@ -64,7 +64,7 @@ public final class StepReviewer implements Reviewer {
     }
 
     private List<SideReaction> sideReactions(Step step, WorkingBase base, List<Transfer> transfers, Donor intended) {
-        return base.isDestroyed() ? List.of() : base.shelfBase().map(working -> sideReactions.of(step,
+        return base.destroyed() ? List.of() : base.shelfBase().map(working -> sideReactions.of(step,
                 new SideReactionContext(working, transfers, OptionalInt.of(intended.site().atom())))).orElse(List.of());
     }
 

@@ -28,7 +28,7 @@ final class VerdictRule {
      * @param shift       by how much its pKa rises once all more acidic sites have lost their proton
      * @param equivalents base per substrate
      * @param levelled    whether the solvent made the working base out of the one added
-     * @param destroyed   whether it left none
+     * @param destroyed   whether nothing like the base added is left
      */
     record World(double[] logK, int intended, double shift, double equivalents, boolean levelled, boolean destroyed) {
 
@@ -41,7 +41,7 @@ final class VerdictRule {
         static World of(Step step, WorkingBase base, List<Donor> sites, Donor intended) {
             double[] logK = sites.stream().mapToDouble(Donor::effectiveLogK).toArray();
             double equivalents = step.equivalents() * step.base().protonsPerFormula();
-            return new World(logK, sites.indexOf(intended), 0, equivalents, base.levelled(), base.isDestroyed());
+            return new World(logK, sites.indexOf(intended), 0, equivalents, base.levelled(), base.destroyed());
         }
     }
 

@@ -15,31 +15,28 @@ import lyate.stock.Solvent;
  * @param pKa         pKa of its conjugate acid by medium
  * @param strong      whether its kind is judged on the DMSO scale
  * @param levelled    whether the solvent turned the base that was added into its own lyate ion, or destroyed it
+ * @param destroyed   whether nobody would call what is left the base that was added: a carbanion or hydride in alcohol, a
+ *                    strong base in a solvent with acidic C-H
  * @param logKSolvent log10 K at 25 degrees C of the base as added against the solvent's proton; empty where the solvent
  *                    has none
  */
 record WorkingBase(String name, Optional<Base> shelfBase, Function<Medium, Optional<KnownPKa>> pKa, boolean strong,
-                   boolean levelled, Optional<Double> logKSolvent) {
+                   boolean levelled, boolean destroyed, Optional<Double> logKSolvent) {
 
     /** A base as it was added. */
     static WorkingBase asAdded(Base base, Function<Medium, Optional<KnownPKa>> pKa, Optional<Double> logKSolvent) {
-        return new WorkingBase(base.name(), Optional.of(base), pKa, base.family().strong(), false, logKSolvent);
+        return new WorkingBase(base.name(), Optional.of(base), pKa, base.family().strong(), false, false, logKSolvent);
     }
 
     /** The anion that the solvent leaves when it gives up its proton. */
-    static WorkingBase lyateIon(Solvent solvent, Optional<Base> shelfBase, double logKSolvent) {
+    static WorkingBase lyateIon(Solvent solvent, Optional<Base> shelfBase, double logKSolvent, boolean destroyed) {
         String name = shelfBase.map(Base::name).orElse("the lyate ion of " + solvent.name());
-        return new WorkingBase(name, shelfBase, solvent::donorPKa, true, true, Optional.of(logKSolvent));
+        return new WorkingBase(name, shelfBase, solvent::donorPKa, true, true, destroyed, Optional.of(logKSolvent));
     }
 
     /** Nothing that could take a proton is left; judged by the strength it had. */
     static WorkingBase destroyed(Base base, Solvent solvent, Function<Medium, Optional<KnownPKa>> pKa) {
         return new WorkingBase("nothing: " + solvent.name() + " destroys " + base.name(), Optional.of(base), pKa,
-                base.family().strong(), true, Optional.empty());
-    }
-
-    /** Whether the solvent left no base at all. */
-    boolean isDestroyed() {
-        return levelled && logKSolvent.isEmpty();
+                base.family().strong(), true, true, Optional.empty());
     }
 }

@@ -35,11 +35,11 @@ final class WorkingBases {
         Solvent solvent = step.solvent();
         Function<Medium, Optional<KnownPKa>> pKa = medium -> strength.pKa(base, medium);
         Optional<Double> logK = isInert(solvent) ? Optional.empty() : logK(pKa, solvent, solvent);
-        if (logK.filter(value -> value >= LEVELLING_LOG_K).isPresent()) {
-            return WorkingBase.lyateIon(solvent, lyateOnShelf(solvent, base), logK.get());
-        }
         boolean destroyed = solventRules.of(base, solvent, step.temperatureCelsius()).stream().anyMatch(SolventEffect::destroysBase);
-        return destroyed && logK.isEmpty() ? WorkingBase.destroyed(base, solvent, pKa) : WorkingBase.asAdded(base, pKa, logK);
+        if (logK.filter(value -> value >= LEVELLING_LOG_K).isPresent()) {
+            return WorkingBase.lyateIon(solvent, lyateOnShelf(solvent, base), logK.get(), destroyed || solvent.kind() != Solvent.Kind.PROTIC);
+        }
+        return destroyed ? WorkingBase.destroyed(base, solvent, pKa) : WorkingBase.asAdded(base, pKa, logK);
     }
 
     /** log10 K at 25 degrees C of the working base against a liquid that is in the flask beside the solvent. */

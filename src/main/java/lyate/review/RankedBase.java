@@ -1,0 +1,32 @@
+package lyate.review;
+
+import lyate.stock.Base;
+
+/**
+ * A base of the stockroom, judged for a step.
+ *
+ * @param base   the base
+ * @param review what it would do
+ * @param why    one line: why it stands where it stands
+ */
+public record RankedBase(Base base, Review review, String why) {
+
+    /** Whether it would do the job. */
+    public boolean suits() {
+        return review.verdict() == Verdict.SELECTIVE && stops() == 0;
+    }
+
+    /** Number of findings that speak against it outright. */
+    public long stops() {
+        return count(Finding.Severity.STOP);
+    }
+
+    /** Number of findings that call for care. */
+    public long cautions() {
+        return count(Finding.Severity.CAUTION);
+    }
+
+    private long count(Finding.Severity severity) {
+        return review.findings().stream().filter(finding -> finding.severity() == severity).count();
+    }
+}
