@@ -10,6 +10,8 @@ import java.util.Map;
 import java.util.Set;
 import java.util.stream.Collectors;
 import lyate.acidity.MeasuredAcidities.Value;
+import lyate.site.SiteClasses;
+import lyate.site.SiteFinder;
 import lyate.stock.Solvent;
 import lyate.stock.Stockroom;
 import lyate.table.TableFolders;
@@ -67,5 +69,15 @@ class MeasuredTableTest {
                         .matches(".*(\\b(18|19|20)\\d\\d\\b|Handbook|Advanced Organic Chemistry|Evans & Ripin).*"))
                 .map(value -> value.row().id()).toList();
         assertEquals(List.of(), unsourced);
+    }
+
+    @Test
+    void everyMeasuredProtonIsASiteTheFinderKnows() {
+        SiteFinder finder = new SiteFinder(SiteClasses.load(TableFolders.packaged()));
+        List<String> unknown = VALUES.stream()
+                .filter(value -> finder.sites(value.molecule(), value.role()).stream()
+                        .noneMatch(site -> site.equivalent().contains(value.atom())))
+                .map(value -> value.row().id() + " " + value.row().text("smiles")).toList();
+        assertEquals(List.of(), unknown);
     }
 }
