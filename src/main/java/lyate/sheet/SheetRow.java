@@ -1,0 +1,41 @@
+package lyate.sheet;
+
+import java.util.ArrayList;
+import java.util.Collections;
+import java.util.List;
+
+/**
+ * One row of a route sheet.
+ *
+ * @param header  the columns
+ * @param number  1-based, comment and blank lines not counted
+ * @param line    1-based line of the file on which it begins
+ * @param cells   trimmed text of every column, in the order of the header
+ * @param problem why the row cannot be taken apart into cells, in words; empty for a sound one
+ */
+public record SheetRow(SheetHeader header, int number, int line, List<String> cells, String problem) {
+
+    public SheetRow {
+        List<String> padded = new ArrayList<>(cells);
+        padded.addAll(Collections.nCopies(Math.max(0, header.names().size() - cells.size()), ""));
+        cells = List.copyOf(padded.subList(0, header.names().size()));
+    }
+
+    /** Text of a cell; empty where the cell is, or where there is no such column. */
+    public String text(SheetColumn column) {
+        int index = header.indexOf(column.header());
+        return index < 0 ? "" : cells.get(index);
+    }
+
+    /** What the row is called: its {@code step} cell, or its number. */
+    public String name() {
+        String step = text(SheetColumn.STEP);
+        return step.isEmpty() ? Integer.toString(number) : step;
+    }
+
+    /** The place for messages, for example {@code row 3 (A003, line 5)}. */
+    public String place() {
+        String step = text(SheetColumn.STEP);
+        return "row " + number + " (" + (step.isEmpty() ? "" : step + ", ") + "line " + line + ")";
+    }
+}

@@ -1,0 +1,165 @@
+package lyate.sheet;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+import java.util.stream.Collectors;
+import java.util.stream.IntStream;
+import lyate.molecule.Molecule;
+import lyate.molecule.MoleculeException;
+import lyate.molecule.MoleculeReader;
+import lyate.review.Step;
+import lyate.stock.Base;
+import lyate.stock.Solvent;
+import lyate.stock.Stockroom;
+import lyate.stock.UnknownNameException;
+
+/**
+ * Turns a row into the step it means. Where the row says nothing: 1.0 equivalent of base, 25 degrees Celsius, 0.2 mol/L,
+ * as much water as a well-kept bottle of the solvent holds. Immutable; safe to share between threads.
+ */
+public final class StepReader {
+
+    /** Moles of base per mole of substrate where the row does not say. */
+    public static final double USUAL_EQUIVALENTS = 1.0;
+    /** Degrees Celsius where the row does not say. */
+    public static final double USUAL_TEMPERATURE = 25;
+    /** mol/L of substrate where the row does not say. */
+    public static final double USUAL_CONCENTRATION = 0.2;
+
+    private final MoleculeReader molecules;
+    private final Stockroom stockroom;
+    private final ReactionReader reactions;
+
+    public StepReader(MoleculeReader molecules, Stockroom stockroom) {
+        this.molecules = molecules;
+        this.stockroom = stockroom;
+        this.reactions = new ReactionReader(molecules, stockroom);
+    }
+
+    /**
+     * Reads a row.
+     *
+     * @throws RowException naming every column at fault
+     */
+    public Step read(SheetRow row) throws RowException {
+        if (!row.problem().isEmpty()) {
+            throw new RowException(List.of(row.problem()));
+        }
+        List<String> problems = new ArrayList<>();
+        Optional<Reaction> reaction = reaction(row, problems);
+        Molecule substrate = reaction.map(Reaction::substrate).orElseGet(() -> substrate(row, problems));
+        Base base = base(row, reaction, problems);
+        Solvent solvent = solvent(row, reaction, problems);
+        Optional<String> site = site(row, substrate, problems);
+        double equivalents = number(row, SheetColumn.BASE_EQUIV, Quantity.EQUIVALENTS, USUAL_EQUIVALENTS, problems);
+        double temperature = number(row, SheetColumn.TEMPERATURE, Quantity.TEMPERATURE, USUAL_TEMPERATURE, problems);
+        double concentration = number(row, SheetColumn.CONCENTRATION, Quantity.CONCENTRATION, USUAL_CONCENTRATION, problems);
+        double water = number(row, SheetColumn.WATER, Quantity.WATER_PPM, UsualWater.ppm(solvent), problems);
+        Optional<Molecule> partner = partner(row, problems);
+        if (!problems.isEmpty()) {
+            throw new RowException(problems);
+        }
+        return new Step(row.name(), substrate, site, base, equivalents, solvent, temperature, concentration, water, partner);
+    }
+
+    private Optional<Reaction> reaction(SheetRow row, List<String> problems) {
+        String text = row.text(SheetColumn.REACTION);
+        if (text.isEmpty() || !row.text(SheetColumn.SUBSTRATE).isEmpty()) {
+            return Optional.empty();
+        }
+        try {
+            return Optional.of(reactions.read(text));
+        } catch (MoleculeException e) {
+            problems.add(problem(SheetColumn.REACTION, e.getMessage()));
+            return Optional.empty();
+        }
+    }
+
+    private Molecule substrate(SheetRow row, List<String> problems) {
+        if (!row.text(SheetColumn.REACTION).isEmpty() && row.text(SheetColumn.SUBSTRATE).isEmpty()) {
+            return null;
+        }
+        try {
+            return molecules.read(row.text(SheetColumn.SUBSTRATE));
+        } catch (MoleculeException e) {
+            problems.add(problem(SheetColumn.SUBSTRATE, e.getMessage()));
+            return null;
+        }
+    }
+
+    private Base base(SheetRow row, Optional<Reaction> reaction, List<String> problems) {
+        String name = row.text(SheetColumn.BASE);
+        Optional<Base> drawn = reaction.flatMap(Reaction::base);
+        if (name.isEmpty() && drawn.isPresent()) {
+            return drawn.get();
+        }
+        try {
+            if (!name.isEmpty()) {
+                return stockroom.base(name);
+            }
+            problems.add(problem(SheetColumn.BASE, "there is no base"));
+        } catch (UnknownNameException e) {
+            problems.add(problem(SheetColumn.BASE, e.getMessage()));
+        }
+        return null;
+    }
+
+    private Solvent solvent(SheetRow row, Optional<Reaction> reaction, List<String> problems) {
+        String name = row.text(SheetColumn.SOLVENT);
+        Optional<Solvent> drawn = reaction.flatMap(Reaction::solvent);
+        if (name.isEmpty() && drawn.isPresent()) {
+            return drawn.get();
+        }
+        try {
+            if (!name.isEmpty()) {
+                return stockroom.solvent(name);
+            }
+            problems.add(problem(SheetColumn.SOLVENT, "there is no solvent"));
+        } catch (UnknownNameException e) {
+            problems.add(problem(SheetColumn.SOLVENT, e.getMessage()));
+        }
+        return null;
+    }
+
+    private static Optional<String> site(SheetRow row, Molecule substrate, List<String> problems) {
+        String label = row.text(SheetColumn.SITE);
+        if (label.isEmpty() || substrate == null) {
+            return Optional.empty();
+        }
+        if (substrate.atomLabelled(label).isEmpty()) {
+            String atoms = IntStream.range(0, substrate.atomCount()).limit(60).mapToObj(substrate::label)
+                    .collect(Collectors.joining(", "));
+            problems.add(problem(SheetColumn.SITE, "there is no atom '" + label + "' in the substrate; it has " + atoms));
+        }
+        return Optional.of(label);
+    }
+
+    private Optional<Molecule> partner(SheetRow row, List<String> problems) {
+        String text = row.text(SheetColumn.ELECTROPHILE);
+        if (text.isEmpty()) {
+            return Optional.empty();
+        }
+        try {
+            return Optional.of(molecules.read(text));
+        } catch (MoleculeException e) {
+            problems.add(problem(SheetColumn.ELECTROPHILE, e.getMessage()));
+            return Optional.empty();
+        }
+    }
+
+    private static double number(SheetRow row, SheetColumn column, Quantity quantity, double usual, List<String> problems) {
+        String text = row.text(column);
+        if (text.isEmpty()) {
+            return usual;
+        }
+        return quantity.parse(text).orElseGet(() -> {
+            problems.add(problem(column, "found '" + text + "', expected " + quantity.expected()));
+            return Double.NaN;
+        });
+    }
+
+    private static String problem(SheetColumn column, String reason) {
+        return "column " + column.header() + ": " + reason;
+    }
+}
