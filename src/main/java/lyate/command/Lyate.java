@@ -2,6 +2,7 @@ package lyate.command;
 
 import lyate.table.TableFolders;
 import lyate.window.WorkbenchFrame;
+import picocli.CommandLine;
 
 /** The program. */
 public final class Lyate {
@@ -12,6 +13,25 @@ public final class Lyate {
     public static void main(String[] arguments) {
         if (arguments.length == 0) {
             WorkbenchFrame.open(TableFolders.packaged());
+        } else {
+            System.exit(run(Terminal.ofSystem(), arguments));
         }
+    }
+
+    /** Runs one command and returns its exit code: 0 done, 1 some input could not be used, 2 wrong usage. */
+    static int run(Terminal terminal, String... arguments) {
+        CommandLine command = new CommandLine(new RootCommand())
+                .addSubcommand(new SitesCommand(terminal))
+                .addSubcommand(new CheckCommand(terminal))
+                .addSubcommand(new ReviewCommand(terminal))
+                .addSubcommand(new AccuracyCommand(terminal))
+                .addSubcommand(new TablesCommand(terminal));
+        command.setOut(terminal.outWriter()).setErr(terminal.errWriter())
+                .setCaseInsensitiveEnumValuesAllowed(true)
+                .setParameterExceptionHandler(Failures::wrongUsage)
+                .setExecutionExceptionHandler(Failures::failed);
+        int code = command.execute(arguments);
+        terminal.flush();
+        return code;
     }
 }

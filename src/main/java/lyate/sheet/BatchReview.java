@@ -26,6 +26,8 @@ public record BatchReview(StepReader steps, Reviewer reviewer) {
             return new ReviewedRow(row, Optional.of(reviewer.review(steps.read(row))), "");
         } catch (RowException | ReviewException e) {
             return new ReviewedRow(row, Optional.empty(), e.getMessage());
+        } catch (RuntimeException | StackOverflowError e) {
+            return new ReviewedRow(row, Optional.empty(), ProgramError.words(e));
         }
     }
 }

@@ -37,6 +37,12 @@ public record OrderedWork(int threads) {
      * @param results called on this thread, in the order of the items
      */
     public <I, O> void run(Iterator<I> items, Function<I, O> work, Consumer<O> results) {
+        if (threads == 1) {
+            while (items.hasNext() && !Thread.currentThread().isInterrupted()) {
+                results.accept(work.apply(items.next()));
+            }
+            return;
+        }
         ExecutorService pool = Executors.newFixedThreadPool(threads);
         try {
             Deque<Future<List<O>>> running = new ArrayDeque<>();

@@ -10,4 +10,10 @@ import lyate.review.Review;
  * @param review  present where the row could be judged
  * @param problem in words where it could not; else empty
  */
-public record ReviewedRow(SheetRow row, Optional<Review> review, String problem) {}
+public record ReviewedRow(SheetRow row, Optional<Review> review, String problem) {
+
+    /** A row that could be judged. */
+    public static ReviewedRow of(SheetRow row, Review review) {
+        return new ReviewedRow(row, Optional.of(review), "");
+    }
+}

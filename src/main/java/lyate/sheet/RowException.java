@@ -1,13 +1,40 @@
 package lyate.sheet;
 
 import java.util.List;
+import java.util.stream.Collectors;
 
 /** A row cannot be turned into a step; the message names every column at fault, what was found and what was expected. */
 public final class RowException extends Exception {
 
     private static final long serialVersionUID = 1L;
 
-    public RowException(List<String> problems) {
-        super(String.join("; ", problems));
+    private final transient List<Problem> problems;
+
+    /**
+     * One thing wrong with a row.
+     *
+     * @param column header of the column; empty where the whole row is meant
+     * @param reason what was found and what was expected, in words
+     */
+    public record Problem(String column, String reason) {
+
+        Problem(SheetColumn column, String reason) {
+            this(column.header(), reason);
+        }
+
+        @Override
+        public String toString() {
+            return column.isEmpty() ? reason : "column " + column + ": " + reason;
+        }
+    }
+
+    public RowException(List<Problem> problems) {
+        super(problems.stream().map(Problem::toString).collect(Collectors.joining("; ")));
+        this.problems = List.copyOf(problems);
+    }
+
+    /** Every problem, in the order of the columns. */
+    public List<Problem> problems() {
+        return problems;
     }
 }

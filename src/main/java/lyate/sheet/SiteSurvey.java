@@ -56,6 +56,8 @@ public record SiteSurvey(MoleculeReader molecules, SiteFinder finder, AcidityEst
             return new Answer(question, Optional.of(molecule), sites, "");
         } catch (MoleculeException e) {
             return new Answer(question, Optional.empty(), List.of(), e.getMessage());
+        } catch (RuntimeException | StackOverflowError e) {
+            return new Answer(question, Optional.empty(), List.of(), ProgramError.words(e));
         }
     }
 }

@@ -9,6 +9,7 @@ import lyate.molecule.Molecule;
 import lyate.molecule.MoleculeException;
 import lyate.molecule.MoleculeReader;
 import lyate.review.Step;
+import lyate.sheet.RowException.Problem;
 import lyate.stock.Base;
 import lyate.stock.Solvent;
 import lyate.stock.Stockroom;
@@ -44,9 +45,9 @@ public final class StepReader {
      */
     public Step read(SheetRow row) throws RowException {
         if (!row.problem().isEmpty()) {
-            throw new RowException(List.of(row.problem()));
+            throw new RowException(List.of(new Problem("", row.problem())));
         }
-        List<String> problems = new ArrayList<>();
+        List<Problem> problems = new ArrayList<>();
         Optional<Reaction> reaction = reaction(row, problems);
         Molecule substrate = reaction.map(Reaction::substrate).orElseGet(() -> substrate(row, problems));
         Base base = base(row, reaction, problems);
@@ -63,7 +64,7 @@ public final class StepReader {
         return new Step(row.name(), substrate, site, base, equivalents, solvent, temperature, concentration, water, partner);
     }
 
-    private Optional<Reaction> reaction(SheetRow row, List<String> problems) {
+    private Optional<Reaction> reaction(SheetRow row, List<Problem> problems) {
         String text = row.text(SheetColumn.REACTION);
         if (text.isEmpty() || !row.text(SheetColumn.SUBSTRATE).isEmpty()) {
             return Optional.empty();
@@ -71,24 +72,24 @@ public final class StepReader {
         try {
             return Optional.of(reactions.read(text));
         } catch (MoleculeException e) {
-            problems.add(problem(SheetColumn.REACTION, e.getMessage()));
+            problems.add(new Problem(SheetColumn.REACTION, e.getMessage()));
             return Optional.empty();
         }
     }
 
-    private Molecule substrate(SheetRow row, List<String> problems) {
+    private Molecule substrate(SheetRow row, List<Problem> problems) {
         if (!row.text(SheetColumn.REACTION).isEmpty() && row.text(SheetColumn.SUBSTRATE).isEmpty()) {
             return null;
         }
         try {
             return molecules.read(row.text(SheetColumn.SUBSTRATE));
         } catch (MoleculeException e) {
-            problems.add(problem(SheetColumn.SUBSTRATE, e.getMessage()));
+            problems.add(new Problem(SheetColumn.SUBSTRATE, e.getMessage()));
             return null;
         }
     }
 
-    private Base base(SheetRow row, Optional<Reaction> reaction, List<String> problems) {
+    private Base base(SheetRow row, Optional<Reaction> reaction, List<Problem> problems) {
         String name = row.text(SheetColumn.BASE);
         Optional<Base> drawn = reaction.flatMap(Reaction::base);
         if (name.isEmpty() && drawn.isPresent()) {
@@ -98,14 +99,14 @@ public final class StepReader {
             if (!name.isEmpty()) {
                 return stockroom.base(name);
             }
-            problems.add(problem(SheetColumn.BASE, "there is no base"));
+            problems.add(new Problem(SheetColumn.BASE, "there is no base"));
         } catch (UnknownNameException e) {
-            problems.add(problem(SheetColumn.BASE, e.getMessage()));
+            problems.add(new Problem(SheetColumn.BASE, e.getMessage()));
         }
         return null;
     }
 
-    private Solvent solvent(SheetRow row, Optional<Reaction> reaction, List<String> problems) {
+    private Solvent solvent(SheetRow row, Optional<Reaction> reaction, List<Problem> problems) {
         String name = row.text(SheetColumn.SOLVENT);
         Optional<Solvent> drawn = reaction.flatMap(Reaction::solvent);
         if (name.isEmpty() && drawn.isPresent()) {
@@ -115,14 +116,14 @@ public final class StepReader {
             if (!name.isEmpty()) {
                 return stockroom.solvent(name);
             }
-            problems.add(problem(SheetColumn.SOLVENT, "there is no solvent"));
+            problems.add(new Problem(SheetColumn.SOLVENT, "there is no solvent"));
         } catch (UnknownNameException e) {
-            problems.add(problem(SheetColumn.SOLVENT, e.getMessage()));
+            problems.add(new Problem(SheetColumn.SOLVENT, e.getMessage()));
         }
         return null;
     }
 
-    private static Optional<String> site(SheetRow row, Molecule substrate, List<String> problems) {
+    private static Optional<String> site(SheetRow row, Molecule substrate, List<Problem> problems) {
         String label = row.text(SheetColumn.SITE);
         if (label.isEmpty() || substrate == null) {
             return Optional.empty();
@@ -130,12 +131,12 @@ public final class StepReader {
         if (substrate.atomLabelled(label).isEmpty()) {
             String atoms = IntStream.range(0, substrate.atomCount()).limit(60).mapToObj(substrate::label)
                     .collect(Collectors.joining(", "));
-            problems.add(problem(SheetColumn.SITE, "there is no atom '" + label + "' in the substrate; it has " + atoms));
+            problems.add(new Problem(SheetColumn.SITE, "there is no atom '" + label + "' in the substrate; it has " + atoms));
         }
         return Optional.of(label);
     }
 
-    private Optional<Molecule> partner(SheetRow row, List<String> problems) {
+    private Optional<Molecule> partner(SheetRow row, List<Problem> problems) {
         String text = row.text(SheetColumn.ELECTROPHILE);
         if (text.isEmpty()) {
             return Optional.empty();
@@ -143,23 +144,19 @@ public final class StepReader {
         try {
             return Optional.of(molecules.read(text));
         } catch (MoleculeException e) {
-            problems.add(problem(SheetColumn.ELECTROPHILE, e.getMessage()));
+            problems.add(new Problem(SheetColumn.ELECTROPHILE, e.getMessage()));
             return Optional.empty();
         }
     }
 
-    private static double number(SheetRow row, SheetColumn column, Quantity quantity, double usual, List<String> problems) {
+    private static double number(SheetRow row, SheetColumn column, Quantity quantity, double usual, List<Problem> problems) {
         String text = row.text(column);
         if (text.isEmpty()) {
             return usual;
         }
         return quantity.parse(text).orElseGet(() -> {
-            problems.add(problem(column, "found '" + text + "', expected " + quantity.expected()));
+            problems.add(new Problem(column, "found '" + text + "', expected " + quantity.expected()));
             return Double.NaN;
         });
-    }
-
-    private static String problem(SheetColumn column, String reason) {
-        return "column " + column.header() + ": " + reason;
     }
 }

@@ -1,0 +1,81 @@
+package lyate.command;
+
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.util.Locale;
+import java.util.SortedSet;
+import java.util.concurrent.Callable;
+import lyate.molecule.MoleculeReader;
+import lyate.review.StepReviewer;
+import lyate.table.NearestNames;
+import lyate.table.TableException;
+import lyate.table.TableFolders;
+import lyate.table.TableListing;
+import picocli.CommandLine.Command;
+import picocli.CommandLine.Mixin;
+import picocli.CommandLine.Model.CommandSpec;
+import picocli.CommandLine.Option;
+import picocli.CommandLine.ParameterException;
+import picocli.CommandLine.Spec;
+
+/** {@code lyate tables}. */
+@Command(name = "tables", mixinStandardHelpOptions = true, description = {
+    "Lists the tables in use, or checks a folder of your own tables.", ""})
+final class TablesCommand implements Callable<Integer> {
+
+    private final Terminal terminal;
+
+    @Spec
+    private CommandSpec spec;
+
+    @Option(names = "--check", paramLabel = "DIR",
+            description = "Reads the tables of this folder over the packaged ones and names every bad cell.")
+    private Path checked;
+
+    @Mixin
+    private TablesOption tables;
+
+    TablesCommand(Terminal terminal) {
+        this.terminal = terminal;
+    }
+
+    @Override
+    public Integer call() {
+        return checked == null ? list(tables.folders()) : check();
+    }
+
+    private int list(TableFolders folders) {
+        for (TableListing.Copy copy : TableListing.of(folders)) {
+            terminal.outWriter().print(String.format(Locale.ROOT, "%-26s %5d rows  version %-3s %s%n%26s %s%n", copy.fileName(),
+                    copy.rows(), copy.version(), copy.origin(), "", copy.summary()).replace(System.lineSeparator(), "\n"));
+        }
+        return 0;
+    }
+
+    private int check() {
+        if (!Files.isDirectory(checked)) {
+            throw new ParameterException(spec.commandLine(), "there is no folder " + checked);
+        }
+        SortedSet<String> known = TableListing.packagedNames();
+        boolean sound = true;
+        for (String name : TableListing.csvFiles(checked)) {
+            if (!known.contains(name)) {
+                sound = false;
+                terminal.tell(checked.resolve(name) + ": there is no table of this name; nearest: "
+                        + String.join(", ", NearestNames.of(name, known, 3)));
+            }
+        }
+        try {
+            TableFolders folders = TableFolders.overlaidBy(checked);
+            StepReviewer.load(folders);
+            MoleculeReader.load(folders);
+        } catch (TableException e) {
+            sound = false;
+            terminal.tell(e.getMessage());
+        }
+        if (sound) {
+            terminal.outWriter().println("every table in " + checked + " can be used");
+        }
+        return sound ? 0 : Failures.SOME_INPUT_NOT_USED;
+    }
+}

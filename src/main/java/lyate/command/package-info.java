@@ -1,0 +1,2 @@
+/** The command line; start with {@link lyate.command.Lyate}. */
+package lyate.command;
