@@ -7,8 +7,10 @@ import static lyate.table.Column.word;
 
 import java.util.ArrayList;
 import java.util.HashMap;
+import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Set;
 import lyate.table.Column;
 import lyate.table.NearestNames;
 import lyate.table.Row;
@@ -32,8 +34,19 @@ final class BaseTable {
     private final TableFolders folders;
     private final List<TableProblem> problems = new ArrayList<>();
 
+    private final Map<String, BaseFamily> families = new LinkedHashMap<>();
+
     BaseTable(TableFolders folders) {
         this.folders = folders;
+        for (Row row : Table.read(FAMILIES, folders).rows()) {
+            families.put(row.id(), new BaseFamily(row.id(), row.text("name"), yes(row, "irreversible"),
+                    yes(row, "insoluble"), yes(row, "strong"), yes(row, "hindered"), row.text("source")));
+        }
+    }
+
+    /** The ids of the families there are. */
+    Set<String> familyIds() {
+        return families.keySet();
     }
 
     private static Schema basesSchema() {
@@ -51,11 +64,6 @@ final class BaseTable {
 
     /** The bases in the order of the table. */
     List<Base> read() {
-        Map<String, BaseFamily> families = new HashMap<>();
-        for (Row row : Table.read(FAMILIES, folders).rows()) {
-            families.put(row.id(), new BaseFamily(row.id(), row.text("name"), yes(row, "irreversible"),
-                    yes(row, "insoluble"), yes(row, "strong"), yes(row, "hindered"), row.text("source")));
-        }
         List<Base> bases = new ArrayList<>();
         for (Row row : Table.read(BASES, folders).rows()) {
             BaseFamily family = families.get(row.text("family"));

@@ -13,10 +13,15 @@ public final class Stockroom {
 
     private final Shelf<Base> bases;
     private final Shelf<Solvent> solvents;
+    private final Shelf<Acid> acids;
+    private final Shelf<Partner> partners;
 
-    private Stockroom(Shelf<Base> bases, Shelf<Solvent> solvents) {
-        this.bases = bases;
-        this.solvents = solvents;
+    private Stockroom(TableFolders folders) {
+        BaseTable baseTable = new BaseTable(folders);
+        this.bases = new Shelf<>("base", "bases.csv", baseTable.read());
+        this.solvents = new Shelf<>("solvent", "solvents.csv", SolventTable.read(folders));
+        this.acids = new Shelf<>("acid", "acids.csv", AcidTable.read(folders));
+        this.partners = new Shelf<>("partner", "partners.csv", PartnerTable.read(folders, baseTable.familyIds()));
     }
 
     /**
@@ -25,8 +30,7 @@ public final class Stockroom {
      * @throws TableException naming file, line and column of every bad cell, and both rows where two share a name
      */
     public static Stockroom load(TableFolders folders) {
-        return new Stockroom(new Shelf<>("base", "bases.csv", new BaseTable(folders).read()),
-                new Shelf<>("solvent", "solvents.csv", SolventTable.read(folders)));
+        return new Stockroom(folders);
     }
 
     /** Every base, in the order of the table. */
@@ -37,6 +41,16 @@ public final class Stockroom {
     /** Every solvent, in the order of the table. */
     public List<Solvent> solvents() {
         return solvents.all();
+    }
+
+    /** Every acid, in the order of the table. */
+    public List<Acid> acids() {
+        return acids.all();
+    }
+
+    /** Every electrophile and other partner, in the order of the table. */
+    public List<Partner> partners() {
+        return partners.all();
     }
 
     /**
@@ -55,6 +69,24 @@ public final class Stockroom {
      */
     public Solvent solvent(String name) throws UnknownNameException {
         return solvents.find(name);
+    }
+
+    /**
+     * The acid of that name.
+     *
+     * @throws UnknownNameException with the nearest known names
+     */
+    public Acid acid(String name) throws UnknownNameException {
+        return acids.find(name);
+    }
+
+    /**
+     * The partner of that name.
+     *
+     * @throws UnknownNameException with the nearest known names
+     */
+    public Partner partner(String name) throws UnknownNameException {
+        return partners.find(name);
     }
 
     /** At most {@code limit} bases that a text typed so far may mean, likeliest first. */

@@ -29,8 +29,18 @@ class StockTablesTest {
         return STOCKROOM.solvents().stream();
     }
 
+    static Stream<Acid> acids() {
+        return STOCKROOM.acids().stream();
+    }
+
+    static Stream<Partner> partners() {
+        return STOCKROOM.partners().stream();
+    }
+
     @Test
     void theShelfIsWellStocked() {
+        assertTrue(STOCKROOM.acids().size() >= 35, STOCKROOM.acids().size() + " acids");
+        assertTrue(STOCKROOM.partners().size() >= 40, STOCKROOM.partners().size() + " partners");
         assertTrue(STOCKROOM.bases().size() >= 120, STOCKROOM.bases().size() + " bases");
         assertTrue(STOCKROOM.solvents().size() >= 50, STOCKROOM.solvents().size() + " solvents");
     }
@@ -134,5 +144,45 @@ class StockTablesTest {
         if (solvent.kind() == Solvent.Kind.PROTIC) {
             assertTrue(solvent.donorPKa(solvent.scale()).isPresent(), solvent.id());
         }
+    }
+
+    @ParameterizedTest
+    @MethodSource("acids")
+    void anAcidIsNeutralAndHasTheMolarMassOfItsStructure(Acid acid) {
+        assertEquals(Formula.of(acid.smiles()).molarMass(), acid.molarMass(), 0.02, acid.id());
+        assertEquals(0, Formula.of(acid.smiles()).charge(), acid.id());
+    }
+
+    @ParameterizedTest
+    @MethodSource("acids")
+    void anAcidHasAnAqueousStrengthAndItsStagesWeaken(Acid acid) {
+        double last = acid.pKa(Medium.WATER).orElseThrow().pKa();
+        assertTrue(last > -20 && last < 20, acid.id());
+        for (KnownPKa stage : acid.furtherStages()) {
+            assertTrue(stage.pKa() > last, acid.id() + ": each further proton is held tighter");
+            last = stage.pKa();
+        }
+        acid.density().ifPresent(density -> assertTrue(density > 0.7 && density < 2, acid.id() + " density"));
+        assertFalse(acid.uses().isEmpty(), acid.id() + " has a use");
+    }
+
+    @Test
+    void everyUseOfAcidsIsServed() {
+        Set<String> uses = acids().flatMap(acid -> acid.uses().stream()).collect(Collectors.toSet());
+        assertEquals(Set.of("quench", "salt", "deprotection"), uses);
+    }
+
+    @ParameterizedTest
+    @MethodSource("partners")
+    void aPartnerHasTheMolarMassOfItsStructure(Partner partner) {
+        assertEquals(Formula.of(partner.smiles()).molarMass(), partner.molarMass(), 0.02, partner.id());
+    }
+
+    @ParameterizedTest
+    @MethodSource("partners")
+    void aBaseIsEitherToleratedOrConsumed(Partner partner) {
+        assertTrue(partner.toleratedBases().stream().noneMatch(partner.consumingBases()::contains), partner.id());
+        partner.density().ifPresent(density -> assertTrue(density > 0.6 && density < 2.5, partner.id() + " density"));
+        partner.boilingPoint().ifPresent(celsius -> assertTrue(celsius > -90 && celsius < 350, partner.id() + " boils"));
     }
 }
