@@ -8,7 +8,6 @@ import java.util.Set;
 import lyate.molecule.Molecule;
 import lyate.molecule.MoleculeException;
 import lyate.molecule.MoleculeReader;
-import lyate.stock.Base;
 
 /** Whether an alkoxide is the one an ester already carries, so that their exchange changes nothing. */
 final class MatchingAlkoxide {
@@ -18,9 +17,13 @@ final class MatchingAlkoxide {
 
     private MatchingAlkoxide() {}
 
-    /** Whether every ester oxygen at an acyl atom carries the group of the base's alcohol. */
-    static boolean at(Molecule molecule, int acyl, Base base) {
-        List<String> alcohol = groupOfAlcohol(base);
+    /**
+     * Whether every ester oxygen at an acyl atom carries the group of an alcohol.
+     *
+     * @param alcoholSmiles conjugate acid of the alkoxide, or the solvent
+     */
+    static boolean at(Molecule molecule, int acyl, String alcoholSmiles) {
+        List<String> alcohol = groupOfAlcohol(alcoholSmiles);
         List<List<String>> groups = new ArrayList<>();
         for (int oxygen : molecule.neighbours(acyl)) {
             if (molecule.atomicNumber(oxygen) == OXYGEN && molecule.bondOrder(acyl, oxygen) == 1) {
@@ -30,9 +33,9 @@ final class MatchingAlkoxide {
         return !groups.isEmpty() && groups.stream().allMatch(alcohol::equals);
     }
 
-    private static List<String> groupOfAlcohol(Base base) {
+    private static List<String> groupOfAlcohol(String smiles) {
         try {
-            Molecule alcohol = new MoleculeReader().read(base.conjugateAcid());
+            Molecule alcohol = new MoleculeReader().read(smiles);
             for (int atom = 0; atom < alcohol.atomCount(); atom++) {
                 if (alcohol.atomicNumber(atom) == OXYGEN && alcohol.hydrogens(atom) == 1) {
                     return groupBehind(alcohol, atom, -1).orElse(List.of());

@@ -47,6 +47,8 @@ record SideReactionRule(String id, Agent agent, Target target, AtomPattern patte
     enum Condition {
         /** The alkoxide is the one the ester already carries. */
         MATCHING_ALKOXIDE,
+        /** The solvent is the alcohol of the ester. */
+        MATCHING_SOLVENT,
         /** The shown atom is the one meant to lose its proton. */
         INTENDED_ATOM,
         /** The shown atom is not the one meant to lose its proton. */

@@ -96,7 +96,7 @@ public final class SideReactions {
                 && enoughBase(rule, step, context)
                 && plainFit(rule, molecule, atom)
                 && reached(rule, atom, context)
-                && rule.unless().stream().noneMatch(condition -> holds(condition, molecule, atom, context));
+                && rule.unless().stream().noneMatch(condition -> holds(condition, molecule, atom, step, context));
     }
 
     private static boolean plainFit(SideReactionRule rule, Molecule molecule, int atom) {
@@ -121,11 +121,13 @@ public final class SideReactions {
         return transfer.isPresent() && rule.logK().contains(transfer.get().logK());
     }
 
-    private static boolean holds(SideReactionRule.Condition condition, Molecule molecule, int atom, SideReactionContext context) {
+    private static boolean holds(SideReactionRule.Condition condition, Molecule molecule, int atom, Step step,
+                                 SideReactionContext context) {
         boolean intended = context.intendedAtom().isPresent()
                 && molecule.symmetryClass(context.intendedAtom().getAsInt()) == molecule.symmetryClass(atom);
         return switch (condition) {
-            case MATCHING_ALKOXIDE -> MatchingAlkoxide.at(molecule, atom, context.workingBase());
+            case MATCHING_ALKOXIDE -> MatchingAlkoxide.at(molecule, atom, context.workingBase().conjugateAcid());
+            case MATCHING_SOLVENT -> MatchingAlkoxide.at(molecule, atom, step.solvent().smiles());
             case INTENDED_ATOM -> intended;
             case NOT_INTENDED_ATOM -> !intended;
             case NO_STEREOCENTRE -> !molecule.stereocentres().contains(atom);

@@ -9,7 +9,7 @@ import java.util.Optional;
 import java.util.OptionalInt;
 import java.util.stream.Stream;
 import lyate.acidity.Acidity;
-import lyate.acidity.ClassValueEstimate;
+import lyate.acidity.AcidityEstimator;
 import lyate.molecule.Molecule;
 import lyate.molecule.MoleculeException;
 import lyate.molecule.MoleculeReader;
@@ -35,6 +35,7 @@ class RuleTablesTest {
     private static final SideReactions SIDE_REACTIONS = SideReactions.load(TableFolders.packaged(), STOCKROOM);
     private static final BaseSolventRules SOLVENT_RULES = BaseSolventRules.load(TableFolders.packaged(), STOCKROOM);
     private static final BaseHazards HAZARDS = BaseHazards.load(TableFolders.packaged(), STOCKROOM);
+    private static final AcidityEstimator ACIDITY = AcidityEstimator.load(TableFolders.packaged());
     private static final SiteFinder SITES = new SiteFinder(SiteClasses.load(TableFolders.packaged()));
 
     static Stream<SideReactionRule> sideReactions() {
@@ -95,21 +96,21 @@ class RuleTablesTest {
         Step step = new Step("example", molecule, site, base, equivalents, solvent(example, 2), number(example, 3), 0.2, 0,
                 rule.target() == Target.PARTNER ? Optional.of(molecule) : Optional.empty());
         SideReactionContext context = new SideReactionContext(base,
-                rule.target() == Target.PARTNER ? List.of() : transfers(molecule, base),
+                rule.target() == Target.PARTNER ? List.of() : transfers(molecule, base, step.solvent()),
                 site.map(molecule::atomLabelled).orElse(OptionalInt.empty()));
         return SIDE_REACTIONS.byRule(molecule, rule.target(),
                 (tried, atom) -> SideReactions.fits(tried, molecule, atom, step, context)).containsKey(rule);
     }
 
-    /** Every acid site against the base, class values on the scale of the base's family. */
-    private static List<Transfer> transfers(Molecule molecule, Base base) {
-        Medium scale = base.family().strong() ? Medium.DMSO : Medium.WATER;
+    /** Every acid site against the base, in DMSO for strong bases out of reach of protic solvents, else in water. */
+    private static List<Transfer> transfers(Molecule molecule, Base base, Solvent solvent) {
+        Medium scale = base.family().strong() && solvent.kind() != Solvent.Kind.PROTIC ? Medium.DMSO : Medium.WATER;
         double pKaOfBase = base.pKa(scale).orElseThrow().pKa();
         List<Transfer> transfers = new ArrayList<>();
         for (ProtonSite site : SITES.sites(molecule, Role.ACID)) {
-            new ClassValueEstimate().estimate(molecule, site, scale).ifPresent((Acidity acidity) -> transfers.add(
+            ACIDITY.acidity(molecule, site, scale).ifPresent((Acidity acidity) -> transfers.add(
                     new Transfer(molecule.label(site.atom()), site.equivalent(), acidity, pKaOfBase - acidity.pKa(),
-                            acidity.sigma(), 0, 0, "class values")));
+                            acidity.sigma(), 0, 0, "example")));
         }
         return transfers;
     }
