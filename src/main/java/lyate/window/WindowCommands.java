@@ -79,8 +79,12 @@ final class WindowCommands implements WindowMenu.Commands {
 
     @Override
     public void about() {
-        JOptionPane.showMessageDialog(frame, "Lyate\nWhich proton goes, how far, and what else does the base do?\n\nApache License 2.0",
-                "About Lyate", JOptionPane.INFORMATION_MESSAGE, new javax.swing.ImageIcon(AppIcon.image(theme.space("ring") * 4)));
+        PageWindow.open(frame, "About Lyate", "about.html", theme);
+    }
+
+    @Override
+    public void guide() {
+        PageWindow.open(frame, "Guide", "guide.html", theme);
     }
 
     @Override

@@ -35,6 +35,8 @@ final class WindowMenu extends JMenuBar {
 
         void zoomed(float zoom);
 
+        void guide();
+
         void about();
 
         void quit();
@@ -67,6 +69,7 @@ final class WindowMenu extends JMenuBar {
         view.add(item("Whole molecule", 'W', KeyStroke.getKeyStroke(KeyEvent.VK_F, COMMAND), commands::fit));
 
         JMenu help = menu("Help", 'H');
+        help.add(item("Guide", 'G', KeyStroke.getKeyStroke("F1"), commands::guide));
         help.add(item("About Lyate", 'A', null, commands::about));
         add(step);
         add(edit);

@@ -30,6 +30,7 @@ final class Workbench extends JPanel implements AutoCloseable {
     private final StepPresenter presenter;
     private final CardLayout cards = new CardLayout();
     private final JPanel middle = new JPanel(cards);
+    private Runnable painted;
     private Optional<Shown> shown = Optional.empty();
 
     Workbench(Theme theme, Stockroom stockroom, Reviewer reviewer, StepText first) {
@@ -111,6 +112,15 @@ final class Workbench extends JPanel implements AutoCloseable {
         findings.show(next.review());
         drawer.show(next);
         cards.show(middle, PICTURES);
+        if (painted != null) {
+            paintImmediately(getVisibleRect());
+            painted.run();
+        }
+    }
+
+    /** Runs once the next result has been painted; for measuring. */
+    void afterPainting(Runnable action) {
+        painted = action;
     }
 
     /** What is on screen now. */
@@ -124,6 +134,10 @@ final class Workbench extends JPanel implements AutoCloseable {
 
     SubstrateView substrate() {
         return substrate;
+    }
+
+    FindingsPanel findings() {
+        return findings;
     }
 
     Drawer drawer() {

@@ -14,6 +14,7 @@ import javax.swing.JOptionPane;
 import javax.swing.SwingConstants;
 import javax.swing.SwingUtilities;
 import javax.swing.SwingWorker;
+import javax.swing.ToolTipManager;
 import lyate.table.TableFolders;
 
 /** The window of the program. For the event thread. */
@@ -29,6 +30,8 @@ public final class WorkbenchFrame extends JFrame {
         this.theme = new Theme(memory.isDark());
         theme.install();
         UIScale.setZoomFactor(memory.zoom());
+        // Long enough to read how an estimate adds up.
+        ToolTipManager.sharedInstance().setDismissDelay(60_000);
         setIconImages(AppIcon.images());
         setDefaultCloseOperation(DISPOSE_ON_CLOSE);
         addWindowListener(new WindowAdapter() {
