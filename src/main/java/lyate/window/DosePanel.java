@@ -1,35 +1,27 @@
 package lyate.window;
 
-import java.awt.BorderLayout;
 import java.awt.Cursor;
 import java.awt.event.MouseAdapter;
 import java.awt.event.MouseEvent;
 import java.util.Locale;
 import java.util.function.DoubleConsumer;
-import javax.swing.JLabel;
-import javax.swing.JPanel;
-import javax.swing.SwingConstants;
 import lyate.review.Reviewer;
 import org.jfree.chart.ChartPanel;
 import org.jfree.chart.plot.XYPlot;
 
 /** The dose curve; the line of the chosen equivalents can be dragged, or moved with the arrow keys. */
-final class DosePanel extends JPanel implements AutoCloseable {
+final class DosePanel extends LazyTab {
 
     private static final double KEY_STEP = 0.05;
 
     private final Theme theme;
     private final transient Reviewer reviewer;
     private final transient DoubleConsumer onEquivalents;
-    private final transient Background background = new Background("dose curve");
     private final ChartPanel panel = new ChartPanel(null, true);
-    private final JLabel message = new JLabel("", SwingConstants.CENTER);
-    private transient Shown shown;
     private transient DoseSweep sweep;
-    private boolean due;
 
     DosePanel(Theme theme, Reviewer reviewer, DoubleConsumer onEquivalents) {
-        super(new BorderLayout());
+        super("dose curve");
         this.theme = theme;
         this.reviewer = reviewer;
         this.onEquivalents = onEquivalents;
@@ -41,78 +33,42 @@ final class DosePanel extends JPanel implements AutoCloseable {
         panel.setMaximumDrawHeight(Integer.MAX_VALUE);
         panel.setFocusable(true);
         panel.getAccessibleContext().setAccessibleName("Protons taken against equivalents of base");
-        Keys.bind(panel, "LEFT", () -> move(shown.review().step().equivalents() - KEY_STEP));
-        Keys.bind(panel, "RIGHT", () -> move(shown.review().step().equivalents() + KEY_STEP));
+        Keys.bind(panel, "LEFT", () -> move(shown().review().step().equivalents() - KEY_STEP));
+        Keys.bind(panel, "RIGHT", () -> move(shown().review().step().equivalents() + KEY_STEP));
         Drag drag = new Drag();
         panel.addMouseListener(drag);
         panel.addMouseMotionListener(drag);
         add(panel);
-        add(message, BorderLayout.SOUTH);
         theme.onChange(this::draw);
     }
 
-    /** Shows another step; the curve is worked out once the panel is looked at. */
-    void show(Shown next) {
-        boolean same = shown != null && sweep != null && sameButForDose(shown, next) && next.review().step().equivalents() <= last();
-        shown = next;
-        due = !same;
-        if (same) {
-            draw();
-        } else if (isShowing()) {
-            work();
-        }
+    @Override
+    Object key(Shown next) {
+        return StepKey.of(next.review().step()).withoutDose(DoseSweep.span(next.review().step()));
     }
 
-    /** To be called when the panel comes into view. */
-    void lookedAt() {
-        if (due && shown != null) {
-            work();
-        }
-    }
-
-    private void work() {
-        due = false;
-        Shown wanted = shown;
-        say("working out the curve \u2026");
-        background.start(goOn -> DoseSweep.of(wanted.review().step(), reviewer, goOn), result -> {
+    @Override
+    void work(Shown wanted) {
+        start("working out the curve \u2026", goOn -> DoseSweep.of(wanted.review().step(), reviewer, goOn), result -> {
             sweep = result;
-            say("");
             draw();
-        }, this::say);
+        });
     }
 
-    private void say(String words) {
-        message.setText(words);
-        message.setVisible(!words.isEmpty());
-    }
-
-    private double last() {
-        return sweep.equivalents().get(sweep.equivalents().size() - 1);
-    }
-
-    private static boolean sameButForDose(Shown before, Shown after) {
-        var a = before.review().step();
-        var b = after.review().step();
-        return a.substrate().input().equals(b.substrate().input()) && a.base().equals(b.base()) && a.solvent().equals(b.solvent())
-                && a.temperatureCelsius() == b.temperatureCelsius() && a.concentrationMolar() == b.concentrationMolar()
-                && a.waterPpm() == b.waterPpm() && a.partner().map(Object::toString).equals(b.partner().map(Object::toString))
-                && before.review().intendedSite().equals(after.review().intendedSite());
+    @Override
+    void refresh() {
+        draw();
     }
 
     private void draw() {
         if (sweep != null && !sweep.equivalents().isEmpty()) {
-            panel.setChart(new DoseChart(theme.palette()).chart(sweep, shown));
+            panel.setChart(new DoseChart(theme.palette()).chart(sweep, shown()));
         }
     }
 
     private void move(double equivalents) {
         double rounded = Math.round(Math.max(0, equivalents) / KEY_STEP) * KEY_STEP;
         onEquivalents.accept(Double.parseDouble(String.format(Locale.ROOT, "%.2f", rounded)));
-    }
-
-    @Override
-    public void close() {
-        background.close();
     }
 
     /** Drags the line of the chosen equivalents. */
@@ -147,7 +103,7 @@ final class DosePanel extends JPanel implements AutoCloseable {
                 return false;
             }
             XYPlot plot = panel.getChart().getXYPlot();
-            double x = plot.getDomainAxis().valueToJava2D(shown.review().step().equivalents(), panel.getScreenDataArea(), plot.getDomainAxisEdge());
+            double x = plot.getDomainAxis().valueToJava2D(shown().review().step().equivalents(), panel.getScreenDataArea(), plot.getDomainAxisEdge());
             return Math.abs(x - event.getX()) < theme.space("gap");
         }
 

@@ -28,7 +28,7 @@ record DoseSweep(List<Double> equivalents, Map<String, List<Double>> percentTake
      * @param goOn asked before each dose; the sweep ends early, and incomplete, once it says no
      */
     static DoseSweep of(Step step, Reviewer reviewer, BooleanSupplier goOn) throws ReviewException {
-        double span = Math.max(LEAST_SPAN, Math.ceil(step.equivalents() * 1.2));
+        double span = span(step);
         List<Double> equivalents = new ArrayList<>();
         Map<String, List<Double>> taken = new LinkedHashMap<>();
         for (int i = 0; i < POINTS && goOn.getAsBoolean(); i++) {
@@ -40,6 +40,11 @@ record DoseSweep(List<Double> equivalents, Map<String, List<Double>> percentTake
             }
         }
         return new DoseSweep(equivalents, taken);
+    }
+
+    /** Equivalents the sweep of a step runs up to. */
+    static double span(Step step) {
+        return Math.max(LEAST_SPAN, Math.ceil(step.equivalents() * 1.2));
     }
 
     private static Step at(Step step, double equivalents) {

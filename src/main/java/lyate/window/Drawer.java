@@ -1,30 +1,47 @@
 package lyate.window;
 
 import java.util.List;
-import java.util.function.Consumer;
-import java.util.function.DoubleConsumer;
 import javax.swing.BorderFactory;
 import javax.swing.JScrollPane;
 import javax.swing.JTabbedPane;
 import javax.swing.JTable;
-import lyate.review.Reviewer;
+import lyate.stock.Base;
 
 /** The tables and charts below the pictures. */
 final class Drawer extends JTabbedPane implements AutoCloseable {
 
     private final TransfersTable transfers;
+    private final BaseChoicePanel choice;
     private final DosePanel dose;
+    private final AmountsPanel amounts;
     private final SourcesModel sources = new SourcesModel();
 
-    Drawer(Theme theme, Reviewer reviewer, Consumer<List<Integer>> highlight, Consumer<String> onSite, DoubleConsumer onEquivalents) {
-        transfers = new TransfersTable(theme, highlight, onSite);
-        dose = new DosePanel(theme, reviewer, onEquivalents);
+    /** What the drawer can ask of the rest of the window. */
+    interface Wishes {
+        void highlight(List<Integer> atoms);
+
+        void intend(String site);
+
+        void take(Base base);
+
+        void compare(Base base);
+
+        void equivalents(double equivalents);
+    }
+
+    Drawer(Theme theme, Engine engine, Wishes wishes) {
+        transfers = new TransfersTable(theme, wishes::highlight, wishes::intend);
+        choice = new BaseChoicePanel(theme, engine, wishes::take, wishes::compare);
+        dose = new DosePanel(theme, engine.reviewer(), wishes::equivalents);
+        amounts = new AmountsPanel(theme, engine.enthalpies());
         addTab("Transfers", null, transfers, "every donor against the base");
+        addTab("Base choice", null, choice, "the whole stockroom ranked for this site in this solvent");
         addTab("Equivalents", null, dose, "what more or less base would do");
+        addTab("Amounts", null, amounts, "what to weigh and measure out, gas and heat");
         addTab("Sources", null, table(sources, "Sources"), "every value used, with its citation");
         addChangeListener(event -> {
-            if (getSelectedComponent() == dose) {
-                dose.lookedAt();
+            if (getSelectedComponent() instanceof LazyTab tab) {
+                tab.lookedAt();
             }
         });
         getAccessibleContext().setAccessibleName("Drawer");
@@ -35,11 +52,7 @@ final class Drawer extends JTabbedPane implements AutoCloseable {
         table.setAutoCreateRowSorter(true);
         table.setFillsViewportHeight(true);
         table.getAccessibleContext().setAccessibleName(name);
-        int em = table.getFontMetrics(table.getFont()).charWidth('n');
-        int[] letters = {36, 26, 90};
-        for (int i = 0; i < letters.length; i++) {
-            table.getColumnModel().getColumn(i).setPreferredWidth(letters[i] * em);
-        }
+        PaddedCell.dress(table, 36, 28, 90);
         JScrollPane scroll = new JScrollPane(table);
         scroll.setBorder(BorderFactory.createEmptyBorder());
         return scroll;
@@ -47,12 +60,15 @@ final class Drawer extends JTabbedPane implements AutoCloseable {
 
     void show(Shown shown) {
         transfers.show(shown);
+        choice.show(shown);
         dose.show(shown);
+        amounts.show(shown);
         sources.show(shown);
     }
 
     @Override
     public void close() {
+        choice.close();
         dose.close();
     }
 }

@@ -4,7 +4,6 @@ import java.awt.BorderLayout;
 import java.awt.Dimension;
 import java.awt.Font;
 import java.awt.Point;
-import java.awt.Rectangle;
 import java.util.EnumSet;
 import java.util.List;
 import java.util.Set;
@@ -14,7 +13,6 @@ import javax.swing.JComponent;
 import javax.swing.JLabel;
 import javax.swing.JPanel;
 import javax.swing.JScrollPane;
-import javax.swing.Scrollable;
 import javax.swing.UIManager;
 import lyate.review.Finding;
 import lyate.review.FindingKind;
@@ -132,34 +130,5 @@ final class FindingsPanel extends JPanel {
             safetyScroll.setPreferredSize(new Dimension(getWidth(), Math.min(wanted, getHeight() * 2 / 5)));
         }
         super.doLayout();
-    }
-
-    /** A column that is as wide as what scrolls it. */
-    private static final class Column extends JPanel implements Scrollable {
-
-        @Override
-        public Dimension getPreferredScrollableViewportSize() {
-            return getPreferredSize();
-        }
-
-        @Override
-        public int getScrollableUnitIncrement(Rectangle visible, int orientation, int direction) {
-            return getFontMetrics(getFont()).getHeight();
-        }
-
-        @Override
-        public int getScrollableBlockIncrement(Rectangle visible, int orientation, int direction) {
-            return visible.height;
-        }
-
-        @Override
-        public boolean getScrollableTracksViewportWidth() {
-            return true;
-        }
-
-        @Override
-        public boolean getScrollableTracksViewportHeight() {
-            return false;
-        }
     }
 }

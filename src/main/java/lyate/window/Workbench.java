@@ -3,6 +3,7 @@ package lyate.window;
 import java.awt.BorderLayout;
 import java.awt.CardLayout;
 import java.math.BigDecimal;
+import java.util.List;
 import java.util.Optional;
 import javax.swing.BorderFactory;
 import javax.swing.JComponent;
@@ -10,12 +11,10 @@ import javax.swing.JOptionPane;
 import javax.swing.JPanel;
 import javax.swing.JSplitPane;
 import lyate.molecule.MoleculeReader;
-import lyate.review.Reviewer;
 import lyate.stock.Base;
-import lyate.stock.Stockroom;
 
 /** All parts of the window put together: fields above, pictures and findings in the middle, the drawer below. */
-final class Workbench extends JPanel implements AutoCloseable {
+final class Workbench extends JPanel implements Drawer.Wishes, AutoCloseable {
 
     private static final String PICTURES = "pictures";
     private static final String EMPTY = "empty";
@@ -33,17 +32,17 @@ final class Workbench extends JPanel implements AutoCloseable {
     private Runnable painted;
     private Optional<Shown> shown = Optional.empty();
 
-    Workbench(Theme theme, Stockroom stockroom, Reviewer reviewer, StepText first) {
+    Workbench(Theme theme, Engine engine, StepText first) {
         super(new BorderLayout());
-        presenter = new StepPresenter(new StepReader(new MoleculeReader(), stockroom), reviewer, this::receive);
-        strip = new StepStrip(theme, stockroom, first, presenter::submit);
+        presenter = new StepPresenter(new StepReader(new MoleculeReader(), engine.stockroom()), engine.reviewer(), this::receive);
+        strip = new StepStrip(theme, engine.stockroom(), first, presenter::submit);
         substrate = new SubstrateView(theme, this::intend);
         substratePane = new Pane("Substrate", substrate, theme);
-        ladder = new AcidityLadder(theme, this::intend, base -> open(strip.text().with(StepField.BASE, base.name())));
-        compare = new CompareField(theme, stockroom, this::compare);
+        ladder = new AcidityLadder(theme, this::intend, this::take);
+        ladder.setTransferHandler(new BaseDrop(engine.stockroom(), this::compare));
+        compare = new CompareField(theme, engine.stockroom(), this::compare);
         findings = new FindingsPanel(theme, substrate::highlight);
-        drawer = new Drawer(theme, reviewer, substrate::highlight, this::intend,
-                equivalents -> open(strip.text().with(StepField.EQUIVALENTS, plain(equivalents))));
+        drawer = new Drawer(theme, engine, this);
         middle.add(pictures(theme), PICTURES);
         middle.add(new EmptyView(theme, example -> open(strip.text().with(StepField.SUBSTRATE, example).withSite(""))), EMPTY);
         add(strip, BorderLayout.NORTH);
@@ -82,15 +81,28 @@ final class Workbench extends JPanel implements AutoCloseable {
     }
 
     /** Makes a site the intended one. */
-    void intend(String site) {
+    @Override
+    public void intend(String site) {
         open(strip.text().withSite(site));
     }
 
-    private static String plain(double value) {
-        return BigDecimal.valueOf(value).stripTrailingZeros().toPlainString();
+    @Override
+    public void highlight(List<Integer> atoms) {
+        substrate.highlight(atoms);
     }
 
-    private void compare(Base base) {
+    @Override
+    public void take(Base base) {
+        open(strip.text().with(StepField.BASE, base.name()));
+    }
+
+    @Override
+    public void equivalents(double equivalents) {
+        open(strip.text().with(StepField.EQUIVALENTS, BigDecimal.valueOf(equivalents).stripTrailingZeros().toPlainString()));
+    }
+
+    @Override
+    public void compare(Base base) {
         ladder.compare(base).ifPresent(reason -> JOptionPane.showMessageDialog(this, reason, "Acidity ladder", JOptionPane.INFORMATION_MESSAGE));
     }
 

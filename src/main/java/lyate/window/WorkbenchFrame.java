@@ -78,7 +78,7 @@ public final class WorkbenchFrame extends JFrame {
 
     private void fill(Engine engine) {
         getContentPane().removeAll();
-        bench = new Workbench(theme, engine.stockroom(), engine.reviewer(), StepText.demo());
+        bench = new Workbench(theme, engine, StepText.demo());
         setJMenuBar(new WindowMenu(new WindowCommands(this, bench, theme, memory), theme.palette().dark()));
         add(bench, BorderLayout.CENTER);
         revalidate();

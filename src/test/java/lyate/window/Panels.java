@@ -1,5 +1,6 @@
 package lyate.window;
 
+import lyate.bench.Enthalpies;
 import lyate.molecule.MoleculeDrawing;
 import lyate.molecule.MoleculeReader;
 import lyate.review.Review;
@@ -11,6 +12,11 @@ import lyate.table.TableFolders;
 final class Panels {
 
     private Panels() {}
+
+    /** Real tables, invented verdicts. */
+    static Engine inventedEngine() {
+        return new Engine(Stockroom.load(TableFolders.packaged()), new InventedReviewer(), Enthalpies.load(TableFolders.packaged()));
+    }
 
     /** What the window would show for a typed step, judged by the invented reviewer. */
     static Shown shown(StepText text) {

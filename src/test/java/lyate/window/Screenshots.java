@@ -30,7 +30,9 @@ final class Screenshots {
         Screenshots screenshots = new Screenshots(Files.createDirectories(Path.of(arguments[0])));
         StepText demo = StepText.demo();
         screenshots.take("light", false, 1, 1500, 920, demo);
-        screenshots.take("dose", true, 1, 1500, 920, demo, bench -> bench.drawer().setSelectedIndex(1));
+        screenshots.take("dose", true, 1, 1500, 920, demo, bench -> bench.drawer().setSelectedIndex(2));
+        screenshots.take("choice", false, 1, 1500, 920, demo, bench -> bench.drawer().setSelectedIndex(1));
+        screenshots.take("amounts", false, 1, 1500, 920, demo, bench -> bench.drawer().setSelectedIndex(3));
         screenshots.take("error", false, 1, 1200, 760, demo, bench -> {
             bench.strip().box(StepField.SUBSTRATE).field().setText("O=C(C1CCC1)Nc1ccc(C)c(O)c");
             bench.strip().box(StepField.BASE).field().setText("LiHDMS");
@@ -55,7 +57,7 @@ final class Screenshots {
             Theme theme = new Theme(dark);
             theme.install();
             UIScale.setZoomFactor(zoom);
-            bench.set(new Workbench(theme, stockroom, engine.reviewer(), step));
+            bench.set(new Workbench(theme, engine, step));
             frame.set(new JFrame(name));
             frame.get().setContentPane(bench.get());
             frame.get().setSize(new Dimension(width, height));
@@ -63,7 +65,7 @@ final class Screenshots {
         });
         Thread.sleep(700);
         SwingUtilities.invokeAndWait(() -> action.accept(bench.get()));
-        Thread.sleep(700);
+        Thread.sleep(name.equals("choice") ? 15000 : 900);
         SwingUtilities.invokeAndWait(() -> write(name, frame.get()));
         SwingUtilities.invokeAndWait(() -> {
             bench.get().close();

@@ -12,8 +12,6 @@ import java.util.function.Predicate;
 import javax.swing.JFrame;
 import javax.swing.SwingUtilities;
 import lyate.review.Verdict;
-import lyate.stock.Stockroom;
-import lyate.table.TableFolders;
 import org.junit.jupiter.api.AfterEach;
 import org.junit.jupiter.api.BeforeEach;
 import org.junit.jupiter.api.Test;
@@ -30,7 +28,7 @@ class WorkbenchTest {
         onEventThread(() -> {
             Theme theme = new Theme(false);
             theme.install();
-            bench = new Workbench(theme, Stockroom.load(TableFolders.packaged()), new InventedReviewer(), StepText.demo());
+            bench = new Workbench(theme, Panels.inventedEngine(), StepText.demo());
             frame = new JFrame();
             frame.setContentPane(bench);
             frame.setSize(1500, 920);

@@ -1,0 +1,37 @@
+package lyate.window;
+
+import java.awt.datatransfer.DataFlavor;
+import java.awt.datatransfer.UnsupportedFlavorException;
+import java.io.IOException;
+import java.util.function.Consumer;
+import javax.swing.TransferHandler;
+import lyate.stock.Base;
+import lyate.stock.Stockroom;
+import lyate.stock.UnknownNameException;
+
+/** Takes a base dropped by its name. */
+final class BaseDrop extends TransferHandler {
+
+    private final transient Stockroom stockroom;
+    private final transient Consumer<Base> onBase;
+
+    BaseDrop(Stockroom stockroom, Consumer<Base> onBase) {
+        this.stockroom = stockroom;
+        this.onBase = onBase;
+    }
+
+    @Override
+    public boolean canImport(TransferSupport support) {
+        return support.isDataFlavorSupported(DataFlavor.stringFlavor);
+    }
+
+    @Override
+    public boolean importData(TransferSupport support) {
+        try {
+            onBase.accept(stockroom.base((String) support.getTransferable().getTransferData(DataFlavor.stringFlavor)));
+            return true;
+        } catch (UnsupportedFlavorException | IOException | UnknownNameException e) {
+            return false;
+        }
+    }
+}
