@@ -32,13 +32,19 @@ final class EquilibriumFindings {
 
     private static List<Finding> unintended(Situation situation) {
         return situation.donors().stream().filter(donor -> donor != situation.intended())
-                .filter(donor -> situation.shares().percentTaken(donor) > LEFT_ALONE_PERCENT)
+                .filter(donor -> situation.shares().percentTaken(donor) > LEFT_ALONE_PERCENT + smallExcess(situation))
                 .map(donor -> finding(situation.before().contains(donor) ? STOP : CAUTION,
                         FindingKind.UNINTENDED_DEPROTONATION, donor,
                         say("%s (%s) loses %.0f %% of its protons as well.", donor.label(),
                                 donor.site().siteClass().name(), situation.shares().percentTaken(donor)),
                         List.of(compared(donor), compared(situation.intended()))))
                 .toList();
+    }
+
+    /** Percent of a further proton that the usual small excess of base takes whatever one does. */
+    private static double smallExcess(Situation situation) {
+        double excess = situation.protonEquivalents() - situation.before().size() - 1;
+        return excess > 0 && excess < NOTABLE_EXCESS ? 100 * excess : 0;
     }
 
     private static List<Finding> secondEquivalent(Situation situation) {

@@ -84,7 +84,9 @@ public final class StepReviewer implements Reviewer {
         EquilibriumFindings.rules().forEach(rule -> findings.addAll(rule.find(situation)));
         ScaleFindings.rules().forEach(rule -> findings.addAll(rule.find(situation)));
         reactions.forEach(reaction -> findings.add(reaction.finding()));
-        solventRules.of(step.base(), step.solvent(), step.temperatureCelsius()).forEach(effect -> findings.add(effect.finding()));
+        solventRules.of(step.base(), step.solvent(), step.temperatureCelsius()).stream()
+                .filter(effect -> !effect.destroysBase() || situation.workingBase().levelled())
+                .forEach(effect -> findings.add(effect.finding()));
         findings.addAll(hazards.of(step.base(), step.solvent(), step.temperatureCelsius(), situation.baseTakesProtons()));
         findings.sort(Comparator.comparing(Finding::severity));
         return findings;

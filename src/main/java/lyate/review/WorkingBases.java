@@ -35,6 +35,9 @@ final class WorkingBases {
         Solvent solvent = step.solvent();
         Function<Medium, Optional<KnownPKa>> pKa = medium -> strength.pKa(base, medium);
         Optional<Double> logK = isInert(solvent) ? Optional.empty() : logK(pKa, solvent, solvent);
+        if (isLyateIonOf(solvent, base)) {
+            return WorkingBase.asAdded(base, pKa, logK);
+        }
         boolean destroyed = solventRules.of(base, solvent, step.temperatureCelsius()).stream().anyMatch(SolventEffect::destroysBase);
         if (logK.filter(value -> value >= LEVELLING_LOG_K).isPresent()) {
             return WorkingBase.lyateIon(solvent, lyateOnShelf(solvent, base), logK.get(), destroyed || solvent.kind() != Solvent.Kind.PROTIC);
@@ -45,6 +48,12 @@ final class WorkingBases {
     /** log10 K at 25 degrees C of the working base against a liquid that is in the flask beside the solvent. */
     Optional<Double> logK(WorkingBase base, Solvent liquid, Solvent solvent) {
         return logK(base.pKa(), liquid, solvent);
+    }
+
+    /** Whether a base is what the solvent itself becomes when it loses its proton, as sodium amide in ammonia. */
+    static boolean isLyateIonOf(Solvent solvent, Base base) {
+        Optional<String> conjugateAcid = key(base.conjugateAcid());
+        return conjugateAcid.isPresent() && conjugateAcid.equals(key(solvent.smiles()));
     }
 
     private static boolean isInert(Solvent solvent) {
