@@ -48,10 +48,18 @@ public final class Enthalpies {
      * Heat of one reaction at 25 degrees C.
      *
      * @param kiloJoulePerProton enthalpy change per proton of the donor; negative where heat is given off
+     * @param protonsPerFormula  protons one formula unit of the base takes in this reaction
+     * @param gases              gas set free, mol per formula unit of the base, by name
      * @param equation           the reaction it belongs to
      * @param source             where the enthalpies of formation come from
      */
-    public record ReactionHeat(double kiloJoulePerProton, String equation, String source) {}
+    public record ReactionHeat(double kiloJoulePerProton, int protonsPerFormula, Map<String, Integer> gases, String equation,
+                               String source) {
+
+        public ReactionHeat {
+            gases = Map.copyOf(gases);
+        }
+    }
 
     private final Map<String, ReactionHeat> heats;
 
@@ -110,11 +118,22 @@ public final class Enthalpies {
                     term.getValue() * substances.get(term.getKey()).number("enthalpy").orElseThrow()).sum();
             String sources = String.join("; ", new TreeSet<>(equation.coefficients().keySet().stream()
                     .map(substance -> substances.get(substance).text("source")).toList()));
-            return Optional.of(new ReactionHeat(enthalpy / -equation.coefficients().get(donor), row.text("equation"), sources));
+            int protons = -equation.coefficients().get(donor);
+            return Optional.of(new ReactionHeat(enthalpy / protons, protons, gases(equation, substances), row.text("equation"), sources));
         } catch (IllegalArgumentException e) {
             problems.add(row.problem("equation", e.getMessage()));
             return Optional.empty();
         }
+    }
+
+    private static Map<String, Integer> gases(ReactionEquation equation, Map<String, Row> substances) {
+        Map<String, Integer> gases = new LinkedHashMap<>();
+        equation.coefficients().forEach((id, count) -> {
+            if (count > 0 && id.endsWith("(g)")) {
+                gases.put(substances.get(id).text("name"), count);
+            }
+        });
+        return gases;
     }
 
     /** What should have been there, or empty text. */
@@ -127,6 +146,11 @@ public final class Enthalpies {
         if (!imbalance.isEmpty()) {
             return "both sides to balance; the right one differs by " + imbalance;
         }
-        return equation.coefficients().getOrDefault(donor, 0) < 0 ? "" : "the donor " + donor + " on the left side";
+        if (equation.coefficients().getOrDefault(donor, 0) >= 0) {
+            return "the donor " + donor + " on the left side";
+        }
+        boolean oneBase = equation.coefficients().entrySet().stream()
+                .allMatch(term -> term.getValue() >= -1 || term.getKey().equals(donor));
+        return oneBase ? "" : "one formula unit of the base";
     }
 }

@@ -3,6 +3,7 @@ package lyate.bench;
 import java.util.Locale;
 import java.util.Optional;
 import java.util.OptionalDouble;
+import lyate.stock.Acid;
 import lyate.stock.Base;
 import lyate.stock.Base.Strength;
 
@@ -32,6 +33,11 @@ public record Portion(double milliMole, OptionalDouble grams, OptionalDouble mil
         }
         String how = titrated.isPresent() ? "titrated" : "by the label";
         return of(milliMole, base.molarMass(), strength, base.density(), base.form().equals("liquid"), how);
+    }
+
+    /** An acid as supplied. */
+    public static Portion of(Acid acid, double milliMole) {
+        return of(milliMole, acid.molarMass(), acid.strength(), acid.density(), acid.form().equals("liquid"), "by the label");
     }
 
     private static Portion of(double milliMole, double molarMass, Optional<Strength> strength, OptionalDouble density,

@@ -9,6 +9,7 @@ import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.HashSet;
+import java.util.Map;
 import java.util.Set;
 import lyate.bench.Enthalpies.Donor;
 import lyate.stock.UnknownNameException;
@@ -51,6 +52,12 @@ class EnthalpiesTest {
     }
 
     @Test
+    void theGasIsReadOffTheEquation() throws UnknownNameException {
+        assertEquals(Map.of("hydrogen", 2), enthalpies.of(Reviews.STOCK.base("cah2"), Donor.WATER).orElseThrow().gases());
+        assertEquals(Map.of(), enthalpies.of(Reviews.STOCK.base("naoh"), Donor.ACID).orElseThrow().gases());
+    }
+
+    @Test
     void everyRowNamesABaseOnTheShelfAndEverySubstanceIsUsed() {
         Set<String> used = new HashSet<>();
         for (Row row : Table.read(Enthalpies.REACTIONS, TableFolders.packaged()).rows()) {
@@ -66,6 +73,7 @@ class EnthalpiesTest {
     void anEquationThatDoesNotBalanceIsRefusedWithWhatIsOff(@TempDir Path folder) throws IOException {
         assertRefused(folder, "NaH(s) + 2 H2O(l) -> NaOH(s) + H2(g)", "{H=-2, O=-1}");
         assertRefused(folder, "NaH(s) + H2O(l) -> NaOH(s) + D2(g)", "it has no D2(g)");
+        assertRefused(folder, "2 NaH(s) + 2 H2O(l) -> 2 NaOH(s) + 2 H2(g)", "one formula unit of the base");
         assertRefused(folder, "NaH(s) + H2O(l)", "two sides with -> between them");
         assertRefused(folder, "NaH(s) + H+(aq) -> Na+(aq) + H2(g)", "the donor H2O(l) on the left side");
         assertRefused(folder, "NaH(s) + H2O(l) -> NaOH(s) + half H2(g)", "at most a whole number in front");
