@@ -11,6 +11,7 @@ import java.util.EnumMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.stream.Stream;
 import lyate.stock.Base;
 import lyate.stock.Solvent;
 import lyate.stock.Stockroom;
@@ -24,7 +25,8 @@ import lyate.table.TableProblem;
 /**
  * What handling a base can do to people: the rows of {@code base-hazards.csv}.
  *
- * <p>General rows come first: of all rows of one finding kind that fit, the last one decides. No finding means only that
+ * <p>General rows come first: of all rows of one finding kind that fit, the last one decides; rows about the solvent alone
+ * (no base named) and rows about the base do so apart. No finding means only that
  * the table has no row, never that a step is safe. Immutable; safe to share between threads.
  */
 public final class BaseHazards {
@@ -76,22 +78,23 @@ public final class BaseHazards {
      * @param protonTaken whether the base is protonated in the step, by the substrate, the solvent or moisture
      */
     public List<Finding> of(Base base, Solvent solvent, double celsius, boolean protonTaken) {
-        return deciding(base, solvent, celsius, protonTaken).values().stream().filter(rule -> rule.severity().isPresent())
+        return deciding(base, solvent, celsius, protonTaken).stream().filter(rule -> rule.severity().isPresent())
                 .map(rule -> new Finding(rule.severity().orElseThrow(), rule.kind(), RuleCells.fill(rule.sentence(), base, solvent),
                         List.of(rule.precaution(), STANDING_LINE), List.of(), rule.source()))
                 .sorted(Comparator.comparing(Finding::severity)).toList();
     }
 
-    /** The row that decides for each kind of finding. */
-    Map<FindingKind, Rule> deciding(Base base, Solvent solvent, double celsius, boolean protonTaken) {
-        Map<FindingKind, Rule> deciding = new EnumMap<>(FindingKind.class);
+    /** The rows that decide, for each kind of finding one about the base and one about the solvent alone. */
+    List<Rule> deciding(Base base, Solvent solvent, double celsius, boolean protonTaken) {
+        Map<FindingKind, Rule> aboutBase = new EnumMap<>(FindingKind.class);
+        Map<FindingKind, Rule> aboutSolvent = new EnumMap<>(FindingKind.class);
         for (Rule rule : rules) {
             if ((protonTaken || !rule.needsProton()) && rule.base().holdsFor(base)
                     && rule.surroundings().holdFor(solvent, celsius)) {
-                deciding.put(rule.kind(), rule);
+                (rule.base().families().isEmpty() ? aboutSolvent : aboutBase).put(rule.kind(), rule);
             }
         }
-        return deciding;
+        return Stream.concat(aboutBase.values().stream(), aboutSolvent.values().stream()).toList();
     }
 
     List<Rule> rules() {

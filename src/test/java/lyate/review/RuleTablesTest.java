@@ -75,9 +75,9 @@ class RuleTablesTest {
     @MethodSource("hazards")
     void aHazardIsRaisedByItsHitAlone(BaseHazards.Rule rule) throws UnknownNameException {
         assertTrue(HAZARDS.deciding(base(rule.hit(), 0), solvent(rule.hit(), 1), number(rule.hit(), 2), rule.needsProton())
-                .containsValue(rule), rule.id() + " is not what decides for " + rule.hit());
+                .contains(rule), rule.id() + " is not what decides for " + rule.hit());
         assertFalse(HAZARDS.deciding(base(rule.miss(), 0), solvent(rule.miss(), 1), number(rule.miss(), 2), true)
-                .containsValue(rule), rule.id() + " is raised by " + rule.miss());
+                .contains(rule), rule.id() + " is raised by " + rule.miss());
     }
 
     /**
