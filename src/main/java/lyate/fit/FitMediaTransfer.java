@@ -41,14 +41,16 @@ public final class FitMediaTransfer {
 
     private static final String FITTED = "fitted";
     private static final List<String> HUBS = List.of("water", "dmso");
-    private static final List<String> CATIONIC = List.of("ammonium", "anilinium", "pyridinium", "oxonium");
-    private static final List<String> NEUTRAL = List.of("carboxylic-acid", "phenol", "alcohol", "nh-acid", "sh-acid",
-            "ch-acid", "ch-acid-stabilised", "hydrocarbon", "ph-acid");
+    private static final List<String> CATIONIC = List.of("ammonium", "tertiary-ammonium", "amidinium", "anilinium",
+            "pyridinium", "phosphonium", "oxonium");
+    private static final List<String> NEUTRAL = List.of("carboxylic-acid", "phenol", "alcohol", "oxime", "nh-acid", "sh-acid",
+            "ch-acid", "ch-acid-stabilised", "nitro-ch-acid", "hydrocarbon", "ph-acid");
     private static final int ENOUGH = 3;
     /** How far a slope may lie from 1 before looking at any acid. */
     private static final double SLOPE_SPREAD = 0.4;
-    /** How far the slope of a family may lie from that of its group. */
-    private static final double FAMILY_SPREAD = 0.2;
+    /** How far the slope of a family may lie from the common one: anions differ much in how they are solvated. */
+    private static final double NEUTRAL_SPREAD = 0.45;
+    private static final double CATIONIC_SPREAD = 0.15;
     /** A line with a larger error, pKa units, says nothing. */
     private static final double LARGEST_ERROR = 4;
 
@@ -155,7 +157,7 @@ public final class FitMediaTransfer {
     private Optional<MediaRelation> ownLine(String from, String to, String family, double slope) {
         List<Point> own = points(from, to, family);
         return own.size() < ENOUGH ? Optional.empty() : Optional.of(relation(from, to, family,
-                LineFit.through(own, slope, FAMILY_SPREAD), own, FITTED + " on acids of this family measured in both media"));
+                LineFit.through(own, slope, CATIONIC.contains(family) ? CATIONIC_SPREAD : NEUTRAL_SPREAD), own, FITTED + " on acids of this family measured in both media"));
     }
 
     /** The line through all acids of the group, for its families that have too few members. */

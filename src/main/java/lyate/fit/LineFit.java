@@ -61,6 +61,7 @@ record LineFit(double slope, double intercept, double standardError, int points)
         return new LineFit(slope, intercept, spread(residuals(points, slope, intercept), weights), points.size());
     }
 
+    /** Spread of a further point: the line itself is uncertain, and few points tell little of their spread. */
     private static double spread(double[] residuals, double[] weights) {
         double squares = 0;
         double weight = 0;
@@ -68,9 +69,9 @@ record LineFit(double slope, double intercept, double standardError, int points)
             squares += weights[i] * residuals[i] * residuals[i];
             weight += weights[i];
         }
-        double freedom = Math.max(1, weight - 2);
-        double few = Math.sqrt(1 + 2.0 / residuals.length) * (1 + 1 / freedom);
-        return Math.max(LEAST_ERROR, few * Math.sqrt(squares / Math.max(1, weight - 1)));
+        double freedom = Math.max(1, weight - 1.5);
+        double few = Math.sqrt(1 + 1.5 / residuals.length) * (1 + 0.5 / freedom);
+        return Math.max(LEAST_ERROR, few * Math.sqrt(squares / freedom));
     }
 
     private static double[] residuals(List<Point> points, double slope, double intercept) {
