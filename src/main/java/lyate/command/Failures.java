@@ -1,15 +1,16 @@
 package lyate.command;
 
 import java.io.IOException;
-import java.nio.file.AccessDeniedException;
-import java.nio.file.NoSuchFileException;
 import java.io.UncheckedIOException;
 import java.nio.charset.CharacterCodingException;
+import java.nio.file.AccessDeniedException;
+import java.nio.file.NoSuchFileException;
 import lyate.sheet.SheetException;
 import lyate.table.TableException;
 import picocli.CommandLine;
 import picocli.CommandLine.ParameterException;
 import picocli.CommandLine.ParseResult;
+import picocli.CommandLine.UnmatchedArgumentException;
 
 /** Turns whatever stops a command into words and an exit code. */
 final class Failures {
@@ -23,6 +24,7 @@ final class Failures {
         CommandLine command = problem.getCommandLine();
         String name = command.getCommandSpec().qualifiedName();
         command.getErr().println(name + ": " + problem.getMessage());
+        UnmatchedArgumentException.printSuggestions(problem, command.getErr());
         command.getErr().println("See '" + name + " --help'.");
         return WRONG_USAGE;
     }

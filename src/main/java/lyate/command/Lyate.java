@@ -27,7 +27,7 @@ public final class Lyate {
                 .addSubcommand(new AccuracyCommand(terminal))
                 .addSubcommand(new TablesCommand(terminal));
         command.setOut(terminal.outWriter()).setErr(terminal.errWriter())
-                .setCaseInsensitiveEnumValuesAllowed(true)
+                .registerConverter(Format.class, new Format.Converter())
                 .setParameterExceptionHandler(Failures::wrongUsage)
                 .setExecutionExceptionHandler(Failures::failed);
         int code = command.execute(arguments);

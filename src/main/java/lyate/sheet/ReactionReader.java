@@ -53,14 +53,15 @@ public final class ReactionReader {
     }
 
     private Molecule substrate(List<String> reactants, List<String> notSubstrate) throws MoleculeException {
-        MoleculeException reason = new MoleculeException("the reaction has no reactant");
+        if (reactants.isEmpty()) {
+            throw new MoleculeException("the reaction has no reactant");
+        }
+        MoleculeException reason = new MoleculeException("the reaction has no reactant besides base and solvent");
         for (String reactant : reactants) {
             try {
-                Molecule molecule = molecules.read(reactant);
-                if (!notSubstrate.contains(molecule.canonicalKey())) {
-                    return molecule;
+                if (!notSubstrate.contains(key(reactant))) {
+                    return molecules.read(reactant);
                 }
-                reason = new MoleculeException("the reaction has no reactant besides base and solvent");
             } catch (MoleculeException e) {
                 reason = e;
             }
