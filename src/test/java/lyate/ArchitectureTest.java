@@ -1,55 +1,66 @@
 package lyate;
 
-import static com.tngtech.archunit.library.Architectures.layeredArchitecture;
+import static com.tngtech.archunit.lang.syntax.ArchRuleDefinition.noClasses;
 
+import com.tngtech.archunit.core.domain.JavaClasses;
+import com.tngtech.archunit.core.importer.ClassFileImporter;
 import com.tngtech.archunit.core.importer.ImportOption;
-import com.tngtech.archunit.junit.AnalyzeClasses;
-import com.tngtech.archunit.junit.ArchTest;
-import com.tngtech.archunit.lang.ArchRule;
-import com.tngtech.archunit.lang.syntax.ArchRuleDefinition;
+import java.util.List;
+import org.junit.jupiter.api.Test;
+import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.MethodSource;
 
-/** Holds the package arrows of docs and DEVELOPERS.md. */
-@AnalyzeClasses(packages = "lyate", importOptions = ImportOption.DoNotIncludeTests.class)
+/** Holds the package arrows drawn in DEVELOPERS.md. */
 class ArchitectureTest {
 
-    @ArchTest
-    static final ArchRule packagesDependOneWay = layeredArchitecture().consideringOnlyDependenciesInLayers()
-            .withOptionalLayers(true)
-            .layer("table").definedBy("lyate.table")
-            .layer("molecule").definedBy("lyate.molecule")
-            .layer("stock").definedBy("lyate.stock")
-            .layer("site").definedBy("lyate.site")
-            .layer("acidity").definedBy("lyate.acidity..")
-            .layer("fit").definedBy("lyate.fit")
-            .layer("flask").definedBy("lyate.flask")
-            .layer("review").definedBy("lyate.review")
-            .layer("bench").definedBy("lyate.bench")
-            .layer("sheet").definedBy("lyate.sheet")
-            .layer("report").definedBy("lyate.report")
-            .layer("command").definedBy("lyate.command")
-            .layer("window").definedBy("lyate.window")
-            .whereLayer("window").mayOnlyBeAccessedByLayers("command")
-            .whereLayer("command").mayNotBeAccessedByAnyLayer()
-            .whereLayer("fit").mayOnlyBeAccessedByLayers("command")
-            .whereLayer("report").mayOnlyBeAccessedByLayers("command", "window")
-            .whereLayer("sheet").mayOnlyBeAccessedByLayers("report", "command", "window")
-            .whereLayer("bench").mayOnlyBeAccessedByLayers("sheet", "report", "command", "window")
-            .whereLayer("review").mayOnlyBeAccessedByLayers("bench", "sheet", "report", "command", "window")
-            .whereLayer("flask").mayOnlyBeAccessedByLayers("review", "bench", "sheet", "report", "command", "window")
-            .whereLayer("acidity").mayOnlyBeAccessedByLayers("fit", "flask", "review", "bench", "sheet", "report", "command", "window")
-            .whereLayer("site").mayOnlyBeAccessedByLayers("acidity", "fit", "flask", "review", "bench", "sheet", "report", "command", "window")
-            .whereLayer("stock").mayOnlyBeAccessedByLayers("site", "acidity", "fit", "flask", "review", "bench", "sheet", "report", "command", "window")
-            .because("text becomes a verdict in one direction, and a reader can follow it");
+    /** Each package may use those before it, never those after it. */
+    private static final List<String> ORDER = List.of("table", "molecule", "stock", "site", "acidity", "flask", "fit",
+            "review", "bench", "sheet", "report", "window", "command");
 
-    @ArchTest
-    static final ArchRule onlyMoleculeKnowsTheToolkit = ArchRuleDefinition.noClasses()
-            .that().resideOutsideOfPackages("lyate.molecule..", "lyate.window..")
-            .should().dependOnClassesThat().resideInAPackage("org.openscience.cdk..")
-            .because("rules accept only our own perceived molecule");
+    private static final JavaClasses PROGRAM = new ClassFileImporter()
+            .withImportOption(new ImportOption.DoNotIncludeTests()).importPackages("lyate");
 
-    @ArchTest
-    static final ArchRule onlyTheWindowKnowsSwing = ArchRuleDefinition.noClasses()
-            .that().resideOutsideOfPackages("lyate.window..", "lyate.command..")
-            .should().dependOnClassesThat().resideInAPackage("javax.swing..")
-            .because("engine and command line run without a display");
+    static List<String> packages() {
+        return ORDER.subList(0, ORDER.size() - 1);
+    }
+
+    @ParameterizedTest
+    @MethodSource("packages")
+    void aPackageKnowsOnlyThoseBeforeIt(String name) {
+        String[] later = ORDER.subList(ORDER.indexOf(name) + 1, ORDER.size()).stream()
+                .map(ArchitectureTest::named).toArray(String[]::new);
+        noClasses().that().resideInAPackage(named(name)).should().dependOnClassesThat().resideInAnyPackage(later)
+                .because("text becomes a verdict in one direction, and a reader can follow it").check(PROGRAM);
+    }
+
+    @Test
+    void theFlaskIsPureNumbers() {
+        noClasses().that().resideInAPackage(named("flask")).should().dependOnClassesThat()
+                .resideInAnyPackage(named("table"), named("molecule"), named("stock"), named("site"), named("acidity"))
+                .because("a solver sees amounts and pKa values, never a table").check(PROGRAM);
+    }
+
+    @Test
+    void theProgramRunsWithoutTheFit() {
+        noClasses().that().resideOutsideOfPackage(named("fit")).should().dependOnClassesThat().resideInAPackage(named("fit"))
+                .because("coefficients are tables by the time the program runs").check(PROGRAM);
+    }
+
+    @Test
+    void onlyTheMoleculePackageKnowsTheToolkit() {
+        noClasses().that().resideOutsideOfPackage(named("molecule")).should().dependOnClassesThat()
+                .resideInAPackage("org.openscience.cdk..")
+                .because("rules accept only our own perceived molecule").check(PROGRAM);
+    }
+
+    @Test
+    void onlyTheWindowKnowsSwing() {
+        noClasses().that().resideOutsideOfPackage(named("window")).should().dependOnClassesThat()
+                .resideInAnyPackage("javax.swing..", "com.formdev..")
+                .because("engine and command line run without a display").check(PROGRAM);
+    }
+
+    private static String named(String name) {
+        return "lyate." + name + "..";
+    }
 }
