@@ -18,6 +18,10 @@ record Donor(ProtonSite site, String label, Comparison comparison, double toTemp
         return comparison.logK() * toTemperature;
     }
 
+    Donor withAdvantage(double other) {
+        return new Donor(site, label, comparison, toTemperature, other);
+    }
+
     /** log10 K with the kinetic advantage: what decides whose proton goes first. */
     double effectiveLogK() {
         return logK() + advantage;

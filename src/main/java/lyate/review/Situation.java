@@ -10,13 +10,15 @@ import java.util.List;
  * @param donors          substrate sites, the one whose proton goes first in front
  * @param intended        the one meant, an element of {@code donors}
  * @param shares          how the protons are shared out at equilibrium
+ * @param orders          which of two C–H sites goes first, where the tables know
  * @param verdict         the verdict from the equilibria
  */
 record Situation(Step step, WorkingBase workingBase, List<Donor> donors, Donor intended, ProtonShares shares,
-                 Verdict verdict) {
+                 List<KineticControl.Order> orders, Verdict verdict) {
 
     Situation {
         donors = List.copyOf(donors);
+        orders = List.copyOf(orders);
     }
 
     /** Sites of the substrate that the base reaches before the intended one. */

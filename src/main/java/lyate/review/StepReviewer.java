@@ -28,6 +28,7 @@ public final class StepReviewer implements Reviewer {
     private final SideReactions sideReactions;
     private final BaseSolventRules solventRules;
     private final BaseHazards hazards;
+    private final KineticControl kinetics;
 
     private StepReviewer(TableFolders folders, Stockroom stockroom, SiteFinder finder, AcidityEstimator acidity) {
         this.solventRules = BaseSolventRules.load(folders, stockroom);
@@ -36,6 +37,7 @@ public final class StepReviewer implements Reviewer {
         this.water = waterOf(stockroom);
         this.sideReactions = SideReactions.load(folders, stockroom);
         this.hazards = BaseHazards.load(folders, stockroom);
+        this.kinetics = new KineticControl(KineticPreferences.load(folders, stockroom));
     }
 
     /**
@@ -51,7 +53,9 @@ public final class StepReviewer implements Reviewer {
     @Override
     public Review review(Step step) throws ReviewException {
         WorkingBase base = workingBases.of(step);
-        List<Donor> sites = donors.of(step, base);
+        List<Donor> atEquilibrium = donors.of(step, base);
+        List<KineticControl.Order> orders = kinetics.orders(step, base, atEquilibrium);
+        List<Donor> sites = KineticControl.ahead(atEquilibrium, orders);
         Donor intended = Donors.intended(step, sites);
         ProtonShares shares = StepFlask.settle(step, base, sites, List.of(), workingBases.logK(base, water, step.solvent()));
         List<Transfer> transfers = new Transfers(step, shares).of(sites);
@@ -59,7 +63,8 @@ public final class StepReviewer implements Reviewer {
 
         World world = World.of(step, base, sites, intended);
         Map<Verdict, Double> probabilities = withSideReactions(odds.of(sites, world), reactions);
-        Situation situation = new Situation(step, base, sites, intended, shares, VerdictOdds.verdict(probabilities));
+        Situation situation = new Situation(step, base, sites, intended, shares, orders,
+                VerdictOdds.verdict(probabilities));
         return new ReviewWriter(situation, world, probabilities, transfers).write(findings(situation, reactions));
     }
 
@@ -82,6 +87,7 @@ public final class StepReviewer implements Reviewer {
         Step step = situation.step();
         List<Finding> findings = new ArrayList<>();
         EquilibriumFindings.rules().forEach(rule -> findings.addAll(rule.find(situation)));
+        SiteFindings.rules().forEach(rule -> findings.addAll(rule.find(situation)));
         ScaleFindings.rules().forEach(rule -> findings.addAll(rule.find(situation)));
         reactions.forEach(reaction -> findings.add(reaction.finding()));
         solventRules.of(step.base(), step.solvent(), step.temperatureCelsius()).stream()

@@ -1,0 +1,67 @@
+package lyate.review;
+
+import java.util.ArrayList;
+import java.util.Comparator;
+import java.util.List;
+import java.util.Optional;
+import lyate.review.KineticPreference.Control;
+
+/** Applies what is known about which C–H proton goes first to the donors of a step. */
+final class KineticControl {
+
+    /** log10 units by which a kinetically favoured site leads its rival: both are tabulated as an order, not as a ratio. */
+    private static final double LEAD = 2;
+
+    private final KineticPreferences preferences;
+
+    KineticControl(KineticPreferences preferences) {
+        this.preferences = preferences;
+    }
+
+    /**
+     * A preference that holds between two sites of the substrate.
+     *
+     * @param rule   the row
+     * @param winner label of the site whose proton goes first
+     * @param loser  label of the other
+     */
+    record Order(KineticPreference rule, String winner, String loser) {}
+
+    /** The orders that hold among the sites the base reaches. */
+    List<Order> orders(Step step, WorkingBase base, List<Donor> donors) {
+        List<Donor> reached = donors.stream().filter(donor -> donor.logK() > VerdictRule.NONE).toList();
+        List<Order> orders = new ArrayList<>();
+        for (Donor winner : reached) {
+            for (Donor loser : reached) {
+                preference(step, base, winner, loser).ifPresent(rule -> orders.add(new Order(rule, winner.label(), loser.label())));
+            }
+        }
+        return orders;
+    }
+
+    private Optional<KineticPreference> preference(Step step, WorkingBase base, Donor winner, Donor loser) {
+        return winner == loser ? Optional.empty() : base.shelfBase().flatMap(taking -> preferences.preference(step.substrate(),
+                winner.site().atom(), loser.site().atom(), taking, step.temperatureCelsius(), step.solvent()));
+    }
+
+    /** The donors with the favoured ones ahead, the first to go in front; equilibrium orders need no push. */
+    static List<Donor> ahead(List<Donor> donors, List<Order> orders) {
+        List<Donor> moved = new ArrayList<>(donors);
+        // Weakest rivals first, so that a lead over a rival that was itself pushed is a lead over where it ended.
+        List<Order> byLoser = orders.stream().filter(order -> order.rule().control() == Control.RATE)
+                .sorted(Comparator.comparingDouble(order -> find(donors, order.loser()).logK())).toList();
+        for (Order order : byLoser) {
+            Donor winner = find(moved, order.winner());
+            double needed = find(moved, order.loser()).effectiveLogK() + LEAD - winner.effectiveLogK();
+            if (needed > 0) {
+                moved.set(moved.indexOf(winner), winner.withAdvantage(winner.advantage() + needed));
+            }
+        }
+        moved.sort(Comparator.comparingDouble(Donor::effectiveLogK).reversed());
+        return moved;
+    }
+
+    private static Donor find(List<Donor> donors, String label) {
+        return donors.stream().filter(donor -> donor.label().equals(label)).findFirst().orElseThrow();
+    }
+}
