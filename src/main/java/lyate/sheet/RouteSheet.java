@@ -106,6 +106,22 @@ public record RouteSheet(SheetHeader header, List<Line> lines, Dialect dialect, 
         return new RouteSheet(header, fewer, dialect, head, tail);
     }
 
+    /**
+     * The sheet with its rows in another order, each with the comment lines before it; rows are numbered anew.
+     *
+     * @param order index of the present row at every place; rows left out are dropped
+     */
+    public RouteSheet withOrder(List<Integer> order) {
+        List<Line> sorted = new ArrayList<>();
+        for (int from : order) {
+            Line line = lines.get(from);
+            SheetRow row = line.row();
+            String text = line.text().endsWith("\n") || line.text().endsWith("\r") ? line.text() : line.text() + dialect.lineEnd();
+            sorted.add(new Line(new SheetRow(header, sorted.size() + 1, row.line(), row.cells(), row.problem()), line.lead(), text));
+        }
+        return new RouteSheet(header, sorted, dialect, head, tail);
+    }
+
     private RouteSheet withColumn(String column) {
         List<String> names = new ArrayList<>(header.names());
         names.add(column);
