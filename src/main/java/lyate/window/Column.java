@@ -6,6 +6,7 @@ import java.awt.Rectangle;
 import javax.swing.JComponent;
 import javax.swing.JPanel;
 import javax.swing.Scrollable;
+import javax.swing.SwingUtilities;
 
 /** Makes what it holds as wide as the pane that scrolls it. */
 final class Column extends JPanel implements Scrollable {
@@ -15,6 +16,17 @@ final class Column extends JPanel implements Scrollable {
     Column(JComponent content) {
         super(new BorderLayout());
         add(content);
+    }
+
+    /** Another width means another height. */
+    @Override
+    @SuppressWarnings("deprecation")
+    public void reshape(int x, int y, int width, int height) {
+        boolean wider = width != getWidth();
+        super.reshape(x, y, width, height);
+        if (wider) {
+            SwingUtilities.invokeLater(this::revalidate);
+        }
     }
 
     @Override

@@ -43,6 +43,7 @@ final class StackLayout implements LayoutManager {
                 continue;
             }
             child.setSize(width, Math.max(1, child.getHeight()));
+            layOut(child);
             int height = child.getPreferredSize().height;
             if (move) {
                 child.setBounds(insets.left, y, width, height);
@@ -50,6 +51,16 @@ final class StackLayout implements LayoutManager {
             y += height + gap;
         }
         return y - (parent.getComponentCount() > 0 ? gap : 0) + insets.bottom;
+    }
+
+    /** Nested text must know its width before anybody asks for its height. */
+    private static void layOut(Component component) {
+        if (component instanceof Container container) {
+            container.doLayout();
+            for (Component child : container.getComponents()) {
+                layOut(child);
+            }
+        }
     }
 
     @Override

@@ -1,6 +1,5 @@
 package lyate.window;
 
-import java.math.BigDecimal;
 import java.util.EnumMap;
 import java.util.Map;
 import java.util.Optional;
@@ -8,47 +7,67 @@ import lyate.molecule.Molecule;
 import lyate.molecule.MoleculeException;
 import lyate.molecule.MoleculeReader;
 import lyate.review.Step;
+import lyate.sheet.Quantity;
+import lyate.sheet.Reaction;
+import lyate.sheet.ReactionReader;
+import lyate.sheet.UsualWater;
 import lyate.stock.Base;
 import lyate.stock.Solvent;
 import lyate.stock.Stockroom;
 import lyate.stock.UnknownNameException;
 
-/** Turns typed text into a step, or says by field what stands in the way. Pure; safe to share between threads. */
+/**
+ * Turns typed text into a step, or says by field what stands in the way. Where a field is empty it means what an empty cell
+ * of a sheet means. Pure; safe to share between threads.
+ */
 final class StepReader {
-
-    private static final Range EQUIVALENTS = new Range(0, 100);
-    private static final Range TEMPERATURE = new Range(-120, 250);
-    private static final Range CONCENTRATION = new Range(1e-6, 30);
-    private static final Range WATER = new Range(0, 1e6);
 
     private final MoleculeReader molecules;
     private final Stockroom stockroom;
+    private final ReactionReader reactions;
 
     StepReader(MoleculeReader molecules, Stockroom stockroom) {
         this.molecules = molecules;
         this.stockroom = stockroom;
+        this.reactions = new ReactionReader(molecules, stockroom);
     }
 
     StepReading read(StepText text) {
         Map<StepField, String> problems = new EnumMap<>(StepField.class);
-        Molecule substrate = molecule(text, StepField.SUBSTRATE, problems);
-        Base base = base(text.get(StepField.BASE), problems);
-        Solvent solvent = solvent(text.get(StepField.SOLVENT), problems);
-        double equivalents = number(text, StepField.EQUIVALENTS, EQUIVALENTS, problems);
-        double temperature = number(text, StepField.TEMPERATURE, TEMPERATURE, problems);
-        double concentration = number(text, StepField.CONCENTRATION, CONCENTRATION, problems);
-        double water = number(text, StepField.WATER, WATER, problems);
+        Optional<Reaction> reaction = reaction(text.get(StepField.SUBSTRATE), problems);
+        Molecule substrate = reaction.map(Reaction::substrate).orElseGet(() -> molecule(text, StepField.SUBSTRATE, problems));
+        Base base = base(text.get(StepField.BASE), reaction, problems);
+        Solvent solvent = solvent(text.get(StepField.SOLVENT), reaction, problems);
+        double equivalents = number(text, StepField.EQUIVALENTS, Quantity.EQUIVALENTS, lyate.sheet.StepReader.USUAL_EQUIVALENTS, problems);
+        double temperature = number(text, StepField.TEMPERATURE, Quantity.TEMPERATURE, lyate.sheet.StepReader.USUAL_TEMPERATURE, problems);
+        double concentration = number(text, StepField.CONCENTRATION, Quantity.CONCENTRATION, lyate.sheet.StepReader.USUAL_CONCENTRATION, problems);
+        double water = number(text, StepField.WATER, Quantity.WATER_PPM, UsualWater.ppm(solvent), problems);
         Optional<Molecule> partner = text.get(StepField.PARTNER).isEmpty() ? Optional.empty()
                 : Optional.ofNullable(molecule(text, StepField.PARTNER, problems));
         if (!problems.isEmpty()) {
             return new StepReading(Optional.empty(), problems);
         }
         Optional<String> site = Optional.of(text.site()).filter(label -> substrate.atomLabelled(label).isPresent());
-        return new StepReading(Optional.of(new Step("1", substrate, site, base, equivalents, solvent, temperature,
+        return new StepReading(Optional.of(new Step("", substrate, site, base, equivalents, solvent, temperature,
                 concentration, water, partner)), problems);
     }
 
+    private Optional<Reaction> reaction(String text, Map<StepField, String> problems) {
+        if (!StepCells.isReaction(text)) {
+            return Optional.empty();
+        }
+        try {
+            return Optional.of(reactions.read(text));
+        } catch (MoleculeException e) {
+            problems.put(StepField.SUBSTRATE, e.getMessage());
+            return Optional.empty();
+        }
+    }
+
     private Molecule molecule(StepText text, StepField field, Map<StepField, String> problems) {
+        if (problems.containsKey(field)) {
+            return null;
+        }
         if (text.get(field).isEmpty()) {
             problems.put(field, "type or paste a structure");
             return null;
@@ -61,7 +80,11 @@ final class StepReader {
         }
     }
 
-    private Base base(String name, Map<StepField, String> problems) {
+    private Base base(String name, Optional<Reaction> reaction, Map<StepField, String> problems) {
+        Optional<Base> drawn = reaction.flatMap(Reaction::base);
+        if (name.isEmpty() && drawn.isPresent()) {
+            return drawn.get();
+        }
         try {
             if (!name.isEmpty()) {
                 return stockroom.base(name);
@@ -73,7 +96,11 @@ final class StepReader {
         return null;
     }
 
-    private Solvent solvent(String name, Map<StepField, String> problems) {
+    private Solvent solvent(String name, Optional<Reaction> reaction, Map<StepField, String> problems) {
+        Optional<Solvent> drawn = reaction.flatMap(Reaction::solvent);
+        if (name.isEmpty() && drawn.isPresent()) {
+            return drawn.get();
+        }
         try {
             if (!name.isEmpty()) {
                 return stockroom.solvent(name);
@@ -85,24 +112,13 @@ final class StepReader {
         return null;
     }
 
-    private static double number(StepText text, StepField field, Range range, Map<StepField, String> problems) {
-        String typed = text.get(field).replace(',', '.').replace('\u2212', '-');
-        try {
-            double value = Double.parseDouble(typed);
-            if (value >= range.low() && value <= range.high()) {
-                return value;
-            }
-        } catch (NumberFormatException e) {
-            // falls through to the same sentence as a number out of range
+    private static double number(StepText text, StepField field, Quantity quantity, double usual, Map<StepField, String> problems) {
+        if (text.get(field).isEmpty()) {
+            return usual;
         }
-        problems.put(field, "a number, " + range.words() + " " + field.unit());
-        return Double.NaN;
-    }
-
-    /** Sane limits of a number, both included. */
-    private record Range(double low, double high) {
-        String words() {
-return BigDecimal.valueOf(low).stripTrailingZeros().toPlainString() + " to " + BigDecimal.valueOf(high).stripTrailingZeros().toPlainString();
-        }
+        return quantity.parse(text.get(field)).orElseGet(() -> {
+            problems.put(field, quantity.expected());
+            return Double.NaN;
+        });
     }
 }

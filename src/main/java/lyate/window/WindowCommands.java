@@ -4,6 +4,8 @@ import java.awt.Toolkit;
 import java.awt.datatransfer.StringSelection;
 import java.io.File;
 import java.io.IOException;
+import java.nio.file.Path;
+import java.util.List;
 import javax.swing.JFileChooser;
 import javax.swing.JFrame;
 import javax.swing.JOptionPane;
@@ -13,25 +15,90 @@ final class WindowCommands implements WindowMenu.Commands {
 
     private final JFrame frame;
     private final Workbench bench;
+    private final SheetDocument document;
+    private final SheetFiles files;
     private final Theme theme;
     private final WindowMemory memory;
 
-    WindowCommands(JFrame frame, Workbench bench, Theme theme, WindowMemory memory) {
+    WindowCommands(JFrame frame, Workbench bench, SheetDocument document, SheetFiles files, Theme theme, WindowMemory memory) {
         this.frame = frame;
         this.bench = bench;
+        this.document = document;
+        this.files = files;
         this.theme = theme;
         this.memory = memory;
     }
 
     @Override
-    public void newStep() {
-        bench.open(bench.strip().text().with(StepField.SUBSTRATE, "").withSite(""));
+    public void newSheet() {
+        files.startNew();
         bench.strip().box(StepField.SUBSTRATE).field().requestFocusInWindow();
     }
 
     @Override
     public void openDemo() {
-        bench.open(StepText.demo());
+        files.openDemo();
+    }
+
+    @Override
+    public void open() {
+        files.open();
+    }
+
+    @Override
+    public void open(Path file) {
+        files.open(file);
+    }
+
+    @Override
+    public List<Path> recent() {
+        return memory.recent();
+    }
+
+    @Override
+    public void save() {
+        files.save();
+    }
+
+    @Override
+    public void saveAs() {
+        files.saveAs();
+    }
+
+    @Override
+    public void undo() {
+        document.undo();
+    }
+
+    @Override
+    public void redo() {
+        document.redo();
+    }
+
+    @Override
+    public void addStep() {
+        document.change(document.state().added());
+        bench.strip().box(StepField.SUBSTRATE).field().requestFocusInWindow();
+    }
+
+    @Override
+    public void duplicateStep() {
+        document.change(document.state().duplicated());
+    }
+
+    @Override
+    public void deleteStep() {
+        document.change(document.state().removed());
+    }
+
+    @Override
+    public void moveStep(int by) {
+        document.change(document.state().moved(by));
+    }
+
+    @Override
+    public void goToStep(int by) {
+        document.select(document.state().selected() + by);
     }
 
     @Override
@@ -58,7 +125,7 @@ final class WindowCommands implements WindowMenu.Commands {
     @Override
     public void copySmiles() {
         bench.shown().ifPresent(shown -> Toolkit.getDefaultToolkit().getSystemClipboard().setContents(
-                new StringSelection(shown.review().step().substrate().input()), null));
+                new StringSelection(shown.review().step().substrate().canonicalKey()), null));
     }
 
     @Override
@@ -78,17 +145,19 @@ final class WindowCommands implements WindowMenu.Commands {
     }
 
     @Override
-    public void about() {
-        PageWindow.open(frame, "About Lyate", "about.html", theme);
-    }
-
-    @Override
     public void guide() {
         PageWindow.open(frame, "Guide", "guide.html", theme);
     }
 
     @Override
+    public void about() {
+        PageWindow.open(frame, "About Lyate", "about.html", theme);
+    }
+
+    @Override
     public void quit() {
-        frame.dispose();
+        if (files.mayLeave()) {
+            frame.dispose();
+        }
     }
 }

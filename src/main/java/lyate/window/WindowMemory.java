@@ -9,6 +9,7 @@ import java.io.Writer;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.nio.file.StandardCopyOption;
+import java.util.List;
 import java.util.Locale;
 import java.util.Optional;
 import java.util.Properties;
@@ -19,6 +20,8 @@ import javax.swing.JFrame;
  * written only means that nothing is remembered.
  */
 final class WindowMemory {
+
+    private static final int MOST_RECENT = 8;
 
     private final Path file;
     private final Properties properties = new Properties();
@@ -50,6 +53,23 @@ final class WindowMemory {
         }
         String config = System.getenv("XDG_CONFIG_HOME");
         return (config == null || config.isEmpty() ? home.resolve(".config") : Path.of(config)).resolve("lyate");
+    }
+
+    /** Where copies of unsaved sheets are kept. */
+    Path recoveryFolder() {
+        return file.resolveSibling("recovery");
+    }
+
+    /** Sheets used lately, latest first; only those that still exist. */
+    List<Path> recent() {
+        return get("recent", "").lines().filter(line -> !line.isBlank()).map(Path::of).filter(Files::isRegularFile).toList();
+    }
+
+    /** Notes that a sheet was used. */
+    void used(Path sheet) {
+        String path = sheet.toAbsolutePath().toString();
+        List<String> others = get("recent", "").lines().filter(line -> !line.isBlank() && !line.equals(path)).limit(MOST_RECENT - 1).toList();
+        put("recent", path + "\n" + String.join("\n", others));
     }
 
     String get(String key, String otherwise) {

@@ -5,23 +5,52 @@ import com.formdev.flatlaf.util.UIScale;
 import java.awt.Toolkit;
 import java.awt.event.InputEvent;
 import java.awt.event.KeyEvent;
+import java.nio.file.Path;
+import java.util.List;
 import javax.swing.JCheckBoxMenuItem;
 import javax.swing.JMenu;
 import javax.swing.JMenuBar;
 import javax.swing.JMenuItem;
 import javax.swing.KeyStroke;
+import javax.swing.event.MenuEvent;
+import javax.swing.event.MenuListener;
 
 /** The menu bar. */
 final class WindowMenu extends JMenuBar {
 
     private static final int COMMAND = InputEvent.CTRL_DOWN_MASK;
     private static final int SHIFT = InputEvent.SHIFT_DOWN_MASK;
+    private static final int ALT = InputEvent.ALT_DOWN_MASK;
 
     /** What the menu can ask of the window. */
     interface Commands {
-        void newStep();
+        void newSheet();
 
         void openDemo();
+
+        void open();
+
+        void open(Path file);
+
+        List<Path> recent();
+
+        void save();
+
+        void saveAs();
+
+        void undo();
+
+        void redo();
+
+        void addStep();
+
+        void duplicateStep();
+
+        void deleteStep();
+
+        void moveStep(int by);
+
+        void goToStep(int by);
 
         void copyPicture();
 
@@ -42,48 +71,111 @@ final class WindowMenu extends JMenuBar {
         void quit();
     }
 
+    private final transient Commands commands;
+
     WindowMenu(Commands commands, boolean dark) {
-        JMenu step = menu("Step", 'S');
-        step.add(item("New", 'N', KeyStroke.getKeyStroke(KeyEvent.VK_N, COMMAND), commands::newStep));
-        step.add(item("Show the example", 'E', null, commands::openDemo));
-        step.addSeparator();
-        step.add(item("Save picture as\u2026", 'P', KeyStroke.getKeyStroke(KeyEvent.VK_E, COMMAND), commands::savePicture));
-        step.addSeparator();
-        step.add(item("Quit", 'Q', KeyStroke.getKeyStroke(KeyEvent.VK_Q, COMMAND), commands::quit));
-
-        JMenu edit = menu("Edit", 'E');
-        edit.add(item("Copy substrate as picture", 'P', KeyStroke.getKeyStroke(KeyEvent.VK_C, COMMAND | SHIFT), commands::copyPicture));
-        edit.add(item("Copy substrate as SMILES", 'S', KeyStroke.getKeyStroke(KeyEvent.VK_S, COMMAND | SHIFT), commands::copySmiles));
-
-        JMenu view = menu("View", 'V');
-        JCheckBoxMenuItem darkItem = new JCheckBoxMenuItem("Dark", dark);
-        darkItem.setMnemonic('D');
-        darkItem.setAccelerator(KeyStroke.getKeyStroke(KeyEvent.VK_D, COMMAND));
-        darkItem.addActionListener(event -> commands.setDark(darkItem.isSelected()));
-        view.add(darkItem);
-        view.addSeparator();
-        view.add(item("Larger", 'L', KeyStroke.getKeyStroke(KeyEvent.VK_PLUS, COMMAND), () -> zoom(commands, UIScale.zoomIn())));
-        view.add(item("Smaller", 'S', KeyStroke.getKeyStroke(KeyEvent.VK_MINUS, COMMAND), () -> zoom(commands, UIScale.zoomOut())));
-        view.add(item("Usual size", 'U', KeyStroke.getKeyStroke(KeyEvent.VK_0, COMMAND), () -> zoom(commands, UIScale.zoomReset())));
-        view.addSeparator();
-        view.add(item("Whole molecule", 'W', KeyStroke.getKeyStroke(KeyEvent.VK_F, COMMAND), commands::fit));
-
-        JMenu help = menu("Help", 'H');
-        help.add(item("Guide", 'G', KeyStroke.getKeyStroke("F1"), commands::guide));
-        help.add(item("About Lyate", 'A', null, commands::about));
-        add(step);
-        add(edit);
-        add(view);
-        add(help);
+        this.commands = commands;
+        add(sheet());
+        add(edit());
+        add(step());
+        add(view(dark));
+        add(help());
     }
 
-    private static void zoom(Commands commands, boolean changed) {
+    private JMenu sheet() {
+        JMenu menu = menu("Sheet", 'S');
+        menu.add(item("New", 'N', key(KeyEvent.VK_N, COMMAND), commands::newSheet));
+        menu.add(item("Open\u2026", 'O', key(KeyEvent.VK_O, COMMAND), commands::open));
+        menu.add(recent());
+        menu.add(item("Show the example", 'E', null, commands::openDemo));
+        menu.addSeparator();
+        menu.add(item("Save", 'S', key(KeyEvent.VK_S, COMMAND), commands::save));
+        menu.add(item("Save as\u2026", 'A', key(KeyEvent.VK_S, COMMAND | SHIFT), commands::saveAs));
+        menu.add(item("Save picture as\u2026", 'P', key(KeyEvent.VK_E, COMMAND), commands::savePicture));
+        menu.addSeparator();
+        menu.add(item("Quit", 'Q', key(KeyEvent.VK_Q, COMMAND), commands::quit));
+        return menu;
+    }
+
+    /** Filled whenever it opens. */
+    private JMenu recent() {
+        JMenu menu = menu("Recent", 'R');
+        menu.addMenuListener(new MenuListener() {
+            @Override
+            public void menuSelected(MenuEvent event) {
+                menu.removeAll();
+                commands.recent().forEach(file -> menu.add(item(file.getFileName() + "  \u2013  " + file.getParent(), '\0', null, () -> commands.open(file))));
+                if (menu.getItemCount() == 0) {
+                    menu.add(item("none yet", '\0', null, () -> {})).setEnabled(false);
+                }
+            }
+
+            @Override
+            public void menuDeselected(MenuEvent event) {}
+
+            @Override
+            public void menuCanceled(MenuEvent event) {}
+        });
+        return menu;
+    }
+
+    private JMenu edit() {
+        JMenu menu = menu("Edit", 'E');
+        menu.add(item("Undo", 'U', key(KeyEvent.VK_Z, COMMAND), commands::undo));
+        menu.add(item("Redo", 'R', key(KeyEvent.VK_Z, COMMAND | SHIFT), commands::redo));
+        menu.addSeparator();
+        menu.add(item("Copy substrate as picture", 'P', key(KeyEvent.VK_P, COMMAND | SHIFT), commands::copyPicture));
+        menu.add(item("Copy substrate as SMILES", 'S', key(KeyEvent.VK_C, COMMAND | SHIFT), commands::copySmiles));
+        return menu;
+    }
+
+    private JMenu step() {
+        JMenu menu = menu("Step", 'T');
+        menu.add(item("Add", 'A', key(KeyEvent.VK_ENTER, COMMAND), commands::addStep));
+        menu.add(item("Duplicate", 'D', key(KeyEvent.VK_D, COMMAND | SHIFT), commands::duplicateStep));
+        menu.add(item("Delete", 'E', key(KeyEvent.VK_DELETE, COMMAND | SHIFT), commands::deleteStep));
+        menu.addSeparator();
+        menu.add(item("Previous", 'P', key(KeyEvent.VK_PAGE_UP, COMMAND), () -> commands.goToStep(-1)));
+        menu.add(item("Next", 'N', key(KeyEvent.VK_PAGE_DOWN, COMMAND), () -> commands.goToStep(1)));
+        menu.add(item("Move up", 'U', key(KeyEvent.VK_PAGE_UP, COMMAND | ALT), () -> commands.moveStep(-1)));
+        menu.add(item("Move down", 'W', key(KeyEvent.VK_PAGE_DOWN, COMMAND | ALT), () -> commands.moveStep(1)));
+        return menu;
+    }
+
+    private JMenu view(boolean dark) {
+        JMenu menu = menu("View", 'V');
+        JCheckBoxMenuItem darkItem = new JCheckBoxMenuItem("Dark", dark);
+        darkItem.setMnemonic('D');
+        darkItem.setAccelerator(key(KeyEvent.VK_D, COMMAND));
+        darkItem.addActionListener(event -> commands.setDark(darkItem.isSelected()));
+        menu.add(darkItem);
+        menu.addSeparator();
+        menu.add(item("Larger", 'L', key(KeyEvent.VK_PLUS, COMMAND), () -> zoom(UIScale.zoomIn())));
+        menu.add(item("Smaller", 'S', key(KeyEvent.VK_MINUS, COMMAND), () -> zoom(UIScale.zoomOut())));
+        menu.add(item("Usual size", 'U', key(KeyEvent.VK_0, COMMAND), () -> zoom(UIScale.zoomReset())));
+        menu.addSeparator();
+        menu.add(item("Whole molecule", 'W', key(KeyEvent.VK_F, COMMAND), commands::fit));
+        return menu;
+    }
+
+    private JMenu help() {
+        JMenu menu = menu("Help", 'H');
+        menu.add(item("Guide", 'G', KeyStroke.getKeyStroke("F1"), commands::guide));
+        menu.add(item("About Lyate", 'A', null, commands::about));
+        return menu;
+    }
+
+    private void zoom(boolean changed) {
         if (changed) {
             FlatLaf.updateUI();
             commands.zoomed(UIScale.getZoomFactor());
         } else {
             Toolkit.getDefaultToolkit().beep();
         }
+    }
+
+    private static KeyStroke key(int code, int modifiers) {
+        return KeyStroke.getKeyStroke(code, modifiers);
     }
 
     private static JMenu menu(String name, char mnemonic) {

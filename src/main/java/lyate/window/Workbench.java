@@ -2,6 +2,7 @@ package lyate.window;
 
 import java.awt.BorderLayout;
 import java.awt.CardLayout;
+import java.awt.Dimension;
 import java.math.BigDecimal;
 import java.util.List;
 import java.util.Optional;
@@ -10,16 +11,22 @@ import javax.swing.JComponent;
 import javax.swing.JOptionPane;
 import javax.swing.JPanel;
 import javax.swing.JSplitPane;
+import javax.swing.Timer;
 import lyate.molecule.MoleculeReader;
 import lyate.stock.Base;
 
 /** All parts of the window put together: fields above, pictures and findings in the middle, the drawer below. */
 final class Workbench extends JPanel implements Drawer.Wishes, AutoCloseable {
 
+    /** A result that takes longer is announced. */
+    private static final int PATIENCE_MILLIS = 300;
     private static final String PICTURES = "pictures";
     private static final String EMPTY = "empty";
 
+    private final SheetDocument document;
     private final StepStrip strip;
+    private final StepsPanel steps;
+    private final Pane stepsPane;
     private final SubstrateView substrate;
     private final Pane substratePane;
     private final AcidityLadder ladder;
@@ -29,13 +36,17 @@ final class Workbench extends JPanel implements Drawer.Wishes, AutoCloseable {
     private final StepPresenter presenter;
     private final CardLayout cards = new CardLayout();
     private final JPanel middle = new JPanel(cards);
+    private final Timer patience;
+    private StepText asked;
     private Runnable painted;
     private Optional<Shown> shown = Optional.empty();
 
-    Workbench(Theme theme, Engine engine, StepText first) {
+    Workbench(Theme theme, Engine engine, SheetDocument document) {
         super(new BorderLayout());
-        presenter = new StepPresenter(new StepReader(new MoleculeReader(), engine.stockroom()), engine.reviewer(), this::receive);
-        strip = new StepStrip(theme, engine.stockroom(), first, presenter::submit);
+        this.document = document;
+        StepReader reader = new StepReader(new MoleculeReader(), engine.stockroom());
+        presenter = new StepPresenter(reader, engine.reviewer(), this::receive);
+        strip = new StepStrip(theme, engine.stockroom(), document.state().text(), document::edit);
         substrate = new SubstrateView(theme, this::intend);
         substratePane = new Pane("Substrate", substrate, theme);
         ladder = new AcidityLadder(theme, this::intend, this::take);
@@ -44,10 +55,18 @@ final class Workbench extends JPanel implements Drawer.Wishes, AutoCloseable {
         findings = new FindingsPanel(theme, substrate::highlight);
         drawer = new Drawer(theme, engine, this);
         middle.add(pictures(theme), PICTURES);
-        middle.add(new EmptyView(theme, example -> open(strip.text().with(StepField.SUBSTRATE, example).withSite(""))), EMPTY);
+        middle.add(new EmptyView(theme, example -> document.edit(strip.text().with(StepField.SUBSTRATE, example).withSite(""))), EMPTY);
         add(strip, BorderLayout.NORTH);
+        steps = new StepsPanel(theme, document, reader, engine.reviewer());
+        stepsPane = new Pane("Steps", steps, theme);
+        stepsPane.setPreferredSize(new Dimension(theme.space("steps.width"), 0));
+        stepsPane.setVisible(document.state().sheet().rows().size() > 1);
+        add(stepsPane, BorderLayout.WEST);
         add(middle);
-        presenter.submit(first);
+        patience = new Timer(PATIENCE_MILLIS, event -> substratePane.note("working \u2026"));
+        patience.setRepeats(false);
+        document.onChange(this::follow);
+        presenter.submit(document.state().text());
     }
 
     private JComponent pictures(Theme theme) {
@@ -74,16 +93,24 @@ final class Workbench extends JPanel implements Drawer.Wishes, AutoCloseable {
         return split;
     }
 
-    /** Opens a step in the fields and reviews it. */
-    void open(StepText step) {
-        strip.show(step);
-        presenter.submit(step);
+    /** Shows what the document says now: after typing the fields say it already, after undo or another row they do not. */
+    private void follow() {
+        stepsPane.setVisible(document.state().sheet().rows().size() > 1);
+        StepText text = document.state().text();
+        if (!text.equals(strip.text())) {
+            strip.show(text);
+        }
+        if (!text.equals(asked)) {
+            asked = text;
+            presenter.submit(text);
+            patience.restart();
+        }
     }
 
     /** Makes a site the intended one. */
     @Override
     public void intend(String site) {
-        open(strip.text().withSite(site));
+        document.edit(strip.text().withSite(site));
     }
 
     @Override
@@ -93,12 +120,12 @@ final class Workbench extends JPanel implements Drawer.Wishes, AutoCloseable {
 
     @Override
     public void take(Base base) {
-        open(strip.text().with(StepField.BASE, base.name()));
+        document.edit(strip.text().with(StepField.BASE, base.name()));
     }
 
     @Override
     public void equivalents(double equivalents) {
-        open(strip.text().with(StepField.EQUIVALENTS, BigDecimal.valueOf(equivalents).stripTrailingZeros().toPlainString()));
+        document.edit(strip.text().with(StepField.EQUIVALENTS, BigDecimal.valueOf(equivalents).stripTrailingZeros().toPlainString()));
     }
 
     @Override
@@ -107,6 +134,7 @@ final class Workbench extends JPanel implements Drawer.Wishes, AutoCloseable {
     }
 
     private void receive(Outcome outcome) {
+        patience.stop();
         strip.report(outcome);
         substratePane.note(outcome.shown().isEmpty() ? "the last step that could be read" : "");
         if (outcome.text().get(StepField.SUBSTRATE).isEmpty()) {
@@ -148,6 +176,10 @@ final class Workbench extends JPanel implements Drawer.Wishes, AutoCloseable {
         return substrate;
     }
 
+    SheetDocument document() {
+        return document;
+    }
+
     FindingsPanel findings() {
         return findings;
     }
@@ -162,6 +194,7 @@ final class Workbench extends JPanel implements Drawer.Wishes, AutoCloseable {
 
     @Override
     public void close() {
+        steps.close();
         drawer.close();
         presenter.close();
     }

@@ -6,6 +6,8 @@ import java.awt.Dimension;
 import java.awt.Frame;
 import java.awt.event.WindowAdapter;
 import java.awt.event.WindowEvent;
+import java.nio.file.Path;
+import java.util.Optional;
 import java.util.concurrent.ExecutionException;
 import java.util.function.Supplier;
 import javax.swing.JFrame;
@@ -23,6 +25,8 @@ public final class WorkbenchFrame extends JFrame {
     private final transient WindowMemory memory;
     private final transient Theme theme;
     private transient Workbench bench;
+    private transient SheetFiles files;
+    private transient Recovery recovery;
 
     private WorkbenchFrame(WindowMemory memory) {
         super("Lyate");
@@ -33,8 +37,15 @@ public final class WorkbenchFrame extends JFrame {
         // Long enough to read how an estimate adds up.
         ToolTipManager.sharedInstance().setDismissDelay(60_000);
         setIconImages(AppIcon.images());
-        setDefaultCloseOperation(DISPOSE_ON_CLOSE);
+        setDefaultCloseOperation(DO_NOTHING_ON_CLOSE);
         addWindowListener(new WindowAdapter() {
+            @Override
+            public void windowClosing(WindowEvent event) {
+                if (files == null || files.mayLeave()) {
+                    dispose();
+                }
+            }
+
             @Override
             public void windowClosed(WindowEvent event) {
                 leave();
@@ -78,9 +89,15 @@ public final class WorkbenchFrame extends JFrame {
 
     private void fill(Engine engine) {
         getContentPane().removeAll();
-        bench = new Workbench(theme, engine, StepText.demo());
-        setJMenuBar(new WindowMenu(new WindowCommands(this, bench, theme, memory), theme.palette().dark()));
+        SheetDocument document = new SheetDocument(StepCells.sheetOf(StepText.demo()), System::nanoTime);
+        files = new SheetFiles(this, document, memory);
+        bench = new Workbench(theme, engine, document);
+        recovery = new Recovery(memory.recoveryFolder(), document);
+        setJMenuBar(new WindowMenu(new WindowCommands(this, bench, document, files, theme, memory), theme.palette().dark()));
+        document.onChange(() -> setTitle(title(document)));
+        setTitle(title(document));
         add(bench, BorderLayout.CENTER);
+        offerRecovery(document);
         revalidate();
         repaint();
     }
@@ -88,6 +105,24 @@ public final class WorkbenchFrame extends JFrame {
     /** Whether a review is on screen. */
     boolean reviewed() {
         return bench != null && bench.shown().isPresent();
+    }
+
+    private static String title(SheetDocument document) {
+        String name = document.file().map(file -> file.getFileName().toString()).orElse("new sheet");
+        return (document.isModified() ? "*" : "") + name + " \u2013 Lyate";
+    }
+
+    /** Asks about sheets that a crash left unsaved. */
+    private void offerRecovery(SheetDocument document) {
+        for (Path left : Recovery.leftBehind(memory.recoveryFolder(), Recovery::isRunning)) {
+            SwingUtilities.invokeLater(() -> {
+                int answer = JOptionPane.showConfirmDialog(this, "Lyate ended unexpectedly. Open the unsaved sheet it left?", "Lyate",
+                        JOptionPane.YES_NO_OPTION);
+                if (answer == JOptionPane.YES_OPTION && files.mayLeave()) {
+                    Recovery.take(left).ifPresent(sheet -> document.open(sheet, Optional.empty(), ""));
+                }
+            });
+        }
     }
 
     private void place() {
@@ -110,6 +145,7 @@ public final class WorkbenchFrame extends JFrame {
     private void leave() {
         if (bench != null) {
             bench.close();
+            recovery.close();
         }
         memory.save();
     }

@@ -24,7 +24,7 @@ final class Latency {
         SwingUtilities.invokeAndWait(() -> {
             Theme theme = new Theme(false);
             theme.install();
-            bench.set(new Workbench(theme, engine, StepText.demo().with(StepField.SUBSTRATE, STEM).withSite("")));
+            bench.set(new Workbench(theme, engine, Panels.document(StepText.demo().with(StepField.SUBSTRATE, STEM).withSite(""))));
             JFrame frame = new JFrame();
             frame.setContentPane(bench.get());
             frame.setSize(1500, 920);

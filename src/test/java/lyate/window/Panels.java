@@ -18,6 +18,11 @@ final class Panels {
         return new Engine(Stockroom.load(TableFolders.packaged()), new InventedReviewer(), Enthalpies.load(TableFolders.packaged()));
     }
 
+    /** A new sheet of one step. */
+    static SheetDocument document(StepText step) {
+        return new SheetDocument(StepCells.sheetOf(step), System::nanoTime);
+    }
+
     /** What the window would show for a typed step, judged by the invented reviewer. */
     static Shown shown(StepText text) {
         try {

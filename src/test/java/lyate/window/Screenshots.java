@@ -31,7 +31,7 @@ final class Screenshots {
         StepText demo = StepText.demo();
         screenshots.take("light", false, 1, 1500, 920, demo);
         screenshots.take("dose", true, 1, 1500, 920, demo, bench -> bench.drawer().setSelectedIndex(2));
-        screenshots.take("choice", false, 1, 1500, 920, demo, bench -> bench.drawer().setSelectedIndex(1));
+        if (arguments.length > 1) screenshots.take("choice", false, 1, 1500, 920, demo, bench -> bench.drawer().setSelectedIndex(1));
         screenshots.take("amounts", false, 1, 1500, 920, demo, bench -> bench.drawer().setSelectedIndex(3));
         screenshots.take("error", false, 1, 1200, 760, demo, bench -> {
             bench.strip().box(StepField.SUBSTRATE).field().setText("O=C(C1CCC1)Nc1ccc(C)c(O)c");
@@ -40,6 +40,12 @@ final class Screenshots {
         });
         screenshots.take("compare", false, 1, 1500, 920, demo, bench -> List.of("lda", "kotbu", "dbu").forEach(id ->
                 bench.ladder().compare(screenshots.stockroom.bases().stream().filter(base -> base.id().equals(id)).findFirst().orElseThrow())));
+        screenshots.take("sheet", false, 1, 1500, 920, demo, bench -> {
+            for (String base : List.of("LDA", "K2CO3", "DBU", "n-BuLi", "KOtBu", "Et3N")) {
+                bench.document().change(bench.document().state().duplicated());
+                bench.document().edit(bench.document().state().text().with(StepField.BASE, base));
+            }
+        });
         screenshots.take("dark", true, 1, 1500, 920, demo);
         screenshots.take("empty", false, 1, 1500, 920, demo.with(StepField.SUBSTRATE, ""));
         screenshots.take("double", false, 2, 2400, 1500, demo);
@@ -57,7 +63,7 @@ final class Screenshots {
             Theme theme = new Theme(dark);
             theme.install();
             UIScale.setZoomFactor(zoom);
-            bench.set(new Workbench(theme, engine, step));
+            bench.set(new Workbench(theme, engine, Panels.document(step)));
             frame.set(new JFrame(name));
             frame.get().setContentPane(bench.get());
             frame.get().setSize(new Dimension(width, height));

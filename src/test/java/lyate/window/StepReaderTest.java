@@ -27,7 +27,7 @@ class StepReaderTest {
 
     @ParameterizedTest
     @CsvSource({"SUBSTRATE,CC(", "SUBSTRATE,''", "BASE,unobtainium amide", "BASE,''", "SOLVENT,mud", "EQUIVALENTS,-1", "EQUIVALENTS,many",
-        "TEMPERATURE,900", "CONCENTRATION,0", "WATER,NaN", "PARTNER,CC("})
+        "TEMPERATURE,900", "CONCENTRATION,0", "WATER,NaN", "SUBSTRATE,>>CCO", "PARTNER,CC("})
     void whatCannotBeReadIsSaidAtItsField(StepField field, String text) {
         StepReading reading = reader.read(StepText.demo().with(field, text));
         assertTrue(reading.step().isEmpty());

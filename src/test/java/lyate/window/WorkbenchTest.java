@@ -6,21 +6,27 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 import static org.junit.jupiter.api.Assumptions.assumeFalse;
 
 import java.awt.GraphicsEnvironment;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.util.Optional;
 import java.util.concurrent.Callable;
 import java.util.concurrent.FutureTask;
 import java.util.function.Predicate;
 import javax.swing.JFrame;
 import javax.swing.SwingUtilities;
 import lyate.review.Verdict;
+import lyate.sheet.RouteSheet;
 import org.junit.jupiter.api.AfterEach;
 import org.junit.jupiter.api.BeforeEach;
 import org.junit.jupiter.api.Test;
+import org.junit.jupiter.api.io.TempDir;
 
 /** Drives the real window; needs a display, for example Xvfb. */
 class WorkbenchTest {
 
     private JFrame frame;
     private Workbench bench;
+    private SheetDocument document;
 
     @BeforeEach
     void openWindow() throws Exception {
@@ -28,7 +34,8 @@ class WorkbenchTest {
         onEventThread(() -> {
             Theme theme = new Theme(false);
             theme.install();
-            bench = new Workbench(theme, Panels.inventedEngine(), StepText.demo());
+            document = Panels.document(StepText.demo());
+            bench = new Workbench(theme, Panels.inventedEngine(), document);
             frame = new JFrame();
             frame.setContentPane(bench);
             frame.setSize(1500, 920);
@@ -87,6 +94,40 @@ class WorkbenchTest {
         });
         waitFor(bench -> bench.shown().orElseThrow().review().intendedSite().equals("O14"));
         assertTrue(onEventThread(() -> bench.shown().orElseThrow().intended().orElseThrow().intended()));
+    }
+
+    @Test
+    void undoBringsBackFieldsAndReview() throws Exception {
+        type(StepField.BASE, "LDA");
+        waitFor(bench -> bench.shown().orElseThrow().review().step().base().id().equals("lda"));
+        onEventThread(() -> {
+            document.undo();
+            return null;
+        });
+        waitFor(bench -> bench.shown().orElseThrow().review().step().base().id().equals("nah"));
+        assertEquals("NaH", onEventThread(() -> bench.strip().box(StepField.BASE).text()));
+    }
+
+    @Test
+    void aSheetIsSavedAndOpenedAgain(@TempDir Path folder) throws Exception {
+        Path file = folder.resolve("sheet.csv");
+        onEventThread(() -> {
+            document.change(document.state().duplicated());
+            document.edit(document.state().text().with(StepField.SOLVENT, "THF"));
+            document.state().sheet().save(file);
+            document.saved(file);
+            document.open(RouteSheet.read(file), Optional.of(file), Files.readString(file));
+            document.select(1);
+            return null;
+        });
+        waitFor(bench -> bench.shown().orElseThrow().review().step().solvent().id().equals("thf"));
+        assertEquals("THF", onEventThread(() -> bench.strip().box(StepField.SOLVENT).text()));
+    }
+
+    @Test
+    void anEmptyNumberMeansTheUsualOne() throws Exception {
+        type(StepField.TEMPERATURE, "");
+        waitFor(bench -> bench.shown().orElseThrow().review().step().temperatureCelsius() == 25);
     }
 
     private void type(StepField field, String text) throws Exception {
