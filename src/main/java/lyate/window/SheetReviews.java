@@ -1,6 +1,6 @@
 package lyate.window;
 
-import java.util.HashMap;
+import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
@@ -45,7 +45,7 @@ final class SheetReviews implements AutoCloseable {
 
     /** Judges the rows that are not judged yet. */
     void update(List<SheetRow> rows) {
-        Map<StepText, SheetRow> due = new HashMap<>();
+        Map<StepText, SheetRow> due = new LinkedHashMap<>();
         rows.forEach(row -> due.put(StepCells.text(row), row));
         judged.keySet().retainAll(due.keySet());
         due.keySet().removeAll(judged.keySet());
