@@ -33,7 +33,7 @@ final class EquilibriumFindings {
     private static List<Finding> unintended(Situation situation) {
         return situation.donors().stream().filter(donor -> donor != situation.intended())
                 .filter(donor -> situation.shares().percentTaken(donor) > LEFT_ALONE_PERCENT + smallExcess(situation))
-                .map(donor -> finding(situation.before().contains(donor) ? STOP : CAUTION,
+                .map(donor -> finding(severityOfLoss(situation, donor),
                         FindingKind.UNINTENDED_DEPROTONATION, donor,
                         say("%s (%s) loses %.0f %% of its protons as well.", donor.label(),
                                 donor.site().siteClass().name(), situation.shares().percentTaken(donor)),
@@ -45,6 +45,14 @@ final class EquilibriumFindings {
     private static double smallExcess(Situation situation) {
         double excess = situation.protonEquivalents() - situation.before().size() - 1;
         return excess > 0 && excess < NOTABLE_EXCESS ? 100 * excess : 0;
+    }
+
+    /** A proton that goes first is a stop, unless enough base was weighed in to take it and the one meant. */
+    private static Severity severityOfLoss(Situation situation, Donor donor) {
+        if (!situation.before().contains(donor)) {
+            return CAUTION;
+        }
+        return situation.verdict() == Verdict.SELECTIVE ? NOTE : STOP;
     }
 
     private static List<Finding> secondEquivalent(Situation situation) {
