@@ -36,7 +36,7 @@ import org.openjdk.jmh.annotations.Warmup;
 public class FlaskBenchmark {
 
     /** 30 heavy atoms: a peptide-like ketoester with acid, amide, phenol and amine sites. */
-    private static final String SUBSTRATE = "CCOC(=O)CC(=O)CNC(=O)C(Cc1ccc(O)cc1)NC(=O)CC(N)C(=O)O";
+    static final String SUBSTRATE = "CCOC(=O)CC(=O)CNC(=O)C(Cc1ccc(O)cc1)NC(=O)CC(N)C(=O)O";
 
     private final MoleculeReader reader = new MoleculeReader();
     private final Flask independent = flask(List.of());

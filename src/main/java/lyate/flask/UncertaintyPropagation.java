@@ -19,6 +19,8 @@ public final class UncertaintyPropagation {
     public static final int DEFAULT_POINTS = 512;
 
     private final int points;
+    /** Normal deviate in the middle of each of the equally probable cells that a coordinate visits once each. */
+    private final double[] deviates;
 
     /** With {@link #DEFAULT_POINTS} points. */
     public UncertaintyPropagation() {
@@ -35,6 +37,9 @@ public final class UncertaintyPropagation {
             throw new IllegalArgumentException(points + " points, expected a power of two");
         }
         this.points = points;
+        NormalDistribution normal = new NormalDistribution();
+        this.deviates = IntStream.range(0, points)
+                .mapToDouble(cell -> normal.inverseCumulativeProbability((cell + 0.5) / points)).toArray();
     }
 
     /**
@@ -52,14 +57,12 @@ public final class UncertaintyPropagation {
         }
         // The first Sobol coordinates are the most even ones: they go to the largest errors.
         SobolSequenceGenerator sobol = new SobolSequenceGenerator(largestFirst.length);
-        NormalDistribution normal = new NormalDistribution();
         Map<L, Integer> counts = new LinkedHashMap<>();
         for (int point = 0; point < points; point++) {
             double[] even = sobol.nextVector();
             double[] deviations = new double[sizes.length];
             for (int coordinate = 0; coordinate < largestFirst.length; coordinate++) {
-                // Half a cell further, so that each point stands for the middle of its cell and none lies at 0.
-                deviations[largestFirst[coordinate]] = normal.inverseCumulativeProbability(even[coordinate] + 0.5 / points);
+                deviations[largestFirst[coordinate]] = deviates[(int) (even[coordinate] * points)];
             }
             counts.merge(outcome.apply(errors.shifts(deviations)), 1, Integer::sum);
         }

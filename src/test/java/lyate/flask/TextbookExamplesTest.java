@@ -62,6 +62,19 @@ class TextbookExamplesTest {
                 PRINTED);
     }
 
+    /**
+     * Brown et al., Chemistry: The Central Science, "Polyprotic acids": 0.0037 M carbonic acid, Ka 4.3e-7 and 5.6e-11: pH 4.40,
+     * carbonate 5.6e-11 M; 0.020 M oxalic acid, Ka 5.9e-2 and 6.4e-5: pH 1.80, oxalate 6.4e-5 M (from memory).
+     */
+    @ParameterizedTest
+    @CsvSource({"carbonic acid, 0.0037, 4.3e-7, 5.6e-11, 4.40, 5.6e-11", "oxalic acid, 0.020, 5.9e-2, 6.4e-5, 1.80, 6.4e-5"})
+    void diproticAcids(String name, double molar, double k1, double k2, double printed, double dianion) {
+        Flask flask = Flask.of("water", ProtonHolder.stages(name, molar, 2, -Math.log10(k1), -Math.log10(k2)), water());
+        Equilibrium settled = ProtonBalance.solve(flask);
+        assertEquals(printed, settled.protonLevel(), PRINTED);
+        assertEquals(dianion, molar * settled.of(name).deprotonated(1), 0.02 * dianion);
+    }
+
     /** Skoog et al., Fundamentals of Analytical Chemistry, ch. 15: 0.100 M NaHCO3, K1 4.45e-7, K2 4.69e-11: pH 8.34 (from memory). */
     @Test
     void hydrogencarbonate() {

@@ -25,6 +25,25 @@ class UncertaintyPropagationTest {
         assertEquals(1, above.values().stream().mapToDouble(share -> share).sum(), 1e-15);
     }
 
+    /** Every coordinate meets every cell of equal probability once: mean 0 and, to the cell width, variance 1. */
+    @Test
+    void everyErrorHasItsOwnMeanAndVariance() {
+        double[] sigmas = {2, 1, 0.5, 3, 0.1, 1.5};
+        double[] sum = new double[6];
+        double[] squares = new double[6];
+        propagation.probabilities(PKaErrors.independent(sigmas), shift -> {
+            for (int value = 0; value < 6; value++) {
+                sum[value] += shift[value] / UncertaintyPropagation.DEFAULT_POINTS;
+                squares[value] += shift[value] * shift[value] / UncertaintyPropagation.DEFAULT_POINTS;
+            }
+            return true;
+        });
+        for (int value = 0; value < 6; value++) {
+            assertEquals(0, sum[value], 1e-12);
+            assertEquals(sigmas[value] * sigmas[value], squares[value], 0.01 * sigmas[value] * sigmas[value]);
+        }
+    }
+
     /** A difference of two independent values has √(σ1² + σ2²). */
     @Test
     void independentErrorsAddInQuadrature() {
