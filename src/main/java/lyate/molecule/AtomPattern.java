@@ -15,12 +15,12 @@ public final class AtomPattern {
 
     private final String smarts;
     private final RootFilter filter;
-    private final DfPattern pattern;
+    private final AtomTest test;
 
-    private AtomPattern(String smarts, RootFilter filter, DfPattern pattern) {
+    private AtomPattern(String smarts, RootFilter filter, AtomTest test) {
         this.smarts = smarts;
         this.filter = filter;
-        this.pattern = pattern;
+        this.test = test;
     }
 
     /**
@@ -35,7 +35,12 @@ public final class AtomPattern {
         }
         NestedPatterns.compile(query);
         RootFilter filter = RootFilter.of(((QueryAtom) query.getAtom(0)).getExpression());
-        return new AtomPattern(smarts, filter, DfPattern.findSubstructure(query));
+        return new AtomPattern(smarts, filter, PatternPlan.of(query).<AtomTest>map(plan -> plan::matches).orElse(byToolkit(query)));
+    }
+
+    private static AtomTest byToolkit(QueryAtomContainer query) {
+        DfPattern pattern = DfPattern.findSubstructure(query);
+        return (molecule, atom) -> pattern.matchesRoot(molecule.container().getAtom(atom));
     }
 
     private static QueryAtomContainer parse(String smarts) throws MoleculeException {
@@ -49,7 +54,7 @@ public final class AtomPattern {
 
     /** Whether the pattern fits with its first atom on {@code atom}. */
     public boolean matches(Molecule molecule, int atom) {
-        return filter.admits(molecule.rootCode(atom)) && pattern.matchesRoot(molecule.container().getAtom(atom));
+        return filter.admits(molecule.facts().rootCodes[atom]) && test.fits(molecule, atom);
     }
 
     /** The pattern as written. */

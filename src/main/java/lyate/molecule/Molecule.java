@@ -5,7 +5,6 @@ import java.util.List;
 import java.util.OptionalInt;
 import org.openscience.cdk.interfaces.IAtom;
 import org.openscience.cdk.interfaces.IAtomContainer;
-import org.openscience.cdk.interfaces.IBond;
 import org.openscience.cdk.interfaces.IStereoElement;
 
 /**
@@ -21,8 +20,7 @@ public final class Molecule {
     private final IAtomContainer container;
     private final int[] inputNumbers;
     private final long[] symmetryClasses;
-    private final int[][] neighbours;
-    private final int[] rootCodes;
+    private final AtomFacts facts;
     private final long quickHash;
     private final List<IAtomContainer> others;
     private final List<String> counterIons;
@@ -35,9 +33,8 @@ public final class Molecule {
         this.container = perceived.container();
         this.inputNumbers = perceived.inputNumbers();
         this.symmetryClasses = perceived.symmetryClasses();
-        this.neighbours = perceived.neighbours();
-        this.rootCodes = perceived.rootCodes();
-        this.quickHash = perceived.quickHash();
+        this.facts = perceived.facts();
+        this.quickHash = QuickHash.of(facts);
         this.others = List.copyOf(others);
         this.counterIons = others.stream().map(SmilesWriter::full).toList();
         this.warnings = List.copyOf(warnings);
@@ -55,7 +52,7 @@ public final class Molecule {
 
     /** Atomic number. */
     public int atomicNumber(int atom) {
-        return container.getAtom(atom).getAtomicNumber();
+        return facts.elements[atom];
     }
 
     /** Element symbol. */
@@ -65,45 +62,45 @@ public final class Molecule {
 
     /** Hydrogens bound to the atom, deuterium included. */
     public int hydrogens(int atom) {
-        return container.getAtom(atom).getImplicitHydrogenCount();
+        return facts.hydrogens[atom];
     }
 
     /** Formal charge. */
     public int charge(int atom) {
-        return container.getAtom(atom).getFormalCharge();
+        return facts.charges[atom];
     }
 
     /** Whether the atom belongs to an aromatic ring (Daylight model). */
     public boolean aromatic(int atom) {
-        return container.getAtom(atom).isAromatic();
+        return facts.aromatic[atom];
     }
 
     /** Whether the atom belongs to any ring. */
     public boolean inRing(int atom) {
-        return container.getAtom(atom).isInRing();
+        return facts.ringBonds[atom] > 0;
     }
 
     /** Indices of the bonded heavy atoms; a copy. */
     public int[] neighbours(int atom) {
-        return neighbours[atom].clone();
+        return facts.neighbours[atom].clone();
     }
 
     /** Bond order 1, 2 or 3 in the Kekule form, or 0 where the atoms are not bonded. */
     public int bondOrder(int first, int second) {
-        IBond bond = container.getBond(container.getAtom(first), container.getAtom(second));
-        return bond == null ? 0 : bond.getOrder().numeric();
+        int code = facts.bondCode(first, second);
+        return code < 0 ? 0 : AtomFacts.order(code);
     }
 
     /** Whether the bond belongs to an aromatic ring. */
     public boolean aromaticBond(int first, int second) {
-        IBond bond = container.getBond(container.getAtom(first), container.getAtom(second));
-        return bond != null && bond.isAromatic();
+        int code = facts.bondCode(first, second);
+        return code >= 0 && AtomFacts.isAromatic(code);
     }
 
     /** Whether the bond belongs to any ring. */
     public boolean ringBond(int first, int second) {
-        IBond bond = container.getBond(container.getAtom(first), container.getAtom(second));
-        return bond != null && bond.isInRing();
+        int code = facts.bondCode(first, second);
+        return code >= 0 && AtomFacts.isInRing(code);
     }
 
     /** Constitutionally equivalent atoms share this number. */
@@ -149,12 +146,12 @@ public final class Molecule {
 
     /** Bonds on the shortest path from one atom to every atom, by index. */
     public int[] distances(int from) {
-        return Paths.distances(neighbours, from);
+        return Paths.distances(facts.neighbours, from);
     }
 
     /** Size of the smallest ring through the atom; 0 where it is in none. */
     public int smallestRing(int atom) {
-        return inRing(atom) ? Paths.smallestRing(neighbours, atom) : 0;
+        return facts.smallestRing(atom);
     }
 
     /** Canonical SMILES of the substrate, configuration and isotopes included; reading it gives the same molecule. */
@@ -205,9 +202,9 @@ public final class Molecule {
         return warnings;
     }
 
-    /** What {@link RootFilter} looks at. */
-    int rootCode(int atom) {
-        return rootCodes[atom];
+    /** What patterns ask, for this package alone; nobody may change it. */
+    AtomFacts facts() {
+        return facts;
     }
 
     /** The prepared toolkit molecule, for this package alone; nobody may change it. */

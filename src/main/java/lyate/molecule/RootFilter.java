@@ -1,7 +1,6 @@
 package lyate.molecule;
 
 import java.util.BitSet;
-import org.openscience.cdk.interfaces.IAtom;
 import org.openscience.cdk.isomorphism.matchers.Expr;
 
 /**
@@ -43,12 +42,8 @@ final class RootFilter {
     }
 
     /** What the filter looks at, as one number. */
-    static int code(IAtom atom) {
-        return code(atom.getAtomicNumber(), atom.isAromatic(), Math.min(atom.getImplicitHydrogenCount(), MOST_HYDROGENS));
-    }
-
-    private static int code(int element, boolean aromatic, int hydrogens) {
-        return (element * (MOST_HYDROGENS + 1) + hydrogens) * 2 + (aromatic ? 1 : 0);
+    static int code(int element, boolean aromatic, int hydrogens) {
+        return (element * (MOST_HYDROGENS + 1) + Math.min(hydrogens, MOST_HYDROGENS)) * 2 + (aromatic ? 1 : 0);
     }
 
     private static int answer(Expr expression, int element, boolean aromatic, int hydrogens) {

@@ -4,8 +4,14 @@ import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertThrows;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
+import java.util.ArrayList;
+import java.util.List;
 import java.util.stream.IntStream;
 import java.util.stream.Stream;
+import lyate.site.SiteClasses;
+import lyate.table.Row;
+import lyate.table.Table;
+import lyate.table.TableFolders;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
@@ -39,11 +45,30 @@ class AtomPatternTest {
 
     @ParameterizedTest
     @ValueSource(strings = {"[*;!#6;!H0]", "[#6;!H0]", "[C,c;H1]", "[!C;!c]", "[CH3,NH2,OH]", "[$([CH2]C=O),$(c[nH])]",
-        "[!$([#6])]", "[R]", "[#7,#8;H0]", "[c,n;H1]", "[!H0;!H1]", "[OX2H1][CX4]", "*~*~*~[#8]"})
-    void answersAsTheToolkitDoesOverAllAtoms(String smarts) throws MoleculeException {
+        "[!$([#6])]", "[R]", "[#7,#8;H0]", "[c,n;H1]", "[!H0;!H1]", "[OX2H1][CX4]", "*~*~*~[#8]", "*1~*~*~*~*~*1", "C1CC1",
+        "[#6;R2]", "[#6;R3]", "[x3]", "[r5]", "[r;!r6]", "[*;v4]", "[D3]", "[X4]", "[+1]", "[-]", "[#6]-,:[#6]=,:[#6]", "*@*!@*",
+        "[C@H](N)C", "[13C]", "[OH].[NH2]", "([OH].[NH2])", "C/C=C/C", "[#6]=[#8]", "c-c", "c:c", "cc", "C=C-C=O", "[C:1][N:2]",
+        "[$([#6;$([#6]-[#7;!$([#7]=*)])]-[#8]),$([#7]~[#6]~[#7])]"})
+    void answersAsTheToolkitDoes(String smarts) throws MoleculeException {
+        compareWithToolkit(smarts, Examples.SMILES);
+    }
+
+    @Test
+    void rowsOfTheSiteClassesAnswerAsTheToolkitDoes() throws MoleculeException {
+        List<String> smiles = new ArrayList<>(Examples.SMILES);
+        List<Row> rows = Table.read(SiteClasses.SCHEMA, TableFolders.packaged()).rows();
+        for (int i = 0; i < rows.size(); i += 5) {
+            smiles.add(rows.get(i).text("hit"));
+        }
+        for (Row row : rows) {
+            compareWithToolkit(row.text("smarts"), smiles);
+        }
+    }
+
+    private void compareWithToolkit(String smarts, List<String> texts) throws MoleculeException {
         AtomPattern ours = AtomPattern.compile(smarts);
         SmartsPattern toolkit = SmartsPattern.create(smarts, SilentChemObjectBuilder.getInstance()).setPrepare(false);
-        for (String smiles : Examples.SMILES) {
+        for (String smiles : texts) {
             Molecule molecule = reader.read(smiles);
             boolean[] expected = new boolean[molecule.atomCount()];
             for (int[] match : toolkit.matchAll(molecule.container())) {
