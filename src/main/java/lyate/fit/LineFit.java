@@ -61,12 +61,15 @@ record LineFit(double slope, double intercept, double standardError, int points)
         return new LineFit(slope, intercept, spread(residuals(points, slope, intercept), weights), points.size());
     }
 
-    /** Spread of a further point: the line itself is uncertain, and few points tell little of their spread. */
+    /**
+     * Spread of a further point: the line itself is uncertain, and few points tell little of their spread. Outliers
+     * count more than in the line: odd acids will be met again.
+     */
     private static double spread(double[] residuals, double[] weights) {
         double squares = 0;
         double weight = 0;
         for (int i = 0; i < residuals.length; i++) {
-            squares += weights[i] * residuals[i] * residuals[i];
+            squares += Math.sqrt(weights[i]) * residuals[i] * residuals[i];
             weight += weights[i];
         }
         double freedom = Math.max(1, weight - 1.5);
