@@ -30,7 +30,7 @@ public record TableText(String file, List<String> lines) {
     private String excerpt(int line, String found) {
         StringBuilder excerpt = new StringBuilder();
         int place = line >= 1 && line <= lines.size() && !found.isEmpty() ? lines.get(line - 1).indexOf(found) : -1;
-        int from = Math.max(0, place + found.length() - WIDTH + 10);
+        int from = Math.max(0, Math.min(place, place + found.length() - WIDTH + 10));
         for (int number = Math.max(1, line - 1); number <= Math.min(lines.size(), line + 1) && line > 0; number++) {
             String mark = number == line ? ">" : " ";
             excerpt.append(String.format(Locale.ROOT, "%s%6d | %s\n", mark, number, cut(lines.get(number - 1), from)));

@@ -1,0 +1,25 @@
+package lyate.table;
+
+import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertThrows;
+import static org.junit.jupiter.api.Assertions.assertTrue;
+
+import java.io.IOException;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.util.List;
+import org.junit.jupiter.api.Test;
+import org.junit.jupiter.api.io.TempDir;
+
+class LongCellTest {
+
+    @Test
+    void aBadCellLongerThanTheExcerptIsStillShown(@TempDir Path folder) throws IOException {
+        String cell = "x".repeat(300);
+        Files.writeString(folder.resolve("colours.csv"), "# version: 1\nid,colour,source\na," + cell + ",none\n");
+        Schema schema = Schema.of("colours.csv", Column.text("id"), Column.word("colour", "red"), Column.text("source"));
+        TableException e = assertThrows(TableException.class, () -> Table.read(schema, new TableFolders(List.of(folder))));
+        assertEquals(1, e.problems().size());
+        assertTrue(e.getMessage().contains("colours.csv:3") && e.getMessage().contains("^"), e.getMessage());
+    }
+}
