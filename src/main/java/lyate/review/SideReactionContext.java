@@ -30,13 +30,13 @@ public record SideReactionContext(Base workingBase, List<Transfer> transfers, Op
 
     /** Equivalents of base left after every proton it can take for good; one proton an atom. */
     double leftAfterAllProtons(Step step) {
-        return step.equivalents() - transfers.stream()
+        return protonEquivalents(step) - transfers.stream()
                 .filter(transfer -> transfer.logK() >= TAKEN).mapToInt(transfer -> transfer.atoms().size()).sum();
     }
 
     /** Equivalents of base left after the protons that go before anything else can happen. */
     double leftAfterFastProtons(Step step) {
-        return step.equivalents() - transfers.stream()
+        return protonEquivalents(step) - transfers.stream()
                 .filter(transfer -> transfer.logK() >= TAKEN && fast(step, transfer))
                 .mapToInt(transfer -> transfer.atoms().size()).sum();
     }
@@ -44,6 +44,10 @@ public record SideReactionContext(Base workingBase, List<Transfer> transfers, Op
     /** The transfer from an atom, if it is a donor. */
     Optional<Transfer> from(int atom) {
         return transfers.stream().filter(transfer -> transfer.atoms().contains(atom)).findFirst();
+    }
+
+    private static double protonEquivalents(Step step) {
+        return step.equivalents() * step.base().protonsPerFormula();
     }
 
     private static boolean fast(Step step, Transfer transfer) {

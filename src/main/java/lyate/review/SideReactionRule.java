@@ -51,8 +51,6 @@ record SideReactionRule(String id, Agent agent, Target target, AtomPattern patte
         MATCHING_SOLVENT,
         /** The shown atom is the one meant to lose its proton. */
         INTENDED_ATOM,
-        /** The shown atom is not the one meant to lose its proton. */
-        NOT_INTENDED_ATOM,
         /** The shown atom is no stereocentre of stated configuration. */
         NO_STEREOCENTRE
     }

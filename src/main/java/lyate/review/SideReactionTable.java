@@ -73,7 +73,7 @@ final class SideReactionTable {
             try {
                 conditions.add(Condition.valueOf(upper(word)));
             } catch (IllegalArgumentException e) {
-                problems.add(row.problem("unless", "matching-alkoxide, matching-solvent, intended-atom, not-intended-atom or no-stereocentre"));
+                problems.add(row.problem("unless", "matching-alkoxide, matching-solvent, intended-atom or no-stereocentre"));
             }
         }
         return conditions;

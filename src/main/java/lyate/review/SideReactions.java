@@ -129,7 +129,6 @@ public final class SideReactions {
             case MATCHING_ALKOXIDE -> MatchingAlkoxide.at(molecule, atom, context.workingBase().conjugateAcid());
             case MATCHING_SOLVENT -> MatchingAlkoxide.at(molecule, atom, step.solvent().smiles());
             case INTENDED_ATOM -> intended;
-            case NOT_INTENDED_ATOM -> !intended;
             case NO_STEREOCENTRE -> !molecule.stereocentres().contains(atom);
         };
     }
