@@ -20,6 +20,8 @@ final class AtomFacts {
     final int[][] bondCodes;
     /** Made when first asked for; volatile, so that another thread sees it complete or not at all. */
     private volatile int[] smallestRings;
+    /** See {@link Surroundings}. */
+    final long[] surroundings;
 
     AtomFacts(IAtomContainer perceived) {
         int count = perceived.getAtomCount();
@@ -50,6 +52,7 @@ final class AtomFacts {
             add(filled, begin, end, bond);
             add(filled, end, begin, bond);
         }
+        surroundings = Surroundings.of(this);
     }
 
     private void add(int[] filled, int atom, int neighbour, IBond bond) {

@@ -15,11 +15,13 @@ public final class AtomPattern {
 
     private final String smarts;
     private final RootFilter filter;
+    private final long[] asked;
     private final AtomTest test;
 
-    private AtomPattern(String smarts, RootFilter filter, AtomTest test) {
+    private AtomPattern(String smarts, RootFilter filter, long[] asked, AtomTest test) {
         this.smarts = smarts;
         this.filter = filter;
+        this.asked = asked;
         this.test = test;
     }
 
@@ -35,7 +37,8 @@ public final class AtomPattern {
         }
         NestedPatterns.compile(query);
         RootFilter filter = RootFilter.of(((QueryAtom) query.getAtom(0)).getExpression());
-        return new AtomPattern(smarts, filter, PatternPlan.of(query).<AtomTest>map(plan -> plan::matches).orElse(byToolkit(query)));
+        AtomTest test = PatternPlan.of(query).<AtomTest>map(plan -> plan::matches).orElse(byToolkit(query));
+        return new AtomPattern(smarts, filter, Surroundings.askedBy(query), test);
     }
 
     private static AtomTest byToolkit(QueryAtomContainer query) {
@@ -54,7 +57,14 @@ public final class AtomPattern {
 
     /** Whether the pattern fits with its first atom on {@code atom}. */
     public boolean matches(Molecule molecule, int atom) {
-        return filter.admits(molecule.facts().rootCodes[atom]) && test.fits(molecule, atom);
+        AtomFacts facts = molecule.facts();
+        return filter.admits(facts.rootCodes[atom]) && Asked.answered(asked, facts.surroundings[atom])
+                && test.fits(molecule, atom);
+    }
+
+    /** Whether atoms of this {@link RootFilter#code} can be the first atom. */
+    boolean admits(int rootCode) {
+        return filter.admits(rootCode);
     }
 
     /** The pattern as written. */

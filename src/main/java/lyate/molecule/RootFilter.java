@@ -12,6 +12,9 @@ final class RootFilter {
     private static final int MOST_HYDROGENS = 5;
     private static final int ELEMENTS = 119;
 
+    /** Codes lie below this number. */
+    static final int CODES = ELEMENTS * (MOST_HYDROGENS + 1) * 2;
+
     /** Three answers, ordered so that minimum is "and" and maximum is "or". */
     private static final int NO = -1;
     private static final int OPEN = 0;

@@ -5,17 +5,32 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import lyate.molecule.LastMatch;
 import lyate.molecule.Molecule;
 
 /** Finds the proton sites of a molecule. Immutable; safe to share between threads. */
 public final class SiteFinder {
 
-    private final List<SiteClass> acids;
-    private final List<SiteClass> bases;
+    private final Rows acids;
+    private final Rows bases;
+
+    /** The rows of one role. */
+    private record Rows(List<SiteClass> classes, LastMatch patterns) {
+
+        static Rows of(SiteClasses classes, Role role) {
+            List<SiteClass> rows = classes.rows().stream().filter(row -> row.role() == role).toList();
+            return new Rows(rows, new LastMatch(rows.stream().map(SiteClass::pattern).toList()));
+        }
+
+        Optional<SiteClass> classOf(Molecule molecule, int atom) {
+            int row = patterns.index(molecule, atom);
+            return row < 0 ? Optional.empty() : Optional.of(classes.get(row));
+        }
+    }
 
     public SiteFinder(SiteClasses classes) {
-        this.acids = classes.rows().stream().filter(row -> row.role() == Role.ACID).toList();
-        this.bases = classes.rows().stream().filter(row -> row.role() == Role.BASE).toList();
+        this.acids = Rows.of(classes, Role.ACID);
+        this.bases = Rows.of(classes, Role.BASE);
     }
 
     /** Every site, acids before bases, each in the order of its lowest atom. */
@@ -33,9 +48,10 @@ public final class SiteFinder {
                 equivalents.computeIfAbsent(molecule.symmetryClass(atom), key -> new ArrayList<>()).add(atom);
             }
         }
+        Rows rows = role == Role.ACID ? acids : bases;
         List<ProtonSite> sites = new ArrayList<>();
         for (List<Integer> atoms : equivalents.values()) {
-            classOf(molecule, atoms.get(0), role).ifPresent(row -> sites.add(site(molecule, role, atoms, row)));
+            rows.classOf(molecule, atoms.get(0)).ifPresent(row -> sites.add(site(molecule, role, atoms, row)));
         }
         return sites;
     }
@@ -43,16 +59,5 @@ public final class SiteFinder {
     private static ProtonSite site(Molecule molecule, Role role, List<Integer> atoms, SiteClass row) {
         int hydrogens = role == Role.BASE ? atoms.size() : atoms.stream().mapToInt(molecule::hydrogens).sum();
         return new ProtonSite(role, atoms.get(0), atoms, hydrogens, row);
-    }
-
-    /** The last row that matches. */
-    private Optional<SiteClass> classOf(Molecule molecule, int atom, Role role) {
-        List<SiteClass> rows = role == Role.ACID ? acids : bases;
-        for (int i = rows.size() - 1; i >= 0; i--) {
-            if (rows.get(i).pattern().matches(molecule, atom)) {
-                return Optional.of(rows.get(i));
-            }
-        }
-        return Optional.empty();
     }
 }

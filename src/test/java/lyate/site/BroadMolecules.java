@@ -3,11 +3,12 @@ package lyate.site;
 import java.util.stream.Stream;
 
 /** Molecules a laboratory meets: medicines, amino acids, sugars, nucleobases, reagents, ligands, ions. */
-final class BroadMolecules {
+public final class BroadMolecules {
 
     private BroadMolecules() {}
 
-    static Stream<String> smiles() {
+    /** SMILES, one molecule each. */
+    public static Stream<String> smiles() {
         return """
                 CC(=O)Oc1ccccc1C(=O)O
                 CC(=O)Nc1ccc(O)cc1
