@@ -2,9 +2,14 @@ package lyate.command;
 
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.util.List;
 import java.util.Locale;
 import java.util.SortedSet;
 import java.util.concurrent.Callable;
+import java.util.function.Consumer;
+import lyate.acidity.IonisationEnthalpies;
+import lyate.bench.Enthalpies;
+import lyate.bench.QuenchHazards;
 import lyate.molecule.MoleculeReader;
 import lyate.review.StepReviewer;
 import lyate.table.NearestNames;
@@ -22,6 +27,10 @@ import picocli.CommandLine.Spec;
 @Command(name = "tables", mixinStandardHelpOptions = true, description = {
     "Lists the tables in use, or checks a folder of your own tables.", ""})
 final class TablesCommand implements Callable<Integer> {
+
+    /** Together they read every table once. */
+    private static final List<Consumer<TableFolders>> READERS = List.of(StepReviewer::load, MoleculeReader::load,
+            IonisationEnthalpies::load, Enthalpies::load, QuenchHazards::load);
 
     private final Terminal terminal;
 
@@ -65,13 +74,14 @@ final class TablesCommand implements Callable<Integer> {
                         + String.join(", ", NearestNames.of(name, known, 3)));
             }
         }
-        try {
-            TableFolders folders = TableFolders.overlaidBy(checked);
-            StepReviewer.load(folders);
-            MoleculeReader.load(folders);
-        } catch (TableException e) {
-            sound = false;
-            terminal.tell(e.getMessage());
+        TableFolders folders = TableFolders.overlaidBy(checked);
+        for (Consumer<TableFolders> reader : READERS) {
+            try {
+                reader.accept(folders);
+            } catch (TableException e) {
+                sound = false;
+                terminal.tell(e.getMessage());
+            }
         }
         if (sound) {
             terminal.outWriter().println("every table in " + checked + " can be used");
