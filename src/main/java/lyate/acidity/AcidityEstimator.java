@@ -10,14 +10,16 @@ import lyate.acidity.Acidity.Contribution;
 import lyate.acidity.Acidity.Effect;
 import lyate.molecule.Molecule;
 import lyate.site.ProtonSite;
+import lyate.site.SiteClass;
 import lyate.stock.Medium;
 import lyate.table.TableFolders;
 
 /**
  * Puts a pKa on a proton site in a medium.
  *
- * <p>A value measured in that medium decides. Else the value measured in another medium and carried over is weighed
- * against the estimate made in that medium, and the one with the smaller uncertainty is given; else an estimate made in
+ * <p>A value measured in that medium decides. Else the value measured in another medium and carried over (along the line
+ * of its family or by the shift of its class) is weighed against the estimate made in that medium, and the one with the
+ * smaller uncertainty is given; else an estimate made in
  * water or DMSO is carried over. Where nothing is known the answer is empty, never zero. A solvent without a scale of its
  * own is asked for by the medium that stands for it ({@code Solvent.scale()}). Immutable; safe to share between threads.
  */
@@ -27,12 +29,14 @@ public final class AcidityEstimator {
 
     private final MeasuredAcidities measured;
     private final MediaTransfer transfer;
+    private final ClassShift shift;
     private final List<SiteEstimate> estimates;
 
     /** The first of {@code estimates} that answers wins. */
     public AcidityEstimator(MeasuredAcidities measured, MediaTransfer transfer, List<SiteEstimate> estimates) {
         this.measured = measured;
         this.transfer = transfer;
+        this.shift = new ClassShift(transfer);
         this.estimates = List.copyOf(estimates);
     }
 
@@ -73,8 +77,12 @@ public final class AcidityEstimator {
                 .flatMap(acidity -> carry(acidity, site, medium)).min(Comparator.comparingDouble(Acidity::sigma));
     }
 
+    /** Every way into the medium: the line of the family, the shift of the class, the shift and then a line. */
     private Stream<Acidity> carry(Acidity acidity, ProtonSite site, Medium medium) {
-        return transfer.carry(acidity, site.siteClass().family(), medium).stream();
+        SiteClass siteClass = site.siteClass();
+        Stream<Acidity> shifted = ESTIMATED_IN.stream().flatMap(hub -> shift.carry(acidity, siteClass, hub).stream());
+        return Stream.concat(Stream.of(acidity), shifted)
+                .flatMap(start -> transfer.carry(start, siteClass.family(), medium).stream());
     }
 
     /** A measured value is the first term of what is carried over, so that the terms add up to the pKa. */

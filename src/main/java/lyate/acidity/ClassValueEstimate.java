@@ -7,6 +7,7 @@ import lyate.acidity.Acidity.Contribution;
 import lyate.acidity.Acidity.Effect;
 import lyate.molecule.Molecule;
 import lyate.site.ProtonSite;
+import lyate.site.SiteClass;
 import lyate.site.SiteClass.ClassValue;
 import lyate.stock.Medium;
 
@@ -15,15 +16,16 @@ public final class ClassValueEstimate implements SiteEstimate {
 
     @Override
     public Optional<Acidity> estimate(Molecule molecule, ProtonSite site, Medium medium) {
-        return valueIn(site, medium).map(value -> new Acidity(value.pKa(), value.sigma(), medium, Basis.ESTIMATED,
+        return valueIn(site.siteClass(), medium).map(value -> new Acidity(value.pKa(), value.sigma(), medium, Basis.ESTIMATED,
                 List.of(new Contribution("class value: " + site.siteClass().name(), Effect.ATOM, value.pKa(), List.of(site.atom()))),
                 List.of(), List.of(), value.source()));
     }
 
-    private static Optional<ClassValue> valueIn(ProtonSite site, Medium medium) {
+    /** The value of the class in a medium; only water and DMSO have any. */
+    static Optional<ClassValue> valueIn(SiteClass siteClass, Medium medium) {
         if (medium.equals(Medium.WATER)) {
-            return site.siteClass().water();
+            return siteClass.water();
         }
-        return medium.equals(Medium.DMSO) ? site.siteClass().dmso() : Optional.empty();
+        return medium.equals(Medium.DMSO) ? siteClass.dmso() : Optional.empty();
     }
 }

@@ -4,11 +4,9 @@ import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
 import java.util.Optional;
+import java.util.OptionalDouble;
 import java.util.stream.Collectors;
 import java.util.stream.Stream;
-import lyate.acidity.Acidity.Basis;
-import lyate.acidity.Acidity.Contribution;
-import lyate.acidity.Acidity.Effect;
 import lyate.stock.Medium;
 import lyate.table.Row;
 import lyate.table.Table;
@@ -75,6 +73,12 @@ public final class MediaTransfer {
                 .map(route -> carry(acidity, route));
     }
 
+    /** Slope of the family's own line between two media; empty where it has none. */
+    OptionalDouble slope(Medium from, Medium to, String family) {
+        return relations.stream().filter(row -> row.from().equals(from) && row.to().equals(to) && row.family().equals(family))
+                .mapToDouble(MediaRelation::slope).findFirst();
+    }
+
     private List<List<MediaRelation>> routes(Medium from, Medium to, String family) {
         List<List<MediaRelation>> routes = new ArrayList<>();
         step(from, to, family).ifPresent(step -> routes.add(List.of(step)));
@@ -112,10 +116,6 @@ public final class MediaTransfer {
             pKa = step.convert(pKa);
         }
         String path = route.stream().map(MediaRelation::toString).collect(Collectors.joining(", then "));
-        List<Contribution> contributions = new ArrayList<>(acidity.contributions());
-        contributions.add(new Contribution("carried over: " + path, Effect.MEDIUM, pKa - acidity.pKa(), List.of()));
-        Medium to = route.get(route.size() - 1).to();
-        return new Acidity(pKa, sigma, to, Basis.TRANSFERRED, contributions, missing, acidity.relatives(),
-                acidity.source() + "; carried from " + acidity.medium().id() + " by " + path);
+        return Carried.of(acidity, pKa, sigma, route.get(route.size() - 1).to(), path, missing);
     }
 }

@@ -11,6 +11,8 @@ import lyate.acidity.Acidity.Effect;
 import lyate.molecule.Molecule;
 import lyate.site.ProtonSite;
 import lyate.site.Role;
+import lyate.site.SiteClass;
+import lyate.site.SiteClass.ClassValue;
 import lyate.stock.Medium;
 import lyate.table.TableFolders;
 import org.junit.jupiter.api.Test;
@@ -80,6 +82,40 @@ class AcidityEstimatorTest {
         Acidity acetic = acidity(ESTIMATOR.withoutMeasured(), "CC(=O)O", "O4", Medium.WATER).orElseThrow();
         assertEquals(8, acetic.pKa(), "the class value");
         assertEquals(Basis.ESTIMATED, acetic.basis());
+    }
+
+    /** 4-Ethoxyphenol, 10.13 in water (Serjeant & Dempsey 1979, from memory), by the class of phenols: 10.0 and 18.0. */
+    @Test
+    void betweenWaterAndDmsoTheShiftOfTheClassIsSurerThanTheLineOfTheFamily() {
+        MediaTransfer vague = new MediaTransfer(List.of(new MediaRelation(Medium.WATER, Medium.DMSO, "phenol", 2, -2, 2, 9, 0, 20, "made up")));
+        ClassValue inWater = new ClassValue(10, 0.8, "made up");
+        ClassValue inDmso = new ClassValue(18, 1.2, "made up");
+        SiteClass phenols = Sites.siteClass(Role.ACID, "phenol", Optional.of(inWater), Optional.of(inDmso));
+        Acidity shifted = new ClassShift(vague).carry(Acidity.measured(10.13, 0.05, Medium.WATER, "made up"), phenols, Medium.DMSO).orElseThrow();
+        assertEquals(18 + 2 * 0.13, shifted.pKa(), 1e-9);
+        assertTrue(shifted.sigma() >= 0.5 && shifted.sigma() < 0.6, () -> "uncertainty " + shifted.sigma());
+        assertEquals(1, shifted.contributions().stream().filter(term -> term.effect() == Effect.MEDIUM).count());
+        Acidity far = new ClassShift(vague).carry(Acidity.measured(4, 0.05, Medium.WATER, "made up"), phenols, Medium.DMSO).orElseThrow();
+        assertTrue(far.sigma() > 1.8, "a phenol that is hardly one of its class");
+    }
+
+    @Test
+    void withoutClassValuesInBothMediaThereIsNoShift() {
+        SiteClass onlyWater = Sites.siteClass(Role.ACID, "phenol", Optional.of(new ClassValue(10, 1, "made up")), Optional.empty());
+        Acidity value = Acidity.measured(10, 0.1, Medium.WATER, "made up");
+        assertEquals(Optional.empty(), new ClassShift(TRANSFER).carry(value, onlyWater, Medium.DMSO));
+    }
+
+    @Test
+    void shiftAndLineTogetherAreOneContribution() {
+        Molecule acid = Sites.molecule("CCCCCCC(=O)O");
+        SiteClass acids = Sites.siteClass(Role.ACID, "carboxylic-acid", Optional.of(new ClassValue(4.8, 0.3, "made up")),
+                Optional.of(new ClassValue(12.3, 0.4, "made up")));
+        ProtonSite site = new ProtonSite(Role.ACID, acid.atomLabelled("O9").orElseThrow(), List.of(8), 1, acids);
+        Acidity carried = ESTIMATOR.acidity(acid, site, Medium.ACETONITRILE).orElseThrow();
+        assertEquals(1, carried.contributions().stream().filter(term -> term.effect() == Effect.MEDIUM).count());
+        assertEquals(carried.pKa(), carried.contributions().stream().mapToDouble(Contribution::value).sum(), 1e-9);
+        assertEquals(23.5, carried.pKa(), 1, "acetic acid 23.51, Kuett et al. 2006 (from memory)");
     }
 
     @Test

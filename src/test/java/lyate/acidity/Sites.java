@@ -35,9 +35,13 @@ final class Sites {
     }
 
     private static SiteClass siteClass(Role role, String family) {
+        return siteClass(role, family, Optional.of(new ClassValue(8, 1, "made up")), Optional.empty());
+    }
+
+    /** A made-up class of the given transfer family and class values. */
+    static SiteClass siteClass(Role role, String family, Optional<ClassValue> water, Optional<ClassValue> dmso) {
         try {
-            return new SiteClass("made-up", "made up for a test", role, AtomPattern.compile("[*]"), family,
-                    Optional.of(new ClassValue(8, 1, "made up")), Optional.empty(), "C", "C");
+            return new SiteClass("made-up", "made up for a test", role, AtomPattern.compile("[*]"), family, water, dmso, "C", "C");
         } catch (MoleculeException e) {
             throw new IllegalStateException(e);
         }
