@@ -5,8 +5,9 @@ import org.openscience.cdk.exception.CDKException;
 import org.openscience.cdk.interfaces.IAtom;
 import org.openscience.cdk.interfaces.IAtomContainer;
 import org.openscience.cdk.interfaces.IBond;
+import org.openscience.cdk.isomorphism.matchers.IQueryAtomContainer;
 
-/** Molfiles may draw aromatic bonds as such (bond type 4); here they become single and double ones. */
+/** Molfiles may draw aromatic bonds as such (bond type 4); here they become single and double ones. Queries are left alone. */
 final class AromaticBonds {
 
     private AromaticBonds() {}
@@ -17,6 +18,9 @@ final class AromaticBonds {
      * @throws MoleculeException where the hydrogens cannot be told from the drawing, as in pyrrole
      */
     static void settle(IAtomContainer molecule) throws MoleculeException {
+        if (molecule instanceof IQueryAtomContainer) {
+            return;
+        }
         boolean any = false;
         for (IBond bond : molecule.bonds()) {
             if (bond.isAromatic() && (bond.getOrder() == null || bond.getOrder().numeric() == 0)) {

@@ -154,7 +154,10 @@ public final class Molecule {
         return facts.smallestRing(atom);
     }
 
-    /** Canonical SMILES of the substrate, configuration and isotopes included; reading it gives the same molecule. */
+    /**
+     * SMILES of the substrate, atoms in canonical order, configuration and isotopes included; reading it gives the same
+     * molecule. To compare molecules ask {@link #canonicalKey()}.
+     */
     public String smiles() {
         return SmilesWriter.full(container);
     }

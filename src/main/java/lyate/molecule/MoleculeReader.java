@@ -11,6 +11,10 @@ import lyate.table.TableFolders;
  */
 public final class MoleculeReader {
 
+    static {
+        SilentLog.install();
+    }
+
     private static final Normalisations PACKAGED = Normalisations.load(TableFolders.packaged());
 
     private final Normaliser normaliser;

@@ -6,9 +6,9 @@ import java.util.regex.Pattern;
 /** Finds the line of a molfile that is at fault, before the toolkit stumbles over it without saying where. */
 final class MolfileCheck {
 
-    private static final Pattern COUNTS = Pattern.compile("[ \\d]{2}\\d[ \\d]{2}\\d.*");
+    private static final Pattern COUNTS = Pattern.compile("( {2}\\d| \\d\\d|\\d{3}){2}.*");
     private static final Pattern ATOM = Pattern.compile("(\\s*-?\\d+\\.\\d+){3}\\s+\\S.*");
-    private static final Pattern BOND = Pattern.compile("[ \\d]{2}\\d[ \\d]{2}\\d[ \\d]{2}\\d.*");
+    private static final Pattern BOND = Pattern.compile("( {2}\\d| \\d\\d|\\d{3}){3}.*");
 
     private MolfileCheck() {}
 

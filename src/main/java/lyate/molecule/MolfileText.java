@@ -2,10 +2,13 @@ package lyate.molecule;
 
 import java.io.IOException;
 import java.io.StringReader;
+import java.util.HashSet;
 import java.util.List;
+import java.util.Set;
 import java.util.regex.Pattern;
 import org.openscience.cdk.exception.CDKException;
 import org.openscience.cdk.interfaces.IAtomContainer;
+import org.openscience.cdk.interfaces.IBond;
 import org.openscience.cdk.io.DefaultChemObjectReader;
 import org.openscience.cdk.io.MDLV2000Reader;
 import org.openscience.cdk.io.MDLV3000Reader;
@@ -40,8 +43,23 @@ record MolfileText(String text) {
             MolfileCheck.v3000(lines);
         }
         IAtomContainer read = parse(old, String.join("\n", lines) + "\n");
+        refuseStrangeBonds(read);
         AromaticBonds.settle(read);
         return normaliser.normalise(text, read, List.of());
+    }
+
+    private static void refuseStrangeBonds(IAtomContainer read) throws MoleculeException {
+        Set<Set<Integer>> joined = new HashSet<>();
+        for (IBond bond : read.bonds()) {
+            int begin = read.indexOf(bond.getBegin()) + 1;
+            int end = read.indexOf(bond.getEnd()) + 1;
+            if (begin == end) {
+                throw new MoleculeException("the molfile has a bond from atom " + begin + " to itself", begin);
+            }
+            if (!joined.add(Set.of(begin, end))) {
+                throw new MoleculeException("the molfile has two bonds between atoms " + begin + " and " + end, begin);
+            }
+        }
     }
 
     private static IAtomContainer parse(boolean old, String molfile) throws MoleculeException {

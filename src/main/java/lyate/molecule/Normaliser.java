@@ -29,6 +29,7 @@ final class Normaliser {
         variants.apply(read, odd, warnings);
         Components components = Components.of(read);
         checkSubstrate(components.substrate(), odd);
+        components.counterIons().forEach(Perception::markRings);
         return new Molecule(input, Perception.of(components.substrate(), warnings), components.counterIons(), warnings);
     }
 

@@ -17,9 +17,14 @@ import org.openscience.cdk.interfaces.IAtomContainer;
  */
 record Perception(IAtomContainer container, AtomFacts facts, int[] inputNumbers, long[] symmetryClasses) {
 
+    /** Flags rings and aromaticity; false where the ring system is too large to decide. */
+    static boolean markRings(IAtomContainer molecule) {
+        Cycles.markRingAtomsAndBonds(molecule);
+        return Aromaticity.apply(Aromaticity.Model.Daylight, molecule);
+    }
+
     static Perception of(IAtomContainer normalised, List<String> warnings) {
-        Cycles.markRingAtomsAndBonds(normalised);
-        if (!Aromaticity.apply(Aromaticity.Model.Daylight, normalised)) {
+        if (!markRings(normalised)) {
             warnings.add("the ring system is too large to decide on its aromaticity; it is read as drawn");
         }
         int[] inputNumbers = new int[normalised.getAtomCount()];

@@ -19,9 +19,12 @@ final class SmilesWriter {
 
     private SmilesWriter() {}
 
-    /** Canonical SMILES of the constitution: neither configuration nor isotopes. */
+    /**
+     * Canonical SMILES of the constitution, neither configuration nor isotopes. It shows the Kekule form, which the toolkit
+     * brings into one of its equals; aromatic symbols would leave open which one is meant in rings that are not aromatic.
+     */
     static String constitution(IAtomContainer molecule) {
-        return write(molecule, SmiFlavor.Canonical | SmiFlavor.UseAromaticSymbols);
+        return write(molecule, SmiFlavor.Canonical);
     }
 
     /**

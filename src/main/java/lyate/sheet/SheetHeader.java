@@ -52,7 +52,7 @@ public record SheetHeader(List<String> names) {
         List<String> nearest = new ArrayList<>();
         for (String name : names) {
             String known = NearestNames.of(name, SheetColumn.headers(), 1).get(0);
-            if (!known.equalsIgnoreCase(name)) {
+            if (!name.isEmpty() && !known.equalsIgnoreCase(name)) {
                 nearest.add(name + " (perhaps " + known + ")");
             }
         }

@@ -4,6 +4,9 @@ import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertThrows;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
+import java.io.ByteArrayOutputStream;
+import java.io.PrintStream;
+import java.nio.charset.StandardCharsets;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
@@ -87,6 +90,9 @@ class RefusalTest {
         "bad-bond.mol|line 9 of the molfile: found '  2  7  1  0', expected bond 2 of 2: two atom numbers from 1 to 3 and a bond type",
         "truncated.mol|line 7 of the molfile: the molfile breaks off, expected atom 3 of 3: three coordinates and an element",
         "no-end.mol|the molfile breaks off: there is no line 'M  END'",
+        "bond-twice.mol|the molfile has two bonds between atoms 2 and 1",
+        "self-bond-v3000.mol|the molfile has a bond from atom 2 to itself",
+        "run-together.mol|line 8 of the molfile: found ' 12 2 1  0', expected bond 1 of 2: two atom numbers from 1 to 3 and a bond type",
         "radical.mol|C2 is a radical; radicals cannot be judged",
         "query-bond.mol|the bond between C1 and C2 is not single, double, triple or aromatic",
         "atom-list.mol|atom 2 is a query, not an element: draw one definite structure",
@@ -95,6 +101,20 @@ class RefusalTest {
     })
     void molfilesThatCannotBeUsed(String file, String reason) {
         assertEquals(reason, refusal(MoleculeReaderTest.resource(file)));
+    }
+
+    @Test
+    void nothingButTheRefusalIsSaid() {
+        PrintStream before = System.err;
+        ByteArrayOutputStream said = new ByteArrayOutputStream();
+        System.setErr(new PrintStream(said, true, StandardCharsets.UTF_8));
+        try {
+            refusal(MoleculeReaderTest.resource("cut-line.mol"));
+            refusal("xyzzy");
+        } finally {
+            System.setErr(before);
+        }
+        assertEquals("", said.toString(StandardCharsets.UTF_8));
     }
 
     @Test

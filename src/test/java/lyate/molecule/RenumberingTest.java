@@ -1,9 +1,11 @@
 package lyate.molecule;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import java.util.List;
 import java.util.stream.Stream;
+import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.MethodSource;
 
@@ -57,6 +59,18 @@ class RenumberingTest {
             assertEquals(one.quickHash(), other.quickHash());
             assertEquals(one.formula(), other.formula());
             assertEquals(one.smiles(), other.smiles());
+        }
+    }
+
+    @Test
+    void bothDrawingsOfAnAntiaromaticRingAreOneConstitution() throws MoleculeException {
+        for (String smiles : Examples.ANTIAROMATIC) {
+            Molecule one = reader.read(smiles);
+            for (int seed = 0; seed < ORDERS; seed++) {
+                Renumbering other = Renumbering.of(one, seed);
+                assertEquals(one.canonicalKey(), other.molecule().canonicalKey(), other.toString());
+                assertTrue(one.sameConstitution(reader.read(other.molecule().smiles())));
+            }
         }
     }
 
