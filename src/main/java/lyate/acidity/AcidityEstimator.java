@@ -74,10 +74,11 @@ public final class AcidityEstimator {
 
     private Optional<Acidity> estimateElsewhere(Molecule molecule, ProtonSite site, Medium medium) {
         return ESTIMATED_IN.stream().map(from -> estimate(molecule, site, from)).flatMap(Optional::stream)
-                .flatMap(acidity -> carry(acidity, site, medium)).min(Comparator.comparingDouble(Acidity::sigma));
+                .flatMap(acidity -> transfer.carry(acidity, site.siteClass().family(), medium).stream())
+                .min(Comparator.comparingDouble(Acidity::sigma));
     }
 
-    /** Every way into the medium: the line of the family, the shift of the class, the shift and then a line. */
+    /** Every way of a measured value: the line of the family, the shift of the class, the shift and then a line. */
     private Stream<Acidity> carry(Acidity acidity, ProtonSite site, Medium medium) {
         SiteClass siteClass = site.siteClass();
         Stream<Acidity> shifted = ESTIMATED_IN.stream().flatMap(hub -> shift.carry(acidity, siteClass, hub).stream());

@@ -33,8 +33,8 @@ public record MediaRelation(Medium from, Medium to, String family, double slope,
             text("id"), text("from"), text("to"), text("family"), number("slope"), number("intercept"),
             number("standard_error"), number("n"), number("valid_from"), number("valid_to"), text("source"));
 
-    /** What a pKa unit outside the fitted range adds to the uncertainty, pKa units (common practice). */
-    private static final double EXTRAPOLATION = 0.15;
+    /** No slope is known better than this (assumption). */
+    private static final double LEAST_SLOPE_ERROR = 0.05;
 
     /** The relation a row of the table states. */
     public static MediaRelation of(Row row) {
@@ -62,7 +62,13 @@ public record MediaRelation(Medium from, Medium to, String family, double slope,
 
     /** Standard uncertainty of {@link #convert} for an exact pKa: the residual spread, more outside the fitted range. */
     public double error(double pKa) {
-        return Math.hypot(standardError, EXTRAPOLATION * distanceOutside(pKa) * Math.max(1, Math.abs(slope)));
+        return Math.hypot(standardError, slopeError() * distanceOutside(pKa));
+    }
+
+    /** Standard error of the slope, as it is for points spread evenly over the range. */
+    private double slopeError() {
+        double range = validTo - validFrom;
+        return Math.max(LEAST_SLOPE_ERROR * Math.abs(slope), Math.sqrt(12.0 / Math.max(1, pairs)) * standardError / range);
     }
 
     /** How far outside the fitted range a pKa lies; 0 within. */
