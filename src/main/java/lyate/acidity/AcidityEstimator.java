@@ -1,6 +1,5 @@
 package lyate.acidity;
 
-import java.util.Comparator;
 import java.util.List;
 import java.util.Locale;
 import java.util.Optional;
@@ -58,8 +57,7 @@ public final class AcidityEstimator {
         if (here.isPresent()) {
             return here;
         }
-        Optional<Acidity> carried = known.stream().map(acidity -> startOfRecipe(acidity, site))
-                .flatMap(acidity -> carry(acidity, site, medium)).min(Comparator.comparingDouble(Acidity::sigma));
+        Optional<Acidity> carried = carryMeasured(known, site, medium);
         Optional<Acidity> estimated = estimate(molecule, site, medium);
         if (carried.isPresent() && estimated.isPresent()) {
             return Optional.of(surer(carried.get(), estimated.get()));
@@ -73,17 +71,16 @@ public final class AcidityEstimator {
     }
 
     private Optional<Acidity> estimateElsewhere(Molecule molecule, ProtonSite site, Medium medium) {
-        return ESTIMATED_IN.stream().map(from -> estimate(molecule, site, from)).flatMap(Optional::stream)
-                .flatMap(acidity -> transfer.carry(acidity, site.siteClass().family(), medium).stream())
-                .min(Comparator.comparingDouble(Acidity::sigma));
+        List<Acidity> elsewhere = ESTIMATED_IN.stream().map(from -> estimate(molecule, site, from)).flatMap(Optional::stream).toList();
+        return transfer.carry(elsewhere, site.siteClass().family(), medium);
     }
 
-    /** Every way of a measured value: the line of the family, the shift of the class, the shift and then a line. */
-    private Stream<Acidity> carry(Acidity acidity, ProtonSite site, Medium medium) {
+    /** The best way of the measured values: the line of the family, the shift of the class, the shift and then a line. */
+    private Optional<Acidity> carryMeasured(List<Acidity> known, ProtonSite site, Medium medium) {
         SiteClass siteClass = site.siteClass();
-        Stream<Acidity> shifted = ESTIMATED_IN.stream().flatMap(hub -> shift.carry(acidity, siteClass, hub).stream());
-        return Stream.concat(Stream.of(acidity), shifted)
-                .flatMap(start -> transfer.carry(start, siteClass.family(), medium).stream());
+        List<Acidity> starts = known.stream().map(acidity -> startOfRecipe(acidity, site)).flatMap(acidity -> Stream.concat(
+                Stream.of(acidity), ESTIMATED_IN.stream().flatMap(hub -> shift.carry(acidity, siteClass, hub).stream()))).toList();
+        return transfer.carry(starts, siteClass.family(), medium);
     }
 
     /** A measured value is the first term of what is carried over, so that the terms add up to the pKa. */

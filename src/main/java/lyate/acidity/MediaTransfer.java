@@ -65,12 +65,27 @@ public final class MediaTransfer {
      * contribution that says by which relation. Empty where no relation exists; the value itself where it is there already.
      */
     public Optional<Acidity> carry(Acidity acidity, String family, Medium to) {
-        if (acidity.medium().equals(to)) {
-            return Optional.of(acidity);
+        return carry(List.of(acidity), family, to);
+    }
+
+    /** The best of several values of one site, each in a medium of its own, in the wanted medium. */
+    Optional<Acidity> carry(List<Acidity> values, String family, Medium to) {
+        return values.stream().flatMap(value -> ways(value, family, to)).min(Way.BEST_FIRST).map(Way::arrived);
+    }
+
+    /** A value that has arrived, and how many of its steps were not of the acid's own family. */
+    private record Way(Acidity arrived, long makeshifts) {
+
+        static final Comparator<Way> BEST_FIRST = Comparator.comparingLong(Way::makeshifts)
+                .thenComparingDouble(way -> way.arrived().sigma());
+    }
+
+    private Stream<Way> ways(Acidity value, String family, Medium to) {
+        if (value.medium().equals(to)) {
+            return Stream.of(new Way(value, 0));
         }
-        return routes(acidity.medium(), to, family).stream()
-                .min(Comparator.comparingLong(MediaTransfer::makeshift).thenComparingDouble(route -> carry(acidity, route).sigma()))
-                .map(route -> carry(acidity, route));
+        return routes(value.medium(), to, family).stream().map(route -> new Way(carry(value, route),
+                route.stream().filter(step -> step.family().equals(MediaRelation.ANY)).count()));
     }
 
     /** Slope of the family's own line between two media; empty where it has none. */
@@ -97,11 +112,6 @@ public final class MediaTransfer {
                 .filter(row -> row.from().equals(from) && row.to().equals(to))
                 .filter(row -> row.family().equals(family) || row.family().equals(MediaRelation.ANY))
                 .min(Comparator.comparing(row -> row.family().equals(MediaRelation.ANY)));
-    }
-
-    /** How many of its steps are not of the acid's own family. */
-    private static long makeshift(List<MediaRelation> route) {
-        return route.stream().filter(step -> step.family().equals(MediaRelation.ANY)).count();
     }
 
     private static Acidity carry(Acidity acidity, List<MediaRelation> route) {
