@@ -7,7 +7,6 @@ import java.util.Locale;
 import java.util.SortedSet;
 import java.util.concurrent.Callable;
 import java.util.function.Consumer;
-import lyate.acidity.IonisationEnthalpies;
 import lyate.bench.Enthalpies;
 import lyate.bench.QuenchHazards;
 import lyate.molecule.MoleculeReader;
@@ -30,7 +29,7 @@ final class TablesCommand implements Callable<Integer> {
 
     /** Together they read every table once. */
     private static final List<Consumer<TableFolders>> READERS = List.of(StepReviewer::load, MoleculeReader::load,
-            IonisationEnthalpies::load, Enthalpies::load, QuenchHazards::load);
+            Enthalpies::load, QuenchHazards::load);
 
     private final Terminal terminal;
 

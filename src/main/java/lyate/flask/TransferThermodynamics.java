@@ -17,12 +17,15 @@ public record TransferThermodynamics(double logK, double deltaGKiloJoule, double
     /** Molar gas constant, J/(mol K); exact since the 2019 SI (CODATA 2018). */
     public static final double GAS_CONSTANT = 8.31446261815324;
 
-    private static final double COLDEST_KELVIN = 173.15;
-    private static final double HOTTEST_KELVIN = 423.15;
+    private static final double COLDEST_KELVIN = 123.15;
+    private static final double HOTTEST_KELVIN = 573.15;
+    private static final double COLDEST_TRUSTED_KELVIN = 173.15;
+    private static final double HOTTEST_TRUSTED_KELVIN = 423.15;
     private static final String ISOCOULOMBIC =
             "transfer taken as isocoulombic without entropy change: log K scales with 298.15 K / T";
     private static final String VANT_HOFF =
             "log K carried over by the van 't Hoff equation with a constant transfer enthalpy of %.1f kJ/mol";
+    private static final String FAR = "; far from the 25 degrees C the values were measured at";
 
     /**
      * A donor or the conjugate acid of an acceptor.
@@ -47,7 +50,7 @@ public record TransferThermodynamics(double logK, double deltaGKiloJoule, double
      * The transfer at a temperature. Enthalpies are used where both partners have one, since only their difference
      * means anything; otherwise the transfer is taken as isocoulombic.
      *
-     * @param temperatureKelvin −100 to +150 degrees C
+     * @param temperatureKelvin −150 to +300 degrees C; beyond −100 to +150 the assumption says that it is far off
      */
     public static TransferThermodynamics of(Acid donor, Acid acceptor, double temperatureKelvin) {
         requireTemperature(temperatureKelvin);
@@ -91,7 +94,9 @@ public record TransferThermodynamics(double logK, double deltaGKiloJoule, double
     }
 
     private static TransferThermodynamics at(double logK, double temperatureKelvin, String assumption) {
-        return new TransferThermodynamics(logK, deltaGKiloJoule(logK, temperatureKelvin), temperatureKelvin, assumption);
+        boolean far = temperatureKelvin < COLDEST_TRUSTED_KELVIN || temperatureKelvin > HOTTEST_TRUSTED_KELVIN;
+        return new TransferThermodynamics(logK, deltaGKiloJoule(logK, temperatureKelvin), temperatureKelvin,
+                far ? assumption + FAR : assumption);
     }
 
     private static double shift(double enthalpyKiloJoule, double temperatureKelvin) {
@@ -101,7 +106,7 @@ public record TransferThermodynamics(double logK, double deltaGKiloJoule, double
     private static void requireTemperature(double temperatureKelvin) {
         if (!(temperatureKelvin >= COLDEST_KELVIN && temperatureKelvin <= HOTTEST_KELVIN)) {
             throw new IllegalArgumentException("temperature " + temperatureKelvin + " K, expected " + COLDEST_KELVIN + " to "
-                    + HOTTEST_KELVIN + " K (-100 to +150 degrees C)");
+                    + HOTTEST_KELVIN + " K (-150 to +300 degrees C)");
         }
     }
 }

@@ -1,5 +1,7 @@
 package lyate.review;
 
+import lyate.flask.Flask;
+import lyate.flask.TransferThermodynamics;
 import lyate.site.ProtonSite;
 
 /**
@@ -8,18 +10,23 @@ import lyate.site.ProtonSite;
  * @param site       the site
  * @param label      its name, for example {@code C3}
  * @param comparison its pKa against the base's, on the scale that decides
- * @param toTemperature 298.15 K divided by the temperature of the step: the isocoulombic factor on log K
+ * @param transfer   the transfer at the temperature of the step
  * @param advantage  log10 units by which kinetic control favours it over its rivals; 0 where equilibrium decides
  */
-record Donor(ProtonSite site, String label, Comparison comparison, double toTemperature, double advantage) {
+record Donor(ProtonSite site, String label, Comparison comparison, TransferThermodynamics transfer, double advantage) {
 
     /** log10 K at the temperature of the step. */
     double logK() {
-        return comparison.logK() * toTemperature;
+        return transfer.logK();
+    }
+
+    /** Standard uncertainty of log K at the temperature of the step. */
+    double sigmaLogK() {
+        return comparison.sigmaLogK() * Flask.ROOM_KELVIN / transfer.temperatureKelvin();
     }
 
     Donor withAdvantage(double other) {
-        return new Donor(site, label, comparison, toTemperature, other);
+        return new Donor(site, label, comparison, transfer, other);
     }
 
     /** log10 K with the kinetic advantage: what decides whose proton goes first. */

@@ -6,21 +6,27 @@ import java.util.List;
 import java.util.Optional;
 import java.util.OptionalInt;
 import lyate.acidity.AcidityEstimator;
-import lyate.flask.Flask;
+import lyate.acidity.IonisationEnthalpies;
+import lyate.acidity.IonisationEnthalpy;
+import lyate.flask.TransferThermodynamics;
+import lyate.flask.TransferThermodynamics.Acid;
 import lyate.molecule.Molecule;
 import lyate.site.ProtonSite;
 import lyate.site.Role;
 import lyate.site.SiteFinder;
+import lyate.stock.Medium;
 
 /** Sets the proton sites of a substrate against the working base. */
 final class Donors {
 
     private final SiteFinder finder;
     private final AcidityEstimator acidity;
+    private final IonisationEnthalpies enthalpies;
 
-    Donors(SiteFinder finder, AcidityEstimator acidity) {
+    Donors(SiteFinder finder, AcidityEstimator acidity, IonisationEnthalpies enthalpies) {
         this.finder = finder;
         this.acidity = acidity;
+        this.enthalpies = enthalpies;
     }
 
     /**
@@ -31,17 +37,31 @@ final class Donors {
     List<Donor> of(Step step, WorkingBase base) throws ReviewException {
         Molecule substrate = step.substrate();
         ScaleChoice scale = new ScaleChoice(step.solvent());
-        double toTemperature = Flask.ROOM_KELVIN / (step.temperatureCelsius() + 273.15);
+        double kelvin = step.temperatureCelsius() + 273.15;
         List<Donor> donors = new ArrayList<>();
         for (ProtonSite site : finder.sites(substrate, Role.ACID)) {
             scale.compare(base.pKa(), base.strong(), medium -> acidity.acidity(substrate, site, medium), site.siteClass().family())
-                    .ifPresent(comparison -> donors.add(new Donor(site, substrate.label(site.atom()), comparison, toTemperature, 0)));
+                    .ifPresent(comparison -> donors.add(new Donor(site, substrate.label(site.atom()), comparison,
+                            atTemperature(comparison, site, base, kelvin), 0)));
         }
         if (donors.isEmpty()) {
             throw new ReviewException("the substrate has no proton whose pKa can be set against " + base.name());
         }
         donors.sort(Comparator.comparingDouble(Donor::effectiveLogK).reversed());
         return donors;
+    }
+
+    /** Ionisation enthalpies are known on the aqueous scale alone. */
+    private TransferThermodynamics atTemperature(Comparison comparison, ProtonSite site, WorkingBase base, double kelvin) {
+        boolean aqueous = comparison.donor().medium().equals(Medium.WATER);
+        Optional<IonisationEnthalpy> donor = enthalpies.of(site.siteClass()).filter(known -> aqueous);
+        Optional<IonisationEnthalpy> acceptor = base.shelfBase().flatMap(shelf -> enthalpies.of(shelf.family()))
+                .filter(known -> aqueous);
+        return TransferThermodynamics.of(acid(comparison.donor().pKa(), donor), acid(comparison.acceptor().pKa(), acceptor), kelvin);
+    }
+
+    private static Acid acid(double pKa, Optional<IonisationEnthalpy> enthalpy) {
+        return enthalpy.map(known -> Acid.of(pKa, known.kiloJoulePerMole())).orElse(Acid.of(pKa));
     }
 
     /**

@@ -27,7 +27,7 @@ final class ReviewWriter {
                 probabilities.values().stream().mapToDouble(Double::doubleValue).max().orElse(0));
         return new Review(situation.step(), situation.verdict(), probability, probabilities, intended.label(), firstSite(),
                 situation.workingBase().name(), intended.logK(), situation.shares().percentTaken(intended),
-                highestOther(), transfers, findings, explanation(), List.of());
+                highestOther(), transfers, findings, explanation(), assumptions());
     }
 
     private String firstSite() {
@@ -41,6 +41,11 @@ final class ReviewWriter {
     private double highestOther() {
         return situation.donors().stream().filter(donor -> donor != situation.intended())
                 .mapToDouble(situation.shares()::percentTaken).max().orElse(0);
+    }
+
+    private List<String> assumptions() {
+        boolean room = Math.abs(situation.step().temperatureCelsius() - 25) < 1;
+        return room ? List.of() : List.of(situation.intended().label() + ": " + situation.intended().transfer().assumption());
     }
 
     private List<String> explanation() {

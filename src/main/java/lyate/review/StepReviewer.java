@@ -6,6 +6,7 @@ import java.util.List;
 import java.util.Map;
 import java.util.OptionalInt;
 import lyate.acidity.AcidityEstimator;
+import lyate.acidity.IonisationEnthalpies;
 import lyate.review.VerdictRule.World;
 import lyate.site.SiteClasses;
 import lyate.site.SiteFinder;
@@ -33,7 +34,7 @@ public final class StepReviewer implements Reviewer {
     private StepReviewer(TableFolders folders, Stockroom stockroom, SiteFinder finder, AcidityEstimator acidity) {
         this.solventRules = BaseSolventRules.load(folders, stockroom);
         this.workingBases = new WorkingBases(new BaseStrength(finder, acidity), solventRules, stockroom);
-        this.donors = new Donors(finder, acidity);
+        this.donors = new Donors(finder, acidity, IonisationEnthalpies.load(folders));
         this.water = waterOf(stockroom);
         this.sideReactions = SideReactions.load(folders, stockroom);
         this.hazards = BaseHazards.load(folders, stockroom);

@@ -1,7 +1,6 @@
 package lyate.review;
 
 import java.util.List;
-import lyate.flask.TransferThermodynamics;
 
 /** Puts the donors of a step into the rows that users see. */
 final class Transfers {
@@ -20,9 +19,7 @@ final class Transfers {
 
     private Transfer transfer(Donor donor) {
         Comparison comparison = donor.comparison();
-        double sigma = donor.toTemperature() * comparison.sigmaLogK();
-        double kelvin = step.temperatureCelsius() + 273.15;
-        return new Transfer(donor.label(), donor.site().equivalent(), comparison.donor(), donor.logK(), sigma,
-                TransferThermodynamics.deltaGKiloJoule(donor.logK(), kelvin), shares.percentTaken(donor), comparison.reason());
+        return new Transfer(donor.label(), donor.site().equivalent(), comparison.donor(), donor.logK(), donor.sigmaLogK(),
+                donor.transfer().deltaGKiloJoule(), shares.percentTaken(donor), comparison.reason());
     }
 }

@@ -1,6 +1,7 @@
 package lyate.flask;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertFalse;
 import static org.junit.jupiter.api.Assertions.assertThrows;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
@@ -72,10 +73,12 @@ class TransferThermodynamicsTest {
     }
 
     @Test
-    void temperaturesOutsideTheRangeAreRefused() {
-        assertThrows(IllegalArgumentException.class, () -> TransferThermodynamics.of(Acid.of(1), Acid.of(2), 170));
-        assertThrows(IllegalArgumentException.class, () -> TransferThermodynamics.of(Acid.of(1), Acid.of(2), 430));
-        TransferThermodynamics.of(Acid.of(1), Acid.of(2), 173.15);
-        TransferThermodynamics.of(Acid.of(1), Acid.of(2), 423.15);
+    void temperaturesOutsideTheRangeAreRefusedAndFarOnesMarked() {
+        assertThrows(IllegalArgumentException.class, () -> TransferThermodynamics.of(Acid.of(1), Acid.of(2), 120));
+        assertThrows(IllegalArgumentException.class, () -> TransferThermodynamics.of(Acid.of(1), Acid.of(2), 580));
+        assertTrue(TransferThermodynamics.of(Acid.of(1), Acid.of(2), 170).assumption().contains("far from"));
+        assertTrue(TransferThermodynamics.of(Acid.of(1), Acid.of(2), 430).assumption().contains("far from"));
+        assertFalse(TransferThermodynamics.of(Acid.of(1), Acid.of(2), 173.15).assumption().contains("far from"));
+        assertFalse(TransferThermodynamics.of(Acid.of(1), Acid.of(2), 423.15).assumption().contains("far from"));
     }
 }
