@@ -25,17 +25,26 @@ final class ReviewWriter {
         Donor intended = situation.intended();
         double probability = probabilities.getOrDefault(situation.verdict(),
                 probabilities.values().stream().mapToDouble(Double::doubleValue).max().orElse(0));
-        return new Review(situation.step(), situation.verdict(), probability, probabilities, intended.label(), firstSite(),
+        return new Review(situation.step(), situation.verdict(), probability, probabilities, intended.label(), firstSite(findings),
                 situation.workingBase().name(), intended.logK(), situation.shares().percentTaken(intended),
                 highestOther(), transfers, findings, explanation(), assumptions());
     }
 
-    private String firstSite() {
+    private String firstSite(List<Finding> findings) {
         if (situation.verdict() == Verdict.LEVELLED) {
             return "solvent";
         }
+        if (situation.verdict() == Verdict.INCOMPATIBLE && findings.stream().anyMatch(ReviewWriter::takesNoProton)) {
+            return "none";
+        }
         Donor first = situation.donors().get(0);
         return situation.verdict() == Verdict.TOO_WEAK || first.effectiveLogK() <= VerdictRule.NONE ? "none" : first.label();
+    }
+
+    /** Whether the base adds or exchanges instead of taking a proton. */
+    private static boolean takesNoProton(Finding finding) {
+        return finding.severity() == Finding.Severity.STOP && (finding.kind() == FindingKind.NUCLEOPHILIC_ADDITION
+                || finding.kind() == FindingKind.HALOGEN_EXCHANGE);
     }
 
     private double highestOther() {
