@@ -2,7 +2,9 @@ package lyate.review;
 
 import java.util.Comparator;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
+import java.util.concurrent.ConcurrentHashMap;
 import java.util.function.Function;
 import lyate.molecule.MoleculeException;
 import lyate.molecule.MoleculeReader;
@@ -33,7 +35,7 @@ final class WorkingBases {
     WorkingBase of(Step step) {
         Base base = step.base();
         Solvent solvent = step.solvent();
-        Function<Medium, Optional<KnownPKa>> pKa = medium -> strength.pKa(base, medium);
+        Function<Medium, Optional<KnownPKa>> pKa = remembered(medium -> strength.pKa(base, medium));
         Optional<Double> logK = isInert(solvent) ? Optional.empty() : logK(pKa, solvent, solvent);
         if (isLyateIonOf(solvent, base)) {
             return WorkingBase.asAdded(base, pKa, logK);
@@ -43,6 +45,12 @@ final class WorkingBases {
             return WorkingBase.lyateIon(solvent, lyateOnShelf(solvent, base), logK.get(), destroyed || solvent.kind() != Solvent.Kind.PROTIC);
         }
         return destroyed ? WorkingBase.destroyed(base, solvent, pKa) : WorkingBase.asAdded(base, pKa, logK);
+    }
+
+    /** Asks once for each medium: a strength worked out from a structure costs as much as a substrate. */
+    private static Function<Medium, Optional<KnownPKa>> remembered(Function<Medium, Optional<KnownPKa>> pKa) {
+        Map<Medium, Optional<KnownPKa>> known = new ConcurrentHashMap<>();
+        return medium -> known.computeIfAbsent(medium, pKa);
     }
 
     /** log10 K at 25 degrees C of the working base against a liquid that is in the flask beside the solvent. */
