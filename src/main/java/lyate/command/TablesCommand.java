@@ -10,6 +10,7 @@ import java.util.function.Consumer;
 import lyate.bench.Enthalpies;
 import lyate.bench.QuenchHazards;
 import lyate.molecule.MoleculeReader;
+import lyate.review.RuleExamples;
 import lyate.review.StepReviewer;
 import lyate.table.NearestNames;
 import lyate.table.TableException;
@@ -81,6 +82,11 @@ final class TablesCommand implements Callable<Integer> {
                 sound = false;
                 terminal.tell(e.getMessage());
             }
+        }
+        if (sound) {
+            List<String> examples = RuleExamples.load(folders).problemsOfOwnRows();
+            examples.forEach(terminal::tell);
+            sound = examples.isEmpty();
         }
         if (sound) {
             terminal.outWriter().println("every table in " + checked + " can be used");

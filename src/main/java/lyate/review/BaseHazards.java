@@ -41,7 +41,7 @@ public final class BaseHazards {
             text("precaution"), text("source"), text("hit"), text("miss"));
 
     /** One row. */
-    record Rule(String id, BaseCondition base, Surroundings surroundings, boolean needsProton, FindingKind kind,
+    record Rule(String id, RulePlace place, BaseCondition base, Surroundings surroundings, boolean needsProton, FindingKind kind,
                 Optional<Finding.Severity> severity, String sentence, String precaution, String source, String hit,
                 String miss) {}
 
@@ -62,7 +62,8 @@ public final class BaseHazards {
         RuleCells cells = new RuleCells(stockroom, problems);
         List<Rule> rules = new ArrayList<>();
         for (Row row : Table.read(SCHEMA, folders).rows()) {
-            rules.add(new Rule(row.id(), cells.families(row), cells.surroundings(row), row.text("when").equals("proton-taken"),
+            rules.add(new Rule(row.id(), RulePlace.of(row, SCHEMA), cells.families(row), cells.surroundings(row),
+                    row.text("when").equals("proton-taken"),
                     RuleCells.kind(row), RuleCells.severity(row), row.text("sentence"), row.text("precaution"),
                     row.text("source"), row.text("hit"), row.text("miss")));
         }

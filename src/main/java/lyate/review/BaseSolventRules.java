@@ -35,7 +35,7 @@ public final class BaseSolventRules {
             text("hit"), text("miss"));
 
     /** One row. */
-    record Rule(String id, BaseCondition base, Surroundings surroundings, FindingKind kind,
+    record Rule(String id, RulePlace place, BaseCondition base, Surroundings surroundings, FindingKind kind,
                 Optional<Finding.Severity> severity, boolean destroys, OptionalDouble halfLifeMinutes, String sentence,
                 String source, String hit, String miss) {}
 
@@ -56,7 +56,8 @@ public final class BaseSolventRules {
         RuleCells cells = new RuleCells(stockroom, problems);
         List<Rule> rules = new ArrayList<>();
         for (Row row : Table.read(SCHEMA, folders).rows()) {
-            rules.add(new Rule(row.id(), cells.families(row), cells.surroundings(row), RuleCells.kind(row), RuleCells.severity(row),
+            rules.add(new Rule(row.id(), RulePlace.of(row, SCHEMA), cells.families(row), cells.surroundings(row),
+                    RuleCells.kind(row), RuleCells.severity(row),
                     row.text("destroys").equals("yes"), row.number("half_life_minutes"), row.text("sentence"),
                     row.text("source"), row.text("hit"), row.text("miss")));
         }

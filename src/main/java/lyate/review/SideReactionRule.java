@@ -9,6 +9,7 @@ import lyate.molecule.AtomPattern;
  * One row of {@code side-reactions.csv}.
  *
  * @param id            stable name
+ * @param place         where it stands
  * @param agent         what causes it
  * @param target        whose atoms the pattern is looked for in
  * @param pattern       SMARTS whose first atom is the one shown
@@ -28,7 +29,7 @@ import lyate.molecule.AtomPattern;
  * @param hit           an example that must end in this row
  * @param miss          an example that must not
  */
-record SideReactionRule(String id, Agent agent, Target target, AtomPattern pattern, BaseCondition base,
+record SideReactionRule(String id, RulePlace place, Agent agent, Target target, AtomPattern pattern, BaseCondition base,
                         OptionalDouble acidPKaAtMost, Surroundings surroundings, ProtonsFirst protonsFirst,
                         double baseLeft, Range logK, List<Condition> unless, Optional<AtomPattern> unlessPattern,
                         FindingKind kind, Optional<Finding.Severity> severity, boolean wins, String sentence,

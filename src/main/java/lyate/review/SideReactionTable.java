@@ -31,7 +31,8 @@ final class SideReactionTable {
             text("id"), word("agent", "base", "acid"), word("target", "substrate", "partner"), text("smarts"),
             list("bases"), word("nucleophilicity", "none", "low", "medium", "high").optional(),
             word("pka_scale", "water", "dmso").optional(), number("pka_at_least").optional(), number("pka_at_most").optional(),
-            number("acid_pka_at_most").optional(), list("solvents"), number("temperature_from").optional(), number("temperature_to").optional(),
+            number("acid_pka_at_most").optional(), list("solvents"), number("temperature_from").optional(),
+            number("temperature_to").optional(),
             word("protons_first", "none", "fast", "all"), number("base_left").optional(),
             number("log_k_from").optional(), number("log_k_to").optional(),
             list("unless"), text("unless_smarts").optional(), RuleCells.kind(), RuleCells.severity(),
@@ -59,7 +60,8 @@ final class SideReactionTable {
     }
 
     private SideReactionRule rule(Row row, AtomPattern pattern, Optional<AtomPattern> unless) {
-        return new SideReactionRule(row.id(), Agent.valueOf(upper(row.text("agent"))), Target.valueOf(upper(row.text("target"))),
+        return new SideReactionRule(row.id(), RulePlace.of(row, SCHEMA), Agent.valueOf(upper(row.text("agent"))),
+                Target.valueOf(upper(row.text("target"))),
                 pattern, cells.base(row), row.number("acid_pka_at_most"), cells.surroundings(row),
                 ProtonsFirst.valueOf(upper(row.text("protons_first"))), row.number("base_left").orElse(0),
                 new Range(row.number("log_k_from"), row.number("log_k_to")), conditions(row), unless,

@@ -42,6 +42,7 @@ final class AcidTable {
             if (!USES.containsAll(row.list("uses"))) {
                 problems.add(row.problem("uses", "words out of " + String.join(", ", USES)));
             }
+            StructureCheck.of(row, SCHEMA.fileName(), problems);
             acids.add(new Acid(row.id(), row.text("name"), row.list("aliases"), row.text("smiles"),
                     PKaCells.read(row, MEDIA, problems), PKaCells.furtherStages(row, problems), row.list("uses"),
                     row.text("form"), row.text("stock"), PKaCells.strength(row, problems),

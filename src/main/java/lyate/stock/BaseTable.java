@@ -81,6 +81,7 @@ final class BaseTable {
     }
 
     private Base base(Row row, BaseFamily family) {
+        StructureCheck.of(row, BASES.fileName(), problems, "conjugate_acid");
         return new Base(row.id(), row.text("name"), row.list("aliases"), family, row.text("smiles"),
                 row.text("conjugate_acid"), row.text("counter_ion"), PKaCells.read(row, MEDIA, problems),
                 PKaCells.furtherStages(row, problems), Integer.parseInt(row.text("protons_per_formula")),

@@ -34,6 +34,7 @@ final class PartnerTable {
                         problems.add(row.problem(column, "families of base-families.csv instead of " + family + ", nearest: "
                                 + String.join(", ", NearestNames.of(family, families, 3)))));
             }
+            StructureCheck.of(row, SCHEMA.fileName(), problems);
             partners.add(new Partner(row.id(), row.text("name"), row.list("aliases"), row.text("kind"), row.text("smiles"),
                     row.list("tolerated_bases"), row.list("consuming_bases"), row.number("molar_mass").getAsDouble(),
                     row.number("density"), row.number("boiling_point"), row.text("notes"), row.text("source")));

@@ -51,6 +51,7 @@ final class SolventTable {
     }
 
     private static Solvent solvent(Row row, List<TableProblem> problems) {
+        StructureCheck.of(row, SCHEMA.fileName(), problems);
         Map<Medium, KnownPKa> donorPKas = new HashMap<>(
                 PKaCells.read(row, List.of(Medium.WATER, Medium.DMSO), problems));
         PKaCells.read(row, "own", problems).ifPresent(value -> donorPKas.put(new Medium(row.id()), value));

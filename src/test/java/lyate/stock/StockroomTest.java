@@ -176,6 +176,28 @@ class StockroomTest {
     }
 
     @Test
+    void aMisdrawnStructureOfTheUsersOwnIsRefusedInWords(@TempDir Path folder) throws IOException {
+        Files.writeString(folder.resolve("bases.csv"), ownTable("my-base,my base,MyB,alkoxide").replace("OCC1CC1,", "OCC1CC,"));
+        TableException e = assertThrows(TableException.class, () -> Stockroom.load(TableFolders.overlaidBy(folder)));
+        assertEquals(List.of("conjugate_acid"), e.problems().stream().map(problem -> problem.column()).toList());
+    }
+
+    @Test
+    void aWrongMolarMassOfTheUsersOwnIsAnsweredWithTheRightOne(@TempDir Path folder) throws IOException {
+        Files.writeString(folder.resolve("bases.csv"), ownTable("my-base,my base,MyB,alkoxide").replace("94.09", "49.09"));
+        TableException e = assertThrows(TableException.class, () -> Stockroom.load(TableFolders.overlaidBy(folder)));
+        assertTrue(e.getMessage().contains("94.09, the molar mass of the structure"), e.getMessage());
+    }
+
+    @Test
+    void aPackagedHydrideCanBeReplaced(@TempDir Path folder) throws IOException, UnknownNameException {
+        String header = String.join(",", BaseTable.BASES.columns().stream().map(column -> column.name()).toList());
+        Files.writeString(folder.resolve("bases.csv"), "# version: 1\n" + header + "\nnah,sodium hydride,NaH,hydride,"
+                + "[Na+].[H-],[H][H],Na,,,,35.3,2,own,,,,,,,,1,none,dispersion,55 % dispersion,55,mass-percent,24.00,,hydrogen,,,own\n");
+        assertEquals(55, Stockroom.load(TableFolders.overlaidBy(folder)).base("NaH").strength().orElseThrow().value());
+    }
+
+    @Test
     void aNameTwoRowsShareIsRefusedNamingBoth(@TempDir Path folder) throws IOException {
         Files.writeString(folder.resolve("bases.csv"), ownTable("my-base,my base,KO-tBu,alkoxide"));
         TableException e = assertThrows(TableException.class, () -> Stockroom.load(TableFolders.overlaidBy(folder)));
