@@ -23,6 +23,7 @@ public final class Lyate {
         CommandLine command = new CommandLine(new RootCommand())
                 .addSubcommand(new SitesCommand(terminal))
                 .addSubcommand(new CheckCommand(terminal))
+                .addSubcommand(new BasesCommand(terminal))
                 .addSubcommand(new ReviewCommand(terminal))
                 .addSubcommand(new AccuracyCommand(terminal))
                 .addSubcommand(new TablesCommand(terminal));

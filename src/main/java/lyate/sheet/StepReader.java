@@ -142,10 +142,19 @@ public final class StepReader {
             return Optional.empty();
         }
         try {
-            return Optional.of(molecules.read(text));
+            return Optional.of(molecules.read(structureOf(text)));
         } catch (MoleculeException e) {
             problems.add(new Problem(SheetColumn.ELECTROPHILE, e.getMessage()));
             return Optional.empty();
+        }
+    }
+
+    /** A partner's structure by its name or abbreviation; any other text is a structure itself. */
+    private String structureOf(String text) {
+        try {
+            return stockroom.partner(text).smiles();
+        } catch (UnknownNameException e) {
+            return text;
         }
     }
 

@@ -100,8 +100,19 @@ class LyateTest {
         Run run = run("", "check", "--substrate", "CC(C)=O", "--base", "sodium hydryde", "--solvent", "THF", "--water-ppm", "wet");
         assertEquals(1, run.code());
         assertEquals("", run.out());
-        assertTrue(run.err().contains("lyate check: --base: no base called 'sodium hydryde' in the tables; nearest: sodium hydride"), run.err());
-        assertTrue(run.err().contains("lyate check: --water-ppm: found 'wet', expected a number from 0 to 1000000 (mass ppm)"), run.err());
+        assertTrue(run.err().contains("--base: no base called 'sodium hydryde' in the tables; nearest: sodium hydride"), run.err());
+        assertTrue(run.err().contains("--water-ppm: found 'wet', expected a number from 0 to 1000000 (mass ppm)"), run.err());
+    }
+
+    @Test
+    void basesRanksTheStockroom() throws IOException {
+        Run run = run("", "bases", "--substrate", "Oc1ccccc1", "--solvent", "DMF", "--top", "5", "--format", "csv");
+        assertEquals(0, run.code());
+        List<CSVRecord> rows = csv(run.out());
+        assertEquals(List.of("1", "2", "3", "4", "5"), rows.stream().map(row -> row.get("rank")).toList());
+        assertEquals("selective", rows.get(0).get("verdict"));
+        assertEquals(2, run("", "bases", "--solvent", "DMF").code());
+        assertEquals(1, run("", "bases", "--substrate", "ClC(Cl)(Cl)Cl", "--solvent", "DMF").code());
     }
 
     @Test
@@ -205,7 +216,7 @@ class LyateTest {
     }
 
     @ParameterizedTest
-    @ValueSource(strings = {"", "sites", "check", "review", "accuracy", "tables"})
+    @ValueSource(strings = {"", "sites", "check", "review", "bases", "accuracy", "tables"})
     void helpIsThere(String command) {
         Run run = run("", Stream.of(command, "--help").filter(word -> !word.isEmpty()).toArray(String[]::new));
         assertEquals(0, run.code());

@@ -48,6 +48,12 @@ class StepReaderTest {
         assertTrue(step.partner().isEmpty());
     }
 
+    @ParameterizedTest
+    @CsvSource({"MeI,CH3I", "benzyl bromide,C7H7Br", "CCBr,C2H5Br", "1-bromobutane,C4H9Br"})
+    void electrophileByNameOrStructure(String text, String formula) throws RowException, SheetException {
+        assertEquals(formula, read("substrate,base,solvent,electrophile", "CC(C)=O,LDA,THF," + text).partner().orElseThrow().formula());
+    }
+
     @Test
     void everyColumnAtFaultIsNamed() {
         RowException refused = assertThrows(RowException.class, () -> read("substrate,site,base,base_equiv,solvent,temperature_C",
