@@ -1,11 +1,11 @@
 package lyate.acidity;
 
 import java.util.ArrayList;
-import java.util.Comparator;
+import java.util.HashMap;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
-import java.util.stream.Collectors;
 import java.util.stream.Stream;
 import lyate.stock.Medium;
 import lyate.table.Row;
@@ -25,9 +25,15 @@ public final class MediaTransfer {
     private static final List<Medium> HUBS = List.of(Medium.DMSO, Medium.WATER);
 
     private final List<MediaRelation> relations;
+    private final Map<Line, MediaRelation> lines = new HashMap<>();
 
+    /** What a relation is looked up by. */
+    private record Line(Medium from, Medium to, String family) {}
+
+    /** Of two relations between the same media for the same family the later one holds. */
     public MediaTransfer(List<MediaRelation> relations) {
         this.relations = Stream.concat(relations.stream(), relations.stream().map(MediaRelation::inverse)).toList();
+        this.relations.forEach(row -> lines.put(new Line(row.from(), row.to(), row.family()), row));
     }
 
     /**
@@ -70,62 +76,34 @@ public final class MediaTransfer {
 
     /** The best of several values of one site, each in a medium of its own, in the wanted medium. */
     Optional<Acidity> carry(List<Acidity> values, String family, Medium to) {
-        return values.stream().flatMap(value -> ways(value, family, to)).min(Way.BEST_FIRST).map(Way::arrived);
-    }
-
-    /** A value that has arrived, and how many of its steps were not of the acid's own family. */
-    private record Way(Acidity arrived, long makeshifts) {
-
-        static final Comparator<Way> BEST_FIRST = Comparator.comparingLong(Way::makeshifts)
-                .thenComparingDouble(way -> way.arrived().sigma());
-    }
-
-    private Stream<Way> ways(Acidity value, String family, Medium to) {
-        if (value.medium().equals(to)) {
-            return Stream.of(new Way(value, 0));
-        }
-        return routes(value.medium(), to, family).stream().map(route -> new Way(carry(value, route),
-                route.stream().filter(step -> step.family().equals(MediaRelation.ANY)).count()));
+        return values.stream().flatMap(value -> routes(value, to, family)).min(MediaRoute.BEST_FIRST).map(MediaRoute::arrived);
     }
 
     /** Slope of the family's own line between two media; empty where it has none. */
     OptionalDouble slope(Medium from, Medium to, String family) {
-        return relations.stream().filter(row -> row.from().equals(from) && row.to().equals(to) && row.family().equals(family))
-                .mapToDouble(MediaRelation::slope).findFirst();
+        MediaRelation own = lines.get(new Line(from, to, family));
+        return own == null ? OptionalDouble.empty() : OptionalDouble.of(own.slope());
     }
 
-    private List<List<MediaRelation>> routes(Medium from, Medium to, String family) {
-        List<List<MediaRelation>> routes = new ArrayList<>();
-        step(from, to, family).ifPresent(step -> routes.add(List.of(step)));
+    private Stream<MediaRoute> routes(Acidity start, Medium to, String family) {
+        Medium from = start.medium();
+        if (from.equals(to)) {
+            return Stream.of(MediaRoute.of(start, List.of()));
+        }
+        List<MediaRoute> routes = new ArrayList<>();
+        step(from, to, family).ifPresent(step -> routes.add(MediaRoute.of(start, List.of(step))));
         for (Medium hub : HUBS) {
             if (!hub.equals(from) && !hub.equals(to)) {
-                step(from, hub, family).ifPresent(first ->
-                        step(hub, to, family).ifPresent(second -> routes.add(List.of(first, second))));
+                step(from, hub, family).ifPresent(first -> step(hub, to, family)
+                        .ifPresent(second -> routes.add(MediaRoute.of(start, List.of(first, second)))));
             }
         }
-        return routes;
+        return routes.stream();
     }
 
     /** The family's own relation, else the one for any acid. */
     private Optional<MediaRelation> step(Medium from, Medium to, String family) {
-        return relations.stream()
-                .filter(row -> row.from().equals(from) && row.to().equals(to))
-                .filter(row -> row.family().equals(family) || row.family().equals(MediaRelation.ANY))
-                .min(Comparator.comparing(row -> row.family().equals(MediaRelation.ANY)));
-    }
-
-    private static Acidity carry(Acidity acidity, List<MediaRelation> route) {
-        double pKa = acidity.pKa();
-        double sigma = acidity.sigma();
-        List<String> missing = new ArrayList<>(acidity.missing());
-        for (MediaRelation step : route) {
-            if (step.distanceOutside(pKa) > 0) {
-                missing.add("the relation " + step + " is used outside the range it was fitted on");
-            }
-            sigma = Math.hypot(step.slope() * sigma, step.error(pKa));
-            pKa = step.convert(pKa);
-        }
-        String path = route.stream().map(MediaRelation::toString).collect(Collectors.joining(", then "));
-        return Carried.of(acidity, pKa, sigma, route.get(route.size() - 1).to(), path, missing);
+        MediaRelation own = lines.get(new Line(from, to, family));
+        return Optional.ofNullable(own != null ? own : lines.get(new Line(from, to, MediaRelation.ANY)));
     }
 }

@@ -1,0 +1,50 @@
+package lyate.acidity;
+
+import java.util.ArrayList;
+import java.util.Comparator;
+import java.util.List;
+import java.util.stream.Collectors;
+
+/**
+ * A value and the lines it may be carried along; no line where it is where it should be already.
+ *
+ * @param start      the value to carry
+ * @param steps      the lines, in order
+ * @param pKa        where it arrives
+ * @param sigma      with which uncertainty
+ * @param makeshifts how many of the lines are not of the acid's own family
+ */
+record MediaRoute(Acidity start, List<MediaRelation> steps, double pKa, double sigma, long makeshifts) {
+
+    /** Lines of the acid's own family first, then the least uncertainty. */
+    static final Comparator<MediaRoute> BEST_FIRST = Comparator.comparingLong(MediaRoute::makeshifts)
+            .thenComparingDouble(MediaRoute::sigma);
+
+    static MediaRoute of(Acidity start, List<MediaRelation> steps) {
+        double pKa = start.pKa();
+        double sigma = start.sigma();
+        for (MediaRelation step : steps) {
+            sigma = Math.hypot(step.slope() * sigma, step.error(pKa));
+            pKa = step.convert(pKa);
+        }
+        long makeshifts = steps.stream().filter(step -> step.family().equals(MediaRelation.ANY)).count();
+        return new MediaRoute(start, steps, pKa, sigma, makeshifts);
+    }
+
+    /** The value at the end of the route, which it names. */
+    Acidity arrived() {
+        if (steps.isEmpty()) {
+            return start;
+        }
+        List<String> missing = new ArrayList<>(start.missing());
+        double value = start.pKa();
+        for (MediaRelation step : steps) {
+            if (step.distanceOutside(value) > 0) {
+                missing.add("the relation " + step + " is used outside the range it was fitted on");
+            }
+            value = step.convert(value);
+        }
+        String path = steps.stream().map(MediaRelation::toString).collect(Collectors.joining(", then "));
+        return Carried.of(start, pKa, sigma, steps.get(steps.size() - 1).to(), path, missing);
+    }
+}
