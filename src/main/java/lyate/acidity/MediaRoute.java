@@ -14,20 +14,28 @@ import java.util.stream.Collectors;
  * @param sigma      with which uncertainty
  * @param makeshifts how many of the lines are not of the acid's own family
  */
-record MediaRoute(Acidity start, List<MediaRelation> steps, double pKa, double sigma, long makeshifts) {
+record MediaRoute(Acidity start, List<Step> steps, double pKa, double sigma, long makeshifts) {
+
+    /** A line and the words for it, which are put together only once. */
+    record Step(MediaRelation line, String words) {
+
+        static Step of(MediaRelation line) {
+            return new Step(line, line.toString());
+        }
+    }
 
     /** Lines of the acid's own family first, then the least uncertainty. */
     static final Comparator<MediaRoute> BEST_FIRST = Comparator.comparingLong(MediaRoute::makeshifts)
             .thenComparingDouble(MediaRoute::sigma);
 
-    static MediaRoute of(Acidity start, List<MediaRelation> steps) {
+    static MediaRoute of(Acidity start, List<Step> steps) {
         double pKa = start.pKa();
         double sigma = start.sigma();
-        for (MediaRelation step : steps) {
-            sigma = Math.hypot(step.slope() * sigma, step.error(pKa));
-            pKa = step.convert(pKa);
+        for (Step step : steps) {
+            sigma = Math.hypot(step.line().slope() * sigma, step.line().error(pKa));
+            pKa = step.line().convert(pKa);
         }
-        long makeshifts = steps.stream().filter(step -> step.family().equals(MediaRelation.ANY)).count();
+        long makeshifts = steps.stream().filter(step -> step.line().family().equals(MediaRelation.ANY)).count();
         return new MediaRoute(start, steps, pKa, sigma, makeshifts);
     }
 
@@ -38,13 +46,13 @@ record MediaRoute(Acidity start, List<MediaRelation> steps, double pKa, double s
         }
         List<String> missing = new ArrayList<>(start.missing());
         double value = start.pKa();
-        for (MediaRelation step : steps) {
-            if (step.distanceOutside(value) > 0) {
-                missing.add("the relation " + step + " is used outside the range it was fitted on");
+        for (Step step : steps) {
+            if (step.line().distanceOutside(value) > 0) {
+                missing.add("the relation " + step.words() + " is used outside the range it was fitted on");
             }
-            value = step.convert(value);
+            value = step.line().convert(value);
         }
-        String path = steps.stream().map(MediaRelation::toString).collect(Collectors.joining(", then "));
-        return Carried.of(start, pKa, sigma, steps.get(steps.size() - 1).to(), path, missing);
+        String path = steps.stream().map(Step::words).collect(Collectors.joining(", then "));
+        return Carried.of(start, pKa, sigma, steps.get(steps.size() - 1).line().to(), path, missing);
     }
 }

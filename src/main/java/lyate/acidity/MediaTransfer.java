@@ -7,6 +7,7 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.stream.Stream;
+import lyate.acidity.MediaRoute.Step;
 import lyate.stock.Medium;
 import lyate.table.Row;
 import lyate.table.Table;
@@ -25,7 +26,7 @@ public final class MediaTransfer {
     private static final List<Medium> HUBS = List.of(Medium.DMSO, Medium.WATER);
 
     private final List<MediaRelation> relations;
-    private final Map<Line, MediaRelation> lines = new HashMap<>();
+    private final Map<Line, Step> lines = new HashMap<>();
 
     /** What a relation is looked up by. */
     private record Line(Medium from, Medium to, String family) {}
@@ -33,7 +34,7 @@ public final class MediaTransfer {
     /** Of two relations between the same media for the same family the later one holds. */
     public MediaTransfer(List<MediaRelation> relations) {
         this.relations = Stream.concat(relations.stream(), relations.stream().map(MediaRelation::inverse)).toList();
-        this.relations.forEach(row -> lines.put(new Line(row.from(), row.to(), row.family()), row));
+        this.relations.forEach(row -> lines.put(new Line(row.from(), row.to(), row.family()), Step.of(row)));
     }
 
     /**
@@ -81,8 +82,8 @@ public final class MediaTransfer {
 
     /** Slope of the family's own line between two media; empty where it has none. */
     OptionalDouble slope(Medium from, Medium to, String family) {
-        MediaRelation own = lines.get(new Line(from, to, family));
-        return own == null ? OptionalDouble.empty() : OptionalDouble.of(own.slope());
+        Step own = lines.get(new Line(from, to, family));
+        return own == null ? OptionalDouble.empty() : OptionalDouble.of(own.line().slope());
     }
 
     private Stream<MediaRoute> routes(Acidity start, Medium to, String family) {
@@ -102,8 +103,8 @@ public final class MediaTransfer {
     }
 
     /** The family's own relation, else the one for any acid. */
-    private Optional<MediaRelation> step(Medium from, Medium to, String family) {
-        MediaRelation own = lines.get(new Line(from, to, family));
+    private Optional<Step> step(Medium from, Medium to, String family) {
+        Step own = lines.get(new Line(from, to, family));
         return Optional.ofNullable(own != null ? own : lines.get(new Line(from, to, MediaRelation.ANY)));
     }
 }
