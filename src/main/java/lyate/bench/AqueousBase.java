@@ -7,6 +7,7 @@ import java.util.stream.IntStream;
 import java.util.stream.Stream;
 import lyate.flask.ProtonHolder;
 import lyate.flask.ProtonPlace;
+import lyate.molecule.Molecule;
 import lyate.molecule.MoleculeException;
 import lyate.molecule.MoleculeReader;
 import lyate.stock.Acid;
@@ -52,15 +53,17 @@ final class AqueousBase {
         return ProtonHolder.stages(acid.name(), 1, pKas.length, pKas);
     }
 
-    /** A metal amide sets an amine free, which takes a proton of its own in acid. Gas leaves. */
+    /** A metal amide sets amines free, which take protons of their own in acid. Gas leaves. */
     private static Optional<ProtonHolder> freed(Base base, double milliMole, AqueousForms forms) {
         boolean stays = base.family().strong() && base.gas().isEmpty() && !base.family().irreversible();
         if (!stays || base.conjugateAcid().isEmpty()) {
             return Optional.empty();
         }
         try {
-            AqueousForm form = forms.of("freed by " + base.name(), new MoleculeReader().read(base.conjugateAcid()));
-            return form.holder().places().isEmpty() ? Optional.empty() : Optional.of(form.holder().withAmount(milliMole));
+            Molecule freed = new MoleculeReader().read(base.conjugateAcid());
+            ProtonHolder holder = forms.of("freed by " + base.name(), freed).holder();
+            return AqueousForm.totalCharge(freed) != 0 || holder.places().isEmpty() ? Optional.empty()
+                    : Optional.of(holder.withAmount(milliMole * base.protonsPerFormula()));
         } catch (MoleculeException e) {
             throw new IllegalArgumentException("conjugate acid of " + base.name() + ": " + e.getMessage(), e);
         }

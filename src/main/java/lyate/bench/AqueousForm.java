@@ -101,7 +101,7 @@ public record AqueousForm(String name, ProtonHolder holder, long uncharged, bool
         return site.role() == Role.ACID ? Math.log10(count) : -Math.log10(count);
     }
 
-    private static int totalCharge(Molecule molecule) {
+    static int totalCharge(Molecule molecule) {
         int charge = 0;
         for (int atom = 0; atom < molecule.atomCount(); atom++) {
             charge += molecule.charge(atom);

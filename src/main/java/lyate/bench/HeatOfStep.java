@@ -1,26 +1,26 @@
 package lyate.bench;
 
 import java.util.ArrayList;
+import java.util.Comparator;
 import java.util.List;
-import java.util.Locale;
 import java.util.Map;
 import java.util.Optional;
-import java.util.function.Function;
 import lyate.bench.Enthalpies.Donor;
 import lyate.bench.Enthalpies.ReactionHeat;
+import lyate.flask.Flask;
 import lyate.flask.TransferThermodynamics;
 import lyate.review.FindingKind;
 import lyate.review.Review;
 import lyate.review.Step;
 import lyate.review.Transfer;
 import lyate.stock.Base;
-import lyate.stock.KnownPKa;
 import lyate.stock.Medium;
 
 /**
  * Who gives its protons to the base in a step, and the heat of each. Where a tabulated heat is at hand it is used; for a
  * proton of the substrate the larger of the pKa difference taken as enthalpy and, where the proton is at least as acidic
- * as water, the heat with water: rather too much than too little.
+ * as water, the heat with water: rather too much than too little, and never less than nothing. What a base gives off as
+ * its own solvent destroys it is only known where it is tabulated: pKa differences say too little there.
  */
 final class HeatOfStep {
 
@@ -69,10 +69,8 @@ final class HeatOfStep {
     private void addSolvent(double protons) {
         Step step = review.step();
         taken += protons;
-        Optional<ReactionHeat> tabulated = Optional.ofNullable(SOLVENT_DONORS.get(step.solvent().id()))
-                .flatMap(donor -> enthalpies.of(step.base(), donor));
-        add(step.solvent().name(), protons, tabulated.map(HeatOfStep::share).or(() ->
-                byPKa(step.base(), medium -> step.solvent().donorPKa(medium).map(KnownPKa::pKa))));
+        add(step.solvent().name(), protons, Optional.ofNullable(SOLVENT_DONORS.get(step.solvent().id()))
+                .flatMap(donor -> enthalpies.of(step.base(), donor)).map(HeatOfStep::share));
     }
 
     private void addDonors(Amounts amounts) {
@@ -103,13 +101,12 @@ final class HeatOfStep {
     }
 
     private Optional<HeatShare> withWater(Base base) {
-        return enthalpies.of(base, Donor.WATER).map(HeatOfStep::share)
-                .or(() -> byPKa(base, medium -> Optional.ofNullable(WATER_PKA.get(medium))));
+        return enthalpies.of(base, Donor.WATER).map(HeatOfStep::share).or(() -> byPKaOfWater(base));
     }
 
     private Optional<HeatShare> withSite(String site) {
         return transfer(site).map(transfer -> {
-            double fromPKa = -transfer.deltaG();
+            double fromPKa = Math.max(0, -transfer.deltaG());
             Double water = WATER_PKA.get(transfer.acidity().medium());
             Optional<ReactionHeat> floor = enthalpies.of(review.step().base(), Donor.WATER)
                     .filter(heat -> water != null && transfer.acidity().pKa() <= water && -heat.kiloJoulePerProton() > fromPKa);
@@ -122,16 +119,13 @@ final class HeatOfStep {
         return new HeatShare("", 0, -heat.kiloJoulePerProton(), true, heat.equation(), heat.source());
     }
 
-    private static Optional<HeatShare> byPKa(Base base, Function<Medium, Optional<Double>> donor) {
-        for (Medium medium : List.of(Medium.WATER, Medium.DMSO)) {
-            Optional<Double> logK = base.pKa(medium).flatMap(known -> donor.apply(medium).map(pKa -> known.pKa() - pKa));
-            if (logK.isPresent()) {
-                double heat = -TransferThermodynamics.deltaGKiloJoule(logK.get(), 298.15);
-                String source = String.format(Locale.ROOT, "pKa values in %s", medium.id());
-                return Optional.of(new HeatShare("", 0, heat, false, BY_PKA, source));
-            }
-        }
-        return Optional.empty();
+    /** By the medium that says more; empty where none says that water gives its proton readily. */
+    private static Optional<HeatShare> byPKaOfWater(Base base) {
+        return WATER_PKA.entrySet().stream()
+                .flatMap(water -> base.pKa(water.getKey()).map(known -> known.pKa() - water.getValue()).stream())
+                .max(Comparator.naturalOrder()).filter(logK -> logK > 0)
+                .map(logK -> new HeatShare("", 0, -TransferThermodynamics.deltaGKiloJoule(logK, Flask.ROOM_KELVIN), false, BY_PKA,
+                        "pKa values of base and water"));
     }
 
     private void add(String donor, double milliMole, Optional<HeatShare> heat) {

@@ -93,6 +93,22 @@ class GasAndHeatTest {
                 "No heat is known for sodium hydride with liquid: treat the addition as strongly exothermic."), found.cautions().toString());
     }
 
+    /** No table tells what potassium hexamethyldisilazide gives off in water; the pKa difference would say next to nothing. */
+    @Test
+    void aBaseItsSolventDestroysIsNotJudgedByPKa() {
+        Step step = Reviews.step("CCOC(=O)CC(=O)OCC", "khmds", 1.1, "water", 25, 0.3, 0);
+        Review review = Reviews.review(step, "C6", true, new Site("C6", 16.4, 1, 90));
+        GasAndHeat found = of(review);
+        assertTrue(found.temperatureRise().isEmpty());
+        assertEquals(List.of("water"), found.withoutHeat());
+    }
+
+    /** A transfer that hardly runs is no cold pack. */
+    @Test
+    void anEstimateIsNeverBelowZero() {
+        assertEquals(0, of(malonate("et3n", "thf", 1, 0, -6, 1)).kiloJoule().orElseThrow());
+    }
+
     @Test
     void moistureAddsItsOwnHeat() {
         GasAndHeat found = of(malonate("n-buli", "thf", 1.2, -78, 30, 100, 500));

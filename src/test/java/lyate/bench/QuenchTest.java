@@ -65,6 +65,12 @@ class QuenchTest {
         assertEquals(20, quench("lda", INERT, "hcl-1m", 7).acid().milliMole(), 0.05);
     }
 
+    /** A phosphazene is a neutral base and takes one proton, whatever its cation looks like. */
+    @Test
+    void aStrongNeutralBaseTakesOneProton() throws UnknownNameException {
+        assertEquals(10, quench("p2-tbu", INERT, "hcl-1m", 7).acid().milliMole(), 0.01);
+    }
+
     /** Butane and hydrogen leave: one proton each. */
     @Test
     void whatLeavesAsAGasTakesOneProton() throws UnknownNameException {
