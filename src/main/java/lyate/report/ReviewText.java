@@ -3,6 +3,7 @@ package lyate.report;
 import java.io.IOException;
 import java.util.List;
 import java.util.Locale;
+import lyate.molecule.Molecule;
 import lyate.review.Finding;
 import lyate.review.Review;
 import lyate.review.Step;
@@ -19,7 +20,7 @@ public final class ReviewText implements ResultWriter<Review> {
 
     @Override
     public void write(Review review) throws IOException {
-        line("%s (%s %%): %s", review.verdict().code(), Numbers.fixed(100 * review.probability(), 0), review.verdict().meaning());
+        line("%s (%s %%): %s", review.verdict().code(), Numbers.percent(review.probability()), review.verdict().meaning());
         line("");
         step(review);
         line("");
@@ -31,7 +32,7 @@ public final class ReviewText implements ResultWriter<Review> {
 
     private void step(Review review) throws IOException {
         Step step = review.step();
-        line("  substrate      %s", step.substrate().smiles());
+        line("  substrate      %s", asGiven(step.substrate()));
         for (String warning : step.substrate().warnings()) {
             line("                 %s", warning);
         }
@@ -78,5 +79,10 @@ public final class ReviewText implements ResultWriter<Review> {
 
     private void line(String format, Object... values) throws IOException {
         out.append(String.format(Locale.ROOT, format, values).stripTrailing()).append('\n');
+    }
+
+    /** The text whose order numbers the atoms; a molfile is too long for a line. */
+    private static String asGiven(Molecule molecule) {
+        return molecule.input().contains("\n") ? molecule.smiles() : molecule.input();
     }
 }
