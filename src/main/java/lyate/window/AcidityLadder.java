@@ -16,6 +16,7 @@ import javax.swing.ToolTipManager;
 import javax.swing.UIManager;
 import lyate.stock.Base;
 import lyate.stock.Medium;
+import lyate.stock.Solvent;
 
 /** The acidity ladder; arrow keys walk its rungs, a click or Enter on a site makes it the intended one. */
 final class AcidityLadder extends JPanel {
@@ -23,6 +24,7 @@ final class AcidityLadder extends JPanel {
     private final Theme theme;
     private final Consumer<String> onSite;
     private final Consumer<Base> onBase;
+    private final Solvent water;
     private Shown shown;
     private List<Base> compared = List.of();
     private Optional<Ladder> ladder = Optional.empty();
@@ -30,10 +32,12 @@ final class AcidityLadder extends JPanel {
     private Dimension pictureSize;
     private int focusedRung = -1;
 
-    AcidityLadder(Theme theme, Consumer<String> onSite, Consumer<Base> onBase) {
+    /** @param water the row for water, which stands on the ladder where the solvent is not dry */
+    AcidityLadder(Theme theme, Solvent water, Consumer<String> onSite, Consumer<Base> onBase) {
         this.theme = theme;
         this.onSite = onSite;
         this.onBase = onBase;
+        this.water = water;
         setFocusable(true);
         setOpaque(true);
         Mouse mouse = new Mouse();
@@ -80,7 +84,7 @@ final class AcidityLadder extends JPanel {
     }
 
     private void refresh() {
-        ladder = shown == null ? Optional.empty() : Ladder.of(shown, compared);
+        ladder = shown == null ? Optional.empty() : Ladder.of(shown, compared, water);
         ladder.ifPresent(known -> getAccessibleContext().setAccessibleDescription(String.join(". ", known.rungs().stream().map(AcidityLadder::sentence).toList())));
         picture = null;
         repaint();

@@ -5,6 +5,7 @@ import java.awt.Dimension;
 import java.awt.FlowLayout;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 import java.util.OptionalDouble;
 import javax.swing.BorderFactory;
 import javax.swing.JComboBox;
@@ -36,6 +37,7 @@ final class AmountsPanel extends JPanel {
     private final AmountsModel model = new AmountsModel();
     private final JPanel words = new JPanel();
     private transient Review review;
+    private transient Optional<Amounts> amounts = Optional.empty();
 
     AmountsPanel(Theme theme, Enthalpies enthalpies) {
         super(new BorderLayout());
@@ -103,6 +105,11 @@ final class AmountsPanel extends JPanel {
         update();
     }
 
+    /** The amounts on screen. */
+    Optional<Amounts> amounts() {
+        return amounts;
+    }
+
     private void update() {
         OptionalDouble size = above(amount);
         OptionalDouble strength = titrated.getText().isBlank() ? OptionalDouble.empty() : above(titrated);
@@ -114,9 +121,10 @@ final class AmountsPanel extends JPanel {
         }
         Molecule substrate = review.step().substrate();
         Batch batch = GRAM.equals(unit.getSelectedItem()) ? Batch.ofGrams(substrate, size.getAsDouble()) : Batch.ofMilliMole(substrate, size.getAsDouble());
-        Amounts amounts = Amounts.of(review, batch, strength);
-        model.show(review.step(), amounts);
-        say(amounts, GasAndHeat.of(review, amounts, enthalpies));
+        Amounts worked = Amounts.of(review, batch, strength);
+        amounts = Optional.of(worked);
+        model.show(review.step(), worked);
+        say(worked, GasAndHeat.of(review, worked, enthalpies));
     }
 
     private static OptionalDouble above(JTextField field) {

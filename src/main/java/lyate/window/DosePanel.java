@@ -17,7 +17,7 @@ final class DosePanel extends LazyTab {
     private final Theme theme;
     private final transient Reviewer reviewer;
     private final transient DoubleConsumer onEquivalents;
-    private final ChartPanel panel = new ChartPanel(null, true);
+    private final ChartPanel panel = Charts.panel("Protons taken against equivalents of base");
     private transient DoseSweep sweep;
 
     DosePanel(Theme theme, Reviewer reviewer, DoubleConsumer onEquivalents) {
@@ -25,14 +25,7 @@ final class DosePanel extends LazyTab {
         this.theme = theme;
         this.reviewer = reviewer;
         this.onEquivalents = onEquivalents;
-        panel.setPopupMenu(null);
-        panel.setMouseZoomable(false);
-        panel.setMinimumDrawWidth(0);
-        panel.setMinimumDrawHeight(0);
-        panel.setMaximumDrawWidth(Integer.MAX_VALUE);
-        panel.setMaximumDrawHeight(Integer.MAX_VALUE);
         panel.setFocusable(true);
-        panel.getAccessibleContext().setAccessibleName("Protons taken against equivalents of base");
         Keys.bind(panel, "LEFT", () -> move(shown().review().step().equivalents() - KEY_STEP));
         Keys.bind(panel, "RIGHT", () -> move(shown().review().step().equivalents() + KEY_STEP));
         Drag drag = new Drag();

@@ -14,6 +14,7 @@ final class Drawer extends JTabbedPane implements AutoCloseable {
     private final BaseChoicePanel choice;
     private final DosePanel dose;
     private final AmountsPanel amounts;
+    private final WorkUpPanel workUp;
     private final SourcesModel sources = new SourcesModel();
 
     /** What the drawer can ask of the rest of the window. */
@@ -34,10 +35,12 @@ final class Drawer extends JTabbedPane implements AutoCloseable {
         choice = new BaseChoicePanel(theme, engine, wishes::take, wishes::compare);
         dose = new DosePanel(theme, engine.reviewer(), wishes::equivalents);
         amounts = new AmountsPanel(theme, engine.enthalpies());
+        workUp = new WorkUpPanel(theme, engine, amounts::amounts);
         addTab("Transfers", null, transfers, "every donor against the base");
         addTab("Base choice", null, choice, "the whole stockroom ranked for this site in this solvent");
         addTab("Equivalents", null, dose, "what more or less base would do");
         addTab("Amounts", null, amounts, "what to weigh and measure out, gas and heat");
+        addTab("Work-up", null, workUp, "acid for the quench, pH for the extraction");
         addTab("Sources", null, table(sources, "Sources"), "every value used, with its citation");
         addChangeListener(event -> {
             if (getSelectedComponent() instanceof LazyTab tab) {
@@ -63,6 +66,7 @@ final class Drawer extends JTabbedPane implements AutoCloseable {
         choice.show(shown);
         dose.show(shown);
         amounts.show(shown);
+        workUp.show(shown);
         sources.show(shown);
     }
 
@@ -70,5 +74,6 @@ final class Drawer extends JTabbedPane implements AutoCloseable {
     public void close() {
         choice.close();
         dose.close();
+        workUp.close();
     }
 }

@@ -121,13 +121,13 @@ final class FindingsPanel extends JPanel {
         return scroll;
     }
 
-    /** At most this share of the height goes to the safety notes before they scroll. */
+    /** At most a third of the height goes to the safety notes before they scroll. */
     @Override
     public void doLayout() {
         if (safetyScroll.isVisible()) {
             safety.setSize(getWidth(), Math.max(1, safety.getHeight()));
             int wanted = safety.getPreferredSize().height;
-            safetyScroll.setPreferredSize(new Dimension(getWidth(), Math.min(wanted, getHeight() * 2 / 5)));
+            safetyScroll.setPreferredSize(new Dimension(getWidth(), Math.min(wanted, getHeight() / 3)));
         }
         super.doLayout();
     }

@@ -5,9 +5,11 @@ import java.util.Comparator;
 import java.util.List;
 import java.util.Locale;
 import java.util.Optional;
+import lyate.review.Step;
 import lyate.review.Transfer;
 import lyate.stock.Base;
 import lyate.stock.Medium;
+import lyate.stock.Solvent;
 
 /**
  * What stands on the acidity ladder. Pure function of a review.
@@ -29,12 +31,13 @@ record Ladder(Medium medium, List<Rung> rungs, double basePKa, String beyond) {
         rungs = List.copyOf(rungs);
     }
 
-    static Optional<Ladder> of(Shown shown, List<Base> compared) {
+    /** @param water the row for water */
+    static Optional<Ladder> of(Shown shown, List<Base> compared, Solvent water) {
         Optional<Transfer> anchor = shown.intended().map(SiteTag::transfer).or(() -> shown.review().transfers().stream().findFirst());
-        return anchor.map(transfer -> of(shown, compared, transfer));
+        return anchor.map(transfer -> of(shown, compared, water, transfer));
     }
 
-    private static Ladder of(Shown shown, List<Base> compared, Transfer anchor) {
+    private static Ladder of(Shown shown, List<Base> compared, Solvent water, Transfer anchor) {
         Medium medium = anchor.acidity().medium();
         // log K is that at the temperature of the step; the axis holds pKa values, which are those of 298.15 K.
         double toRoom = (shown.review().step().temperatureCelsius() + ZERO_CELSIUS) / ROOM_KELVIN;
@@ -44,6 +47,11 @@ record Ladder(Medium medium, List<Rung> rungs, double basePKa, String beyond) {
         shown.tags().sites().forEach(site -> all.add(rung(Rung.Kind.SITE, site.label(), site.transfer(), Optional.of(site), scale)));
         shown.review().transfers().stream().filter(transfer -> transfer.atoms().isEmpty())
                 .forEach(transfer -> all.add(other(shown, transfer, scale)));
+        Step step = shown.review().step();
+        donor(Rung.Kind.SOLVENT, step.solvent(), medium, all).ifPresent(all::add);
+        if (step.waterPpm() > 0 && !step.solvent().id().equals(water.id())) {
+            donor(Rung.Kind.WATER, water, medium, all).ifPresent(all::add);
+        }
         double sigma = Math.sqrt(Math.max(0, square(anchor.sigmaLogK() * toRoom) - square(anchor.acidity().sigma())));
         all.add(new Rung(Rung.Kind.BASE, workingBase(shown), basePKa, sigma, Words.oneDecimal(basePKa), Optional.empty(),
                 Optional.empty(), anchor.decidedBy()));
@@ -60,6 +68,15 @@ record Ladder(Medium medium, List<Rung> rungs, double basePKa, String beyond) {
     private static String workingBase(Shown shown) {
         Base base = shown.review().step().base();
         return shown.review().workingBase().equals(base.name()) ? StockWords.shortName(base) : shown.review().workingBase();
+    }
+
+    /** A solvent by its own pKa, unless the review has a transfer for it already. */
+    private static Optional<Rung> donor(Rung.Kind kind, Solvent solvent, Medium medium, List<Rung> already) {
+        if (already.stream().anyMatch(rung -> rung.kind() == kind)) {
+            return Optional.empty();
+        }
+        return solvent.donorPKa(medium).map(known -> new Rung(kind, StockWords.shortName(solvent), known.pKa(), known.sigma(),
+                Words.withSigma(known.pKa(), known.sigma()), Optional.empty(), Optional.empty(), known.source()));
     }
 
     private static Rung other(Shown shown, Transfer transfer, Scale scale) {

@@ -1,8 +1,10 @@
 package lyate.window;
 
 import java.util.ArrayList;
+import java.util.Collections;
 import java.util.Comparator;
 import java.util.List;
+import java.util.stream.Collectors;
 import java.util.stream.Stream;
 
 /**
@@ -23,7 +25,9 @@ record LadderLabel(Rung rung, double y) {
     private static List<LadderLabel> rail(Stream<Rung> rungs, LadderAxis axis, double height, double top, double bottom) {
         int room = (int) ((bottom - top) / height);
         List<Rung> kept = rungs.sorted(Comparator.comparingInt(Rung::importance)).limit(room)
-                .sorted(Comparator.comparingDouble(rung -> axis.y(rung.pKa()))).toList();
+                .sorted(Comparator.comparingDouble((Rung rung) -> -axis.y(rung.pKa()))).collect(Collectors.toCollection(ArrayList::new));
+        // Sorted from below, so that of equal values the earlier letter comes to stand lower.
+        Collections.reverse(kept);
         double[] wanted = kept.stream().mapToDouble(rung -> axis.y(rung.pKa())).toArray();
         double[] placed = LabelSpread.spread(wanted, height, top, bottom);
         List<LadderLabel> labels = new ArrayList<>();

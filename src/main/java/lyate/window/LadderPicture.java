@@ -93,7 +93,7 @@ final class LadderPicture {
             g.draw(new Line2D.Double(rightRail - tick, axis.y(value), rightRail, axis.y(value)));
             if (value % step == 0) {
                 String text = Words.whole(value);
-                g.drawString(text, (float) (rightRail - palette.space("gap") - metrics.stringWidth(text)), (float) (axis.y(value) + metrics.getAscent() * 0.38));
+                g.drawString(text, (float) (rightRail - palette.space("mark") - palette.space("gap") - metrics.stringWidth(text)), (float) (axis.y(value) + metrics.getAscent() * 0.38));
             }
         }
         Font bold = font.deriveFont(Font.BOLD);

@@ -45,6 +45,7 @@ abstract class LazyTab extends JPanel implements AutoCloseable {
 
     /** To be called when the tab comes into view. */
     void lookedAt() {
+        due |= shown != null && !key.equals(Optional.of(key(shown)));
         if (due && shown != null && isShowing()) {
             due = false;
             key = Optional.of(key(shown));

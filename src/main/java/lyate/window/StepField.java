@@ -8,7 +8,7 @@ enum StepField {
     SOLVENT("Solvent", "Solvent", "name or abbreviation", ""),
     TEMPERATURE("T / \u00b0C", "Temperature", "of the deprotonation", "\u00b0C"),
     CONCENTRATION("c / mol L\u207b\u00b9", "Concentration", "of the substrate", "mol/L"),
-    WATER("Water / ppm", "Water", "in the solvent, by mass", "ppm"),
+    WATER("H\u2082O / ppm", "Water", "in the solvent, by mass", "ppm"),
     PARTNER("Partner", "Partner", "electrophile or additive in the same flask (optional)", "");
 
     private final String label;

@@ -5,6 +5,7 @@ import java.awt.Font;
 import java.awt.Graphics2D;
 import java.awt.RenderingHints;
 import java.awt.geom.AffineTransform;
+import java.awt.geom.Dimension2D;
 import java.awt.geom.Ellipse2D;
 import java.awt.geom.Line2D;
 import java.awt.geom.Point2D;
@@ -21,6 +22,9 @@ import lyate.window.TagPlacer.Wish;
 
 /** The substrate with its tags, laid out for one size and one view; painted on screen, tested and exported alike. */
 final class SubstratePicture {
+
+    /** The values of tags may take this part of the picture. */
+    private static final double ROOM_PER_VALUE = 12;
 
     private final Shown shown;
     private final Palette palette;
@@ -42,7 +46,7 @@ final class SubstratePicture {
         this.ring = Math.min(palette.space("ring"), 0.4 * Math.sqrt(Math.abs(transform.getDeterminant())));
         Rectangle2D area = new Rectangle2D.Double(palette.space("small"), palette.space("small"),
                 size.width - 2.0 * palette.space("small"), size.height - 2.0 * palette.space("small"));
-        this.placed = new TagPlacer(area, atoms, bonds(), symbols(), ring + palette.space("small")).place(wishes(measure));
+        this.placed = new TagPlacer(area, atoms, bonds(), symbols(), ring + palette.space("small")).place(wishes(measure, size));
     }
 
     void paint(Graphics2D g, List<Integer> highlighted, Optional<SiteTag> focused) {
@@ -120,9 +124,20 @@ final class SubstratePicture {
                 .map(mark -> transform.createTransformedShape(mark.shape()).getBounds2D()).toList();
     }
 
-    /** The intended site first, then by acidity; sites out of reach ask for a letter only. */
-    private List<Wish> wishes(Graphics2D g) {
-        return shown.tags().sites().stream().sorted(Comparator.comparing((SiteTag tag) -> !tag.intended()))
-                .map(tag -> new Wish(tag, TagPainter.counts(tag) ? painter.fullSize(g, tag) : null, painter.letterSize(g, tag))).toList();
+    /**
+     * The intended site first, then in the order in which protons go. Sites out of reach ask for a letter only, and so do
+     * the last ones where there is not room for all values.
+     */
+    private List<Wish> wishes(Graphics2D g, Dimension size) {
+        List<SiteTag> ordered = shown.tags().sites().stream().sorted(Comparator.comparing((SiteTag tag) -> !tag.intended())).toList();
+        List<Wish> wishes = new ArrayList<>();
+        double room = size.getWidth() * size.getHeight() / ROOM_PER_VALUE;
+        for (SiteTag tag : ordered) {
+            Dimension2D full = painter.fullSize(g, tag);
+            room -= full.getWidth() * full.getHeight();
+            boolean value = tag.intended() || TagPainter.counts(tag) && room > 0;
+            wishes.add(new Wish(tag, value ? full : null, painter.letterSize(g, tag)));
+        }
+        return wishes;
     }
 }

@@ -3,6 +3,7 @@ package lyate.window;
 import java.awt.BorderLayout;
 import java.awt.Font;
 import java.util.Comparator;
+import java.util.Locale;
 import java.util.Map;
 import java.util.stream.Collectors;
 import javax.swing.BorderFactory;
@@ -50,7 +51,7 @@ final class VerdictHeader extends JPanel {
         JLabel name = new JLabel(name(review.verdict()));
         name.setFont(plain.deriveFont(Font.BOLD, plain.getSize2D() * 1.5f));
         name.setForeground(palette.color(VerdictIcon.accent(review.verdict())));
-        JLabel probability = new JLabel(probability(review.probability()));
+        JLabel probability = new JLabel(probability(review));
         probability.setFont(plain.deriveFont(Font.BOLD));
         probability.setForeground(palette.color("ink"));
         JPanel line = new JPanel(new StackLayout(0));
@@ -66,8 +67,11 @@ final class VerdictHeader extends JPanel {
         return Words.sentence(verdict.code().replace('-', ' '));
     }
 
-    private static String probability(double probability) {
-        return "probability " + (probability > 0.99 ? "> 99 %" : Math.round(probability * 100) + " %");
+    private static String probability(Review review) {
+        if (review.verdict() == Verdict.UNDECIDED) {
+            return "no verdict is likely enough";
+        }
+        return "probability " + (review.probability() > 0.99 ? ">\u00a099\u00a0%" : Math.round(review.probability() * 100) + "\u00a0%");
     }
 
     private static String facts(Review review) {
@@ -81,8 +85,8 @@ final class VerdictHeader extends JPanel {
         String text = review.probabilities().entrySet().stream()
                 .filter(entry -> entry.getKey() != review.verdict() && entry.getValue() >= WORTH_A_WORD)
                 .sorted(Map.Entry.<Verdict, Double>comparingByValue(Comparator.reverseOrder()))
-                .map(entry -> name(entry.getKey()).toLowerCase(java.util.Locale.ROOT) + " " + Math.round(entry.getValue() * 100) + " %")
+                .map(entry -> name(entry.getKey()).toLowerCase(Locale.ROOT) + " " + Math.round(entry.getValue() * 100) + " %")
                 .collect(Collectors.joining(", "));
-        return text.isEmpty() ? "" : "Otherwise: " + text + ".";
+        return text.isEmpty() ? "" : (review.verdict() == Verdict.UNDECIDED ? "Possible: " : "Otherwise: ") + text + ".";
     }
 }

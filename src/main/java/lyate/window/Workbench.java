@@ -49,7 +49,7 @@ final class Workbench extends JPanel implements Drawer.Wishes, AutoCloseable {
         strip = new StepStrip(theme, engine.stockroom(), document.state().text(), document::edit);
         substrate = new SubstrateView(theme, this::intend);
         substratePane = new Pane("Substrate", substrate, theme);
-        ladder = new AcidityLadder(theme, this::intend, this::take);
+        ladder = new AcidityLadder(theme, engine.water(), this::intend, this::take);
         ladder.setTransferHandler(new BaseDrop(engine.stockroom(), this::compare));
         compare = new CompareField(theme, engine.stockroom(), this::compare);
         findings = new FindingsPanel(theme, substrate::highlight);
@@ -67,6 +67,7 @@ final class Workbench extends JPanel implements Drawer.Wishes, AutoCloseable {
         patience.setRepeats(false);
         document.onChange(this::follow);
         presenter.submit(document.state().text());
+        patience.start();
     }
 
     private JComponent pictures(Theme theme) {

@@ -11,18 +11,20 @@ import java.awt.geom.Point2D;
 import java.awt.image.BufferedImage;
 import java.util.List;
 import java.util.Optional;
+import lyate.stock.Solvent;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.ValueSource;
 
 class LadderTest {
 
+    private static final Solvent WATER = Panels.inventedEngine().water();
     private static final Palette PALETTE = Palette.load(false);
     private final Shown demo = Panels.shown(StepText.demo());
 
     @Test
     void theGapBetweenSiteAndBaseOnTheAxisIsLogKAtRoomTemperature() {
-        Ladder ladder = Ladder.of(demo, List.of()).orElseThrow();
+        Ladder ladder = Ladder.of(demo, List.of(), WATER).orElseThrow();
         assertEquals(demo.review().logK() * 273.15 / 298.15, ladder.basePKa() - ladder.intended().orElseThrow().pKa(), 1e-9);
     }
 
@@ -65,7 +67,7 @@ class LadderTest {
 
     private LadderPicture picture(Dimension size, Font font) {
         Graphics2D g = new BufferedImage(size.width, size.height, BufferedImage.TYPE_INT_RGB).createGraphics();
-        LadderPicture picture = new LadderPicture(Ladder.of(demo, List.of()).orElseThrow(), PALETTE, font, size, g);
+        LadderPicture picture = new LadderPicture(Ladder.of(demo, List.of(), WATER).orElseThrow(), PALETTE, font, size, g);
         picture.paint(g, Optional.empty());
         return picture;
     }

@@ -15,7 +15,7 @@ final class Panels {
 
     /** Real tables, invented verdicts. */
     static Engine inventedEngine() {
-        return new Engine(Stockroom.load(TableFolders.packaged()), new InventedReviewer(), Enthalpies.load(TableFolders.packaged()));
+        return new Engine(TableFolders.packaged(), Stockroom.load(TableFolders.packaged()), new InventedReviewer(), Enthalpies.load(TableFolders.packaged()));
     }
 
     /** A new sheet of one step. */

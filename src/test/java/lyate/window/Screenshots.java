@@ -49,6 +49,12 @@ final class Screenshots {
         screenshots.take("dark", true, 1, 1500, 920, demo);
         screenshots.take("empty", false, 1, 1500, 920, demo.with(StepField.SUBSTRATE, ""));
         screenshots.take("double", false, 2, 2400, 1500, demo);
+        screenshots.take("workup", false, 1, 1500, 920, demo.with(StepField.BASE, "Et3N").with(StepField.SOLVENT, "dichloromethane").with(StepField.SUBSTRATE, "OC(=O)c1ccccc1CNC(=O)C"), bench -> bench.drawer().setSelectedIndex(4));
+        String big = "CC(C)CC(NC(=O)C(CC(N)=O)NC(=O)C(Cc1ccc(O)cc1)NC(=O)C(C)N)C(=O)NC(CO)C(=O)NC(Cc1c[nH]cn1)C(=O)NC(CS)C(=O)NCC(=O)O";
+        screenshots.take("sixty", false, 1, 1500, 920, demo.with(StepField.SUBSTRATE, big).withSite(""));
+        screenshots.take("low", false, 1, 1300, 640, demo.with(StepField.SUBSTRATE, "OCC1OC(O)C(O)C(O)C1NC(=O)CC(=O)c1ccc[nH]1").withSite(""));
+        screenshots.take("long", false, 1, 1300, 800, demo.with(StepField.SUBSTRATE, "ethyl 2-(4-hydroxy-3-methoxyphenyl)-3-oxobutanoate")
+                .with(StepField.BASE, "lithium bis(trimethylsilyl)amide").with(StepField.SOLVENT, "cyclopentyl methyl ether").withSite(""));
         System.exit(0);
     }
 
