@@ -76,7 +76,7 @@ final class BaseChoiceModel extends AbstractTableModel {
         RankedBase choice = ranked.get(row);
         return switch (Column.values()[column]) {
             case RANK -> row + 1;
-            case BASE -> choice.base().name();
+            case BASE -> choice.base().name().length() > Column.BASE.letters ? StockWords.shortName(choice.base()) : choice.base().name();
             case VERDICT -> choice.review().verdict();
             case PROBABILITY -> 100 * choice.review().probability();
             case LOG_K -> choice.review().logK();

@@ -61,6 +61,11 @@ final class Drawer extends JTabbedPane implements AutoCloseable {
         return scroll;
     }
 
+    /** Whether the tab in view has its answer. */
+    boolean isSettled() {
+        return !(getSelectedComponent() instanceof LazyTab tab) || !tab.isBusy();
+    }
+
     void show(Shown shown) {
         transfers.show(shown);
         choice.show(shown);

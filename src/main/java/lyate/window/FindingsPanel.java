@@ -22,7 +22,7 @@ import lyate.review.Review;
 final class FindingsPanel extends JPanel {
 
     private static final Set<FindingKind> SAFETY = EnumSet.of(FindingKind.GAS_EVOLVED, FindingKind.HEAT_RELEASED,
-            FindingKind.THERMAL_HAZARD, FindingKind.PYROPHORIC);
+            FindingKind.THERMAL_HAZARD, FindingKind.PYROPHORIC, FindingKind.WATER_REACTIVE, FindingKind.TOXIC, FindingKind.PEROXIDE_FORMER);
     private static final String WHO_DECIDES = "This is not a risk assessment. The safety data sheets, the local rules and a qualified person decide.";
 
     private final Theme theme;

@@ -2,6 +2,7 @@ package lyate.window;
 
 import java.awt.BorderLayout;
 import java.util.Optional;
+import java.util.function.Consumer;
 import javax.swing.JLabel;
 import javax.swing.JPanel;
 import javax.swing.SwingConstants;
@@ -10,16 +11,17 @@ import javax.swing.SwingConstants;
 abstract class LazyTab extends JPanel implements AutoCloseable {
 
     private final transient Background background;
-    private final JLabel message = new JLabel("", SwingConstants.CENTER);
+    private final JLabel remark = new JLabel("", SwingConstants.CENTER);
     private transient Optional<Object> key = Optional.empty();
     private transient Shown shown;
     private boolean due;
+    private boolean busy;
 
     LazyTab(String name) {
         super(new BorderLayout());
         background = new Background(name);
-        add(message, BorderLayout.SOUTH);
-        message.setVisible(false);
+        add(remark, BorderLayout.SOUTH);
+        remark.setVisible(false);
         getAccessibleContext().setAccessibleName(name);
     }
 
@@ -53,23 +55,33 @@ abstract class LazyTab extends JPanel implements AutoCloseable {
         }
     }
 
+    /** Whether an answer is on its way. */
+    boolean isBusy() {
+        return busy;
+    }
+
     Shown shown() {
         return shown;
     }
 
     /** Runs work in the background; a sentence says so meanwhile. */
-    <T> void start(String doing, Background.Work<T> work, java.util.function.Consumer<T> done) {
+    <T> void start(String doing, Background.Work<T> work, Consumer<T> done) {
+        busy = true;
         say(doing);
         background.start(work, result -> {
+            busy = false;
             say("");
             done.accept(result);
-        }, this::say);
+        }, message -> {
+            busy = false;
+            say(message);
+        });
     }
 
     /** A remark below the content; empty for none. */
     void say(String words) {
-        message.setText(words);
-        message.setVisible(!words.isEmpty());
+        remark.setText(words);
+        remark.setVisible(!words.isEmpty());
     }
 
     @Override

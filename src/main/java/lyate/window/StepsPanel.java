@@ -59,6 +59,7 @@ final class StepsPanel extends JPanel {
         running.add(progress);
         running.add(stop, BorderLayout.EAST);
         add(running, BorderLayout.SOUTH);
+        running.setVisible(false);
         document.onChange(this::refresh);
         theme.onChange(list::repaint);
         refresh();
@@ -110,6 +111,11 @@ final class StepsPanel extends JPanel {
         progress.setValue(rows.size() - left);
         progress.setString(left + " to judge");
         list.repaint();
+    }
+
+    /** Whether every row has its verdict. */
+    boolean isSettled() {
+        return !running.isVisible();
     }
 
     void close() {

@@ -5,6 +5,7 @@ import java.awt.CardLayout;
 import java.awt.Dimension;
 import java.math.BigDecimal;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
 import javax.swing.BorderFactory;
 import javax.swing.JComponent;
@@ -38,6 +39,7 @@ final class Workbench extends JPanel implements Drawer.Wishes, AutoCloseable {
     private final JPanel middle = new JPanel(cards);
     private final Timer patience;
     private StepText asked;
+    private StepText answered = new StepText(Map.of(), "");
     private Runnable painted;
     private Optional<Shown> shown = Optional.empty();
 
@@ -136,6 +138,7 @@ final class Workbench extends JPanel implements Drawer.Wishes, AutoCloseable {
 
     private void receive(Outcome outcome) {
         patience.stop();
+        answered = outcome.text();
         strip.report(outcome);
         substratePane.note(outcome.shown().isEmpty() ? "the last step that could be read" : "");
         if (outcome.text().get(StepField.SUBSTRATE).isEmpty()) {
@@ -162,6 +165,11 @@ final class Workbench extends JPanel implements Drawer.Wishes, AutoCloseable {
     /** Runs once the next result has been painted; for measuring. */
     void afterPainting(Runnable action) {
         painted = action;
+    }
+
+    /** Whether everything on screen belongs to what the fields say. */
+    boolean isSettled() {
+        return answered.equals(document.state().text()) && drawer.isSettled() && steps.isSettled();
     }
 
     /** What is on screen now. */

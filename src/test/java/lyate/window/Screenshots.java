@@ -28,34 +28,52 @@ final class Screenshots {
 
     public static void main(String[] arguments) throws Exception {
         Screenshots screenshots = new Screenshots(Files.createDirectories(Path.of(arguments[0])));
-        StepText demo = StepText.demo();
-        screenshots.take("light", false, 1, 1500, 920, demo);
-        screenshots.take("dose", true, 1, 1500, 920, demo, bench -> bench.drawer().setSelectedIndex(2));
-        if (arguments.length > 1) screenshots.take("choice", false, 1, 1500, 920, demo, bench -> bench.drawer().setSelectedIndex(1));
-        screenshots.take("amounts", false, 1, 1500, 920, demo, bench -> bench.drawer().setSelectedIndex(3));
-        screenshots.take("error", false, 1, 1200, 760, demo, bench -> {
+        int status = 1;
+        try {
+            screenshots.takeAll(StepText.demo());
+            status = 0;
+        } catch (IllegalStateException e) {
+            System.err.println(e.getMessage());
+        }
+        System.exit(status);
+    }
+
+    private void takeAll(StepText demo) throws Exception {
+        take("light", false, 1, 1500, 920, demo);
+        take("dose", true, 1, 1500, 920, demo, bench -> bench.drawer().setSelectedIndex(2));
+        take("choice", false, 1, 1500, 920, demo, bench -> bench.drawer().setSelectedIndex(1));
+        take("amounts", false, 1, 1500, 920, demo, bench -> bench.drawer().setSelectedIndex(3));
+        take("error", false, 1, 1200, 760, demo, bench -> {
             bench.strip().box(StepField.SUBSTRATE).field().setText("O=C(C1CCC1)Nc1ccc(C)c(O)c");
             bench.strip().box(StepField.BASE).field().setText("LiHDMS");
             bench.strip().box(StepField.CONCENTRATION).field().setText("much");
         });
-        screenshots.take("compare", false, 1, 1500, 920, demo, bench -> List.of("lda", "kotbu", "dbu").forEach(id ->
-                bench.ladder().compare(screenshots.stockroom.bases().stream().filter(base -> base.id().equals(id)).findFirst().orElseThrow())));
-        screenshots.take("sheet", false, 1, 1500, 920, demo, bench -> {
-            for (String base : List.of("LDA", "K2CO3", "DBU", "n-BuLi", "KOtBu", "Et3N")) {
-                bench.document().change(bench.document().state().duplicated());
-                bench.document().edit(bench.document().state().text().with(StepField.BASE, base));
-            }
-        });
-        screenshots.take("dark", true, 1, 1500, 920, demo);
-        screenshots.take("empty", false, 1, 1500, 920, demo.with(StepField.SUBSTRATE, ""));
-        screenshots.take("double", false, 2, 2400, 1500, demo);
-        screenshots.take("workup", false, 1, 1500, 920, demo.with(StepField.BASE, "Et3N").with(StepField.SOLVENT, "dichloromethane").with(StepField.SUBSTRATE, "OC(=O)c1ccccc1CNC(=O)C"), bench -> bench.drawer().setSelectedIndex(4));
+        take("compare", false, 1, 1500, 920, demo, bench -> List.of("lda", "kotbu", "dbu").forEach(id ->
+                bench.ladder().compare(stockroom.bases().stream().filter(base -> base.id().equals(id)).findFirst().orElseThrow())));
+        take("sheet", false, 1, 1500, 920, demo, Screenshots::fortySteps);
+        take("dark", true, 1, 1500, 920, demo);
+        take("empty", false, 1, 1500, 920, demo.with(StepField.SUBSTRATE, ""));
+        take("double", false, 2, 2400, 1500, demo);
+        take("workup", false, 1, 1500, 920, demo.with(StepField.BASE, "Et3N").with(StepField.SOLVENT, "dichloromethane").with(StepField.SUBSTRATE, "OC(=O)c1ccccc1CNC(=O)C"), bench -> bench.drawer().setSelectedIndex(4));
         String big = "CC(C)CC(NC(=O)C(CC(N)=O)NC(=O)C(Cc1ccc(O)cc1)NC(=O)C(C)N)C(=O)NC(CO)C(=O)NC(Cc1c[nH]cn1)C(=O)NC(CS)C(=O)NCC(=O)O";
-        screenshots.take("sixty", false, 1, 1500, 920, demo.with(StepField.SUBSTRATE, big).withSite(""));
-        screenshots.take("low", false, 1, 1300, 640, demo.with(StepField.SUBSTRATE, "OCC1OC(O)C(O)C(O)C1NC(=O)CC(=O)c1ccc[nH]1").withSite(""));
-        screenshots.take("long", false, 1, 1300, 800, demo.with(StepField.SUBSTRATE, "ethyl 2-(4-hydroxy-3-methoxyphenyl)-3-oxobutanoate")
+        take("sixty", false, 1, 1500, 920, demo.with(StepField.SUBSTRATE, big).withSite(""));
+        take("low", false, 1, 1300, 640, demo.with(StepField.SUBSTRATE, "OCC1OC(O)C(O)C(O)C1NC(=O)CC(=O)c1ccc[nH]1").withSite(""));
+        take("long", false, 1, 1300, 800, demo.with(StepField.SUBSTRATE, "ethyl 2-(4-hydroxy-3-methoxyphenyl)-3-oxobutanoate")
                 .with(StepField.BASE, "lithium bis(trimethylsilyl)amide").with(StepField.SOLVENT, "cyclopentyl methyl ether").withSite(""));
-        System.exit(0);
+    }
+
+    /** Four substrates with ten bases each. */
+    private static void fortySteps(Workbench bench) {
+        List<String> bases = List.of("NaH", "LDA", "K2CO3", "DBU", "n-BuLi", "KOtBu", "Et3N", "LiHMDS", "NaOEt", "MeMgBr");
+        List<String> substrates = List.of("O=C(C1CCC1)Nc1ccc(C)c(O)c1", "CCOC(=O)CC(=O)CCO", "C#CCCC(C)=O", "c1ccc2[nH]ccc2c1");
+        SheetDocument document = bench.document();
+        for (int i = 1; i < substrates.size() * bases.size(); i++) {
+            document.change(document.state().duplicated());
+            String substrate = substrates.get(i / bases.size());
+            document.edit(document.state().text().with(StepField.SUBSTRATE, substrate).with(StepField.BASE, bases.get(i % bases.size()))
+                    .withSite(i < bases.size() ? "N7" : ""));
+        }
+        document.select(12);
     }
 
     private void take(String name, boolean dark, float zoom, int width, int height, StepText step) throws Exception {
@@ -75,14 +93,28 @@ final class Screenshots {
             frame.get().setSize(new Dimension(width, height));
             frame.get().setVisible(true);
         });
-        Thread.sleep(700);
+        settle(bench.get());
         SwingUtilities.invokeAndWait(() -> action.accept(bench.get()));
-        Thread.sleep(name.equals("choice") ? 15000 : 900);
+        settle(bench.get());
         SwingUtilities.invokeAndWait(() -> write(name, frame.get()));
         SwingUtilities.invokeAndWait(() -> {
             bench.get().close();
             frame.get().dispose();
         });
+    }
+
+    /** Waits until the window says what it has to say, and a little for what is drawn later. */
+    private static void settle(Workbench bench) throws Exception {
+        AtomicReference<Boolean> settled = new AtomicReference<>(false);
+        long end = System.nanoTime() + 120_000_000_000L;
+        while (!settled.get()) {
+            if (System.nanoTime() > end) {
+                throw new IllegalStateException("the window did not settle within two minutes");
+            }
+            Thread.sleep(200);
+            SwingUtilities.invokeAndWait(() -> settled.set(bench.isSettled()));
+        }
+        Thread.sleep(200);
     }
 
     private void write(String name, JFrame frame) {
