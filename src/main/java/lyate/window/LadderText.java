@@ -26,7 +26,7 @@ record LadderText(String name, String value, Font bold, Font plain, double nameW
         if (!brief && whole.width() <= room) {
             return whole;
         }
-        LadderText shorter = of(rung, name, "  " + Words.oneDecimal(rung.pKa()), bold, font, g);
+        LadderText shorter = of(rung, name, "  " + rung.brief(), bold, font, g);
         for (int letters = name.length() - 1; shorter.width() > room && letters > 1; letters--) {
             shorter = of(rung, name.substring(0, letters).strip() + DOTS, shorter.value(), bold, font, g);
         }

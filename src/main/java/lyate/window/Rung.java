@@ -20,6 +20,11 @@ record Rung(Kind kind, String name, double pKa, double sigma, String text, Optio
 
     enum Kind { SITE, BASE, COMPARED, SOLVENT, WATER, PARTNER }
 
+    /** The value without its uncertainty. */
+    String brief() {
+        return text.replaceFirst(" \u00b1 [0-9.]+", "");
+    }
+
     boolean left() {
         return kind == Kind.SITE;
     }
