@@ -1,0 +1,97 @@
+package lyate.acidity;
+
+import java.util.Locale;
+import lyate.molecule.Molecule;
+
+/**
+ * What lies between two atoms of a molecule.
+ *
+ * @param kind  what the shortest ways run through
+ * @param bonds length of the shortest way, 0 for one and the same atom
+ * @param ways  number of shortest ways
+ */
+record CouplingPath(Kind kind, int bonds, int ways) {
+
+    /** What the shortest ways run through. */
+    enum Kind {
+        SAME_ATOM, SATURATED, CONJUGATED,
+        /** Conjugated, and an anion at one end can hold a proton of the other end in a ring. */
+        HYDROGEN_BONDED;
+
+        /** The word used in the table. */
+        String word() {
+            return name().toLowerCase(Locale.ROOT).replace('_', '-');
+        }
+    }
+
+    static CouplingPath between(Molecule molecule, int from, int to) {
+        if (from == to) {
+            return new CouplingPath(Kind.SAME_ATOM, 0, 1);
+        }
+        return new Ways(molecule, molecule.distances(from), molecule.distances(to), from, to).path();
+    }
+
+    /** The shortest ways between two atoms; {@code after} and {@code before} are bonds from either end. */
+    private record Ways(Molecule molecule, int[] after, int[] before, int from, int to) {
+
+        CouplingPath path() {
+            return new CouplingPath(kind(), after[to], count(to));
+        }
+
+        private int count(int atom) {
+            int count = 0;
+            for (int neighbour : molecule.neighbours(atom)) {
+                if (after[neighbour] == after[atom] - 1) {
+                    count += neighbour == from ? 1 : count(neighbour);
+                }
+            }
+            return count;
+        }
+
+        private boolean on(int atom) {
+            return after[atom] + before[atom] == after[to];
+        }
+
+        private Kind kind() {
+            if (after[to] == 1) {
+                return molecule.aromatic(from) && molecule.aromatic(to) ? Kind.CONJUGATED : Kind.SATURATED;
+            }
+            for (int atom = 0; atom < molecule.atomCount(); atom++) {
+                if (on(atom) && atom != from && atom != to && !conjugated(atom)) {
+                    return Kind.SATURATED;
+                }
+            }
+            return closes() ? Kind.HYDROGEN_BONDED : Kind.CONJUGATED;
+        }
+
+        private boolean conjugated(int atom) {
+            if (molecule.aromatic(atom)) {
+                return true;
+            }
+            for (int neighbour : molecule.neighbours(atom)) {
+                if (molecule.atomicNumber(atom) <= 8 && molecule.bondOrder(atom, neighbour) > 1) {
+                    return true;
+                }
+            }
+            return false;
+        }
+
+        /**
+         * Six-membered, with the hydrogen, over one ring bond as in salicylic acid; seven-membered over a double bond that
+         * a ring keeps cis. Over an aromatic bond, as in phthalic acid, seven members close badly.
+         */
+        private boolean closes() {
+            int ringBonds = 0;
+            boolean aromatic = false;
+            for (int atom = 0; atom < molecule.atomCount(); atom++) {
+                for (int next : molecule.neighbours(atom)) {
+                    if (on(atom) && on(next) && after[next] == after[atom] + 1 && molecule.ringBond(atom, next)) {
+                        ringBonds++;
+                        aromatic |= molecule.aromaticBond(atom, next);
+                    }
+                }
+            }
+            return ringBonds == 1 && (after[to] == 4 || after[to] == 5 && !aromatic);
+        }
+    }
+}
