@@ -3,6 +3,7 @@ package lyate.acidity;
 import java.io.IOException;
 import java.io.Reader;
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.Comparator;
 import java.util.List;
 import java.util.Locale;
@@ -10,6 +11,7 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.TreeMap;
 import java.util.function.Function;
+import java.util.stream.Collectors;
 import lyate.acidity.AccuracyReport.BadRow;
 import lyate.acidity.AccuracyReport.Comparison;
 import lyate.molecule.Molecule;
@@ -27,9 +29,10 @@ import org.apache.commons.csv.CSVRecord;
 
 /**
  * Compares what the program says with a CSV file of measured values. Columns {@code smiles}, {@code solvent} and
- * {@code pka}; {@code site} (for example {@code O4}) and {@code role} ({@code acid} or {@code base}) may be left out or
- * left empty, others are ignored. Without a site, the most acidic or most basic one of the role is compared; without a
- * role it is the acid, unless only a base can be meant.
+ * {@code pka}; {@code site} (for example {@code O4}) and {@code role} or {@code kind} ({@code acid} or {@code base}) may be
+ * left out or left empty, others are ignored. Without a site, the most acidic or most basic one of the role is compared.
+ * Without a role the row says either how easily a proton leaves or how readily one arrives: it is compared with the nearer
+ * of the two, and the report counts such rows.
  *
  * @param finder    finds the sites
  * @param estimator the values to be judged
@@ -62,8 +65,13 @@ public record AccuracyCheck(SiteFinder finder, AcidityEstimator estimator, Funct
         }
     }
 
-    /** A site and what is said of it. */
-    private record Stated(ProtonSite site, Acidity acidity) {}
+    /** A site, what is said of it, and whether the role was left to be found out. */
+    private record Stated(ProtonSite site, Acidity acidity, boolean roleGuessed) {
+
+        double distanceFrom(double measured) {
+            return Math.abs(acidity.pKa() - measured);
+        }
+    }
 
     /**
      * Compares every row.
@@ -105,9 +113,10 @@ public record AccuracyCheck(SiteFinder finder, AcidityEstimator estimator, Funct
         Medium medium = media.apply(row.get("solvent"))
                 .orElseThrow(() -> new RowException("column solvent: found '" + row.get("solvent") + "', expected a known solvent"));
         Molecule molecule = new MoleculeReader().read(row.get("smiles"));
-        Stated stated = stated(molecule, optional(row, "site"), optional(row, "role"), medium);
+        String role = optional(row, "role").isEmpty() ? optional(row, "kind") : optional(row, "role");
+        Stated stated = stated(molecule, optional(row, "site"), role, medium, measured);
         return new Comparison(line, row.get("smiles"), molecule.label(stated.site().atom()),
-                stated.site().siteClass().name(), measured, stated.acidity());
+                stated.site().siteClass().name(), measured, stated.acidity(), stated.roleGuessed());
     }
 
     private static double number(String text) throws RowException {
@@ -126,33 +135,28 @@ public record AccuracyCheck(SiteFinder finder, AcidityEstimator estimator, Funct
         return row.isMapped(column) ? row.get(column) : "";
     }
 
-    private Stated stated(Molecule molecule, String label, String role, Medium medium) throws RowException {
+    private Stated stated(Molecule molecule, String label, String role, Medium medium, double measured) throws RowException {
         List<ProtonSite> sites = finder.sites(molecule);
         if (!label.isEmpty()) {
             int atom = molecule.atomLabelled(label)
                     .orElseThrow(() -> new RowException("column site: found '" + label + "', expected an atom such as O4"));
             sites = sites.stream().filter(site -> site.equivalent().contains(atom)).toList();
         }
+        List<Role> wanted = roles(role);
         Map<Role, Stated> extremes = extremes(molecule, sites, medium);
-        Role wanted = role(role, extremes);
-        Stated found = extremes.get(wanted);
-        if (found == null) {
-            throw new RowException("no pKa is stated for " + (label.isEmpty() ? "any " + wanted.word() + " site" : label
-                    + " as " + wanted.word()) + " in " + medium.id());
-        }
-        return found;
+        extremes.keySet().retainAll(wanted);
+        Stated nearest = extremes.values().stream().min(Comparator.comparingDouble(stated -> stated.distanceFrom(measured)))
+                .orElseThrow(() -> new RowException("no pKa is stated for " + (label.isEmpty() ? "any site" : label) + " as "
+                        + wanted.stream().map(Role::word).collect(Collectors.joining(" or ")) + " in " + medium.id()));
+        return new Stated(nearest.site(), nearest.acidity(), extremes.size() > 1);
     }
 
-    private static Role role(String text, Map<Role, Stated> extremes) throws RowException {
-        for (Role role : Role.values()) {
-            if (text.equalsIgnoreCase(role.word())) {
-                return role;
-            }
-        }
-        if (!text.isEmpty()) {
+    private static List<Role> roles(String text) throws RowException {
+        List<Role> roles = Arrays.stream(Role.values()).filter(role -> text.isEmpty() || text.equalsIgnoreCase(role.word())).toList();
+        if (roles.isEmpty()) {
             throw new RowException("column role: found '" + text + "', expected acid or base");
         }
-        return extremes.containsKey(Role.ACID) || !extremes.containsKey(Role.BASE) ? Role.ACID : Role.BASE;
+        return roles;
     }
 
     /** The most acidic acid site and the most basic base site. */
@@ -161,7 +165,7 @@ public record AccuracyCheck(SiteFinder finder, AcidityEstimator estimator, Funct
         for (Role role : Role.values()) {
             Comparator<Stated> byPKa = Comparator.comparingDouble(stated -> stated.acidity().pKa());
             sites.stream().filter(site -> site.role() == role)
-                    .flatMap(site -> estimator.acidity(molecule, site, medium).map(value -> new Stated(site, value)).stream())
+                    .flatMap(site -> estimator.acidity(molecule, site, medium).map(value -> new Stated(site, value, false)).stream())
                     .min(role == Role.ACID ? byPKa : byPKa.reversed())
                     .ifPresent(stated -> extremes.put(role, stated));
         }

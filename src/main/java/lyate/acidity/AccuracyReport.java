@@ -23,14 +23,16 @@ public record AccuracyReport(List<Comparison> comparisons, List<BadRow> badRows)
     /**
      * One value compared.
      *
-     * @param line      1-based line in the file
-     * @param smiles    structure as given
-     * @param site      label of the site
-     * @param siteClass name of its class
-     * @param measured  pKa in the file
-     * @param stated    what the program says, in the medium of the row
+     * @param line        1-based line in the file
+     * @param smiles      structure as given
+     * @param site        label of the site
+     * @param siteClass   name of its class
+     * @param measured    pKa in the file
+     * @param stated      what the program says, in the medium of the row
+     * @param roleGuessed whether the row gives no role and the site could have both
      */
-    public record Comparison(long line, String smiles, String site, String siteClass, double measured, Acidity stated) {
+    public record Comparison(long line, String smiles, String site, String siteClass, double measured, Acidity stated,
+                             boolean roleGuessed) {
 
         /** Stated minus measured, pKa units. */
         public double error() {
@@ -83,6 +85,10 @@ public record AccuracyReport(List<Comparison> comparisons, List<BadRow> badRows)
         overall().ifPresent(all -> text.append(AccuracyStatistics.HEADER).append('\n').append(all.line("all")).append('\n'));
         byMedium().forEach((medium, part) -> text.append(part.line("in " + medium)).append('\n'));
         bySiteClass().forEach((name, part) -> text.append(part.line("  " + name)).append('\n'));
+        long guessed = comparisons.stream().filter(Comparison::roleGuessed).count();
+        if (guessed > 0) {
+            text.append(guessed).append(" rows give no role; each was compared with the nearer of its acid and its base value\n");
+        }
         if (!comparisons.isEmpty()) {
             text.append("furthest off:\n");
         }

@@ -5,16 +5,13 @@ import java.io.Reader;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.Path;
-import java.util.Optional;
 import java.util.concurrent.Callable;
 import lyate.acidity.AccuracyCheck;
 import lyate.acidity.AccuracyReport;
 import lyate.acidity.AcidityEstimator;
 import lyate.site.SiteClasses;
 import lyate.site.SiteFinder;
-import lyate.stock.Medium;
 import lyate.stock.Stockroom;
-import lyate.stock.UnknownNameException;
 import lyate.table.TableFolders;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Mixin;
@@ -51,10 +48,9 @@ final class AccuracyCommand implements Callable<Integer> {
     @Override
     public Integer call() throws IOException {
         TableFolders folders = tables.folders();
-        Stockroom stockroom = Stockroom.load(folders);
         AcidityEstimator acidity = AcidityEstimator.load(folders);
-        AccuracyCheck check = new AccuracyCheck(new SiteFinder(SiteClasses.load(folders)),
-                estimateOnly ? acidity.withoutMeasured() : acidity, name -> medium(stockroom, name));
+        AccuracyCheck check = AccuracyCheck.of(new SiteFinder(SiteClasses.load(folders)),
+                estimateOnly ? acidity.withoutMeasured() : acidity, Stockroom.load(folders));
         try (Reader csv = Files.newBufferedReader(file, StandardCharsets.UTF_8)) {
             AccuracyReport report = check.check(csv);
             terminal.outWriter().print(report.text());
@@ -62,14 +58,6 @@ final class AccuracyCommand implements Callable<Integer> {
             return report.badRows().isEmpty() ? 0 : Failures.SOME_INPUT_NOT_USED;
         } catch (IllegalArgumentException e) {
             throw new ParameterException(spec.commandLine(), file + ": " + e.getMessage());
-        }
-    }
-
-    private static Optional<Medium> medium(Stockroom stockroom, String name) {
-        try {
-            return Optional.of(stockroom.solvent(name).scale());
-        } catch (UnknownNameException e) {
-            return Optional.empty();
         }
     }
 }
