@@ -1,0 +1,92 @@
+package lyate.acidity.lfer;
+
+import java.util.ArrayList;
+import java.util.Comparator;
+import java.util.List;
+import lyate.acidity.Acidity.Effect;
+
+/**
+ * Groups on the site that take up the charge of its anion, strongest first.
+ *
+ * <p>Each further group finds less left to do, the less the stronger the first one is: the second counts with
+ * {@code 1.05 - 0.018 s1}, later ones with a fifth of their strength (fitted by eye to the series CH3X, CH2XY, CHXYZ of
+ * Bordwell, Acc. Chem. Res. 1988, 21, 456).
+ */
+final class AnionTerms {
+
+    private static final double SECOND = 1.05;
+    private static final double SATURATION = 0.018;
+    private static final double LATER = 0.2;
+    /** Lowering by a cyclopentadienide ring (cyclopentadiene, DMSO), and what each fused benzo ring takes away. */
+    private static final double CYCLOPENTADIENIDE = 38;
+    private static final double BENZO = 2.3;
+
+    private record Stabiliser(double strength, int atom, String name) {}
+
+    private AnionTerms() {}
+
+    static void add(Facts facts, int site, Terms terms) {
+        Topology t = facts.topology();
+        if (t.aromatic[site]) {
+            return;
+        }
+        List<Stabiliser> groups = stabilisers(facts, site);
+        groups.sort(Comparator.comparingDouble(group -> -group.strength()));
+        double total = 0;
+        for (int i = 0; i < groups.size(); i++) {
+            Stabiliser group = groups.get(i);
+            double share = i == 0 ? 1 : i == 1 ? SECOND - SATURATION * groups.get(0).strength() : LATER;
+            total += share * group.strength();
+            terms.add("anion.total", Effect.RESONANCE, share * group.strength() / 10, group.atom(), group.name());
+            if (i > 0) {
+                terms.add(i == 1 ? "anion.second" : "anion.later", Effect.RESONANCE, group.strength() / 10, group.atom(), group.name());
+            }
+        }
+        addRings(t, site, terms);
+        terms.add("anion.square", Effect.RESONANCE, total * total / 1000, site);
+    }
+
+    private static List<Stabiliser> stabilisers(Facts facts, int site) {
+        Topology t = facts.topology();
+        List<Stabiliser> groups = new ArrayList<>();
+        int[] ring = t.element[site] == 6 ? CyclopentadienideRing.around(t, site) : new int[0];
+        if (ring.length == 5) {
+            groups.add(new Stabiliser(CYCLOPENTADIENIDE - BENZO * CyclopentadienideRing.fusedBenzo(t, ring), ring[1], "cyclopentadienide ring"));
+        }
+        for (int branch = t.first[site]; branch < t.first[site + 1]; branch++) {
+            int child = t.child[branch];
+            boolean counted = ring.length == 5 && (child == ring[1] || child == ring[4]);
+            if (!counted) {
+                Substituent group = facts.constants()[branch];
+                groups.add(new Stabiliser(group.carbanion(), child, group.name()));
+            }
+        }
+        return groups;
+    }
+
+    /** Lactones and lactams, whose acyl group cannot turn away, and rings that the loss of the proton makes aromatic. */
+    private static void addRings(Topology t, int site, Terms terms) {
+        int unsaturated = 0;
+        int carbonyl = -1;
+        for (int branch = t.first[site]; branch < t.first[site + 1]; branch++) {
+            String state = BindingState.of(t, branch);
+            if (t.ringBond[branch] && (state.equals("ester") || state.equals("amide"))) {
+                terms.add("anion.lactone", Effect.ORBITAL, 1, t.child[branch]);
+            }
+        }
+        if (t.element[site] == 6 && t.inRing[site]) {
+            for (int[] ring : SixRing.around(t, site)) {
+                unsaturated = 0;
+                for (int atom : ring) {
+                    boolean oxo = t.oxo(atom) && !t.aromatic[atom];
+                    unsaturated += atom != site && t.unsaturated(atom) ? 1 : 0;
+                    carbonyl = oxo ? atom : carbonyl;
+                }
+                if (unsaturated == 5 && carbonyl >= 0) {
+                    terms.add("anion.aromatic", Effect.RESONANCE, 1, carbonyl);
+                    return;
+                }
+            }
+        }
+    }
+}
