@@ -9,10 +9,11 @@ import java.util.Arrays;
  * @param weights how much each counts: more often and closer to the site counts more
  * @param total   sum of the weights
  */
-record Environment(long[] codes, double[] weights, double total) {
+public record Environment(long[] codes, double[] weights, double total) {
 
     private static final int REACH = 7;
-    private static final double FALL_OFF = 0.72;
+    /** 0.72 to the power of the distance. */
+    private static final double[] FALL_OFF = {1, 0.72, 0.5184, 0.3732, 0.2687, 0.1935, 0.1393, 0.1003};
 
     static Environment of(Facts facts, int site) {
         Topology t = facts.topology();
@@ -29,7 +30,7 @@ record Environment(long[] codes, double[] weights, double total) {
             if (d > REACH) {
                 continue;
             }
-            double weight = Math.pow(FALL_OFF, d);
+            double weight = FALL_OFF[d];
             long place = BranchKeys.mix(d, nodes[atom]);
             codes[n] = place;
             weights[n++] = weight;
@@ -50,28 +51,57 @@ record Environment(long[] codes, double[] weights, double total) {
         return packed(codes, weights, n);
     }
 
+    /** Sorts by code (an in-place heap sort, so that nothing is boxed) and adds up equal codes. */
     private static Environment packed(long[] codes, double[] weights, int n) {
-        Integer[] by = new Integer[n];
-        for (int i = 0; i < n; i++) {
-            by[i] = i;
+        for (int start = n / 2 - 1; start >= 0; start--) {
+            sink(codes, weights, start, n);
         }
-        Arrays.sort(by, (a, b) -> Long.compare(codes[a], codes[b]));
-        long[] packedCodes = new long[n];
-        double[] packedWeights = new double[n];
+        for (int end = n - 1; end > 0; end--) {
+            swap(codes, weights, 0, end);
+            sink(codes, weights, 0, end);
+        }
         int m = -1;
-        double total = 0;
         for (int i = 0; i < n; i++) {
-            if (m < 0 || packedCodes[m] != codes[by[i]]) {
-                packedCodes[++m] = codes[by[i]];
+            if (m < 0 || codes[m] != codes[i]) {
+                codes[++m] = codes[i];
+                weights[m] = weights[i];
+            } else {
+                weights[m] += weights[i];
             }
-            packedWeights[m] += weights[by[i]];
-            total += weights[by[i]];
         }
-        return new Environment(Arrays.copyOf(packedCodes, m + 1), Arrays.copyOf(packedWeights, m + 1), total);
+        double total = 0;
+        for (int i = 0; i <= m; i++) {
+            total += weights[i];
+        }
+        return new Environment(Arrays.copyOf(codes, m + 1), Arrays.copyOf(weights, m + 1), total);
+    }
+
+    private static void sink(long[] codes, double[] weights, int from, int end) {
+        int root = from;
+        while (2 * root + 1 < end) {
+            int child = 2 * root + 1;
+            if (child + 1 < end && codes[child] < codes[child + 1]) {
+                child++;
+            }
+            if (codes[root] >= codes[child]) {
+                return;
+            }
+            swap(codes, weights, root, child);
+            root = child;
+        }
+    }
+
+    private static void swap(long[] codes, double[] weights, int i, int j) {
+        long code = codes[i];
+        codes[i] = codes[j];
+        codes[j] = code;
+        double weight = weights[i];
+        weights[i] = weights[j];
+        weights[j] = weight;
     }
 
     /** 1 for the same surroundings, 0 for nothing in common: shared weight over joint weight. */
-    double similarity(Environment other) {
+    public double similarity(Environment other) {
         double shared = 0;
         int i = 0;
         int j = 0;

@@ -12,5 +12,8 @@ import lyate.site.Role;
  * @param line    the set of coefficients it uses; several series may share one
  * @param group   lines of one group lean on common coefficients
  * @param pattern SMARTS whose first atom is the site
+ * @param lowest  lowest pKa in water that makes sense for it
+ * @param highest highest pKa in water that makes sense for it
  */
-record Series(String id, String name, Role role, String line, String group, AtomPattern pattern) {}
+public record Series(String id, String name, Role role, String line, String group, AtomPattern pattern,
+                     double lowest, double highest) {}

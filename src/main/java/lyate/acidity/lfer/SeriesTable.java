@@ -1,5 +1,6 @@
 package lyate.acidity.lfer;
 
+import static lyate.table.Column.number;
 import static lyate.table.Column.text;
 import static lyate.table.Column.word;
 
@@ -25,7 +26,8 @@ import lyate.table.TableProblem;
 record SeriesTable(List<Series> rows) {
 
     static final Schema SCHEMA = Schema.of("estimate-series.csv", text("id"), text("name"), word("role", "acid", "base"),
-            text("line"), text("group"), text("smarts"), text("source"));
+            text("line"), text("group"), text("smarts"), number("lowest_water").optional(),
+            number("highest_water").optional(), text("source"));
 
     SeriesTable {
         rows = List.copyOf(rows);
@@ -42,7 +44,9 @@ record SeriesTable(List<Series> rows) {
         for (Row row : Table.read(SCHEMA, folders).rows()) {
             try {
                 series.add(new Series(row.id(), row.text("name"), row.text("role").equals("acid") ? Role.ACID : Role.BASE,
-                        row.text("line"), row.text("group"), AtomPattern.compile(row.text("smarts"))));
+                        row.text("line"), row.text("group"), AtomPattern.compile(row.text("smarts")),
+                        row.number("lowest_water").orElse(Double.NEGATIVE_INFINITY),
+                        row.number("highest_water").orElse(Double.POSITIVE_INFINITY)));
             } catch (MoleculeException e) {
                 problems.add(row.problem("smarts", "a SMARTS pattern (" + e.getMessage() + ")"));
             }

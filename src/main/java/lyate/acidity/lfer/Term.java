@@ -12,4 +12,4 @@ import lyate.acidity.Acidity.Effect;
  * @param atoms  atoms it comes from
  * @param note   what was found there, for example {@code nitro}; empty where the name says it all
  */
-record Term(String name, Effect effect, double value, List<Integer> atoms, String note) {}
+public record Term(String name, Effect effect, double value, List<Integer> atoms, String note) {}
