@@ -7,6 +7,7 @@ import java.util.stream.Stream;
 import lyate.acidity.Acidity.Basis;
 import lyate.acidity.Acidity.Contribution;
 import lyate.acidity.Acidity.Effect;
+import lyate.acidity.lfer.LinearFreeEnergyEstimate;
 import lyate.molecule.Molecule;
 import lyate.site.ProtonSite;
 import lyate.site.SiteClass;
@@ -42,7 +43,7 @@ public final class AcidityEstimator {
     /** The estimator of the tables in these folders. */
     public static AcidityEstimator load(TableFolders folders) {
         return new AcidityEstimator(MeasuredAcidities.load(folders), MediaTransfer.load(folders),
-                List.of(new ClassValueEstimate()));
+                List.of(LinearFreeEnergyEstimate.load(folders), new ClassValueEstimate()));
     }
 
     /** The same without the table of measured values: what it says of a molecule nobody has measured. */

@@ -33,7 +33,7 @@ final class FittedTables {
             # relationship (the dual coefficients of the fit; not a measured value). measured: the row of measured-acidities.csv that
             # states its pKa, if there is one: estimates quote it as a relative. Made by lyate.fit.Fit.
             # version: 1
-            id,medium,smiles,site,role,weight,measured,source
+            id,medium,pool,smiles,site,role,weight,measured,source
             """;
     private static final String SPREAD = """
             # Standard uncertainty of an estimate: sigma_alike beside a relative with the same surroundings, times
@@ -72,8 +72,8 @@ final class FittedTables {
             List<Anchor> anchors = pool.anchors(measured);
             for (int i = 0; i < anchors.size(); i++) {
                 Anchor anchor = anchors.get(i);
-                text.append(String.format(Locale.ROOT, "%s-%s-%d,%s,%s,%s,%s,%.4f,%s,%s%n", pool.pool.medium().id(), pool.pool.name(),
-                        i + 1, pool.pool.medium().id(), anchor.smiles(), anchor.label(), anchor.site().series().role().word(),
+                text.append(String.format(Locale.ROOT, "%s-%s-%d,%s,%s,%s,%s,%s,%.4f,%s,%s%n", pool.pool.medium().id(), pool.pool.name(),
+                        i + 1, pool.pool.medium().id(), pool.pool.name(), anchor.smiles(), anchor.label(), anchor.site().series().role().word(),
                         anchor.weight(), anchor.measured(), SOURCE));
             }
         }

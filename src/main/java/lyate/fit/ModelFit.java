@@ -42,7 +42,8 @@ record ModelFit(List<PoolFit> pools, EstimateModel model) {
             fit.changes().forEach(change -> changes.add(change.change()));
             anchors.put(fit.pool, fit.anchors(start.measured()));
         }
-        return new ModelFit(fits, new EstimateModel(start.pools(), new Coefficients(start.published(), changes), anchors));
+        return new ModelFit(fits, new EstimateModel(start.pools(), new Coefficients(start.published(), changes),
+                pool -> anchors.getOrDefault(pool, List.of())));
     }
 
     private static List<TrainingRow> rowsOf(Pool pool, List<TrainingRow> rows) {

@@ -1,13 +1,14 @@
 package lyate.acidity.lfer;
 
-import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.concurrent.ConcurrentHashMap;
+import java.util.function.Function;
 import lyate.stock.Medium;
 
 /**
- * The fitted relationships: coefficients, then what measured relatives add. Immutable; safe to share between threads.
+ * The fitted relationships: coefficients, then what measured relatives add. Answers never change; safe to share between threads.
  */
 public final class EstimateModel {
 
@@ -16,7 +17,9 @@ public final class EstimateModel {
 
     private final Pools pools;
     private final Coefficients coefficients;
-    private final Map<Pool, Anchors> anchors = new HashMap<>();
+    private final Function<Pool, List<Anchor>> source;
+    /** Filled pool by pool when first needed: reading thousands of structures for one molecule would be waste. */
+    private final Map<Pool, Anchors> anchors = new ConcurrentHashMap<>();
 
     /**
      * What the model makes of a site.
@@ -28,11 +31,11 @@ public final class EstimateModel {
      */
     public record Prediction(double pKa, Pool pool, Coefficients.Line line, Anchors.Comparison comparison) {}
 
-    /** @param anchors by pool; a pool without anchors relies on its coefficients */
-    public EstimateModel(Pools pools, Coefficients coefficients, Map<Pool, List<Anchor>> anchors) {
+    /** @param anchors the anchors of a pool, asked for once; a pool without anchors relies on its coefficients */
+    public EstimateModel(Pools pools, Coefficients coefficients, Function<Pool, List<Anchor>> anchors) {
         this.pools = pools;
         this.coefficients = coefficients;
-        pools.all().forEach(pool -> this.anchors.put(pool, new Anchors(pool, anchors.getOrDefault(pool, List.of()))));
+        this.source = anchors;
     }
 
     /** The prediction, or empty where the series has no pool in that medium. */
@@ -43,13 +46,13 @@ public final class EstimateModel {
             for (Term term : site.terms()) {
                 sum += line.value(term.name()) * term.value();
             }
-            Anchors.Comparison comparison = anchors.get(pool).compare(site, RELATIVES);
+            Anchors.Comparison comparison = anchors(pool).compare(site, RELATIVES);
             return new Prediction(sum + comparison.correction(), pool, line, comparison);
         });
     }
 
     /** The anchors of a pool. */
     public Anchors anchors(Pool pool) {
-        return anchors.get(pool);
+        return anchors.computeIfAbsent(pool, key -> new Anchors(key, source.apply(key)));
     }
 }

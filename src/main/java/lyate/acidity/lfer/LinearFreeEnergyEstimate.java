@@ -53,9 +53,9 @@ public final class LinearFreeEnergyEstimate implements SiteEstimate {
      */
     public static LinearFreeEnergyEstimate load(TableFolders folders) {
         SiteDescriber describer = SiteDescriber.load(folders);
-        Pools pools = Pools.load(folders);
         Coefficients coefficients = Coefficients.load(folders, Published.load(folders));
-        EstimateModel model = new EstimateModel(pools, coefficients, AnchorTable.load(folders, describer, pools));
+        EstimateModel model = new EstimateModel(Pools.load(folders), coefficients,
+                AnchorTable.load(folders, describer)::of);
         Map<String, Row> measured = new HashMap<>();
         Table.read(MeasuredAcidities.SCHEMA, folders).rows().forEach(row -> measured.put(row.id(), row));
         return new LinearFreeEnergyEstimate(describer, model, Spread.load(folders), measured);
