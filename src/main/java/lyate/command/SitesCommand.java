@@ -83,9 +83,10 @@ final class SitesCommand implements Callable<Integer> {
 
     private SiteSurvey survey() {
         TableFolders folders = tables.folders();
+        Solvent asked = solvent(folders);
         AcidityEstimator acidity = AcidityEstimator.load(folders);
         return new SiteSurvey(MoleculeReader.load(folders), new SiteFinder(SiteClasses.load(folders)),
-                estimateOnly ? acidity.withoutMeasured() : acidity, solvent(folders));
+                estimateOnly ? acidity.withoutMeasured() : acidity, asked);
     }
 
     private Solvent solvent(TableFolders folders) {

@@ -35,13 +35,13 @@ public final class AtomPattern {
         if (query.isEmpty()) {
             throw new MoleculeException("the pattern is empty");
         }
-        NestedPatterns.compile(query);
         RootFilter filter = RootFilter.of(((QueryAtom) query.getAtom(0)).getExpression());
-        AtomTest test = PatternPlan.of(query).<AtomTest>map(plan -> plan::matches).orElse(byToolkit(query));
+        AtomTest test = PatternPlan.of(query).<AtomTest>map(plan -> plan::matches).orElseGet(() -> byToolkit(query));
         return new AtomPattern(smarts, filter, Surroundings.askedBy(query), test);
     }
 
     private static AtomTest byToolkit(QueryAtomContainer query) {
+        NestedPatterns.compile(query);
         DfPattern pattern = DfPattern.findSubstructure(query);
         return (molecule, atom) -> pattern.matchesRoot(molecule.container().getAtom(atom));
     }

@@ -50,7 +50,9 @@ interface AtomTest {
     }
 
     private static AtomTest nested(Expr expression) {
-        return PatternPlan.of(expression.subquery()).<AtomTest>map(plan -> plan::matches)
-                .orElse((molecule, atom) -> expression.matches(molecule.container().getAtom(atom)));
+        return PatternPlan.of(expression.subquery()).<AtomTest>map(plan -> plan::matches).orElseGet(() -> {
+            NestedPatterns.compile(expression);
+            return (molecule, atom) -> expression.matches(molecule.container().getAtom(atom));
+        });
     }
 }

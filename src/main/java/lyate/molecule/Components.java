@@ -10,13 +10,13 @@ import org.openscience.cdk.interfaces.IAtomContainer;
 /**
  * A salt or mixture taken apart.
  *
- * @param substrate   the organic component with most heavy atoms; the first of equals
+ * @param substrate   the organic component with most heavy atoms that is no usual counter-ion; the first of equals
  * @param counterIons the others, in input order
  */
 record Components(IAtomContainer substrate, List<IAtomContainer> counterIons) {
 
     /** @throws MoleculeException where no component could be a substrate */
-    static Components of(IAtomContainer molecule) throws MoleculeException {
+    static Components of(IAtomContainer molecule, CounterIons usual) throws MoleculeException {
         if (connected(molecule) && !loneIon(molecule)) {
             return new Components(molecule, List.of());
         }
@@ -24,7 +24,7 @@ record Components(IAtomContainer substrate, List<IAtomContainer> counterIons) {
         ConnectivityChecker.partitionIntoMolecules(molecule).atomContainers().forEach(parts::add);
         IAtomContainer substrate = null;
         for (IAtomContainer part : parts) {
-            if (!loneIon(part) && (substrate == null || rank(part) > rank(substrate))) {
+            if (!loneIon(part) && (substrate == null || rank(part, usual) > rank(substrate, usual))) {
                 substrate = part;
             }
         }
@@ -56,14 +56,18 @@ record Components(IAtomContainer substrate, List<IAtomContainer> counterIons) {
         return true;
     }
 
-    private static int rank(IAtomContainer part) {
-        int carbon = 0;
+    /** What has carbon and is no usual counter-ion comes first; then size decides. */
+    private static int rank(IAtomContainer part, CounterIons usual) {
+        int size = part.getAtomCount();
+        if (usual.contains(part)) {
+            return size;
+        }
         for (IAtom atom : part.atoms()) {
             if (atom.getAtomicNumber() == 6) {
-                carbon = 10 * Refusals.MOST_ATOMS;
+                return size + 20 * Refusals.MOST_ATOMS;
             }
         }
-        return carbon + part.getAtomCount();
+        return size;
     }
 
     private static String describe(List<IAtomContainer> parts) {

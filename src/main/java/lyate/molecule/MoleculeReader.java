@@ -15,22 +15,25 @@ public final class MoleculeReader {
         SilentLog.install();
     }
 
-    private static final Normalisations PACKAGED = Normalisations.load(TableFolders.packaged());
+    private static final Normaliser PACKAGED = new Normaliser(TableFolders.packaged());
 
     private final Normaliser normaliser;
 
-    /** A reader that knows the packaged variants of drawing. */
+    /** A reader that knows the packaged variants of drawing and counter-ions. */
     public MoleculeReader() {
         this(PACKAGED);
     }
 
-    private MoleculeReader(Normalisations variants) {
-        this.normaliser = new Normaliser(variants);
+    private MoleculeReader(Normaliser normaliser) {
+        this.normaliser = normaliser;
     }
 
-    /** A reader that knows the variants of drawing in {@code normalisations.csv} of the given folders. */
+    /**
+     * A reader that knows the variants of drawing in {@code normalisations.csv} and the ions in {@code counter-ions.csv} of
+     * the given folders.
+     */
     public static MoleculeReader load(TableFolders folders) {
-        return new MoleculeReader(Normalisations.load(folders));
+        return new MoleculeReader(new Normaliser(folders));
     }
 
     /**

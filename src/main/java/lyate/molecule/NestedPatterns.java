@@ -13,22 +13,22 @@ final class NestedPatterns {
 
     /** Compiles every nested pattern of a query. */
     static void compile(IAtomContainer query) {
-        IAtom probe = SilentChemObjectBuilder.getInstance().newAtomContainer().newAtom(6, 4);
         for (IAtom atom : query.atoms()) {
-            compile(((QueryAtom) atom).getExpression(), probe);
+            compile(((QueryAtom) atom).getExpression());
         }
     }
 
-    private static void compile(Expr expression, IAtom probe) {
+    /** Compiles every nested pattern of what one atom is asked. */
+    static void compile(Expr expression) {
         switch (expression.type()) {
             case AND, OR -> {
-                compile(expression.left(), probe);
-                compile(expression.right(), probe);
+                compile(expression.left());
+                compile(expression.right());
             }
-            case NOT -> compile(expression.left(), probe);
+            case NOT -> compile(expression.left());
             case RECURSIVE -> {
                 compile(expression.subquery());
-                expression.matches(probe);
+                expression.matches(SilentChemObjectBuilder.getInstance().newAtomContainer().newAtom(6, 4));
             }
             default -> { }
         }

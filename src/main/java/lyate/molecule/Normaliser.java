@@ -2,6 +2,7 @@ package lyate.molecule;
 
 import java.util.ArrayList;
 import java.util.List;
+import lyate.table.TableFolders;
 import org.openscience.cdk.interfaces.IAtom;
 import org.openscience.cdk.interfaces.IAtomContainer;
 
@@ -9,9 +10,12 @@ import org.openscience.cdk.interfaces.IAtomContainer;
 final class Normaliser {
 
     private final Normalisations variants;
+    private final CounterIons counterIons;
 
-    Normaliser(Normalisations variants) {
-        this.variants = variants;
+    /** @throws lyate.table.TableException for a bad cell of the tables it needs */
+    Normaliser(TableFolders folders) {
+        this.variants = Normalisations.load(folders);
+        this.counterIons = CounterIons.load(folders);
     }
 
     /**
@@ -27,7 +31,7 @@ final class Normaliser {
         Metals.split(read, warnings);
         List<IAtom> odd = Valence.oddAtoms(read);
         variants.apply(read, odd, warnings);
-        Components components = Components.of(read);
+        Components components = Components.of(read, counterIons);
         checkSubstrate(components.substrate(), odd);
         components.counterIons().forEach(Perception::markRings);
         return new Molecule(input, Perception.of(components.substrate(), warnings), components.counterIons(), warnings);

@@ -11,6 +11,7 @@ final class RootFilter {
 
     private static final int MOST_HYDROGENS = 5;
     private static final int ELEMENTS = 119;
+    private static final int NO_ELEMENT = 0;
 
     /** Codes lie below this number. */
     static final int CODES = ELEMENTS * (MOST_HYDROGENS + 1) * 2;
@@ -27,17 +28,43 @@ final class RootFilter {
     }
 
     static RootFilter of(Expr root) {
+        BitSet named = new BitSet();
+        nameElements(root, named);
         BitSet admitted = new BitSet();
+        BitSet unnamed = new BitSet();
+        admit(root, NO_ELEMENT, unnamed);
         for (int element = 1; element < ELEMENTS; element++) {
-            for (int hydrogens = 0; hydrogens <= MOST_HYDROGENS; hydrogens++) {
-                for (int aromatic = 0; aromatic < 2; aromatic++) {
-                    if (answer(root, element, aromatic == 1, hydrogens) != NO) {
-                        admitted.set(code(element, aromatic == 1, hydrogens));
-                    }
-                }
+            if (named.get(element)) {
+                admit(root, element, admitted);
+            } else {
+                int shift = code(element, false, 0);
+                unnamed.stream().forEach(code -> admitted.set(code + shift));
             }
         }
         return new RootFilter(admitted);
+    }
+
+    /** Elements that an expression does not name all get the same answer. */
+    private static void nameElements(Expr expression, BitSet named) {
+        switch (expression.type()) {
+            case AND, OR -> {
+                nameElements(expression.left(), named);
+                nameElements(expression.right(), named);
+            }
+            case NOT -> nameElements(expression.left(), named);
+            case ELEMENT, ALIPHATIC_ELEMENT, AROMATIC_ELEMENT -> named.set(expression.value());
+            default -> { }
+        }
+    }
+
+    private static void admit(Expr root, int element, BitSet admitted) {
+        for (int hydrogens = 0; hydrogens <= MOST_HYDROGENS; hydrogens++) {
+            for (int aromatic = 0; aromatic < 2; aromatic++) {
+                if (answer(root, element, aromatic == 1, hydrogens) != NO) {
+                    admitted.set(code(element, aromatic == 1, hydrogens));
+                }
+            }
+        }
     }
 
     boolean admits(int code) {

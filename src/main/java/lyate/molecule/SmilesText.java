@@ -37,7 +37,8 @@ record SmilesText(String text) {
         }
     }
 
-    private IAtomContainer parse() throws MoleculeException {
+    /** Every atom in the order of the text. */
+    IAtomContainer parse() throws MoleculeException {
         try {
             return PARSER.parseSmiles(text);
         } catch (InvalidSmilesException e) {

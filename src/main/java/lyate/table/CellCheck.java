@@ -1,7 +1,11 @@
 package lyate.table;
 
+import java.util.regex.Pattern;
+
 /** Says what a cell should hold where it does not. */
 final class CellCheck {
+
+    private static final Pattern NUMBER = Pattern.compile("[-+]?(\\d+\\.?\\d*|\\.\\d+)([eE][-+]?\\d+)?");
 
     private CellCheck() {}
 
@@ -18,6 +22,6 @@ final class CellCheck {
     }
 
     private static boolean isNumber(String cell) {
-        return cell.matches("[-+]?(\\d+\\.?\\d*|\\.\\d+)([eE][-+]?\\d+)?") && Double.isFinite(Double.parseDouble(cell));
+        return NUMBER.matcher(cell).matches() && Double.isFinite(Double.parseDouble(cell));
     }
 }

@@ -223,15 +223,16 @@ class LyateTest {
         assertTrue(run.out().startsWith("Usage: lyate"), run.out());
     }
 
-    @ParameterizedTest
-    @ValueSource(strings = {"tr", "de", "ar-u-nu-arab", "th-TH-u-nu-thai"})
-    void resultsAreTheSameInEveryLocale(String language) {
+    @Test
+    void resultsAreTheSameInEveryLocale() {
         Locale before = Locale.getDefault();
         String[] command = {"check", "--substrate", "OC(=O)CC#N", "--base", "TRIETHYLAMINE", "--solvent", "DICHLOROMETHANE"};
         String expected = run("", command).out();
         try {
-            Locale.setDefault(Locale.forLanguageTag(language));
-            assertEquals(expected, run("", command).out());
+            for (String language : List.of("tr", "de", "ar-u-nu-arab", "th-TH-u-nu-thai")) {
+                Locale.setDefault(Locale.forLanguageTag(language));
+                assertEquals(expected, run("", command).out());
+            }
         } finally {
             Locale.setDefault(before);
         }

@@ -111,6 +111,16 @@ class MoleculeReaderTest {
     }
 
     @ParameterizedTest
+    @CsvSource(delimiter = '|', value = {
+        "CC[NH3+].[O-]C(=O)C(F)(F)F|C2H8N+", "OC(=O)C(F)(F)F.CCN|C2H7N", "CC(=O)[O-].CCCC[N+](CCCC)(CCCC)CCCC|C2H3O2-",
+        "CO.CS(=O)(=O)O|CH4O", "[Na+].[O-]C(=O)C(F)(F)F|C2F3O2-", "C[N+](C)(C)C.[O-]C(=O)C(F)(F)F|C2F3O2-", "C[N+](C)(C)C.[Cl-]|C4H12N+",
+        "O.O.CS(=O)(=O)[O-].[Na+]|CH3O3S-",
+    })
+    void usualCounterIonsAreSetAside(String salt, String formula) throws MoleculeException {
+        assertEquals(formula, reader.read(salt).formula());
+    }
+
+    @ParameterizedTest
     @CsvSource({"[Na]OC(C)=O,O=C([O-])C", "C[Mg]Br,[CH3-]", "[Li]CCCC,[CH2-]CCC", "[K]C#C,[C-]#C"})
     void bondsOfAlkaliAndAlkalineEarthMetalsAreIonic(String smiles, String key) throws MoleculeException {
         Molecule anion = reader.read(smiles);

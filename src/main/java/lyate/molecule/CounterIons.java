@@ -1,0 +1,51 @@
+package lyate.molecule;
+
+import java.util.ArrayList;
+import java.util.HashSet;
+import java.util.List;
+import java.util.Set;
+import lyate.table.Column;
+import lyate.table.Row;
+import lyate.table.Schema;
+import lyate.table.Table;
+import lyate.table.TableException;
+import lyate.table.TableFolders;
+import lyate.table.TableProblem;
+import org.openscience.cdk.interfaces.IAtomContainer;
+
+/**
+ * The rows of {@code counter-ions.csv}: components that are rarely what is meant.
+ *
+ * @param keys canonical SMILES of their constitutions
+ */
+record CounterIons(Set<String> keys) {
+
+    /** What {@code counter-ions.csv} looks like. */
+    static final Schema SCHEMA = Schema.of("counter-ions.csv", Column.text("id"), Column.text("name"), Column.text("smiles"),
+            Column.text("source"));
+
+    CounterIons {
+        keys = Set.copyOf(keys);
+    }
+
+    /** @throws TableException for a bad cell */
+    static CounterIons load(TableFolders folders) {
+        List<TableProblem> problems = new ArrayList<>();
+        Set<String> keys = new HashSet<>();
+        for (Row row : Table.read(SCHEMA, folders).rows()) {
+            try {
+                keys.add(SmilesWriter.constitution(new SmilesText(row.text("smiles")).parse()));
+            } catch (MoleculeException e) {
+                problems.add(row.problem("smiles", "SMILES (" + e.getMessage() + ")"));
+            }
+        }
+        if (!problems.isEmpty()) {
+            throw new TableException(problems);
+        }
+        return new CounterIons(keys);
+    }
+
+    boolean contains(IAtomContainer component) {
+        return keys.contains(SmilesWriter.constitution(component));
+    }
+}
