@@ -7,11 +7,17 @@ import java.util.ArrayList;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.OptionalDouble;
 import java.util.Set;
 import java.util.stream.Collectors;
 import lyate.acidity.MeasuredAcidities.Value;
+import lyate.molecule.Molecule;
+import lyate.site.Role;
 import lyate.site.SiteClasses;
 import lyate.site.SiteFinder;
+import lyate.stock.Base;
+import lyate.stock.KnownPKa;
+import lyate.stock.Medium;
 import lyate.stock.Solvent;
 import lyate.stock.Stockroom;
 import lyate.table.TableFolders;
@@ -79,5 +85,32 @@ class MeasuredTableTest {
                         .noneMatch(site -> site.equivalent().contains(value.atom())))
                 .map(value -> value.row().id() + " " + value.row().text("smiles")).toList();
         assertEquals(List.of(), unknown);
+    }
+
+    /** Both tables were put together apart from each other, so that a slip in one shows against the other. */
+    @Test
+    void basesOfTheStockroomAgreeWithTheTable() {
+        SiteFinder finder = new SiteFinder(SiteClasses.load(TableFolders.packaged()));
+        MeasuredAcidities measured = MeasuredAcidities.load(TableFolders.packaged());
+        List<String> contradictions = new ArrayList<>();
+        int compared = 0;
+        for (Base base : Stockroom.load(TableFolders.packaged()).bases()) {
+            if (base.conjugateAcid().equals("[H][H]")) {
+                continue;
+            }
+            Molecule acid = Sites.molecule(base.conjugateAcid());
+            for (Map.Entry<Medium, KnownPKa> stated : base.pKas().entrySet()) {
+                OptionalDouble nearest = finder.sites(acid, Role.ACID).stream()
+                        .flatMap(site -> measured.measured(acid, site, stated.getKey()).stream())
+                        .mapToDouble(value -> Math.abs(value.pKa() - stated.getValue().pKa())
+                                / Math.max(0.15, Math.hypot(value.sigma(), stated.getValue().sigma()))).min();
+                compared += nearest.isPresent() ? 1 : 0;
+                if (nearest.orElse(0) > 2) {
+                    contradictions.add(base.id() + " in " + stated.getKey().id());
+                }
+            }
+        }
+        assertEquals(List.of(), contradictions);
+        assertTrue(compared > 150, compared + " compared");
     }
 }
