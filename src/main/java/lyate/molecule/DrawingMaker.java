@@ -36,10 +36,16 @@ final class DrawingMaker {
         }
     }
 
-    MoleculeDrawing make() {
+    /** The molecule with places for its atoms; a copy. */
+    IAtomContainer laidOut() {
         if (!hasUsableLayout()) {
             layOut();
         }
+        return container;
+    }
+
+    MoleculeDrawing make() {
+        laidOut();
         double bondLength = medianBondLength();
         DrawingShapes shapes = new DrawingShapes(bondLength);
         shapes.add(render(bondLength));

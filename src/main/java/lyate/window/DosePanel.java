@@ -59,6 +59,17 @@ final class DosePanel extends LazyTab {
         }
     }
 
+    /** Where the line of a dose is, or would be. */
+    int lineAt(double equivalents) {
+        XYPlot plot = panel.getChart().getXYPlot();
+        return (int) Math.round(plot.getDomainAxis().valueToJava2D(equivalents, panel.getScreenDataArea(), plot.getDomainAxisEdge()));
+    }
+
+    /** What is drawn on. */
+    ChartPanel chart() {
+        return panel;
+    }
+
     private void move(double equivalents) {
         double rounded = Math.round(Math.max(0, equivalents) / KEY_STEP) * KEY_STEP;
         onEquivalents.accept(Double.parseDouble(String.format(Locale.ROOT, "%.2f", rounded)));
@@ -95,9 +106,7 @@ final class DosePanel extends LazyTab {
             if (panel.getChart() == null) {
                 return false;
             }
-            XYPlot plot = panel.getChart().getXYPlot();
-            double x = plot.getDomainAxis().valueToJava2D(shown().review().step().equivalents(), panel.getScreenDataArea(), plot.getDomainAxisEdge());
-            return Math.abs(x - event.getX()) < theme.space("gap");
+            return Math.abs(lineAt(shown().review().step().equivalents()) - event.getX()) < theme.space("gap");
         }
 
         private double valueAt(MouseEvent event) {

@@ -61,6 +61,10 @@ final class Drawer extends JTabbedPane implements AutoCloseable {
         return scroll;
     }
 
+    DosePanel dose() {
+        return dose;
+    }
+
     /** Whether the tab in view has its answer. */
     boolean isSettled() {
         return !(getSelectedComponent() instanceof LazyTab tab) || !tab.isBusy();

@@ -5,7 +5,6 @@ import java.io.File;
 import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
-import java.util.Map;
 import java.util.Optional;
 import javax.swing.JFileChooser;
 import javax.swing.JOptionPane;
@@ -31,7 +30,7 @@ final class SheetFiles {
     /** A sheet with one blank step. */
     void startNew() {
         if (mayLeave()) {
-            RouteSheet sheet = StepCells.sheetOf(new StepText(Map.of(), ""));
+            RouteSheet sheet = StepCells.sheetOf(memory.newStep());
             document.open(sheet, Optional.empty(), sheet.text());
         }
     }

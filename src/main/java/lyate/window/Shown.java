@@ -1,7 +1,9 @@
 package lyate.window;
 
+import java.util.List;
 import java.util.Optional;
 import lyate.molecule.MoleculeDrawing;
+import lyate.review.FindingKind;
 import lyate.review.Review;
 
 /**
@@ -16,5 +18,11 @@ record Shown(Review review, MoleculeDrawing drawing, SiteTags tags) {
     /** The tag of the site that is meant. */
     Optional<SiteTag> intended() {
         return tags.labelled(review.intendedSite());
+    }
+
+    /** Stereocentres that may lose their configuration, by atom index. */
+    List<Integer> atRisk() {
+        return review.findings().stream().filter(finding -> finding.kind() == FindingKind.EPIMERISATION)
+                .flatMap(finding -> finding.atoms().stream()).distinct().toList();
     }
 }

@@ -1,6 +1,7 @@
 package lyate.window;
 
 import com.formdev.flatlaf.util.UIScale;
+import java.util.Locale;
 import lyate.acidity.Acidity;
 import lyate.acidity.Acidity.Contribution;
 import lyate.acidity.Acidity.Relative;
@@ -14,30 +15,48 @@ final class SiteCard {
 
     static String html(Shown shown, SiteTag site) {
         Acidity acidity = site.transfer().acidity();
-        StringBuilder html = new StringBuilder("<html><div style='width:" + UIScale.scale(WIDTH) + "px'><b>" + site.letter() + " &nbsp; "
-                + escape(site.label()) + "</b> &nbsp; pKa <b>" + site.value() + "</b> in " + escape(Words.medium(acidity.medium()))
-                + ", " + acidity.basis().word() + "<br>" + Words.percent(site.transfer().percentTaken()) + " taken by "
-                + escape(shown.review().workingBase()) + ", log K " + Words.signed(site.transfer().logK()));
+        StringBuilder html = new StringBuilder("<html><div style='width:" + UIScale.scale(WIDTH) + "px'>");
+        html.append("<b>").append(site.letter()).append(" &nbsp; ").append(escape(site.label())).append("</b> &nbsp; pKa <b>")
+                .append(site.value()).append("</b> in ").append(escape(Words.medium(acidity.medium()))).append(", ")
+                .append(acidity.basis().word()).append("<br>")
+                .append(escape(Words.percent(site.transfer().percentTaken()))).append(" taken by ").append(escape(shown.review().workingBase()))
+                .append(", log K ").append(Words.signed(site.transfer().logK())).append("<br>")
+                .append(escape(Words.sentence(site.transfer().decidedBy()))).append('.');
         if (!acidity.contributions().isEmpty()) {
-            html.append("<hr><table cellpadding=1>");
-            for (Contribution term : acidity.contributions()) {
-                html.append("<tr><td>").append(escape(term.text())).append("</td><td align=right>")
-                        .append(term == acidity.contributions().get(0) ? Words.oneDecimal(term.value()) : Words.signed(term.value())).append("</td></tr>");
-            }
-            html.append("</table>");
+            recipe(acidity, html);
         }
         for (String missing : acidity.missing()) {
             html.append("<br>Not accounted for: ").append(escape(missing));
         }
         if (!acidity.relatives().isEmpty()) {
-            html.append("<hr>Nearest measured:<table cellpadding=1>");
-            for (Relative relative : acidity.relatives()) {
-                html.append("<tr><td>").append(escape(relative.smiles())).append("</td><td>").append(escape(relative.site()))
-                        .append("</td><td align=right>").append(Words.oneDecimal(relative.pKa())).append("</td></tr>");
-            }
-            html.append("</table>");
+            relatives(acidity, html);
         }
         return html.append("<hr>").append(escape(acidity.source())).append("</div></html>").toString();
+    }
+
+    /** The terms of the estimate, as a sum. */
+    private static void recipe(Acidity acidity, StringBuilder html) {
+        html.append("<hr><table width='100%' cellpadding=1 cellspacing=0>");
+        boolean first = true;
+        for (Contribution term : acidity.contributions()) {
+            row(html, escape(term.text()), term.effect().name().toLowerCase(Locale.ROOT).replace('_', ' '),
+                    first ? Words.oneDecimal(term.value()) : Words.signed(term.value()));
+            first = false;
+        }
+        row(html, "<b>pKa</b>", "", "<b>" + Words.withSigma(acidity) + "</b>");
+        html.append("</table>");
+    }
+
+    private static void relatives(Acidity acidity, StringBuilder html) {
+        html.append("<hr>Nearest measured compounds<table width='100%' cellpadding=1 cellspacing=0>");
+        for (Relative relative : acidity.relatives()) {
+            row(html, escape(relative.smiles()), escape(relative.site()), Words.oneDecimal(relative.pKa()));
+        }
+        html.append("</table>");
+    }
+
+    private static void row(StringBuilder html, String left, String middle, String right) {
+        html.append("<tr><td>").append(left).append("</td><td>").append(middle).append("</td><td align=right>").append(right).append("</td></tr>");
     }
 
     static String escape(String text) {

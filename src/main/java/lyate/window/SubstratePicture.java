@@ -65,6 +65,7 @@ final class SubstratePicture {
         }
         shown.drawing().paintSeam(g, transform, palette.color("ground"), palette.space("tiny"));
         shown.drawing().paint(g, transform, palette.drawing());
+        shown.atRisk().forEach(atom -> painter.paintAtRisk(g, atoms.get(atom), ring));
         for (Placed tag : placed) {
             painter.paintTag(g, tag.tag(), tag.box(), tag.full(), focused.filter(tag.tag()::equals).isPresent());
         }
@@ -79,6 +80,11 @@ final class SubstratePicture {
         }
         return shown.tags().sites().stream()
                 .filter(site -> site.transfer().atoms().stream().anyMatch(atom -> atoms.get(atom).distance(point) <= ring * 1.2)).findFirst();
+    }
+
+    /** Where the tag of a site came to be. */
+    Optional<Rectangle2D> placeOf(SiteTag site) {
+        return placed.stream().filter(tag -> tag.tag().equals(site)).map(Placed::box).findFirst();
     }
 
     /** Where tags came to be. */

@@ -6,14 +6,21 @@ import java.awt.Graphics;
 import java.awt.Graphics2D;
 import java.awt.Point;
 import java.awt.RenderingHints;
+import java.awt.event.FocusAdapter;
+import java.awt.event.FocusEvent;
 import java.awt.event.MouseAdapter;
 import java.awt.event.MouseEvent;
 import java.awt.event.MouseWheelEvent;
 import java.awt.geom.AffineTransform;
+import java.awt.geom.Rectangle2D;
 import java.util.List;
 import java.util.Optional;
 import java.util.function.Consumer;
 import javax.swing.JPanel;
+import javax.swing.JToolTip;
+import javax.swing.Popup;
+import javax.swing.PopupFactory;
+import javax.swing.SwingUtilities;
 import javax.swing.ToolTipManager;
 import javax.swing.UIManager;
 
@@ -30,6 +37,7 @@ final class SubstrateView extends JPanel {
     private Shown shown;
     private List<Integer> highlighted = List.of();
     private int focusedSite = -1;
+    private Popup card;
     private SubstratePicture picture;
     private Dimension pictureSize;
 
@@ -49,6 +57,14 @@ final class SubstrateView extends JPanel {
         Keys.bind(this, "UP", () -> moveFocus(-1));
         Keys.bind(this, "ENTER", this::chooseFocused);
         Keys.bind(this, "SPACE", this::chooseFocused);
+        Keys.bind(this, "I", this::showCard);
+        Keys.bind(this, "ESCAPE", this::hideCard);
+        addFocusListener(new FocusAdapter() {
+            @Override
+            public void focusLost(FocusEvent event) {
+                hideCard();
+            }
+        });
         Keys.bind(this, "0", this::fit);
         Keys.bind(this, "PLUS", () -> zoom(ZOOM_STEP, new Point(getWidth() / 2, getHeight() / 2)));
         Keys.bind(this, "MINUS", () -> zoom(1 / ZOOM_STEP, new Point(getWidth() / 2, getHeight() / 2)));
@@ -114,7 +130,31 @@ final class SubstrateView extends JPanel {
         return focusedSite < 0 || focusedSite >= shown.tags().sites().size() ? Optional.empty() : Optional.of(shown.tags().sites().get(focusedSite));
     }
 
+    /** The card of the site that has the keyboard. */
+    private void showCard() {
+        hideCard();
+        if (shown == null || picture == null) {
+            return;
+        }
+        focused().ifPresent(site -> picture.placeOf(site).ifPresent(box -> {
+            JToolTip tip = createToolTip();
+            tip.setTipText(SiteCard.html(shown, site));
+            Point corner = new Point((int) box.getMaxX(), (int) box.getMaxY());
+            SwingUtilities.convertPointToScreen(corner, this);
+            card = PopupFactory.getSharedInstance().getPopup(this, tip, corner.x, corner.y);
+            card.show();
+        }));
+    }
+
+    private void hideCard() {
+        if (card != null) {
+            card.hide();
+            card = null;
+        }
+    }
+
     private void moveFocus(int by) {
+        hideCard();
         if (shown != null && !shown.tags().sites().isEmpty()) {
             int count = shown.tags().sites().size();
             focusedSite = focusedSite < 0 ? by > 0 ? 0 : count - 1 : Math.floorMod(focusedSite + by, count);
@@ -126,6 +166,11 @@ final class SubstrateView extends JPanel {
         if (shown != null) {
             focused().ifPresent(site -> onSite.accept(site.label()));
         }
+    }
+
+    /** Where the tag of a site is, once it has been painted. */
+    Optional<Rectangle2D> placeOf(String label) {
+        return picture == null ? Optional.empty() : shown.tags().labelled(label).flatMap(picture::placeOf);
     }
 
     private Optional<SiteTag> siteAt(Point point) {

@@ -91,6 +91,20 @@ final class TagPainter {
         }
     }
 
+    /** A diamond round a stereocentre that may epimerise. */
+    void paintAtRisk(Graphics2D g, Point2D centre, double radius) {
+        double r = radius * 1.5;
+        Path2D diamond = new Path2D.Double();
+        diamond.moveTo(centre.getX() - r, centre.getY());
+        diamond.lineTo(centre.getX(), centre.getY() - r);
+        diamond.lineTo(centre.getX() + r, centre.getY());
+        diamond.lineTo(centre.getX(), centre.getY() + r);
+        diamond.closePath();
+        g.setColor(palette.color("caution"));
+        g.setStroke(new BasicStroke(palette.space("tiny")));
+        g.draw(diamond);
+    }
+
     /** A thin line from a tag to its ring, where there is a gap between them. */
     void paintLeader(Graphics2D g, SiteTag tag, Rectangle2D box, Point2D atom, double radius) {
         double x = Math.max(box.getMinX(), Math.min(atom.getX(), box.getMaxX()));

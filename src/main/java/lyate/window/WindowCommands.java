@@ -9,6 +9,7 @@ import java.util.List;
 import javax.swing.JFileChooser;
 import javax.swing.JFrame;
 import javax.swing.JOptionPane;
+import lyate.molecule.MoleculeText;
 
 /** What the menu does. */
 final class WindowCommands implements WindowMenu.Commands {
@@ -124,8 +125,16 @@ final class WindowCommands implements WindowMenu.Commands {
 
     @Override
     public void copySmiles() {
-        bench.shown().ifPresent(shown -> Toolkit.getDefaultToolkit().getSystemClipboard().setContents(
-                new StringSelection(shown.review().step().substrate().canonicalKey()), null));
+        bench.shown().ifPresent(shown -> copy(MoleculeText.smiles(shown.review().step().substrate())));
+    }
+
+    @Override
+    public void copyMolfile() {
+        bench.shown().ifPresent(shown -> copy(MoleculeText.molfile(shown.review().step().substrate())));
+    }
+
+    private static void copy(String text) {
+        Toolkit.getDefaultToolkit().getSystemClipboard().setContents(new StringSelection(text), null);
     }
 
     @Override
@@ -142,6 +151,11 @@ final class WindowCommands implements WindowMenu.Commands {
     @Override
     public void zoomed(float zoom) {
         memory.put("zoom", Float.toString(zoom));
+    }
+
+    @Override
+    public void preferences() {
+        new PreferencesWindow(frame, theme, memory).setVisible(true);
     }
 
     @Override

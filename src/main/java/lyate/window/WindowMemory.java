@@ -9,11 +9,14 @@ import java.io.Writer;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.nio.file.StandardCopyOption;
+import java.util.EnumMap;
 import java.util.List;
 import java.util.Locale;
+import java.util.Map;
 import java.util.Optional;
 import java.util.Properties;
 import javax.swing.JFrame;
+import lyate.table.TableFolders;
 
 /**
  * What the window remembers from one time to the next, in one properties file of the user's. A file that cannot be read or
@@ -58,6 +61,21 @@ final class WindowMemory {
     /** Where copies of unsaved sheets are kept. */
     Path recoveryFolder() {
         return file.resolveSibling("recovery");
+    }
+
+    /** What a new step starts with. */
+    StepText newStep() {
+        Map<StepField, String> fields = new EnumMap<>(StepField.class);
+        for (StepField field : StepField.values()) {
+            fields.put(field, get("new." + field.name(), ""));
+        }
+        return new StepText(fields, "");
+    }
+
+    /** The tables to use: a folder of the user's own on top, where one is set and no other was asked for. */
+    TableFolders tables(TableFolders asked) {
+        String own = get("tables", "");
+        return own.isEmpty() || !asked.own().isEmpty() ? asked : TableFolders.overlaidBy(Path.of(own));
     }
 
     /** Sheets used lately, latest first; only those that still exist. */

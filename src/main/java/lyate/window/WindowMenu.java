@@ -58,6 +58,10 @@ final class WindowMenu extends JMenuBar {
 
         void copySmiles();
 
+        void copyMolfile();
+
+        void preferences();
+
         void fit();
 
         void setDark(boolean dark);
@@ -73,12 +77,12 @@ final class WindowMenu extends JMenuBar {
 
     private final transient Commands commands;
 
-    WindowMenu(Commands commands, boolean dark) {
+    WindowMenu(Commands commands, Theme theme) {
         this.commands = commands;
         add(sheet());
         add(edit());
         add(step());
-        add(view(dark));
+        add(view(theme));
         add(help());
     }
 
@@ -126,6 +130,9 @@ final class WindowMenu extends JMenuBar {
         menu.addSeparator();
         menu.add(item("Copy substrate as picture", 'P', key(KeyEvent.VK_P, COMMAND | SHIFT), commands::copyPicture));
         menu.add(item("Copy substrate as SMILES", 'S', key(KeyEvent.VK_C, COMMAND | SHIFT), commands::copySmiles));
+        menu.add(item("Copy substrate as molfile", 'M', key(KeyEvent.VK_M, COMMAND | SHIFT), commands::copyMolfile));
+        menu.addSeparator();
+        menu.add(item("Preferences\u2026", 'F', key(KeyEvent.VK_COMMA, COMMAND), commands::preferences));
         return menu;
     }
 
@@ -142,9 +149,10 @@ final class WindowMenu extends JMenuBar {
         return menu;
     }
 
-    private JMenu view(boolean dark) {
+    private JMenu view(Theme theme) {
         JMenu menu = menu("View", 'V');
-        JCheckBoxMenuItem darkItem = new JCheckBoxMenuItem("Dark", dark);
+        JCheckBoxMenuItem darkItem = new JCheckBoxMenuItem("Dark", theme.palette().dark());
+        theme.onChange(() -> darkItem.setSelected(theme.palette().dark()));
         darkItem.setMnemonic('D');
         darkItem.setAccelerator(key(KeyEvent.VK_D, COMMAND));
         darkItem.addActionListener(event -> commands.setDark(darkItem.isSelected()));

@@ -13,6 +13,8 @@ import java.util.function.Supplier;
 import javax.swing.JFrame;
 import javax.swing.JLabel;
 import javax.swing.JOptionPane;
+import javax.swing.JScrollPane;
+import javax.swing.JTextArea;
 import javax.swing.SwingConstants;
 import javax.swing.SwingUtilities;
 import javax.swing.SwingWorker;
@@ -56,7 +58,8 @@ public final class WorkbenchFrame extends JFrame {
 
     /** Opens the window of the program with the tables in these folders; may be called on any thread. */
     public static void open(TableFolders folders) {
-        open(() -> Engine.load(folders), WindowMemory.ofUser());
+        WindowMemory memory = WindowMemory.ofUser();
+        open(() -> Engine.load(memory.tables(folders)), memory);
     }
 
     /** Shows the window at once and loads the engine behind it. */
@@ -77,8 +80,7 @@ public final class WorkbenchFrame extends JFrame {
                     try {
                         frame.fill(get());
                     } catch (ExecutionException e) {
-                        JOptionPane.showMessageDialog(frame, e.getCause().getMessage(), "The tables could not be read", JOptionPane.ERROR_MESSAGE);
-                        frame.dispose();
+                        frame.withoutOwnTables(e.getCause().getMessage());
                     } catch (InterruptedException e) {
                         Thread.currentThread().interrupt();
                     }
@@ -87,13 +89,22 @@ public final class WorkbenchFrame extends JFrame {
         });
     }
 
+    /** Tables that cannot be read must not lock the user out: the program goes on with its own. */
+    private void withoutOwnTables(String problem) {
+        JTextArea text = new JTextArea(problem, 16, 90);
+        text.setEditable(false);
+        JOptionPane.showMessageDialog(this, new JScrollPane(text), "The tables could not be read; going on with the program's own",
+                JOptionPane.ERROR_MESSAGE);
+        fill(Engine.load(TableFolders.packaged()));
+    }
+
     private void fill(Engine engine) {
         getContentPane().removeAll();
         SheetDocument document = new SheetDocument(StepCells.sheetOf(StepText.demo()), System::nanoTime);
         files = new SheetFiles(this, document, memory);
         bench = new Workbench(theme, engine, document);
         recovery = new Recovery(memory.recoveryFolder(), document);
-        setJMenuBar(new WindowMenu(new WindowCommands(this, bench, document, files, theme, memory), theme.palette().dark()));
+        setJMenuBar(new WindowMenu(new WindowCommands(this, bench, document, files, theme, memory), theme));
         document.onChange(() -> setTitle(title(document)));
         setTitle(title(document));
         add(bench, BorderLayout.CENTER);

@@ -5,15 +5,27 @@ import static org.junit.jupiter.api.Assertions.assertFalse;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 import static org.junit.jupiter.api.Assumptions.assumeFalse;
 
+import java.awt.Component;
+import java.awt.Container;
 import java.awt.GraphicsEnvironment;
+import java.awt.event.MouseEvent;
+import java.awt.geom.Rectangle2D;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.util.ArrayList;
+import java.util.List;
 import java.util.Optional;
 import java.util.concurrent.Callable;
 import java.util.concurrent.FutureTask;
 import java.util.function.Predicate;
+import javax.swing.AbstractButton;
+import javax.swing.JComboBox;
 import javax.swing.JFrame;
+import javax.swing.JList;
+import javax.swing.JScrollBar;
+import javax.swing.JTable;
 import javax.swing.SwingUtilities;
+import javax.swing.text.JTextComponent;
 import lyate.review.Verdict;
 import lyate.sheet.RouteSheet;
 import org.junit.jupiter.api.AfterEach;
@@ -94,6 +106,65 @@ class WorkbenchTest {
         });
         waitFor(bench -> bench.shown().orElseThrow().review().intendedSite().equals("O14"));
         assertTrue(onEventThread(() -> bench.shown().orElseThrow().intended().orElseThrow().intended()));
+    }
+
+    @Test
+    void aClickOnATagMakesItsSiteTheIntendedOne() throws Exception {
+        waitFor(bench -> bench.substrate().placeOf("O14").isPresent());
+        onEventThread(() -> {
+            Rectangle2D box = bench.substrate().placeOf("O14").orElseThrow();
+            mouse(bench.substrate(), MouseEvent.MOUSE_CLICKED, (int) box.getCenterX(), (int) box.getCenterY());
+            return null;
+        });
+        waitFor(bench -> bench.shown().orElseThrow().review().intendedSite().equals("O14"));
+    }
+
+    @Test
+    void draggingTheLineOfTheDoseChangesTheEquivalents() throws Exception {
+        onEventThread(() -> {
+            bench.drawer().setSelectedComponent(bench.drawer().dose());
+            return null;
+        });
+        waitFor(bench -> bench.isSettled() && bench.drawer().dose().chart().getChart() != null
+                && bench.drawer().dose().chart().getScreenDataArea().getWidth() > 0);
+        onEventThread(() -> {
+            DosePanel dose = bench.drawer().dose();
+            int middle = dose.chart().getHeight() / 2;
+            mouse(dose.chart(), MouseEvent.MOUSE_PRESSED, dose.lineAt(1.05), middle);
+            mouse(dose.chart(), MouseEvent.MOUSE_DRAGGED, dose.lineAt(2.0), middle);
+            mouse(dose.chart(), MouseEvent.MOUSE_RELEASED, dose.lineAt(2.0), middle);
+            return null;
+        });
+        waitFor(bench -> bench.shown().orElseThrow().review().step().equivalents() == 2.0);
+        assertEquals("2", onEventThread(() -> bench.strip().box(StepField.EQUIVALENTS).text()));
+    }
+
+    @Test
+    void everyControlThatTakesTheKeyboardHasAName() throws Exception {
+        onEventThread(() -> {
+            assertEquals(List.of(), nameless(bench));
+            return null;
+        });
+    }
+
+    private static List<String> nameless(Container parent) {
+        List<String> found = new ArrayList<>();
+        for (Component child : parent.getComponents()) {
+            boolean control = child instanceof JTextComponent text && text.isEditable() || child instanceof AbstractButton && child.isFocusable()
+                    || child instanceof JTable || child instanceof JList || child instanceof JComboBox;
+            String name = child.getAccessibleContext() == null ? "" : child.getAccessibleContext().getAccessibleName();
+            if (control && child.isShowing() && (name == null || name.isBlank())) {
+                found.add(child.getClass().getSimpleName() + " in " + parent.getClass().getSimpleName());
+            }
+            if (child instanceof Container container && !(child instanceof JComboBox) && !(child instanceof JScrollBar)) {
+                found.addAll(nameless(container));
+            }
+        }
+        return found;
+    }
+
+    private static void mouse(Component target, int kind, int x, int y) {
+        target.dispatchEvent(new MouseEvent(target, kind, System.currentTimeMillis(), MouseEvent.BUTTON1_DOWN_MASK, x, y, 1, false, MouseEvent.BUTTON1));
     }
 
     @Test
