@@ -9,7 +9,8 @@ import java.util.Map;
  * A table read from every folder that has it, each row checked against the schema.
  *
  * <p>A table file starts with {@code #} lines that say what it is, its units, how rows are matched and its
- * {@code # version:}; then a header line, then rows. Blank lines and {@code #} lines between rows are skipped.
+ * {@code # version:}; then a header line, then rows. Blank lines and {@code #} lines between rows are skipped. A column whose
+ * cells may be empty may be left out.
  *
  * @param schema what the file was checked against
  * @param rows   packaged rows in file order (replaced ones in place), then rows that a later folder added

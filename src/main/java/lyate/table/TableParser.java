@@ -84,7 +84,7 @@ final class TableParser {
                 problem(line, name, name, "every column once");
             }
         }
-        columnNames().stream().filter(name -> !header.contains(name))
+        schema.columns().stream().filter(Column::required).map(Column::name).filter(name -> !header.contains(name))
                 .forEach(name -> problem(line, name, "no such column", "a column " + name));
         return problems.size() == before;
     }
@@ -97,7 +97,8 @@ final class TableParser {
         Map<String, String> cells = new LinkedHashMap<>();
         boolean sound = true;
         for (Column column : schema.columns()) {
-            String cell = csv.get(header.indexOf(column.name()));
+            int place = header.indexOf(column.name());
+            String cell = place < 0 ? "" : csv.get(place);
             cells.put(column.name(), cell);
             sound &= check(column, cell, line);
         }

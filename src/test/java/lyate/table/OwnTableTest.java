@@ -11,7 +11,17 @@ import java.util.List;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
 
-class LongCellTest {
+class OwnTableTest {
+
+    @Test
+    void columnsThatMayBeEmptyMayBeLeftOut(@TempDir Path folder) throws IOException {
+        Files.writeString(folder.resolve("colours.csv"), "# version: 1\nid,source\na,none\n");
+        Schema schema = Schema.of("colours.csv", Column.text("id"), Column.number("ph").optional(), Column.list("aliases"),
+                Column.text("source"));
+        Row row = Table.read(schema, new TableFolders(List.of(folder))).rows().get(0);
+        assertTrue(row.number("ph").isEmpty());
+        assertEquals(List.of(), row.list("aliases"));
+    }
 
     @Test
     void aBadCellLongerThanTheExcerptIsStillShown(@TempDir Path folder) throws IOException {
