@@ -7,6 +7,8 @@ import java.util.Locale;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.Set;
+import java.util.regex.Matcher;
+import java.util.regex.Pattern;
 import java.util.stream.Collectors;
 import lyate.stock.Base;
 import lyate.stock.Medium;
@@ -22,6 +24,9 @@ final class RuleCells {
 
     /** The severity word of a row that keeps an earlier, more general row quiet. */
     static final String SILENT = "silent";
+
+    /** Locants and prefixes that stay as they are, then the letter that takes the capital. */
+    private static final Pattern FRONT = Pattern.compile("((?:(?:n|sec|tert|o|m|p)-|(?:N,)*N-|[^A-Za-z])*)([a-z])");
 
     private final Set<String> baseWords;
     private final Set<String> solventWords;
@@ -84,9 +89,11 @@ final class RuleCells {
         return found;
     }
 
-    /** A sentence of a table with the names of the step put in. */
+    /** A sentence of a table with the names of the step put in; a name at its front gets its capital: n-Butyllithium. */
     static String fill(String sentence, Base base, Solvent solvent) {
         String filled = sentence.replace("{base}", base.name()).replace("{solvent}", solvent.name());
-        return filled.substring(0, 1).toUpperCase(Locale.ROOT) + filled.substring(1);
+        Matcher front = FRONT.matcher(filled);
+        return sentence.startsWith("{") && front.lookingAt()
+                ? front.group(1) + front.group(2).toUpperCase(Locale.ROOT) + filled.substring(front.end()) : filled;
     }
 }
