@@ -1,5 +1,6 @@
 package lyate.molecule;
 
+import org.openscience.cdk.interfaces.IBond;
 import org.openscience.cdk.isomorphism.DfPattern;
 import org.openscience.cdk.isomorphism.matchers.QueryAtom;
 import org.openscience.cdk.isomorphism.matchers.QueryAtomContainer;
@@ -35,6 +36,11 @@ public final class AtomPattern {
         if (query.isEmpty()) {
             throw new MoleculeException("the pattern is empty");
         }
+        for (IBond bond : query.bonds()) {
+            if (bond.getBegin().equals(bond.getEnd())) {
+                throw new MoleculeException("the pattern has a ring bond from an atom to itself\n" + smarts);
+            }
+        }
         RootFilter filter = RootFilter.of(((QueryAtom) query.getAtom(0)).getExpression());
         AtomTest test = PatternPlan.of(query).<AtomTest>map(plan -> plan::matches).orElseGet(() -> byToolkit(query));
         return new AtomPattern(smarts, filter, Surroundings.askedBy(query), test);
@@ -48,11 +54,16 @@ public final class AtomPattern {
 
     private static QueryAtomContainer parse(String smarts) throws MoleculeException {
         QueryAtomContainer query = new QueryAtomContainer(SilentChemObjectBuilder.getInstance());
-        SmartsResult result = Smarts.parseToResult(query, smarts);
-        if (!result.ok()) {
-            throw new MoleculeException(result.getMessage() + SmilesError.caret(smarts, result.getPosition()));
+        try {
+            SmartsResult result = Smarts.parseToResult(query, smarts);
+            if (!result.ok()) {
+                throw new MoleculeException(result.getMessage() + SmilesError.caret(smarts, result.getPosition()));
+            }
+            return query;
+        } catch (RuntimeException e) {
+            // The toolkit stumbles over some patterns that break off or close a ring in mid-air.
+            throw new MoleculeException("the pattern does not make sense as a whole" + SmilesError.caret(smarts, smarts.length()));
         }
-        return query;
     }
 
     /** Whether the pattern fits with its first atom on {@code atom}. */

@@ -92,10 +92,10 @@ public record RouteSheet(SheetHeader header, List<Line> lines, Dialect dialect, 
     /** The sheet with one more row at the end, cells in the order of the header. */
     public RouteSheet withRow(List<String> cells) {
         List<Line> more = new ArrayList<>(lines);
-        String open = lines.isEmpty() ? head : lines.get(lines.size() - 1).text();
-        String lead = open.endsWith("\n") || open.endsWith("\r") ? "" : dialect.lineEnd();
+        String whole = text();
+        String lead = whole.endsWith("\n") || whole.endsWith("\r") ? tail : tail + dialect.lineEnd();
         int number = lines.size() + 1;
-        more.add(new Line(new SheetRow(header, number, 0, cells, ""), lead + tail, dialect.record(cells)));
+        more.add(new Line(new SheetRow(header, number, 0, cells, ""), lead, dialect.record(cells)));
         return new RouteSheet(header, more, dialect, head, "");
     }
 
