@@ -72,6 +72,12 @@ final class AcidityLadder extends JPanel {
         return Optional.empty();
     }
 
+    /** The ladder, as a picture. */
+    Optional<Picture> asPicture() {
+        return ladder.map(known -> new Picture("acidity-ladder", getSize(), theme.color("ground"),
+                g -> new LadderPicture(known, theme.palette(), g.getFont(), getSize(), g).paint(g, Optional.empty())));
+    }
+
     private void leaveOut(Base base) {
         compared = compared.stream().filter(other -> !other.equals(base)).toList();
         focusedRung = -1;

@@ -1,5 +1,7 @@
 package lyate.window;
 
+import java.awt.geom.Rectangle2D;
+import java.util.Optional;
 import org.jfree.chart.ChartPanel;
 
 /** Chart panels as the window uses them: drawn at the size they have, no pop-up menu, no zooming by mouse. */
@@ -17,5 +19,11 @@ final class Charts {
         panel.setMaximumDrawHeight(Integer.MAX_VALUE);
         panel.getAccessibleContext().setAccessibleName(name);
         return panel;
+    }
+
+    /** A chart as a picture, once there is one. */
+    static Optional<Picture> picture(String name, ChartPanel panel, Theme theme) {
+        return Optional.ofNullable(panel.getChart()).map(chart -> new Picture(name, panel.getSize(), theme.color("ground"),
+                g -> chart.draw(g, new Rectangle2D.Double(0, 0, panel.getWidth(), panel.getHeight()))));
     }
 }

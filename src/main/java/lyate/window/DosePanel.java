@@ -4,6 +4,7 @@ import java.awt.Cursor;
 import java.awt.event.MouseAdapter;
 import java.awt.event.MouseEvent;
 import java.util.Locale;
+import java.util.Optional;
 import java.util.function.DoubleConsumer;
 import lyate.review.Reviewer;
 import org.jfree.chart.ChartPanel;
@@ -33,6 +34,11 @@ final class DosePanel extends LazyTab {
         panel.addMouseMotionListener(drag);
         add(panel);
         theme.onChange(this::draw);
+    }
+
+    @Override
+    Optional<Picture> asPicture() {
+        return Charts.picture("equivalents", panel, theme);
     }
 
     @Override

@@ -1,6 +1,7 @@
 package lyate.window;
 
 import java.util.List;
+import java.util.Optional;
 import javax.swing.BorderFactory;
 import javax.swing.JScrollPane;
 import javax.swing.JTabbedPane;
@@ -59,6 +60,11 @@ final class Drawer extends JTabbedPane implements AutoCloseable {
         JScrollPane scroll = new JScrollPane(table);
         scroll.setBorder(BorderFactory.createEmptyBorder());
         return scroll;
+    }
+
+    /** The chart in view, if there is one. */
+    Optional<Picture> asPicture() {
+        return getSelectedComponent() instanceof LazyTab tab ? tab.asPicture() : Optional.empty();
     }
 
     DosePanel dose() {

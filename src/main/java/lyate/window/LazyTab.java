@@ -34,6 +34,11 @@ abstract class LazyTab extends JPanel implements AutoCloseable {
     /** The answer still holds, but the step on screen is another one. */
     abstract void refresh();
 
+    /** The chart of the tab, where it has one. */
+    Optional<Picture> asPicture() {
+        return Optional.empty();
+    }
+
     /** Shows another step. */
     void show(Shown next) {
         shown = next;

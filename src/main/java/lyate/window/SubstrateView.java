@@ -95,6 +95,12 @@ final class SubstrateView extends JPanel {
         refresh();
     }
 
+    /** The substrate with its tags, as a picture. */
+    Optional<Picture> asPicture() {
+        return Optional.ofNullable(shown).map(known -> new Picture("substrate", getSize(), theme.color("ground"),
+                g -> new SubstratePicture(known, theme.palette(), g.getFont(), getSize(), view, g).paint(g, List.of(), Optional.empty())));
+    }
+
     private static String describe(Shown shown) {
         return String.join(". ", shown.tags().sites().stream().map(SiteTag::sentence).toList());
     }

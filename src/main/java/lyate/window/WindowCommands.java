@@ -9,6 +9,7 @@ import java.util.List;
 import javax.swing.JFileChooser;
 import javax.swing.JFrame;
 import javax.swing.JOptionPane;
+import javax.swing.filechooser.FileNameExtensionFilter;
 import lyate.molecule.MoleculeText;
 
 /** What the menu does. */
@@ -103,24 +104,27 @@ final class WindowCommands implements WindowMenu.Commands {
     }
 
     @Override
-    public void copyPicture() {
-        bench.shown().ifPresent(shown -> Toolkit.getDefaultToolkit().getSystemClipboard().setContents(
-                new ImageSelection(Pictures.image(shown, theme.palette(), bench.substrate().getSize())), null));
+    public void copyPicture(WindowMenu.Drawn what) {
+        bench.picture(what).ifPresentOrElse(picture -> Toolkit.getDefaultToolkit().getSystemClipboard().setContents(
+                new ImageSelection(Pictures.image(picture)), null), Toolkit.getDefaultToolkit()::beep);
     }
 
     @Override
-    public void savePicture() {
-        bench.shown().ifPresent(shown -> {
-            JFileChooser chooser = new JFileChooser();
-            chooser.setSelectedFile(new File("substrate.svg"));
-            if (chooser.showSaveDialog(frame) == JFileChooser.APPROVE_OPTION) {
-                try {
-                    Pictures.save(shown, theme.palette(), bench.substrate().getSize(), chooser.getSelectedFile().toPath());
-                } catch (IOException e) {
-                    JOptionPane.showMessageDialog(frame, "The picture was not saved: " + e.getMessage(), "Lyate", JOptionPane.ERROR_MESSAGE);
-                }
+    public void savePicture(WindowMenu.Drawn what) {
+        bench.picture(what).ifPresentOrElse(this::save, Toolkit.getDefaultToolkit()::beep);
+    }
+
+    private void save(Picture picture) {
+        JFileChooser chooser = new JFileChooser();
+        chooser.setFileFilter(new FileNameExtensionFilter("Pictures (*.svg, *.pdf, *.png)", "svg", "pdf", "png"));
+        chooser.setSelectedFile(new File(picture.name() + ".svg"));
+        if (chooser.showSaveDialog(frame) == JFileChooser.APPROVE_OPTION) {
+            try {
+                Pictures.save(picture, chooser.getSelectedFile().toPath());
+            } catch (IOException e) {
+                JOptionPane.showMessageDialog(frame, "The picture was not saved: " + e.getMessage(), "Lyate", JOptionPane.ERROR_MESSAGE);
             }
-        });
+        }
     }
 
     @Override

@@ -22,6 +22,17 @@ final class WindowMenu extends JMenuBar {
     private static final int SHIFT = InputEvent.SHIFT_DOWN_MASK;
     private static final int ALT = InputEvent.ALT_DOWN_MASK;
 
+    /** What is drawn in the window. */
+    enum Drawn {
+        SUBSTRATE("Substrate"), LADDER("Acidity ladder"), CHART("Chart in the drawer");
+
+        private final String title;
+
+        Drawn(String title) {
+            this.title = title;
+        }
+    }
+
     /** What the menu can ask of the window. */
     interface Commands {
         void newSheet();
@@ -52,9 +63,9 @@ final class WindowMenu extends JMenuBar {
 
         void goToStep(int by);
 
-        void copyPicture();
+        void copyPicture(Drawn what);
 
-        void savePicture();
+        void savePicture(Drawn what);
 
         void copySmiles();
 
@@ -95,7 +106,12 @@ final class WindowMenu extends JMenuBar {
         menu.addSeparator();
         menu.add(item("Save", 'S', key(KeyEvent.VK_S, COMMAND), commands::save));
         menu.add(item("Save as\u2026", 'A', key(KeyEvent.VK_S, COMMAND | SHIFT), commands::saveAs));
-        menu.add(item("Save picture as\u2026", 'P', key(KeyEvent.VK_E, COMMAND), commands::savePicture));
+        JMenu pictures = menu("Save picture", 'P');
+        for (Drawn what : Drawn.values()) {
+            pictures.add(item(what.title + "\u2026", what.title.charAt(0), what == Drawn.SUBSTRATE ? key(KeyEvent.VK_E, COMMAND) : null,
+                    () -> commands.savePicture(what)));
+        }
+        menu.add(pictures);
         menu.addSeparator();
         menu.add(item("Quit", 'Q', key(KeyEvent.VK_Q, COMMAND), commands::quit));
         return menu;
@@ -128,7 +144,12 @@ final class WindowMenu extends JMenuBar {
         menu.add(item("Undo", 'U', key(KeyEvent.VK_Z, COMMAND), commands::undo));
         menu.add(item("Redo", 'R', key(KeyEvent.VK_Z, COMMAND | SHIFT), commands::redo));
         menu.addSeparator();
-        menu.add(item("Copy substrate as picture", 'P', key(KeyEvent.VK_P, COMMAND | SHIFT), commands::copyPicture));
+        JMenu pictures = menu("Copy picture", 'P');
+        for (Drawn what : Drawn.values()) {
+            pictures.add(item(what.title, what.title.charAt(0), what == Drawn.SUBSTRATE ? key(KeyEvent.VK_P, COMMAND | SHIFT) : null,
+                    () -> commands.copyPicture(what)));
+        }
+        menu.add(pictures);
         menu.add(item("Copy substrate as SMILES", 'S', key(KeyEvent.VK_C, COMMAND | SHIFT), commands::copySmiles));
         menu.add(item("Copy substrate as molfile", 'M', key(KeyEvent.VK_M, COMMAND | SHIFT), commands::copyMolfile));
         menu.addSeparator();

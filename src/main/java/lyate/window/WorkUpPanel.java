@@ -110,6 +110,11 @@ final class WorkUpPanel extends LazyTab {
     }
 
     @Override
+    Optional<Picture> asPicture() {
+        return Charts.picture("work-up", chart, theme);
+    }
+
+    @Override
     Object key(Shown next) {
         return List.of(StepKey.of(next.review().step()), product.getText(), String.valueOf(acids.getSelectedItem()), pH.getText(), amounts.get());
     }

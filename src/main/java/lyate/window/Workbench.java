@@ -172,6 +172,15 @@ final class Workbench extends JPanel implements Drawer.Wishes, AutoCloseable {
         return answered.equals(document.state().text()) && drawer.isSettled() && steps.isSettled();
     }
 
+    /** What can be copied or saved as a picture now, by the name the menu gives it. */
+    Optional<Picture> picture(WindowMenu.Drawn what) {
+        return switch (what) {
+            case SUBSTRATE -> substrate.asPicture();
+            case LADDER -> ladder.asPicture();
+            case CHART -> drawer.asPicture();
+        };
+    }
+
     /** What is on screen now. */
     Optional<Shown> shown() {
         return shown;
