@@ -27,12 +27,15 @@ public final class AcidityEstimator {
 
     private static final List<Medium> ESTIMATED_IN = List.of(Medium.WATER, Medium.DMSO);
 
+    /** An estimate less sure than this is extrapolated from acids of another kind; the class value knows the kind. */
+    private static final double NEAR_DATA_SIGMA = 1.5;
+
     private final MeasuredAcidities measured;
     private final MediaTransfer transfer;
     private final ClassShift shift;
     private final List<SiteEstimate> estimates;
 
-    /** The first of {@code estimates} that answers wins. */
+    /** The first of {@code estimates} that answers from near its data wins; where none does, the last that answers. */
     public AcidityEstimator(MeasuredAcidities measured, MediaTransfer transfer, List<SiteEstimate> estimates) {
         this.measured = measured;
         this.transfer = transfer;
@@ -67,8 +70,10 @@ public final class AcidityEstimator {
     }
 
     private Optional<Acidity> estimate(Molecule molecule, ProtonSite site, Medium medium) {
-        return estimates.stream().map(estimate -> estimate.estimate(molecule, site, medium))
-                .flatMap(Optional::stream).findFirst();
+        List<Acidity> answers = estimates.stream().map(estimate -> estimate.estimate(molecule, site, medium))
+                .flatMap(Optional::stream).toList();
+        return answers.stream().filter(answer -> answer.sigma() <= NEAR_DATA_SIGMA).findFirst()
+                .or(() -> answers.stream().reduce((first, later) -> later));
     }
 
     private Optional<Acidity> estimateElsewhere(Molecule molecule, ProtonSite site, Medium medium) {

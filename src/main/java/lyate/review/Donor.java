@@ -25,6 +25,12 @@ record Donor(ProtonSite site, String label, Comparison comparison, TransferTherm
         return comparison.sigmaLogK() * Flask.ROOM_KELVIN / transfer.temperatureKelvin();
     }
 
+    /** Protons that go one after the other: one for each equivalent atom, since several on one carbon hardly ever do. */
+    int protons() {
+        String family = site.siteClass().family();
+        return family.startsWith("ch-acid") || family.equals("hydrocarbon") ? 1 : site.equivalent().size();
+    }
+
     Donor withAdvantage(double other) {
         return new Donor(site, label, comparison, transfer, other);
     }

@@ -43,7 +43,7 @@ final class EquilibriumFindings {
 
     /** Percent of a further proton that the usual small excess of base takes whatever one does. */
     private static double smallExcess(Situation situation) {
-        double excess = situation.protonEquivalents() - situation.before().size() - 1;
+        double excess = situation.protonEquivalents() - situation.protonsBefore() - 1;
         return excess > 0 && excess < NOTABLE_EXCESS ? 100 * excess : 0;
     }
 
@@ -65,7 +65,7 @@ final class EquilibriumFindings {
         String names = before.stream().map(Donor::label).collect(Collectors.joining(", "));
         return List.of(finding(paid ? NOTE : STOP, FindingKind.SECOND_EQUIVALENT_NEEDED, situation.intended(),
                 say("%s goes first; taking %s as well needs %d equivalents, there are %.2f.", names,
-                        situation.intended().label(), before.size() + 1, situation.protonEquivalents()),
+                        situation.intended().label(), situation.protonsBefore() + 1, situation.protonEquivalents()),
                 before.stream().map(EquilibriumFindings::compared).toList()));
     }
 
@@ -83,7 +83,7 @@ final class EquilibriumFindings {
     }
 
     private static List<Finding> excess(Situation situation) {
-        double excess = situation.protonEquivalents() - situation.before().size() - 1;
+        double excess = situation.protonEquivalents() - situation.protonsBefore() - 1;
         if (excess < NOTABLE_EXCESS || situation.verdict() != Verdict.SELECTIVE) {
             return List.of();
         }

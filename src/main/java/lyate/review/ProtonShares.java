@@ -5,7 +5,7 @@ import java.util.Map;
 /**
  * Where the protons are at equilibrium, at the amounts of the step.
  *
- * @param percentTaken share of each substrate site that has lost its proton, by site label
+ * @param percentTaken share of the substrate molecules whose site has lost a proton, by site label
  * @param percentOfBaseSpentOnWater share of the base that moisture uses up
  * @param percentOfSolventTaken share of the base that ends as the solvent's lyate ion
  */

@@ -33,6 +33,11 @@ record Situation(Step step, WorkingBase workingBase, List<Donor> donors, Donor i
                 || donors.stream().anyMatch(donor -> donor.logK() >= VerdictRule.COMPLETE);
     }
 
+    /** Protons that go before the intended one. */
+    int protonsBefore() {
+        return before().stream().mapToInt(Donor::protons).sum();
+    }
+
     /** Protons the base takes per mole that was weighed in. */
     double protonEquivalents() {
         return step.equivalents() * step.base().protonsPerFormula();

@@ -5,13 +5,14 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
-import lyate.flask.Coupling;
 import lyate.flask.Equilibrium;
 import lyate.flask.Flask;
 import lyate.flask.HolderState;
 import lyate.flask.ProtonBalance;
 import lyate.flask.ProtonHolder;
 import lyate.flask.ProtonPlace;
+import lyate.stock.KnownPKa;
+import lyate.stock.Medium;
 
 /**
  * Fills a flask with what a step says and lets the protons settle.
@@ -27,8 +28,6 @@ final class StepFlask {
     private static final String WATER = "water";
     /** Where the working base stands on the common axis; any number would do. */
     private static final double REFERENCE = 0;
-    /** More places than this cost time and change nothing: the others are too weak to matter. */
-    private static final int MOST_PLACES = 12;
     /** Molar mass of water, g/mol. */
     private static final double WATER_MOLAR_MASS = 18.015;
 
@@ -37,31 +36,42 @@ final class StepFlask {
     /**
      * Where the protons are at equilibrium.
      *
-     * @param donors   substrate sites, the first to go in front
-     * @param couplings couplings between the first {@code MOST_PLACES} of them, by index
+     * @param protons   the substrate's
+     * @param donors    the same by site
      * @param logKWater log10 K of the working base against water at 25 degrees C
      */
-    static ProtonShares settle(Step step, WorkingBase base, List<Donor> donors, List<Coupling> couplings, Optional<Double> logKWater) {
+    static ProtonShares settle(Step step, WorkingBase base, SubstrateProtons protons, List<Donor> donors, Optional<Double> logKWater) {
         double kelvin = step.temperatureCelsius() + 273.15;
         double toTemperature = Flask.ROOM_KELVIN / kelvin;
-        List<Donor> counted = donors.subList(0, Math.min(MOST_PLACES, donors.size()));
-        double baseAmount = step.concentrationMolar() * step.equivalents() * step.base().protonsPerFormula();
         List<ProtonHolder> holders = new ArrayList<>();
-        holders.add(substrate(step.concentrationMolar(), counted, couplings));
-        holders.add(ProtonHolder.base(BASE, baseAmount, REFERENCE));
+        holders.add(protons.holder(SUBSTRATE, step.concentrationMolar(), REFERENCE));
+        holders.add(baseHolder(step, base, toTemperature));
         logKWater.ifPresent(logK -> holders.add(ProtonHolder.acid(WATER, waterMolar(step), placed(logK * toTemperature))));
         if (!base.levelled()) {
             base.logKSolvent().ifPresent(logK ->
                     holders.add(ProtonHolder.acid(SOLVENT, step.solvent().molarity(), placed(logK * toTemperature))));
         }
-        Equilibrium settled = ProtonBalance.solve(new Flask(holders, kelvin, step.solvent().scale().id()));
-        return shares(settled, donors, counted.size(), baseAmount);
+        return shares(ProtonBalance.solve(new Flask(holders, kelvin, step.solvent().scale().id())), protons, donors, baseMolar(step));
     }
 
-    private static ProtonHolder substrate(double amount, List<Donor> donors, List<Coupling> couplings) {
-        List<ProtonPlace> places = donors.stream()
-                .map(donor -> new ProtonPlace(donor.label(), placed(donor.effectiveLogK()))).toList();
-        return new ProtonHolder(SUBSTRATE, amount, places, couplings, places.size());
+    /** Protons that the base takes in its first stage, mol/L. */
+    private static double baseMolar(Step step) {
+        return step.concentrationMolar() * step.equivalents() * step.base().protonsPerFormula();
+    }
+
+    /** The base with its further stages, where the table has them: carbonate goes on to take a second proton. */
+    private static ProtonHolder baseHolder(Step step, WorkingBase base, double toTemperature) {
+        Optional<KnownPKa> first = step.base().pKa(Medium.WATER);
+        List<KnownPKa> further = step.base().furtherStages();
+        if (base.levelled() || first.isEmpty() || further.isEmpty()) {
+            return ProtonHolder.base(BASE, baseMolar(step), REFERENCE);
+        }
+        double[] stages = new double[further.size() + 1];
+        for (int i = 0; i < further.size(); i++) {
+            stages[further.size() - 1 - i] = REFERENCE + (further.get(i).pKa() - first.get().pKa()) * toTemperature;
+        }
+        stages[further.size()] = REFERENCE;
+        return ProtonHolder.stages(BASE, baseMolar(step), 0, stages);
     }
 
     private static double placed(double logK) {
@@ -74,13 +84,14 @@ final class StepFlask {
         return step.waterPpm() * 1e-6 * 1000 * step.solvent().density() / WATER_MOLAR_MASS;
     }
 
-    private static ProtonShares shares(Equilibrium settled, List<Donor> donors, int counted, double baseAmount) {
+    private static ProtonShares shares(Equilibrium settled, SubstrateProtons protons, List<Donor> donors, double baseMolar) {
         Map<String, Double> taken = new LinkedHashMap<>();
         HolderState substrate = settled.of(SUBSTRATE);
-        for (int i = 0; i < donors.size(); i++) {
-            taken.put(donors.get(i).label(), i < counted ? 100 * substrate.deprotonated(i) : 0.0);
+        for (Donor donor : donors) {
+            double lost = protons.placesOf(donor).stream().mapToDouble(substrate::deprotonated).sum();
+            taken.put(donor.label(), 100 * Math.min(1, lost));
         }
-        return new ProtonShares(taken, spentOn(WATER, settled, baseAmount), spentOn(SOLVENT, settled, baseAmount));
+        return new ProtonShares(taken, spentOn(WATER, settled, baseMolar), spentOn(SOLVENT, settled, baseMolar));
     }
 
     private static double spentOn(String name, Equilibrium settled, double baseAmount) {

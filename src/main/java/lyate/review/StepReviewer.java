@@ -7,6 +7,7 @@ import java.util.Map;
 import java.util.OptionalInt;
 import lyate.acidity.AcidityEstimator;
 import lyate.acidity.IonisationEnthalpies;
+import lyate.acidity.SiteCoupling;
 import lyate.review.VerdictRule.World;
 import lyate.site.SiteClasses;
 import lyate.site.SiteFinder;
@@ -30,6 +31,7 @@ public final class StepReviewer implements Reviewer {
     private final BaseSolventRules solventRules;
     private final BaseHazards hazards;
     private final KineticControl kinetics;
+    private final SiteCoupling coupling;
 
     private StepReviewer(TableFolders folders, Stockroom stockroom, SiteFinder finder, AcidityEstimator acidity) {
         this.solventRules = BaseSolventRules.load(folders, stockroom);
@@ -38,6 +40,7 @@ public final class StepReviewer implements Reviewer {
         this.water = waterOf(stockroom);
         this.sideReactions = SideReactions.load(folders, stockroom);
         this.hazards = BaseHazards.load(folders, stockroom);
+        this.coupling = SiteCoupling.load(folders);
         this.kinetics = new KineticControl(KineticPreferences.load(folders, stockroom));
     }
 
@@ -58,11 +61,12 @@ public final class StepReviewer implements Reviewer {
         List<KineticControl.Order> orders = kinetics.orders(step, base, atEquilibrium);
         List<Donor> sites = KineticControl.ahead(atEquilibrium, orders);
         Donor intended = Donors.intended(step, sites);
-        ProtonShares shares = StepFlask.settle(step, base, sites, List.of(), workingBases.logK(base, water, step.solvent()));
+        SubstrateProtons protons = new SubstrateProtons(step.substrate(), coupling, sites);
+        ProtonShares shares = StepFlask.settle(step, base, protons, sites, workingBases.logK(base, water, step.solvent()));
         List<Transfer> transfers = new Transfers(step, shares).of(sites);
         List<SideReaction> reactions = sideReactions(step, base, transfers, intended);
 
-        World world = World.of(step, base, sites, intended);
+        World world = World.of(step, base, protons, sites, intended);
         Map<Verdict, Double> probabilities = withSideReactions(odds.of(sites, world), reactions);
         Situation situation = new Situation(step, base, sites, intended, shares, orders,
                 VerdictOdds.verdict(probabilities));

@@ -25,23 +25,27 @@ final class VerdictRule {
      *
      * @param logK        log10 K of every substrate site against the working base
      * @param intended    index of the intended site
+     * @param protons     protons of each site that the base takes one after the other
      * @param shift       by how much its pKa rises once all more acidic sites have lost their proton
      * @param equivalents base per substrate
      * @param levelled    whether the solvent made the working base out of the one added
      * @param destroyed   whether nothing like the base added is left
      */
-    record World(double[] logK, int intended, double shift, double equivalents, boolean levelled, boolean destroyed) {
+    record World(double[] logK, int[] protons, int intended, double shift, double equivalents, boolean levelled, boolean destroyed) {
 
         /** The same world with other constants. */
         World withLogK(double[] others) {
-            return new World(others, intended, shift, equivalents, levelled, destroyed);
+            return new World(others, protons, intended, shift, equivalents, levelled, destroyed);
         }
 
         /** The world in which every pKa is exactly its best value. */
-        static World of(Step step, WorkingBase base, List<Donor> sites, Donor intended) {
+        static World of(Step step, WorkingBase base, SubstrateProtons substrate, List<Donor> sites, Donor intended) {
             double[] logK = sites.stream().mapToDouble(Donor::effectiveLogK).toArray();
+            int[] protons = sites.stream().mapToInt(Donor::protons).toArray();
+            double shift = sites.stream().filter(site -> site != intended && site.effectiveLogK() > intended.effectiveLogK()
+                    && site.effectiveLogK() >= 0).mapToDouble(site -> substrate.raise(site, intended)).sum();
             double equivalents = step.equivalents() * step.base().protonsPerFormula();
-            return new World(logK, sites.indexOf(intended), 0, equivalents, base.levelled(), base.destroyed());
+            return new World(logK, protons, sites.indexOf(intended), shift, equivalents, base.levelled(), base.destroyed());
         }
     }
 
@@ -55,7 +59,7 @@ final class VerdictRule {
         for (int site = 0; site < world.logK().length; site++) {
             double lead = world.logK()[site] - intended;
             boolean reached = site != world.intended() && world.logK()[site] >= 0;
-            before += reached && lead > 0 ? 1 : 0;
+            before += reached && lead > 0 ? world.protons()[site] : 0;
             rivalled |= reached && Math.abs(lead) < CLEAR && lead <= 0;
         }
         if (before > 0) {

@@ -2,6 +2,7 @@ package lyate.review;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
 
+import java.util.stream.IntStream;
 import lyate.review.VerdictRule.World;
 import org.junit.jupiter.api.Test;
 
@@ -55,20 +56,20 @@ class VerdictRuleTest {
 
     @Test
     void aLyateIonThatStillSufficesIsSelective() {
-        assertEquals(Verdict.SELECTIVE, VerdictRule.judge(new World(new double[] {5}, 0, COUPLED, 1, true, false)));
+        assertEquals(Verdict.SELECTIVE, VerdictRule.judge(new World(new double[] {5}, new int[] {1}, 0, COUPLED, 1, true, false)));
     }
 
     @Test
     void aLyateIonThatDoesNotSufficeMeansTheBaseWasLevelled() {
-        assertEquals(Verdict.LEVELLED, VerdictRule.judge(new World(new double[] {1}, 0, COUPLED, 1, true, false)));
+        assertEquals(Verdict.LEVELLED, VerdictRule.judge(new World(new double[] {1}, new int[] {1}, 0, COUPLED, 1, true, false)));
     }
 
     @Test
     void aBaseThatTheSolventDestroysTakesNothing() {
-        assertEquals(Verdict.LEVELLED, VerdictRule.judge(new World(new double[] {20}, 0, COUPLED, 1, true, true)));
+        assertEquals(Verdict.LEVELLED, VerdictRule.judge(new World(new double[] {20}, new int[] {1}, 0, COUPLED, 1, true, true)));
     }
 
     private static Verdict judge(double equivalents, double... logKIntendedFirst) {
-        return VerdictRule.judge(new World(logKIntendedFirst, 0, COUPLED, equivalents, false, false));
+        return VerdictRule.judge(new World(logKIntendedFirst, IntStream.range(0, logKIntendedFirst.length).map(site -> 1).toArray(), 0, COUPLED, equivalents, false, false));
     }
 }
