@@ -1,5 +1,6 @@
 package lyate.molecule;
 
+import java.util.Arrays;
 import org.openscience.cdk.interfaces.IBond;
 import org.openscience.cdk.isomorphism.DfPattern;
 import org.openscience.cdk.isomorphism.matchers.QueryAtom;
@@ -71,6 +72,11 @@ public final class AtomPattern {
         AtomFacts facts = molecule.facts();
         return filter.admits(facts.rootCodes[atom]) && Asked.answered(asked, facts.surroundings[atom])
                 && test.fits(molecule, atom);
+    }
+
+    /** Bits of {@link Surroundings} without which no first atom can do. */
+    long needed() {
+        return Arrays.stream(asked).reduce(-1L, (one, other) -> one & other);
     }
 
     /** Whether atoms of this {@link RootFilter#code} can be the first atom. */

@@ -1,7 +1,7 @@
 package lyate.molecule;
 
-import java.util.ArrayList;
 import java.util.List;
+import java.util.stream.IntStream;
 
 /**
  * Patterns in an order that matters: of all that fit an atom the last one decides. Immutable; safe to share between
@@ -9,34 +9,39 @@ import java.util.List;
  */
 public final class LastMatch {
 
-    private final List<AtomPattern> patterns;
+    private final AtomPattern[] patterns;
     /** By root code: the patterns that admit it, last first. */
-    private final int[][] candidates;
+    private final Candidates[] byRootCode;
+
+    /**
+     * Patterns to try.
+     *
+     * @param indices last first
+     * @param needed  bits that each cannot do without, see {@link Surroundings}
+     */
+    private record Candidates(int[] indices, long[] needed) {}
 
     /** @param patterns general ones first */
     public LastMatch(List<AtomPattern> patterns) {
-        this.patterns = List.copyOf(patterns);
-        this.candidates = new int[RootFilter.CODES][];
-        for (int code = 0; code < candidates.length; code++) {
-            candidates[code] = admitting(code);
-        }
+        this.patterns = patterns.toArray(AtomPattern[]::new);
+        this.byRootCode = IntStream.range(0, RootFilter.CODES).mapToObj(this::admitting).toArray(Candidates[]::new);
     }
 
-    private int[] admitting(int code) {
-        List<Integer> admitting = new ArrayList<>();
-        for (int i = patterns.size() - 1; i >= 0; i--) {
-            if (patterns.get(i).admits(code)) {
-                admitting.add(i);
-            }
-        }
-        return admitting.stream().mapToInt(Integer::intValue).toArray();
+    private Candidates admitting(int code) {
+        int[] indices = IntStream.range(0, patterns.length).map(i -> patterns.length - 1 - i)
+                .filter(i -> patterns[i].admits(code)).toArray();
+        return new Candidates(indices, IntStream.of(indices).mapToLong(i -> patterns[i].needed()).toArray());
     }
 
     /** Index of the last pattern that fits with its first atom on {@code atom}, or -1. */
     public int index(Molecule molecule, int atom) {
-        for (int candidate : candidates[molecule.facts().rootCodes[atom]]) {
-            if (patterns.get(candidate).matches(molecule, atom)) {
-                return candidate;
+        AtomFacts facts = molecule.facts();
+        Candidates candidates = byRootCode[facts.rootCodes[atom]];
+        long missing = ~facts.surroundings[atom];
+        long[] needed = candidates.needed();
+        for (int i = 0; i < needed.length; i++) {
+            if ((needed[i] & missing) == 0 && patterns[candidates.indices()[i]].matches(molecule, atom)) {
+                return candidates.indices()[i];
             }
         }
         return -1;

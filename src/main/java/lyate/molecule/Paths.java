@@ -30,29 +30,28 @@ final class Paths {
 
     /**
      * Size of the smallest ring through a ring atom: the first bond that joins the parts reached through two different
-     * neighbours of it.
+     * neighbours of it. Looks no farther than it must.
      */
     static int smallestRing(int[][] neighbours, int atom) {
-        int[] distances = distances(neighbours, atom);
+        int[] distance = new int[neighbours.length];
         int[] branch = new int[neighbours.length];
-        Arrays.fill(branch, -1);
-        Deque<Integer> waiting = new ArrayDeque<>();
+        int[] queue = new int[neighbours.length];
+        int reached = 0;
         for (int neighbour : neighbours[atom]) {
+            distance[neighbour] = 1;
             branch[neighbour] = neighbour;
-            waiting.add(neighbour);
+            queue[reached++] = neighbour;
         }
         int smallest = Integer.MAX_VALUE;
-        while (!waiting.isEmpty()) {
-            int here = waiting.remove();
+        for (int i = 0; i < reached && 2 * distance[queue[i]] + 1 < smallest; i++) {
+            int here = queue[i];
             for (int next : neighbours[here]) {
-                if (next == atom) {
-                    continue;
-                }
-                if (branch[next] < 0) {
+                if (next != atom && distance[next] == 0) {
+                    distance[next] = distance[here] + 1;
                     branch[next] = branch[here];
-                    waiting.add(next);
-                } else if (branch[next] != branch[here]) {
-                    smallest = Math.min(smallest, distances[here] + distances[next] + 1);
+                    queue[reached++] = next;
+                } else if (next != atom && branch[next] != branch[here]) {
+                    smallest = Math.min(smallest, distance[here] + distance[next] + 1);
                 }
             }
         }
