@@ -24,6 +24,12 @@ public final class MoleculeSvg {
         StringBuilder svg = new StringBuilder(String.format(Locale.ROOT,
                 "<svg xmlns=\"http://www.w3.org/2000/svg\" width=\"%.1f\" height=\"%.1f\" viewBox=\"%.3f %.3f %.3f %.3f\">%n",
                 width * bondLength, height * bondLength, box.getX() - MARGIN, box.getY() - MARGIN, width, height));
+        return svg.append(paths(drawing, colours)).append("</svg>\n").toString();
+    }
+
+    /** The shapes as {@code <path>} elements in drawing coordinates, to go into a larger picture. */
+    public static String paths(MoleculeDrawing drawing, DrawingColours colours) {
+        StringBuilder svg = new StringBuilder();
         for (DrawingMark mark : drawing.marks()) {
             String colour = hex(colours.of(mark.atomicNumber()));
             String style = mark.filled() ? "fill=\"" + colour + "\"" : String.format(Locale.ROOT,
@@ -31,7 +37,7 @@ public final class MoleculeSvg {
                     colour, mark.strokeWidth());
             svg.append("<path ").append(style).append(" d=\"").append(path(mark)).append("\"/>\n");
         }
-        return svg.append("</svg>\n").toString();
+        return svg.toString();
     }
 
     private static String path(DrawingMark mark) {

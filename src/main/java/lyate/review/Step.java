@@ -29,6 +29,12 @@ public record Step(String id, Molecule substrate, Optional<String> intendedSite,
                 waterPpm, partner);
     }
 
+    /** The same step with another amount of base. */
+    public Step withEquivalents(double other) {
+        return new Step(id, substrate, intendedSite, base, other, solvent, temperatureCelsius, concentrationMolar, waterPpm,
+                partner);
+    }
+
     /** The same step in another solvent, with that solvent's typical water. */
     public Step withSolvent(Solvent other) {
         return new Step(id, substrate, intendedSite, base, equivalents, other, temperatureCelsius, concentrationMolar,

@@ -5,11 +5,15 @@ import java.io.StringReader;
 import java.io.UncheckedIOException;
 import java.net.URI;
 import java.net.URISyntaxException;
+import java.nio.charset.StandardCharsets;
 import java.nio.file.FileSystem;
 import java.nio.file.FileSystems;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.security.MessageDigest;
+import java.security.NoSuchAlgorithmException;
 import java.util.ArrayList;
+import java.util.HexFormat;
 import java.util.List;
 import java.util.Map;
 import java.util.SortedSet;
@@ -34,8 +38,9 @@ public final class TableListing {
      * @param version  what its {@code # version:} line states; empty where there is none
      * @param rows     rows below the header
      * @param summary  its first comment line
+     * @param digest   first 12 hexadecimal digits of the SHA-256 of its text: two tables of one digest are the same
      */
-    public record Copy(String fileName, String origin, String version, int rows, String summary) {}
+    public record Copy(String fileName, String origin, String version, int rows, String summary, String digest) {}
 
     /** Every copy of every table, by name, packaged ones first. */
     public static List<Copy> of(TableFolders folders) {
@@ -85,7 +90,16 @@ public final class TableListing {
         String version = head.stream().filter(line -> line.startsWith("version:")).map(line -> line.substring(8).strip())
                 .findFirst().orElse("");
         String origin = source.name().equals(name) ? "packaged" : source.name();
-        return new Copy(name, origin, version, rows(source.text()), head.stream().findFirst().orElse(""));
+        return new Copy(name, origin, version, rows(source.text()), head.stream().findFirst().orElse(""), digest(source.text()));
+    }
+
+    private static String digest(String text) {
+        try {
+            byte[] hash = MessageDigest.getInstance("SHA-256").digest(text.getBytes(StandardCharsets.UTF_8));
+            return HexFormat.of().formatHex(hash, 0, 6);
+        } catch (NoSuchAlgorithmException e) {
+            throw new IllegalStateException("every Java has SHA-256", e);
+        }
     }
 
     private static int rows(String text) {

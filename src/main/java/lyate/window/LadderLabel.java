@@ -6,6 +6,7 @@ import java.util.Comparator;
 import java.util.List;
 import java.util.stream.Collectors;
 import java.util.stream.Stream;
+import lyate.report.LabelSpread;
 
 /**
  * A label of the ladder and where its middle goes.

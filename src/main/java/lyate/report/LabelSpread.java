@@ -1,7 +1,7 @@
-package lyate.window;
+package lyate.report;
 
 /** Moves labels apart along one line by as little as possible (least squares), keeping their order. */
-final class LabelSpread {
+public final class LabelSpread {
 
     private LabelSpread() {}
 
@@ -12,7 +12,7 @@ final class LabelSpread {
      * @param high    highest edge allowed; too little room lets the labels overlap evenly
      * @return where they go, same order
      */
-    static double[] spread(double[] wanted, double height, double low, double high) {
+    public static double[] spread(double[] wanted, double height, double low, double high) {
         int count = wanted.length;
         if (count == 0) {
             return new double[0];

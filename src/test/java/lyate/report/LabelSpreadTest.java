@@ -1,4 +1,4 @@
-package lyate.window;
+package lyate.report;
 
 import static org.junit.jupiter.api.Assertions.assertArrayEquals;
 import static org.junit.jupiter.api.Assertions.assertTrue;
