@@ -1,0 +1,109 @@
+package lyate.report;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Locale;
+import java.util.stream.Collectors;
+
+/** Per cent of each proton taken against equivalents of base; every line is named at its end, the dose of the step is marked. */
+final class DoseFigure {
+
+    private static final double WIDTH = 330;
+    private static final double HEIGHT = 300;
+    private static final double LEFT = 40;
+    private static final double RIGHT = 282;
+    private static final double TOP = 24;
+    private static final double BOTTOM = 256;
+    private static final double FONT = 11;
+    /** Donors that never lose more than this, per cent, stay out of the picture. */
+    private static final double WORTH_A_LINE = 0.5;
+    private static final List<String> DASHES = List.of("6 3", "2 3", "8 3 2 3");
+
+    private final DoseSweep sweep;
+    private final List<LetteredSite> sites;
+    private final double dose;
+
+    DoseFigure(DoseSweep sweep, List<LetteredSite> sites, double dose) {
+        this.sweep = sweep;
+        this.sites = sites.stream().filter(site -> taken(site).stream().anyMatch(percent -> percent > WORTH_A_LINE)).toList();
+        this.dose = dose;
+    }
+
+    String write(String id) {
+        Svg svg = new Svg(WIDTH, HEIGHT);
+        axes(svg);
+        svg.line(x(dose), TOP - 6, x(dose), BOTTOM, Ink.BASE, 1.6, "stroke-dasharray", "3 2");
+        boolean late = dose > 0.6 * sweep.span();
+        svg.text(x(dose) + (late ? -4 : 4), TOP - 8, Words.number(dose) + " eq.", FONT, Ink.BASE, late ? "end" : "start", true);
+        for (int i = 0; i < sites.size(); i++) {
+            line(svg, sites.get(i), i);
+        }
+        names(svg);
+        return svg.write(id, "Protons taken against equivalents of base", description());
+    }
+
+    private void axes(Svg svg) {
+        for (int percent = 0; percent <= 100; percent += 25) {
+            svg.line(LEFT, y(percent), RIGHT, y(percent), Ink.LINE, percent == 0 ? 1.2 : 0.5);
+            svg.text(LEFT - 6, y(percent) + 4, Integer.toString(percent), FONT, Ink.SOFT, "end", false);
+        }
+        int step = Math.max(1, (int) Math.ceil(sweep.span() / 6));
+        for (int equivalents = 0; equivalents <= sweep.span(); equivalents += step) {
+            svg.line(x(equivalents), BOTTOM, x(equivalents), BOTTOM + 4, Ink.SOFT, 1);
+            svg.text(x(equivalents), BOTTOM + 17, Integer.toString(equivalents), FONT, Ink.SOFT, "middle", false);
+        }
+        svg.text((LEFT + RIGHT) / 2, BOTTOM + 36, "equivalents of base", FONT, Ink.TEXT, "middle", false);
+        svg.text(2, TOP - 8, "% taken", FONT, Ink.TEXT, "start", false);
+    }
+
+    private void line(Svg svg, LetteredSite site, int index) {
+        StringBuilder path = new StringBuilder();
+        List<Double> percent = taken(site);
+        for (int i = 0; i < percent.size(); i++) {
+            path.append(String.format(Locale.ROOT, "%s%.1f %.1f", i == 0 ? "M" : "L", x(sweep.equivalents().get(i)), y(percent.get(i))));
+        }
+        if (site.intended()) {
+            svg.path(path.toString(), "none", site.ink(), 2.4);
+        } else {
+            svg.path(path.toString(), "none", site.ink(), 1.6, "stroke-dasharray", DASHES.get(index % DASHES.size()));
+        }
+    }
+
+    private void names(Svg svg) {
+        List<LetteredSite> downwards = new ArrayList<>(sites);
+        downwards.sort((one, other) -> Double.compare(last(other), last(one)));
+        double[] wanted = downwards.stream().mapToDouble(site -> y(last(site))).toArray();
+        double[] placed = LabelSpread.spread(wanted, FONT + 3, TOP - 8, BOTTOM + 8);
+        for (int i = 0; i < placed.length; i++) {
+            LetteredSite site = downwards.get(i);
+            svg.text(RIGHT + 5, placed[i] + 4, site.letter() + " " + site.transfer().donor(), FONT, site.ink(), "start", site.intended());
+        }
+    }
+
+    private String description() {
+        return sites.isEmpty() ? "No site loses its protons." : sites.stream().map(site -> site.transfer().donor() + ": "
+                + sayAt(site, 1) + ", " + sayAt(site, 2) + ", " + sayAt(site, 3)).collect(Collectors.joining("; ")) + ".";
+    }
+
+    private String sayAt(LetteredSite site, int equivalents) {
+        int nearest = (int) Math.round(equivalents / sweep.span() * (sweep.equivalents().size() - 1));
+        return Words.percent(taken(site).get(nearest)) + " at " + equivalents + " equivalent" + (equivalents == 1 ? "" : "s");
+    }
+
+    private double last(LetteredSite site) {
+        List<Double> percent = taken(site);
+        return percent.get(percent.size() - 1);
+    }
+
+    private List<Double> taken(LetteredSite site) {
+        return sweep.percentTaken().getOrDefault(site.transfer().donor(), List.of());
+    }
+
+    private double x(double equivalents) {
+        return LEFT + (RIGHT - LEFT) * equivalents / sweep.span();
+    }
+
+    private static double y(double percent) {
+        return BOTTOM - (BOTTOM - TOP) * percent / 100;
+    }
+}

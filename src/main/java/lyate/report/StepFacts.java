@@ -1,0 +1,44 @@
+package lyate.report;
+
+import java.util.List;
+import java.util.Optional;
+import java.util.OptionalDouble;
+import lyate.bench.Amounts;
+import lyate.bench.Batch;
+import lyate.bench.GasAndHeat;
+import lyate.review.Review;
+import lyate.review.ReviewException;
+import lyate.sheet.ReviewedRow;
+
+/**
+ * Everything a report says about one judged step.
+ *
+ * @param row       the row it came from
+ * @param review    the judgement
+ * @param sites     the substrate's sites under their letters
+ * @param doses     what other amounts of base would do; empty where the step cannot be judged at other doses
+ * @param amounts   for {@link ReportContext#MILLIMOLE} of substrate
+ * @param gasAndHeat for the same amounts
+ */
+record StepFacts(ReviewedRow row, Review review, List<LetteredSite> sites, Optional<DoseSweep> doses, Amounts amounts,
+                 GasAndHeat gasAndHeat) {
+
+    static StepFacts of(ReviewedRow row, Review review, ReportContext context) {
+        Amounts amounts = Amounts.of(review, Batch.ofMilliMole(review.step().substrate(), ReportContext.MILLIMOLE), OptionalDouble.empty());
+        return new StepFacts(row, review, LetteredSite.of(review), doses(review, context), amounts,
+                GasAndHeat.of(review, amounts, context.enthalpies()));
+    }
+
+    private static Optional<DoseSweep> doses(Review review, ReportContext context) {
+        try {
+            return Optional.of(DoseSweep.of(review.step(), context.reviewer()));
+        } catch (ReviewException e) {
+            return Optional.empty();
+        }
+    }
+
+    /** The intended site, or the first there is. */
+    Optional<LetteredSite> anchor() {
+        return sites.stream().filter(LetteredSite::intended).findFirst().or(() -> sites.stream().findFirst());
+    }
+}

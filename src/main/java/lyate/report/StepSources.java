@@ -1,0 +1,47 @@
+package lyate.report;
+
+import java.util.ArrayList;
+import java.util.Comparator;
+import java.util.List;
+import java.util.Map;
+import lyate.acidity.Acidity.Relative;
+import lyate.review.Review;
+import lyate.review.Transfer;
+import lyate.stock.KnownPKa;
+import lyate.stock.Medium;
+
+/** Every value a review rests on, with where it comes from. */
+final class StepSources {
+
+    /**
+     * One value in use.
+     *
+     * @param what   what it is
+     * @param value  the value as written; may be empty
+     * @param source citation
+     */
+    record Use(String what, String value, String source) {}
+
+    private StepSources() {}
+
+    static List<Use> of(StepFacts facts) {
+        Review review = facts.review();
+        List<Use> uses = new ArrayList<>();
+        for (Transfer transfer : review.transfers()) {
+            uses.add(new Use("pKa of " + transfer.donor() + ", " + transfer.acidity().basis().word(),
+                    Words.withSigma(transfer.acidity()) + " in " + Words.medium(transfer.acidity().medium()), transfer.acidity().source()));
+            for (Relative relative : transfer.acidity().relatives()) {
+                uses.add(new Use("measured relative of " + transfer.donor(),
+                        relative.smiles() + ", " + relative.site() + ": " + Words.oneDecimal(relative.pKa()), relative.source()));
+            }
+        }
+        review.step().base().pKas().entrySet().stream().sorted(Comparator.comparing((Map.Entry<Medium, KnownPKa> known) -> known.getKey().id()))
+                .forEach(known -> uses.add(new Use("pKa of the conjugate acid of " + review.step().base().name(),
+                        Words.withSigma(known.getValue().pKa(), known.getValue().sigma()) + " in " + Words.medium(known.getKey()), known.getValue().source())));
+        uses.add(new Use("data of " + review.step().base().name(), review.step().base().stock(), review.step().base().source()));
+        uses.add(new Use("data of " + review.step().solvent().name(), "", review.step().solvent().source()));
+        facts.gasAndHeat().heat().forEach(share -> uses.add(new Use("heat of " + share.donor(),
+                Words.number(share.kiloJoulePerMole()) + " kJ/mol, " + share.how(), share.source())));
+        return uses.stream().distinct().toList();
+    }
+}
