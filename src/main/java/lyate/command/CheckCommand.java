@@ -2,14 +2,18 @@ package lyate.command;
 
 import java.io.IOException;
 import java.util.concurrent.Callable;
+import java.util.function.Supplier;
 import lyate.molecule.MoleculeReader;
+import lyate.report.HtmlReport;
 import lyate.report.JsonList;
+import lyate.report.ReportContext;
 import lyate.report.ResultWriter;
 import lyate.report.ReviewJson;
 import lyate.report.ReviewText;
 import lyate.report.SheetCsv;
 import lyate.review.Review;
 import lyate.review.ReviewException;
+import lyate.review.Reviewer;
 import lyate.review.StepReviewer;
 import lyate.sheet.ReviewedRow;
 import lyate.sheet.RowException;
@@ -34,7 +38,8 @@ final class CheckCommand implements Callable<Integer> {
     @Mixin
     private StepOptions step;
 
-    @Option(names = "--format", paramLabel = "FORMAT", defaultValue = "text", description = "text, json or csv (default: text).")
+    @Option(names = "--format", paramLabel = "FORMAT", defaultValue = "text", converter = Format.OrHtml.class,
+            description = "text, json, csv or html (default: text).")
     private Format format;
 
     @Mixin
@@ -50,7 +55,10 @@ final class CheckCommand implements Callable<Integer> {
         StepReader reader = new StepReader(MoleculeReader.load(folders), Stockroom.load(folders));
         SheetRow row = step.row(base);
         try {
-            write(row, StepReviewer.load(folders).review(reader.read(row)));
+            Reviewer reviewer = StepReviewer.load(folders);
+            Review review = reviewer.review(reader.read(row));
+            String title = review.step().base().name() + " in " + review.step().solvent().name();
+            write(row, review, () -> ReportContext.of(title, ProgramVersion.text(), folders, reviewer));
             return 0;
         } catch (RowException e) {
             terminal.tell(StepOptions.words(e));
@@ -60,7 +68,7 @@ final class CheckCommand implements Callable<Integer> {
         return Failures.SOME_INPUT_NOT_USED;
     }
 
-    private void write(SheetRow row, Review review) throws IOException {
+    private void write(SheetRow row, Review review, Supplier<ReportContext> context) throws IOException {
         switch (format) {
             case TEXT -> new ReviewText(terminal.outWriter()).write(review);
             case CSV -> new SheetCsv(terminal.outWriter(), row.header()).write(ReviewedRow.of(row, review));
@@ -68,6 +76,12 @@ final class CheckCommand implements Callable<Integer> {
                 ResultWriter<Review> json = new JsonList<>(terminal.outWriter(), ReviewJson::describe);
                 json.write(review);
                 json.finish();
+            }
+            case HTML -> {
+                try (HtmlReport report = new HtmlReport(terminal.outWriter(), context.get())) {
+                    report.write(ReviewedRow.of(row, review));
+                    report.finish();
+                }
             }
             default -> throw new IllegalStateException("no writer for " + format);
         }

@@ -7,7 +7,11 @@ final class ProgramVersion implements IVersionProvider {
 
     @Override
     public String[] getVersion() {
+        return new String[] {text()};
+    }
+
+    static String text() {
         String version = Lyate.class.getPackage().getImplementationVersion();
-        return new String[] {"lyate " + (version == null ? "(development)" : version)};
+        return "lyate " + (version == null ? "(development)" : version);
     }
 }

@@ -11,9 +11,11 @@ import java.util.Optional;
 import java.util.concurrent.Callable;
 import lyate.molecule.MoleculeReader;
 import lyate.report.JsonList;
+import lyate.report.ReportContext;
 import lyate.report.ResultWriter;
 import lyate.report.RowJson;
 import lyate.report.SheetCsv;
+import lyate.review.Reviewer;
 import lyate.review.StepReviewer;
 import lyate.sheet.BatchReview;
 import lyate.sheet.ReviewedRow;
@@ -50,6 +52,9 @@ final class ReviewCommand implements Callable<Integer> {
     @Option(names = {"-o", "--output"}, paramLabel = "FILE", description = "Where the result goes, .csv or .json (default: CSV on standard output).")
     private Path output;
 
+    @Option(names = "--report", paramLabel = "REPORT", description = "A document for reading as well, .html or .pdf.")
+    private Path report;
+
     @Option(names = "--threads", paramLabel = "N", description = "How many rows are reviewed at a time (default: one per core).")
     private Integer threads;
 
@@ -68,20 +73,29 @@ final class ReviewCommand implements Callable<Integer> {
         }
         TableFolders folders = tables.folders();
         StepReader steps = new StepReader(MoleculeReader.load(folders), Stockroom.load(folders));
-        BatchReview batch = new BatchReview(steps, StepReviewer.load(folders));
+        Reviewer reviewer = StepReviewer.load(folders);
+        BatchReview batch = new BatchReview(steps, reviewer);
         try (BufferedReader text = sheet.equals("-") ? terminal.reader() : Files.newBufferedReader(Path.of(sheet), StandardCharsets.UTF_8);
-                ResultTarget target = new ResultTarget(Optional.ofNullable(output), terminal)) {
+                ResultTarget target = new ResultTarget(Optional.ofNullable(output), terminal);
+                ReportFile document = ReportFile.open(Optional.ofNullable(report), terminal, spec,
+                        () -> ReportContext.of(title(), ProgramVersion.text(), folders, reviewer))) {
             SheetReader rows = new SheetReader(text);
             ResultWriter<ReviewedRow> writer = writer(target, rows);
             BatchProgress progress = new BatchProgress(terminal);
             batch.run(rows, workers, reviewed -> {
                 write(writer, reviewed);
+                write(document, reviewed);
                 progress.add(reviewed);
             });
             writer.finish();
             target.keep();
+            document.finish();
             return progress.finish() ? 0 : Failures.SOME_INPUT_NOT_USED;
         }
+    }
+
+    private String title() {
+        return sheet.equals("-") ? "Route" : Path.of(sheet).getFileName().toString().replaceFirst("\\.[^.]*$", "");
     }
 
     private ResultWriter<ReviewedRow> writer(ResultTarget target, SheetReader rows) throws IOException {
