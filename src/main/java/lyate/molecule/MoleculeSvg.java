@@ -40,6 +40,14 @@ public final class MoleculeSvg {
         return svg.toString();
     }
 
+    /** A seam of one colour round the atom symbols, to go below {@link #paths} and over whatever lies behind; width in bond lengths. */
+    public static String seam(MoleculeDrawing drawing, String colour, double width) {
+        StringBuilder svg = new StringBuilder();
+        drawing.marks().stream().filter(DrawingMark::filled).forEach(mark -> svg.append(String.format(Locale.ROOT,
+                "<path fill=\"%s\" stroke=\"%s\" stroke-width=\"%.3f\" stroke-linejoin=\"round\" d=\"%s\"/>\n", colour, colour, 2 * width, path(mark))));
+        return svg.toString();
+    }
+
     private static String path(DrawingMark mark) {
         StringBuilder text = new StringBuilder();
         double[] p = new double[6];

@@ -19,13 +19,13 @@ final class Assumptions {
             said.add("No intended site given: " + review.intendedSite() + ", the first to go, was taken.");
         }
         if (row.text(SheetColumn.BASE_EQUIV).isEmpty()) {
-            said.add("No equivalents given: " + Words.number(step.equivalents()) + " taken.");
+            said.add("No equivalents given: " + Words.chosen(step.equivalents()) + " taken.");
         }
         if (row.text(SheetColumn.TEMPERATURE).isEmpty()) {
             said.add("No temperature given: " + Words.minus(Numbers.fixed(step.temperatureCelsius(), 0)) + " \u00b0C taken.");
         }
         if (row.text(SheetColumn.CONCENTRATION).isEmpty()) {
-            said.add("No concentration given: " + Words.number(step.concentrationMolar()) + " mol/L taken.");
+            said.add("No concentration given: " + Words.chosen(step.concentrationMolar()) + " mol/L taken.");
         }
         if (row.text(SheetColumn.WATER).isEmpty()) {
             said.add("No water content given: " + Numbers.fixed(step.waterPpm(), 0) + " ppm by mass taken, as a bottle of "
@@ -34,7 +34,7 @@ final class Assumptions {
         if (step.temperatureCelsius() != 25) {
             said.add("log K at the temperature of the step is log K at 25 \u00b0C times 298.15 K/T (isocoulombic transfer).");
         }
-        said.add("Amounts are for " + Words.number(ReportContext.MILLIMOLE) + " mmol of substrate; strengths are those of the label.");
+        said.add("Amounts are for " + Words.chosen(ReportContext.MILLIMOLE) + " mmol of substrate; strengths are those of the label.");
         said.addAll(review.assumptions());
         return said;
     }

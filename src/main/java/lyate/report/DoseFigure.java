@@ -8,10 +8,10 @@ import java.util.stream.Collectors;
 /** Per cent of each proton taken against equivalents of base; every line is named at its end, the dose of the step is marked. */
 final class DoseFigure {
 
-    private static final double WIDTH = 330;
+    private static final double WIDTH = 310;
     private static final double HEIGHT = 300;
     private static final double LEFT = 40;
-    private static final double RIGHT = 282;
+    private static final double RIGHT = 264;
     private static final double TOP = 24;
     private static final double BOTTOM = 256;
     private static final double FONT = 11;
@@ -34,7 +34,7 @@ final class DoseFigure {
         axes(svg);
         svg.line(x(dose), TOP - 6, x(dose), BOTTOM, Ink.BASE, 1.6, "stroke-dasharray", "3 2");
         boolean late = dose > 0.6 * sweep.span();
-        svg.text(x(dose) + (late ? -4 : 4), TOP - 8, Words.number(dose) + " eq.", FONT, Ink.BASE, late ? "end" : "start", true);
+        svg.text(x(dose) + (late ? -4 : 4), TOP - 8, Words.equivalents(dose), FONT, Ink.BASE, late ? "end" : "start", true);
         for (int i = 0; i < sites.size(); i++) {
             line(svg, sites.get(i), i);
         }

@@ -27,6 +27,11 @@ final class DrawingFigure {
     private static final double LARGEST_HEIGHT = 330;
     private static final double FONT = 11.5;
     private static final double LINE = 15;
+    private static final double EDGE = 6;
+    /** White round the atom symbols, bond lengths. */
+    private static final double SEAM = 0.12;
+    /** Ring of a site out of reach, relative to the others. */
+    private static final double FAINT = 0.5;
 
     private final Molecule molecule;
     private final List<LetteredSite> sites;
@@ -48,11 +53,19 @@ final class DrawingFigure {
     }
 
     String write(String id) {
-        Svg svg = new Svg(WIDTH, height);
-        svg.markup(String.format(Locale.ROOT, "<g transform=\"matrix(%.4f 0 0 %.4f %.3f %.3f)\">\n", toPicture.getScaleX(), toPicture.getScaleY(),
-                toPicture.getTranslateX(), toPicture.getTranslateY())).markup(MoleculeSvg.paths(drawing, Ink.atoms())).markup("</g>\n");
+        List<Rectangle2D> boxes = boxes();
+        Rectangle2D used = toPicture.createTransformedShape(drawing.bounds()).getBounds2D();
+        boxes.forEach(used::add);
+        double top = used.getMinY() - EDGE;
+        Svg svg = new Svg(WIDTH, top, used.getMaxY() + EDGE - top);
         sites.forEach(site -> rings(svg, site));
-        tags(svg);
+        svg.markup(String.format(Locale.ROOT, "<g transform=\"matrix(%.4f 0 0 %.4f %.3f %.3f)\">\n", toPicture.getScaleX(), toPicture.getScaleY(),
+                toPicture.getTranslateX(), toPicture.getTranslateY())).markup(MoleculeSvg.seam(drawing, Ink.PAPER, SEAM))
+                .markup(MoleculeSvg.paths(drawing, Ink.atoms())).markup("</g>\n");
+        for (int i = 0; i < sites.size(); i++) {
+            leader(svg, sites.get(i), boxes.get(i), position(sites.get(i).transfer().atoms().get(0)));
+            tag(svg, sites.get(i), boxes.get(i));
+        }
         String names = sites.stream().map(LetteredSite::sentence).collect(Collectors.joining("; "));
         return svg.write(id, "Structure of the substrate with its proton sites", molecule.smiles() + ". Sites, first to go first. " + names + ".");
     }
@@ -60,7 +73,11 @@ final class DrawingFigure {
     private void rings(Svg svg, LetteredSite site) {
         for (int atom : site.transfer().atoms()) {
             Point2D centre = position(atom);
-            svg.ring(centre, ring, site.ink(), site.counts() ? 1 : 0.6);
+            if (!site.counts()) {
+                svg.ring(centre, FAINT * ring, Ink.LINE, 0.8);
+                continue;
+            }
+            svg.ring(centre, ring, site.ink(), 1);
             if (site.intended()) {
                 svg.ring(centre, ring + 4.5, site.ink(), 1);
             }
@@ -70,19 +87,19 @@ final class DrawingFigure {
         }
     }
 
-    private void tags(Svg svg) {
+    /** Where the tags go, in the order of the sites. */
+    private List<Rectangle2D> boxes() {
         TagSpots spots = new TagSpots(new Rectangle2D.Double(2, 2, WIDTH - 4, height - 4), positions(), bonds(), symbols(), ring + 3);
-        List<Rectangle2D> taken = new ArrayList<>();
+        List<Rectangle2D> boxes = new ArrayList<>();
         for (LetteredSite site : sites) {
-            int atom = site.transfer().atoms().get(0);
-            List<String> lines = lines(site);
-            double chip = Svg.width(site.letter(), FONT) + 9;
-            double words = lines.stream().mapToDouble(line -> Svg.width(line, FONT)).max().orElse(-6);
-            Rectangle2D box = spots.find(atom, chip + words + 6, Math.max(1, lines.size()) * LINE + 3, taken);
-            taken.add(new Rectangle2D.Double(box.getX() - 2, box.getY() - 2, box.getWidth() + 4, box.getHeight() + 4));
-            leader(svg, site, box, position(atom));
-            tag(svg, site, lines, box, chip);
+            double words = lines(site).stream().mapToDouble(line -> Svg.width(line, FONT) + 4).max().orElse(0);
+            boxes.add(spots.find(site.transfer().atoms().get(0), chip(site) + words, Math.max(1, lines(site).size()) * LINE + 3, boxes));
         }
+        return boxes;
+    }
+
+    private static double chip(LetteredSite site) {
+        return Svg.width(site.letter(), FONT) + 9;
     }
 
     private static List<String> lines(LetteredSite site) {
@@ -93,12 +110,17 @@ final class DrawingFigure {
         return site.transfer().percentTaken() < 0.05 ? List.of(pKa) : List.of(pKa, Words.percent(site.transfer().percentTaken()) + " taken");
     }
 
-    private static void tag(Svg svg, LetteredSite site, List<String> lines, Rectangle2D box, double chip) {
+    /** A site out of reach has its letter and no more. */
+    private static void tag(Svg svg, LetteredSite site, Rectangle2D box) {
+        if (!site.counts()) {
+            svg.text(box.getCenterX(), box.getY() + LINE - 3, site.letter(), FONT, site.ink(), "middle", false);
+            return;
+        }
         svg.box(box.getX(), box.getY(), box.getWidth(), box.getHeight(), 3, site.intended() ? Ink.INTENDED_GROUND : Ink.PAPER, site.ink(),
                 site.intended() ? 1.6 : 0.8);
-        svg.text(box.getX() + (lines.isEmpty() ? box.getWidth() / 2 : chip / 2), box.getY() + LINE - 3, site.letter(), FONT, site.ink(), "middle", true);
-        for (int i = 0; i < lines.size(); i++) {
-            svg.text(box.getX() + chip, box.getY() + (i + 1) * LINE - 3, lines.get(i), FONT, Ink.TEXT, "start", false);
+        svg.text(box.getX() + chip(site) / 2, box.getY() + LINE - 3, site.letter(), FONT, site.ink(), "middle", true);
+        for (int i = 0; i < lines(site).size(); i++) {
+            svg.text(box.getX() + chip(site), box.getY() + (i + 1) * LINE - 3, lines(site).get(i), FONT, Ink.TEXT, "start", false);
         }
     }
 
@@ -106,9 +128,9 @@ final class DrawingFigure {
         double x = Math.max(box.getMinX(), Math.min(atom.getX(), box.getMaxX()));
         double y = Math.max(box.getMinY(), Math.min(atom.getY(), box.getMaxY()));
         double distance = atom.distance(x, y);
-        double edge = ring + (site.intended() ? 4.5 : 0);
+        double edge = (site.counts() ? ring : FAINT * ring) + (site.intended() ? 4.5 : 0);
         if (distance > edge + 3) {
-            svg.line(atom.getX() + (x - atom.getX()) * edge / distance, atom.getY() + (y - atom.getY()) * edge / distance, x, y, site.ink(), 0.8);
+            svg.line(atom.getX() + (x - atom.getX()) * edge / distance, atom.getY() + (y - atom.getY()) * edge / distance, x, y, site.counts() ? site.ink() : Ink.LINE, 0.8);
         }
     }
 

@@ -4,6 +4,8 @@ import java.io.IOException;
 import java.io.InputStream;
 import java.nio.charset.StandardCharsets;
 import java.util.List;
+import java.util.function.Supplier;
+import lyate.review.BaseHazards;
 import lyate.sheet.ReviewedRow;
 import lyate.table.TableListing;
 
@@ -16,7 +18,7 @@ public final class HtmlReport implements ResultWriter<ReviewedRow>, AutoCloseabl
 
     private final Appendable out;
     private final ReportContext context;
-    private final String headExtras;
+    private final Supplier<String> headExtras;
     private final RouteSummary summary = new RouteSummary();
     private final Spool lines = new Spool();
     private final Spool sections = new Spool();
@@ -24,11 +26,11 @@ public final class HtmlReport implements ResultWriter<ReviewedRow>, AutoCloseabl
 
     /** Nothing is written to {@code out} before {@link #finish()}. */
     public HtmlReport(Appendable out, ReportContext context) throws IOException {
-        this(out, context, "");
+        this(out, context, () -> "");
     }
 
-    /** With markup of this package's own added to the head. */
-    HtmlReport(Appendable out, ReportContext context, String headExtras) throws IOException {
+    /** With markup of this package's own added to the head, asked for when all rows are known. */
+    HtmlReport(Appendable out, ReportContext context, Supplier<String> headExtras) throws IOException {
         this.out = out;
         this.context = context;
         this.headExtras = headExtras;
@@ -48,7 +50,7 @@ public final class HtmlReport implements ResultWriter<ReviewedRow>, AutoCloseabl
         out.append("<!DOCTYPE html>\n<html lang=\"en\" xmlns=\"http://www.w3.org/1999/xhtml\">\n<head>\n<meta charset=\"utf-8\"/>\n"
                 + "<meta name=\"viewport\" content=\"width=device-width, initial-scale=1\"/>\n");
         out.append(new Html().element("title", context.title() + " \u2013 route review").element("style", "@@").toString()
-                .replace("@@", resource("report.css"))).append(headExtras).append("</head>\n<body>\n");
+                .replace("@@", resource("report.css"))).append(headExtras.get()).append("</head>\n<body>\n");
         out.append(new Html().open("header").element("h1", context.title()).element("p", "Route review. " + summary.counts()
                 + " Made by " + context.program() + ".").close().toString());
         out.append("<main>\n<section aria-labelledby=\"summary-h\">\n<h2 id=\"summary-h\">Summary</h2>\n<table class=\"summary\">\n"
@@ -67,7 +69,7 @@ public final class HtmlReport implements ResultWriter<ReviewedRow>, AutoCloseabl
     private String foot() {
         Html html = new Html().open("footer").element("h2", "Made with");
         html.element("p", context.program() + ". The same sheet, program and tables give the same report. Verdicts rest on pKa values with their"
-                + " uncertainties; they are advice for people who know the trade. " + lyate.review.BaseHazards.STANDING_LINE);
+                + " uncertainties; they are advice for people who know the trade. " + BaseHazards.STANDING_LINE);
         HtmlTable table = new HtmlTable(html, "tables", "Tables in use", List.of("Table", "Version", "Rows", "Digest", "Read from"));
         for (TableListing.Copy copy : context.tables()) {
             table.row(copy.fileName(), copy.version(), Integer.toString(copy.rows()), copy.digest(), copy.origin());

@@ -11,12 +11,12 @@ import java.util.stream.Collectors;
  */
 final class LadderFigure {
 
-    private static final double WIDTH = 330;
+    private static final double WIDTH = 340;
     private static final double HEIGHT = 300;
     private static final double TOP = 34;
     private static final double BOTTOM = 280;
-    private static final double LEFT_RAIL = 132;
-    private static final double RIGHT_RAIL = 214;
+    private static final double LEFT_RAIL = 116;
+    private static final double RIGHT_RAIL = 216;
     private static final double FONT = 11;
     private static final double MARK = 5;
 

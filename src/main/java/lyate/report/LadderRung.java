@@ -21,8 +21,10 @@ import lyate.stock.Medium;
  */
 record LadderRung(String name, double pKa, double sigma, String value, Optional<LetteredSite> site, boolean base) {
 
-    /** pKa units beyond the intended site and the base that are still shown. */
+    /** pKa units beyond the base, the intended site and the first to go that are still shown, where the axis does not get too long. */
     private static final double OF_INTEREST = 12;
+    private static final double LEAST_OF_INTEREST = 3;
+    private static final double LONG_AXIS = 36;
     private static final double ROOM_KELVIN = 298.15;
 
     /** Everything near enough to be of interest, highest pKa first; the anchor is the intended site. */
@@ -40,9 +42,12 @@ record LadderRung(String name, double pKa, double sigma, String value, Optional<
         if (review.transfers().stream().noneMatch(transfer -> transfer.donor().equals("solvent"))) {
             review.step().solvent().donorPKa(medium).ifPresent(known -> rungs.add(solvent(review, known)));
         }
-        double low = Math.min(basePKa, anchor.transfer().acidity().pKa()) - OF_INTEREST;
-        double high = Math.max(basePKa, anchor.transfer().acidity().pKa()) + OF_INTEREST;
-        return rungs.stream().filter(rung -> rung.pKa() >= low && rung.pKa() <= high)
+        // The first to go heads the list of transfers.
+        double first = rungs.size() > 1 ? rungs.get(1).pKa() : basePKa;
+        double low = Math.min(first, Math.min(basePKa, anchor.transfer().acidity().pKa()));
+        double high = Math.max(first, Math.max(basePKa, anchor.transfer().acidity().pKa()));
+        double air = Math.max(LEAST_OF_INTEREST, Math.min(OF_INTEREST, (LONG_AXIS - (high - low)) / 2));
+        return rungs.stream().filter(rung -> rung.pKa() >= low - air && rung.pKa() <= high + air)
                 .sorted(Comparator.comparingDouble(LadderRung::pKa).reversed()).toList();
     }
 

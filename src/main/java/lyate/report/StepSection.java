@@ -1,13 +1,15 @@
 package lyate.report;
 
 import java.util.ArrayList;
+import java.util.LinkedHashMap;
 import java.util.List;
+import java.util.Locale;
 import java.util.Map;
-import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.stream.Collectors;
 import lyate.bench.Amounts;
 import lyate.molecule.Molecule;
+import lyate.review.BaseHazards;
 import lyate.review.Finding;
 import lyate.review.Review;
 import lyate.review.Step;
@@ -57,7 +59,7 @@ final class StepSection {
         String others = review.probabilities().entrySet().stream()
                 .filter(entry -> entry.getKey() != review.verdict() && entry.getValue() >= WORTH_A_WORD)
                 .sorted(Map.Entry.<Verdict, Double>comparingByValue().reversed())
-                .map(entry -> Words.verdict(entry.getKey()).toLowerCase(java.util.Locale.ROOT) + " " + Words.probability(entry.getValue()))
+                .map(entry -> Words.verdict(entry.getKey()).toLowerCase(Locale.ROOT) + " " + Words.probability(entry.getValue()))
                 .collect(Collectors.joining(", "));
         if (!others.isEmpty()) {
             html.element("p", "Otherwise: " + others + ".");
@@ -100,11 +102,12 @@ final class StepSection {
         }
         substrate.warnings().forEach(warning -> pair("note", warning));
         pair("Intended site", review.intendedSite());
-        pair("Base", step.base().name() + ", " + Words.number(step.equivalents()) + " equivalents");
-        pair("Working base", review.workingBase());
+        pair("Base", step.base().name() + ", " + Words.chosen(step.equivalents()) + " equivalents");
+        if (!review.workingBase().equals(step.base().name())) {
+            pair("Working base", review.workingBase());
+        }
         pair("Solvent", step.solvent().name() + ", water " + Numbers.fixed(step.waterPpm(), 0) + " ppm by mass");
-        pair("Temperature", Words.minus(Numbers.fixed(step.temperatureCelsius(), 0)) + " \u00b0C");
-        pair("Concentration", Words.number(step.concentrationMolar()) + " mol/L of substrate");
+        pair("Temperature, concentration", Words.celsius(step.temperatureCelsius()) + ", " + Words.chosen(step.concentrationMolar()) + " mol/L of substrate");
         step.partner().ifPresent(partner -> pair("Electrophile", partner.smiles()));
         passedThrough().forEach(this::pair);
         html.close().close();
@@ -113,7 +116,7 @@ final class StepSection {
     /** Notes and columns that mean nothing to the program. */
     private Map<String, String> passedThrough() {
         SheetRow row = facts.row().row();
-        Map<String, String> others = new java.util.LinkedHashMap<>();
+        Map<String, String> others = new LinkedHashMap<>();
         for (int i = 0; i < row.cells().size(); i++) {
             String name = row.header().names().get(i);
             boolean known = SheetColumn.headers().contains(name) && !name.equals(SheetColumn.NOTES.header());
@@ -129,18 +132,22 @@ final class StepSection {
     }
 
     private void transfers() {
-        html.element("h3", "Transfers");
+        html.open("div", "class", "whole").element("h3", "Transfers");
         HtmlTable table = new HtmlTable(html, "transfers", "Every donor against " + review.workingBase(),
-                List.of("Site", "Donor", "pKa", "Scale", "Value is", "log K", "\u0394G / kJ/mol", "Taken", "Which scale decides, and why"));
+                List.of("Site", "Donor", "pKa", "Scale", "Value is", "log K", "\u0394G, kJ/mol", "Taken", "Reason"));
+        List<String> reasons = review.transfers().stream().map(Transfer::decidedBy).distinct().toList();
         for (Transfer transfer : review.transfers()) {
             String letter = facts.sites().stream().filter(site -> site.transfer().equals(transfer)).map(LetteredSite::letter).findFirst().orElse("");
             boolean intended = transfer.donor().equals(review.intendedSite());
-            table.row(letter, transfer.donor() + (intended ? " (intended)" : ""), Words.withSigma(transfer.acidity()),
+            table.row(letter, transfer.donor() + (intended ? ", intended" : ""), Words.withSigma(transfer.acidity()),
                     Words.medium(transfer.acidity().medium()), transfer.acidity().basis().word(),
-                    Words.signed(transfer.logK()) + " \u00b1 " + Words.oneDecimal(transfer.sigmaLogK()),
-                    Words.minus(Numbers.fixed(transfer.deltaG(), 0)), Words.percent(transfer.percentTaken()), transfer.decidedBy());
+                    Words.withSigma(transfer.logK(), transfer.sigmaLogK()), Words.minus(Numbers.fixed(transfer.deltaG(), 0)),
+                    Words.percent(transfer.percentTaken()), Integer.toString(reasons.indexOf(transfer.decidedBy()) + 1));
         }
         table.end();
+        html.element("p", "Which scale decides, and why:", "class", "source").open("ol");
+        reasons.forEach(reason -> html.element("li", reason));
+        html.close().close();
     }
 
     private void findings() {
@@ -152,7 +159,8 @@ final class StepSection {
             html.open("div", "class", "finding");
             html.open("p").markup(Signs.of(finding.severity())).element("strong", Words.sentence(finding.severity().word()) + ", "
                     + finding.kind().code().replace('-', ' ') + ":").text(" " + finding.sentence()).close();
-            List<String> details = new ArrayList<>(finding.evidence());
+            // The standing line closes the safety note of every step; once is enough.
+            List<String> details = new ArrayList<>(finding.evidence().stream().filter(fact -> !fact.equals(BaseHazards.STANDING_LINE)).toList());
             if (!finding.atoms().isEmpty()) {
                 details.add("Atoms: " + String.join(", ", finding.atoms().stream().map(step.substrate()::label).toList()));
             }
@@ -163,13 +171,13 @@ final class StepSection {
 
     private void amounts() {
         Amounts amounts = facts.amounts();
-        html.element("h3", "Amounts");
-        HtmlTable table = new HtmlTable(html, "amounts", "For " + Words.number(ReportContext.MILLIMOLE) + " mmol of substrate",
+        html.open("div", "class", "whole").element("h3", "Amounts");
+        HtmlTable table = new HtmlTable(html, "amounts", "For " + Words.chosen(ReportContext.MILLIMOLE) + " mmol of substrate",
                 List.of("What", "mmol", "g", "mL", "Remark"));
         table.row("substrate", Words.number(amounts.batch().milliMole()), Words.number(amounts.batch().grams()), "", "counter-ions included");
-        table.row(step.solvent().name(), "", "", Words.number(amounts.solventMilliLitre()), "for " + Words.number(step.concentrationMolar()) + " mol/L");
+        table.row(step.solvent().name(), "", "", Words.number(amounts.solventMilliLitre()), "for " + Words.chosen(step.concentrationMolar()) + " mol/L");
         table.row(step.base().name(), Words.number(amounts.base().milliMole()), number(amounts.base().grams()), number(amounts.base().milliLitre()),
-                Words.number(step.equivalents()) + " equivalents; " + amounts.base().form());
+                Words.chosen(step.equivalents()) + " equivalents; " + amounts.base().form());
         amounts.spending().forEach(spent -> table.row("protons of " + spent.what(), Words.number(spent.milliMole()), "", "",
                 "met before or at the intended site"));
         table.row("base that just covers these", Words.number(amounts.baseNeeded().milliMole()), number(amounts.baseNeeded().grams()),
@@ -177,6 +185,7 @@ final class StepSection {
         table.row(amounts.excess() < 0 ? "base missing" : "base left over", Words.number(Math.abs(amounts.excess())), "", "", "counted in protons");
         table.end();
         bullets(amounts.warnings());
+        html.close();
     }
 
     private static String number(OptionalDouble value) {

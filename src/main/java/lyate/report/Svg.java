@@ -11,11 +11,18 @@ final class Svg {
 
     private final StringBuilder body = new StringBuilder();
     private final double width;
+    private final double top;
     private final double height;
 
     /** A picture of so many px at most. */
     Svg(double width, double height) {
+        this(width, 0, height);
+    }
+
+    /** A picture whose upper edge is not at zero. */
+    Svg(double width, double top, double height) {
         this.width = width;
+        this.top = top;
         this.height = height;
     }
 
@@ -79,8 +86,8 @@ final class Svg {
     /** The whole element; {@code id} is unique in the document. */
     String write(String id, String title, String description) {
         return String.format(Locale.ROOT, "<svg xmlns=\"http://www.w3.org/2000/svg\" role=\"img\" aria-labelledby=\"%s-t %s-d\""
-                + " width=\"%.0f\" height=\"%.0f\" viewBox=\"0 0 %.0f %.0f\" font-family=\"Roboto, Helvetica, Arial, sans-serif\">\n",
-                id, id, width, height, width, height)
+                + " width=\"%.0f\" height=\"%.0f\" viewBox=\"0 %.0f %.0f %.0f\" font-family=\"Roboto, Helvetica, Arial, sans-serif\">\n",
+                id, id, width, height, top, width, height)
                 + "<title id=\"" + id + "-t\">" + Html.escape(title) + "</title>\n<desc id=\"" + id + "-d\">" + Html.escape(description)
                 + "</desc>\n" + body + "</svg>\n";
     }

@@ -10,6 +10,9 @@ final class Words {
 
     private static final String MINUS = "\u2212";
 
+    /** A space that no line breaks at. */
+    private static final String NO_BREAK = "\u00a0";
+
     private Words() {}
 
     /** One decimal, with a true minus sign. */
@@ -24,7 +27,7 @@ final class Words {
 
     /** For example {@code 9.9 ± 0.4}. */
     static String withSigma(double value, double sigma) {
-        return oneDecimal(value) + " \u00b1 " + oneDecimal(sigma);
+        return oneDecimal(value) + NO_BREAK + "\u00b1" + NO_BREAK + oneDecimal(sigma);
     }
 
     static String withSigma(Acidity acidity) {
@@ -34,17 +37,17 @@ final class Words {
     /** A share in percent: whole numbers in the middle, more digits near the ends. */
     static String percent(double percent) {
         if (percent > 0 && percent < 0.1) {
-            return "< 0.1 %";
+            return "<" + NO_BREAK + "0.1" + NO_BREAK + "%";
         }
         if (percent < 100 && percent > 99.9) {
-            return "> 99.9 %";
+            return ">" + NO_BREAK + "99.9" + NO_BREAK + "%";
         }
         boolean nearAnEnd = percent > 0 && percent < 10 || percent > 90 && percent < 100;
-        return Numbers.fixed(percent, nearAnEnd ? 1 : 0) + " %";
+        return Numbers.fixed(percent, nearAnEnd ? 1 : 0) + NO_BREAK + "%";
     }
 
     static String probability(double probability) {
-        return probability > 0.99 ? "> 99 %" : Numbers.fixed(100 * probability, 0) + " %";
+        return probability > 0.99 ? ">" + NO_BREAK + "99" + NO_BREAK + "%" : Numbers.fixed(100 * probability, 0) + NO_BREAK + "%";
     }
 
     /** Three significant digits, without an exponent where that is readable. */
@@ -57,6 +60,20 @@ final class Words {
         }
         int decimals = Math.max(0, 2 - (int) Math.floor(Math.log10(Math.abs(value))));
         return minus(Numbers.fixed(value, decimals));
+    }
+
+    /** A number somebody chose: three significant digits at most, no idle zeros. */
+    static String chosen(double value) {
+        String text = number(value);
+        return text.contains(".") && !text.contains("e") ? text.replaceFirst("\\.?0+$", "") : text;
+    }
+
+    static String celsius(double temperature) {
+        return minus(Numbers.fixed(temperature, 0)) + NO_BREAK + "\u00b0C";
+    }
+
+    static String equivalents(double value) {
+        return chosen(value) + NO_BREAK + "eq.";
     }
 
     static String medium(Medium medium) {
