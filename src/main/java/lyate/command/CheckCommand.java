@@ -38,9 +38,9 @@ final class CheckCommand implements Callable<Integer> {
     @Mixin
     private StepOptions step;
 
-    @Option(names = "--format", paramLabel = "FORMAT", defaultValue = "text", converter = Format.OrHtml.class,
+    @Option(names = "--format", paramLabel = "FORMAT", defaultValue = "text", converter = CheckFormat.Converter.class,
             description = "text, json, csv or html (default: text).")
-    private Format format;
+    private CheckFormat format;
 
     @Mixin
     private TablesOption tables;

@@ -102,7 +102,6 @@ final class SitesCommand implements Callable<Integer> {
             case TEXT -> new SiteText(terminal.outWriter(), solventId);
             case CSV -> new SiteCsv(terminal.outWriter(), solventId);
             case JSON -> new JsonList<>(terminal.outWriter(), answer -> SiteJson.describe(answer, solventId));
-            case HTML -> throw new IllegalStateException("sites are not offered as a document");
         };
     }
 
