@@ -25,10 +25,15 @@ record Donor(ProtonSite site, String label, Comparison comparison, TransferTherm
         return comparison.sigmaLogK() * Flask.ROOM_KELVIN / transfer.temperatureKelvin();
     }
 
+    /** Whether the proton sits on carbon and so moves slowly. */
+    boolean isCarbonAcid() {
+        String family = site.siteClass().family();
+        return family.startsWith("ch-acid") || family.equals("hydrocarbon");
+    }
+
     /** Protons that go one after the other: one for each equivalent atom, since several on one carbon hardly ever do. */
     int protons() {
-        String family = site.siteClass().family();
-        return family.startsWith("ch-acid") || family.equals("hydrocarbon") ? 1 : site.equivalent().size();
+        return isCarbonAcid() ? 1 : site.equivalent().size();
     }
 
     Donor withAdvantage(double other) {

@@ -126,7 +126,7 @@ final class EquilibriumFindings {
     }
 
     private static List<Finding> slow(Situation situation) {
-        boolean carbon = situation.intended().site().siteClass().family().equals("ch-acid");
+        boolean carbon = situation.intended().isCarbonAcid();
         boolean takes = situation.intended().logK() >= VerdictRule.COMPLETE;
         if (!carbon || !takes || situation.workingBase().levelled() || !situation.step().base().family().insoluble()) {
             return List.of();

@@ -27,7 +27,7 @@ final class ReviewWriter {
                 probabilities.values().stream().mapToDouble(Double::doubleValue).max().orElse(0));
         return new Review(situation.step(), situation.verdict(), probability, probabilities, intended.label(), firstSite(findings),
                 situation.workingBase().name(), intended.logK(), situation.shares().percentTaken(intended),
-                highestOther(), transfers, findings, explanation(), assumptions());
+                highestOther(), transfers, findings, explanation(), Assumptions.of(situation));
     }
 
     private String firstSite(List<Finding> findings) {
@@ -52,11 +52,6 @@ final class ReviewWriter {
                 .mapToDouble(situation.shares()::percentTaken).max().orElse(0);
     }
 
-    private List<String> assumptions() {
-        boolean room = Math.abs(situation.step().temperatureCelsius() - 25) < 1;
-        return room ? List.of() : List.of(situation.intended().label() + ": " + situation.intended().transfer().assumption());
-    }
-
     private List<String> explanation() {
         List<String> lines = new ArrayList<>();
         Donor intended = situation.intended();
@@ -64,6 +59,7 @@ final class ReviewWriter {
                 intended.comparison().donor().pKa(), intended.comparison().donor().sigma(),
                 intended.comparison().acceptor().pKa(), intended.comparison().acceptor().sigma(),
                 situation.workingBase().name(), intended.logK(), intended.comparison().reason()));
+        lines.add("Rule: " + VerdictRule.reason(situation.verdict()));
         VerdictMargin.sentence(world, intended.label()).ifPresent(lines::add);
         return lines;
     }

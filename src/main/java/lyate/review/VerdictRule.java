@@ -72,6 +72,19 @@ final class VerdictRule {
         return intended < COMPLETE || rivalled ? Verdict.PARTIAL : Verdict.SELECTIVE;
     }
 
+    /** Why a verdict is given, in words; the numbers of a step say whether it holds. */
+    static String reason(Verdict verdict) {
+        return switch (verdict) {
+            case SELECTIVE -> "K is 100 or more at the intended site, and every proton that goes before it is paid for";
+            case PARTIAL -> "K lies between 0.01 and 100 at the intended site, or another site takes more than 5 % of the base";
+            case TOO_WEAK -> "K is 0.01 or less at the intended site, and no other site takes the base";
+            case WRONG_SITE -> "a more acidic site takes the base, and there is not enough for both";
+            case LEVELLED -> "the solvent destroys the base, or K of its lyate ion at the intended site is below 100";
+            case INCOMPATIBLE -> "a tabulated side reaction is faster than the wanted transfer or follows it at once";
+            case UNDECIDED -> "no verdict reaches 60 %";
+        };
+    }
+
     /** The more acidic protons are paid for; what is left of the base meets the intended one. */
     private static Verdict afterOthers(double logK) {
         if (logK <= NONE) {

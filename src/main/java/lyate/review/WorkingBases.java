@@ -22,6 +22,9 @@ final class WorkingBases {
     /** C–H of hydrocarbon and ether solvents above this pKa (DMSO) moves too slowly to count; base-solvent.csv knows the exceptions. */
     private static final double INERT_SOLVENT_PKA = 40;
 
+    /** How far the nominal strength of a solid base in an aprotic solvent may be off, pKa units (common practice). */
+    static final double HETEROGENEOUS_SIGMA = 1.0;
+
     private final BaseStrength strength;
     private final BaseSolventRules solventRules;
     private final Stockroom stockroom;
@@ -35,7 +38,8 @@ final class WorkingBases {
     WorkingBase of(Step step) {
         Base base = step.base();
         Solvent solvent = step.solvent();
-        Function<Medium, Optional<KnownPKa>> pKa = remembered(medium -> strength.pKa(base, medium));
+        Function<Medium, Optional<KnownPKa>> pKa = remembered(medium -> strength.pKa(base, medium)
+                .map(known -> isHeterogeneous(base, solvent) ? widened(known) : known));
         Optional<Double> logK = isInert(solvent) ? Optional.empty() : logK(pKa, solvent, solvent);
         if (isLyateIonOf(solvent, base)) {
             return WorkingBase.asAdded(base, pKa, logK);
@@ -45,6 +49,15 @@ final class WorkingBases {
             return WorkingBase.lyateIon(solvent, lyateOnShelf(solvent, base), logK.get(), destroyed || solvent.kind() != Solvent.Kind.PROTIC);
         }
         return destroyed ? WorkingBase.destroyed(base, solvent, pKa) : WorkingBase.asAdded(base, pKa, logK);
+    }
+
+    /** Whether the base reacts from a solid that the solvent does not dissolve, so that its strength is only nominal. */
+    static boolean isHeterogeneous(Base base, Solvent solvent) {
+        return base.family().insoluble() && !base.family().irreversible() && solvent.kind() != Solvent.Kind.PROTIC;
+    }
+
+    private static KnownPKa widened(KnownPKa known) {
+        return new KnownPKa(known.pKa(), Math.hypot(known.sigma(), HETEROGENEOUS_SIGMA), known.source());
     }
 
     /** Asks once for each medium: a strength worked out from a structure costs as much as a substrate. */
