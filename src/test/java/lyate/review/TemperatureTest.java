@@ -3,7 +3,6 @@ package lyate.review;
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
-import java.util.List;
 import java.util.Optional;
 import lyate.molecule.MoleculeException;
 import lyate.molecule.MoleculeReader;
@@ -23,7 +22,7 @@ class TemperatureTest {
         Review warm = review("O=C1CCCCC1", "LDA", "THF", 25);
         Review cold = review("O=C1CCCCC1", "LDA", "THF", -78);
         assertEquals(warm.logK() * 298.15 / 195.15, cold.logK(), 1e-9);
-        assertEquals(List.of(), warm.assumptions());
+        assertTrue(warm.assumptions().stream().noneMatch(line -> line.contains("isocoulombic")), warm.assumptions().toString());
         assertTrue(cold.assumptions().get(0).contains("isocoulombic"), cold.assumptions().toString());
     }
 
