@@ -27,15 +27,12 @@ public final class AcidityEstimator {
 
     private static final List<Medium> ESTIMATED_IN = List.of(Medium.WATER, Medium.DMSO);
 
-    /** An estimate less sure than this is extrapolated from acids of another kind; the class value knows the kind. */
-    private static final double NEAR_DATA_SIGMA = 1.5;
-
     private final MeasuredAcidities measured;
     private final MediaTransfer transfer;
     private final ClassShift shift;
     private final List<SiteEstimate> estimates;
 
-    /** The first of {@code estimates} that answers from near its data wins; where none does, the last that answers. */
+    /** Of the {@code estimates} that answer the surest wins, of equally sure ones the first. */
     public AcidityEstimator(MeasuredAcidities measured, MediaTransfer transfer, List<SiteEstimate> estimates) {
         this.measured = measured;
         this.transfer = transfer;
@@ -69,11 +66,11 @@ public final class AcidityEstimator {
         return carried.or(() -> estimated).or(() -> estimateElsewhere(molecule, site, medium));
     }
 
+    /** A relationship used far from the acids it was fitted on says so by its uncertainty, and the class value may know better. */
     private Optional<Acidity> estimate(Molecule molecule, ProtonSite site, Medium medium) {
-        List<Acidity> answers = estimates.stream().map(estimate -> estimate.estimate(molecule, site, medium))
-                .flatMap(Optional::stream).toList();
-        return answers.stream().filter(answer -> answer.sigma() <= NEAR_DATA_SIGMA).findFirst()
-                .or(() -> answers.stream().reduce((first, later) -> later));
+        return estimates.stream().map(estimate -> estimate.estimate(molecule, site, medium))
+                .flatMap(Optional::stream)
+                .reduce((first, second) -> first.sigma() <= second.sigma() ? first : surer(first, second));
     }
 
     private Optional<Acidity> estimateElsewhere(Molecule molecule, ProtonSite site, Medium medium) {
@@ -97,10 +94,10 @@ public final class AcidityEstimator {
                 acidity.missing(), acidity.relatives(), acidity.source());
     }
 
-    private static Acidity surer(Acidity carried, Acidity estimated) {
-        boolean carriedIsSurer = carried.sigma() <= estimated.sigma();
-        Acidity chosen = carriedIsSurer ? carried : estimated;
-        Acidity other = carriedIsSurer ? estimated : carried;
+    private static Acidity surer(Acidity first, Acidity second) {
+        boolean firstIsSurer = first.sigma() <= second.sigma();
+        Acidity chosen = firstIsSurer ? first : second;
+        Acidity other = firstIsSurer ? second : first;
         String why = String.format(Locale.ROOT, "; preferred to the %s value %.1f, whose uncertainty of %.1f is larger",
                 other.basis().word(), other.pKa(), other.sigma());
         return new Acidity(chosen.pKa(), chosen.sigma(), chosen.medium(), chosen.basis(), chosen.contributions(),

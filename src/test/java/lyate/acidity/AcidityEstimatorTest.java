@@ -71,10 +71,12 @@ class AcidityEstimatorTest {
     }
 
     @Test
-    void theFirstEstimateThatAnswersWins() {
+    void ofSeveralEstimatesTheSurestWins() {
         AcidityEstimator estimator = new AcidityEstimator(MeasuredAcidities.none(), TRANSFER,
-                List.of(always(20, 1, Medium.DMSO), always(5, 1, Medium.WATER), always(6, 0.1, Medium.WATER)));
-        assertEquals(5, acidity(estimator, "CC(=O)O", "O4", Medium.WATER).orElseThrow().pKa());
+                List.of(always(20, 0.1, Medium.DMSO), always(5, 1, Medium.WATER), always(6, 0.5, Medium.WATER), always(7, 0.5, Medium.WATER)));
+        Acidity acid = acidity(estimator, "CC(=O)O", "O4", Medium.WATER).orElseThrow();
+        assertEquals(6, acid.pKa(), "the first of two equally sure ones");
+        assertTrue(acid.source().contains("preferred to the estimated value 5.0"), acid.source());
     }
 
     @Test
