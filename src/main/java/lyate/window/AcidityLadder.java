@@ -10,6 +10,7 @@ import java.awt.event.MouseEvent;
 import java.util.List;
 import java.util.Optional;
 import java.util.function.Consumer;
+import java.util.function.Supplier;
 import java.util.stream.Stream;
 import javax.swing.JPanel;
 import javax.swing.ToolTipManager;
@@ -24,7 +25,7 @@ final class AcidityLadder extends JPanel {
     private final Theme theme;
     private final Consumer<String> onSite;
     private final Consumer<Base> onBase;
-    private final Solvent water;
+    private final Supplier<Solvent> water;
     private Shown shown;
     private List<Base> compared = List.of();
     private Optional<Ladder> ladder = Optional.empty();
@@ -33,7 +34,7 @@ final class AcidityLadder extends JPanel {
     private int focusedRung = -1;
 
     /** @param water the row for water, which stands on the ladder where the solvent is not dry */
-    AcidityLadder(Theme theme, Solvent water, Consumer<String> onSite, Consumer<Base> onBase) {
+    AcidityLadder(Theme theme, Supplier<Solvent> water, Consumer<String> onSite, Consumer<Base> onBase) {
         this.theme = theme;
         this.onSite = onSite;
         this.onBase = onBase;
@@ -90,7 +91,7 @@ final class AcidityLadder extends JPanel {
     }
 
     private void refresh() {
-        ladder = shown == null ? Optional.empty() : Ladder.of(shown, compared, water);
+        ladder = shown == null ? Optional.empty() : Ladder.of(shown, compared, water.get());
         ladder.ifPresent(known -> getAccessibleContext().setAccessibleDescription(String.join(". ", known.rungs().stream().map(AcidityLadder::sentence).toList())));
         picture = null;
         repaint();

@@ -18,7 +18,6 @@ import javax.swing.event.DocumentEvent;
 import javax.swing.event.DocumentListener;
 import lyate.bench.Amounts;
 import lyate.bench.Batch;
-import lyate.bench.Enthalpies;
 import lyate.bench.GasAndHeat;
 import lyate.molecule.Molecule;
 import lyate.review.Review;
@@ -30,7 +29,7 @@ final class AmountsPanel extends JPanel {
     private static final String GRAM = "g";
 
     private final Theme theme;
-    private final transient Enthalpies enthalpies;
+    private final transient Engine engine;
     private final JTextField amount = new JTextField("5", 7);
     private final JComboBox<String> unit = new JComboBox<>(new String[] {GRAM, MILLIMOLE});
     private final JTextField titrated = new JTextField(7);
@@ -39,10 +38,10 @@ final class AmountsPanel extends JPanel {
     private transient Review review;
     private transient Optional<Amounts> amounts = Optional.empty();
 
-    AmountsPanel(Theme theme, Enthalpies enthalpies) {
+    AmountsPanel(Theme theme, Engine engine) {
         super(new BorderLayout());
         this.theme = theme;
-        this.enthalpies = enthalpies;
+        this.engine = engine;
         JPanel form = new JPanel(new FlowLayout(FlowLayout.LEADING, theme.space("gap"), theme.space("small")));
         form.add(label("Substrate", amount));
         form.add(amount);
@@ -124,7 +123,7 @@ final class AmountsPanel extends JPanel {
         Amounts worked = Amounts.of(review, batch, strength);
         amounts = Optional.of(worked);
         model.show(review.step(), worked);
-        say(worked, GasAndHeat.of(review, worked, enthalpies));
+        say(worked, GasAndHeat.of(review, worked, engine.enthalpies()));
     }
 
     private static OptionalDouble above(JTextField field) {

@@ -6,17 +6,16 @@ import java.io.IOException;
 import java.util.function.Consumer;
 import javax.swing.TransferHandler;
 import lyate.stock.Base;
-import lyate.stock.Stockroom;
 import lyate.stock.UnknownNameException;
 
 /** Takes a base dropped by its name. */
 final class BaseDrop extends TransferHandler {
 
-    private final transient Stockroom stockroom;
+    private final transient Engine engine;
     private final transient Consumer<Base> onBase;
 
-    BaseDrop(Stockroom stockroom, Consumer<Base> onBase) {
-        this.stockroom = stockroom;
+    BaseDrop(Engine engine, Consumer<Base> onBase) {
+        this.engine = engine;
         this.onBase = onBase;
     }
 
@@ -28,7 +27,7 @@ final class BaseDrop extends TransferHandler {
     @Override
     public boolean importData(TransferSupport support) {
         try {
-            onBase.accept(stockroom.base((String) support.getTransferable().getTransferData(DataFlavor.stringFlavor)));
+            onBase.accept(engine.stockroom().base((String) support.getTransferable().getTransferData(DataFlavor.stringFlavor)));
             return true;
         } catch (UnsupportedFlavorException | IOException | UnknownNameException e) {
             return false;

@@ -6,7 +6,6 @@ import javax.swing.JTextField;
 import javax.swing.event.DocumentEvent;
 import javax.swing.event.DocumentListener;
 import lyate.stock.Base;
-import lyate.stock.Stockroom;
 import lyate.stock.UnknownNameException;
 
 /** Adds bases of the stockroom to the ladder, to be compared with the one chosen. */
@@ -14,20 +13,20 @@ final class CompareField extends JTextField {
 
     private static final int HITS = 40;
 
-    private final transient Stockroom stockroom;
+    private final transient Engine engine;
     private final transient Consumer<Base> onBase;
     private final transient Suggestions suggestions;
 
-    CompareField(Theme theme, Stockroom stockroom, Consumer<Base> onBase) {
+    CompareField(Theme theme, Engine engine, Consumer<Base> onBase) {
         super(18);
-        this.stockroom = stockroom;
+        this.engine = engine;
         this.onBase = onBase;
         putClientProperty("JTextField.placeholderText", "compare with another base");
         getAccessibleContext().setAccessibleName("Base to compare on the ladder");
         setToolTipText("Adds a base to the ladder. There, Enter or a double click takes it, Delete removes it.");
         Runnable enter = this::addTyped;
         Keys.bind(this, "ENTER", enter);
-        suggestions = new Suggestions(this, theme, typed -> stockroom.searchBases(typed, HITS).stream().map(StockWords::hit).toList(), enter);
+        suggestions = new Suggestions(this, theme, typed -> engine.searchBases(typed, HITS).stream().map(StockWords::hit).toList(), enter);
         getDocument().addDocumentListener(new DocumentListener() {
             @Override
             public void insertUpdate(DocumentEvent event) {
@@ -48,7 +47,7 @@ final class CompareField extends JTextField {
 
     private void addTyped() {
         try {
-            Base base = stockroom.base(getText());
+            Base base = engine.stockroom().base(getText());
             setText("");
             putClientProperty("JComponent.outline", null);
             onBase.accept(base);

@@ -34,8 +34,8 @@ final class Drawer extends JTabbedPane implements AutoCloseable {
     Drawer(Theme theme, Engine engine, Wishes wishes) {
         transfers = new TransfersTable(theme, wishes::highlight, wishes::intend);
         choice = new BaseChoicePanel(theme, engine, wishes::take, wishes::compare);
-        dose = new DosePanel(theme, engine.reviewer(), wishes::equivalents);
-        amounts = new AmountsPanel(theme, engine.enthalpies());
+        dose = new DosePanel(theme, step -> engine.reviewer().review(step), wishes::equivalents);
+        amounts = new AmountsPanel(theme, engine);
         workUp = new WorkUpPanel(theme, engine, amounts::amounts);
         addTab("Transfers", null, transfers, "every donor against the base");
         addTab("Base choice", null, choice, "the whole stockroom ranked for this site in this solvent");

@@ -1,8 +1,14 @@
 package lyate.window;
 
+import java.util.List;
+import java.util.concurrent.CompletableFuture;
+import java.util.concurrent.CompletionException;
+import java.util.function.Consumer;
+import javax.swing.SwingUtilities;
 import lyate.bench.Enthalpies;
 import lyate.review.Reviewer;
 import lyate.review.StepReviewer;
+import lyate.stock.Base;
 import lyate.stock.Medium;
 import lyate.stock.Solvent;
 import lyate.stock.Stockroom;
@@ -10,25 +16,80 @@ import lyate.stock.UnknownNameException;
 import lyate.table.TableFolders;
 
 /**
- * What the window asks.
- *
- * @param folders    where the tables are
- * @param stockroom  what there is to choose from
- * @param reviewer   what judges a step
- * @param enthalpies heats of bases with proton donors
+ * What the window asks. The tables are read in the background, so that the window stands before they are; whoever asks
+ * earlier waits. Safe to share between threads.
  */
-record Engine(TableFolders folders, Stockroom stockroom, Reviewer reviewer, Enthalpies enthalpies) {
+final class Engine {
 
+    private final TableFolders folders;
+    private final CompletableFuture<Stockroom> stockroom;
+    private final CompletableFuture<Reviewer> reviewer;
+    private final CompletableFuture<Enthalpies> enthalpies;
 
-    /** Loads the tables. */
+    private Engine(TableFolders folders, CompletableFuture<Stockroom> stockroom, CompletableFuture<Reviewer> reviewer,
+                   CompletableFuture<Enthalpies> enthalpies) {
+        this.folders = folders;
+        this.stockroom = stockroom;
+        this.reviewer = reviewer;
+        this.enthalpies = enthalpies;
+    }
+
+    /** An engine whose parts are there already. */
+    Engine(TableFolders folders, Stockroom stockroom, Reviewer reviewer, Enthalpies enthalpies) {
+        this(folders, CompletableFuture.completedFuture(stockroom), CompletableFuture.completedFuture(reviewer),
+                CompletableFuture.completedFuture(enthalpies));
+    }
+
+    /** Starts reading the tables and returns at once. */
     static Engine load(TableFolders folders) {
-        return new Engine(folders, Stockroom.load(folders), StepReviewer.load(folders), Enthalpies.load(folders));
+        return new Engine(folders, CompletableFuture.supplyAsync(() -> Stockroom.load(folders)),
+                CompletableFuture.supplyAsync(() -> StepReviewer.load(folders)), CompletableFuture.supplyAsync(() -> Enthalpies.load(folders)));
+    }
+
+    /** Tells, on the event thread, why the tables cannot be read; never called where they can. */
+    void onFailure(Consumer<String> told) {
+        CompletableFuture.allOf(stockroom, reviewer, enthalpies).whenComplete((nothing, failure) -> {
+            if (failure != null) {
+                String words = String.valueOf(failure instanceof CompletionException ? failure.getCause().getMessage() : failure.getMessage());
+                SwingUtilities.invokeLater(() -> told.accept(words));
+            }
+        });
+    }
+
+    /** Where the tables are. */
+    TableFolders folders() {
+        return folders;
+    }
+
+    /** What there is to choose from. */
+    Stockroom stockroom() {
+        return stockroom.join();
+    }
+
+    /** What judges a step. */
+    Reviewer reviewer() {
+        return reviewer.join();
+    }
+
+    /** Heats of bases with proton donors. */
+    Enthalpies enthalpies() {
+        return enthalpies.join();
+    }
+
+    /** Bases a text may mean; none while the tables are still being read. */
+    List<Base> searchBases(String text, int limit) {
+        return stockroom.isDone() ? stockroom().searchBases(text, limit) : List.of();
+    }
+
+    /** Solvents a text may mean; none while the tables are still being read. */
+    List<Solvent> searchSolvents(String text, int limit) {
+        return stockroom.isDone() ? stockroom().searchSolvents(text, limit) : List.of();
     }
 
     /** The row for water. */
     Solvent water() {
         try {
-            return stockroom.solvent(Medium.WATER.id());
+            return stockroom().solvent(Medium.WATER.id());
         } catch (UnknownNameException e) {
             throw new IllegalStateException("solvents.csv needs a row for water", e);
         }

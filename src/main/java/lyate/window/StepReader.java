@@ -3,6 +3,7 @@ package lyate.window;
 import java.util.EnumMap;
 import java.util.Map;
 import java.util.Optional;
+import java.util.function.Supplier;
 import lyate.molecule.Molecule;
 import lyate.molecule.MoleculeException;
 import lyate.molecule.MoleculeReader;
@@ -23,13 +24,12 @@ import lyate.stock.UnknownNameException;
 final class StepReader {
 
     private final MoleculeReader molecules;
-    private final Stockroom stockroom;
-    private final ReactionReader reactions;
+    private final Supplier<Stockroom> stockroom;
 
-    StepReader(MoleculeReader molecules, Stockroom stockroom) {
+    /** @param stockroom asked when the first step is read */
+    StepReader(MoleculeReader molecules, Supplier<Stockroom> stockroom) {
         this.molecules = molecules;
         this.stockroom = stockroom;
-        this.reactions = new ReactionReader(molecules, stockroom);
     }
 
     StepReading read(StepText text) {
@@ -57,7 +57,7 @@ final class StepReader {
             return Optional.empty();
         }
         try {
-            return Optional.of(reactions.read(text));
+            return Optional.of(new ReactionReader(molecules, stockroom.get()).read(text));
         } catch (MoleculeException e) {
             problems.put(StepField.SUBSTRATE, e.getMessage());
             return Optional.empty();
@@ -87,7 +87,7 @@ final class StepReader {
         }
         try {
             if (!name.isEmpty()) {
-                return stockroom.base(name);
+                return stockroom.get().base(name);
             }
             problems.put(StepField.BASE, "choose a base");
         } catch (UnknownNameException e) {
@@ -103,7 +103,7 @@ final class StepReader {
         }
         try {
             if (!name.isEmpty()) {
-                return stockroom.solvent(name);
+                return stockroom.get().solvent(name);
             }
             problems.put(StepField.SOLVENT, "choose a solvent");
         } catch (UnknownNameException e) {

@@ -12,7 +12,6 @@ import javax.swing.BorderFactory;
 import javax.swing.JPanel;
 import lyate.molecule.Molecule;
 import lyate.review.Step;
-import lyate.stock.Stockroom;
 
 /** The row of fields at the top; tells its listener the step as typed after every edit. */
 final class StepStrip extends JPanel {
@@ -25,7 +24,7 @@ final class StepStrip extends JPanel {
     private final HintRow hints;
     private StepText text;
 
-    StepStrip(Theme theme, Stockroom stockroom, StepText first, Consumer<StepText> onEdit) {
+    StepStrip(Theme theme, Engine engine, StepText first, Consumer<StepText> onEdit) {
         super(new GridBagLayout());
         this.onEdit = onEdit;
         this.text = first;
@@ -35,9 +34,9 @@ final class StepStrip extends JPanel {
         }
         boxes.get(StepField.SUBSTRATE).field().setTransferHandler(new StructureDrop(boxes.get(StepField.SUBSTRATE).field()));
         suggestions.put(StepField.BASE, new Suggestions(boxes.get(StepField.BASE).field(), theme,
-                typed -> stockroom.searchBases(typed, HITS).stream().map(StockWords::hit).toList(), () -> {}));
+                typed -> engine.searchBases(typed, HITS).stream().map(StockWords::hit).toList(), () -> {}));
         suggestions.put(StepField.SOLVENT, new Suggestions(boxes.get(StepField.SOLVENT).field(), theme,
-                typed -> stockroom.searchSolvents(typed, HITS).stream().map(StockWords::hit).toList(), () -> {}));
+                typed -> engine.searchSolvents(typed, HITS).stream().map(StockWords::hit).toList(), () -> {}));
         int margin = theme.space("wide");
         setBorder(BorderFactory.createEmptyBorder(theme.space("gap"), margin, theme.space("small"), margin));
         for (StepField field : StepField.values()) {

@@ -9,6 +9,7 @@ import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.function.Supplier;
 import javax.swing.BorderFactory;
+import javax.swing.DefaultComboBoxModel;
 import javax.swing.JComboBox;
 import javax.swing.JLabel;
 import javax.swing.JPanel;
@@ -52,7 +53,6 @@ final class WorkUpPanel extends LazyTab {
         this.theme = theme;
         this.engine = engine;
         this.amounts = amounts;
-        engine.stockroom().acids().stream().filter(acid -> acid.pKa(Medium.WATER).isPresent()).map(Acid::name).sorted().forEach(acids::addItem);
         product.putClientProperty("JTextField.placeholderText", "the substrate, its anion quenched");
         JPanel form = new JPanel(new FlowLayout(FlowLayout.LEADING, theme.space("gap"), theme.space("small")));
         form.add(label("Product", product));
@@ -133,8 +133,16 @@ final class WorkUpPanel extends LazyTab {
         }));
     }
 
+    private void fillAcids() {
+        acids.setModel(new DefaultComboBoxModel<>(engine.stockroom().acids().stream().filter(acid -> acid.pKa(Medium.WATER).isPresent())
+                .map(Acid::name).sorted().toArray(String[]::new)));
+    }
+
     /** What is asked for; empty, with the field marked, where a field cannot be read. */
     private Optional<Plan> plan(Shown wanted) {
+        if (acids.getItemCount() == 0) {
+            fillAcids();
+        }
         OptionalDouble target = PH.parse(pH.getText());
         pH.putClientProperty("JComponent.outline", target.isEmpty() ? "error" : null);
         Optional<Molecule> molecule = Optional.empty();

@@ -14,6 +14,7 @@ import javax.swing.JPanel;
 import javax.swing.JSplitPane;
 import javax.swing.Timer;
 import lyate.molecule.MoleculeReader;
+import lyate.review.Reviewer;
 import lyate.stock.Base;
 
 /** All parts of the window put together: fields above, pictures and findings in the middle, the drawer below. */
@@ -46,20 +47,21 @@ final class Workbench extends JPanel implements Drawer.Wishes, AutoCloseable {
     Workbench(Theme theme, Engine engine, SheetDocument document) {
         super(new BorderLayout());
         this.document = document;
-        StepReader reader = new StepReader(new MoleculeReader(), engine.stockroom());
-        presenter = new StepPresenter(reader, engine.reviewer(), this::receive);
-        strip = new StepStrip(theme, engine.stockroom(), document.state().text(), document::edit);
+        StepReader reader = new StepReader(new MoleculeReader(), engine::stockroom);
+        Reviewer reviewer = step -> engine.reviewer().review(step);
+        presenter = new StepPresenter(reader, reviewer, this::receive);
+        strip = new StepStrip(theme, engine, document.state().text(), document::edit);
         substrate = new SubstrateView(theme, this::intend);
         substratePane = new Pane("Substrate", substrate, theme);
-        ladder = new AcidityLadder(theme, engine.water(), this::intend, this::take);
-        ladder.setTransferHandler(new BaseDrop(engine.stockroom(), this::compare));
-        compare = new CompareField(theme, engine.stockroom(), this::compare);
+        ladder = new AcidityLadder(theme, engine::water, this::intend, this::take);
+        ladder.setTransferHandler(new BaseDrop(engine, this::compare));
+        compare = new CompareField(theme, engine, this::compare);
         findings = new FindingsPanel(theme, substrate::highlight);
         drawer = new Drawer(theme, engine, this);
         middle.add(pictures(theme), PICTURES);
         middle.add(new EmptyView(theme, example -> document.edit(strip.text().with(StepField.SUBSTRATE, example).withSite(""))), EMPTY);
         add(strip, BorderLayout.NORTH);
-        steps = new StepsPanel(theme, document, reader, engine.reviewer());
+        steps = new StepsPanel(theme, document, reader, reviewer);
         stepsPane = new Pane("Steps", steps, theme);
         stepsPane.setPreferredSize(new Dimension(theme.space("steps.width"), 0));
         stepsPane.setVisible(document.state().sheet().rows().size() > 1);

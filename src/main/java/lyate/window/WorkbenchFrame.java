@@ -8,16 +8,11 @@ import java.awt.event.WindowAdapter;
 import java.awt.event.WindowEvent;
 import java.nio.file.Path;
 import java.util.Optional;
-import java.util.concurrent.ExecutionException;
-import java.util.function.Supplier;
 import javax.swing.JFrame;
-import javax.swing.JLabel;
 import javax.swing.JOptionPane;
 import javax.swing.JScrollPane;
 import javax.swing.JTextArea;
-import javax.swing.SwingConstants;
 import javax.swing.SwingUtilities;
-import javax.swing.SwingWorker;
 import javax.swing.ToolTipManager;
 import lyate.table.TableFolders;
 
@@ -59,33 +54,16 @@ public final class WorkbenchFrame extends JFrame {
     /** Opens the window of the program with the tables in these folders; may be called on any thread. */
     public static void open(TableFolders folders) {
         WindowMemory memory = WindowMemory.ofUser();
-        open(() -> Engine.load(memory.tables(folders)), memory);
+        open(Engine.load(memory.tables(folders)), memory);
     }
 
-    /** Shows the window at once and loads the engine behind it. */
-    static void open(Supplier<Engine> loader, WindowMemory memory) {
+    /** Shows the window, whether or not the engine is there yet. */
+    static void open(Engine engine, WindowMemory memory) {
         SwingUtilities.invokeLater(() -> {
             WorkbenchFrame frame = new WorkbenchFrame(memory);
-            JLabel wait = new JLabel("Reading the tables \u2026", SwingConstants.CENTER);
-            frame.add(wait);
+            frame.fill(engine);
             frame.setVisible(true);
-            new SwingWorker<Engine, Void>() {
-                @Override
-                protected Engine doInBackground() {
-                    return loader.get();
-                }
-
-                @Override
-                protected void done() {
-                    try {
-                        frame.fill(get());
-                    } catch (ExecutionException e) {
-                        frame.withoutOwnTables(e.getCause().getMessage());
-                    } catch (InterruptedException e) {
-                        Thread.currentThread().interrupt();
-                    }
-                }
-            }.execute();
+            engine.onFailure(frame::withoutOwnTables);
         });
     }
 
@@ -95,6 +73,8 @@ public final class WorkbenchFrame extends JFrame {
         text.setEditable(false);
         JOptionPane.showMessageDialog(this, new JScrollPane(text), "The tables could not be read; going on with the program's own",
                 JOptionPane.ERROR_MESSAGE);
+        bench.close();
+        recovery.close();
         fill(Engine.load(TableFolders.packaged()));
     }
 

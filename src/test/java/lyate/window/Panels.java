@@ -26,7 +26,7 @@ final class Panels {
     /** What the window would show for a typed step, judged by the invented reviewer. */
     static Shown shown(StepText text) {
         try {
-            Review review = new InventedReviewer().review(new StepReader(new MoleculeReader(), Stockroom.load(TableFolders.packaged()))
+            Review review = new InventedReviewer().review(new StepReader(new MoleculeReader(), () -> Stockroom.load(TableFolders.packaged()))
                     .read(text).step().orElseThrow());
             return new Shown(review, MoleculeDrawing.of(review.step().substrate()));
         } catch (ReviewException e) {

@@ -14,7 +14,8 @@ import org.junit.jupiter.params.provider.CsvSource;
 
 class StepReaderTest {
 
-    private final StepReader reader = new StepReader(new MoleculeReader(), Stockroom.load(TableFolders.packaged()));
+    private static final Stockroom STOCKROOM = Stockroom.load(TableFolders.packaged());
+    private final StepReader reader = new StepReader(new MoleculeReader(), () -> STOCKROOM);
 
     @Test
     void theDemoStepCanBeRead() {

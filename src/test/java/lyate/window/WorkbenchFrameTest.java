@@ -22,7 +22,7 @@ class WorkbenchFrameTest {
     void opensWithTheRealTablesAndRemembersItsPlace(@TempDir Path folder) throws Exception {
         assumeFalse(GraphicsEnvironment.isHeadless(), "the window needs a display");
         Path file = folder.resolve("window.properties");
-        WorkbenchFrame.open(() -> Engine.load(TableFolders.packaged()), new WindowMemory(file));
+        WorkbenchFrame.open(Engine.load(TableFolders.packaged()), new WindowMemory(file));
         WorkbenchFrame frame = waitForReview();
         SwingUtilities.invokeAndWait(() -> frame.setSize(1234, 777));
         SwingUtilities.invokeAndWait(frame::dispose);
