@@ -75,6 +75,7 @@ record Components(IAtomContainer substrate, List<IAtomContainer> counterIons) {
             return "there is no atom other than hydrogen in it";
         }
         StringJoiner ions = new StringJoiner(", ");
+        parts.forEach(Perception::markRings);
         parts.forEach(part -> ions.add(SmilesWriter.full(part)));
         return "there are only counter-ions in it (" + ions + "), no substrate";
     }

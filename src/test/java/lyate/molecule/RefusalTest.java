@@ -30,6 +30,7 @@ class RefusalTest {
         "CF(C)C|F2 has 3 bonds, hydrogens counted, but at most 1 are possible",
         "[Na+].CC(C)(C)(C)C|C3 has 5 bonds, hydrogens counted, but at most 4 are possible",
         "[Na+].[Cl-]|there are only counter-ions in it ([Na+], [Cl-]), no substrate",
+        "I:[Mg]Br|there are only counter-ions in it ([I-], [Mg+2], [Br-]), no substrate",
         "[H][H]|there is no atom other than hydrogen in it",
         "C[Zn]C|Zn2 is a metal with covalent bonds, which cannot be judged; give the organic part alone, or draw the metal as an ion",
         "C[Pd]Cl|Pd2 is a metal with covalent bonds, which cannot be judged; give the organic part alone, or draw the metal as an ion",
