@@ -25,6 +25,7 @@ public final class Lyate {
                 .addSubcommand(new CheckCommand(terminal))
                 .addSubcommand(new BasesCommand(terminal))
                 .addSubcommand(new ReviewCommand(terminal))
+                .addSubcommand(new CompareCommand(terminal))
                 .addSubcommand(new AccuracyCommand(terminal))
                 .addSubcommand(new TablesCommand(terminal));
         command.setOut(terminal.outWriter()).setErr(terminal.errWriter())
