@@ -1,0 +1,133 @@
+package lyate.command;
+
+import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertFalse;
+import static org.junit.jupiter.api.Assertions.assertTrue;
+
+import com.fasterxml.jackson.databind.JsonNode;
+import com.fasterxml.jackson.databind.ObjectMapper;
+import com.fasterxml.jackson.databind.node.ObjectNode;
+import com.networknt.schema.JsonSchema;
+import com.networknt.schema.JsonSchemaFactory;
+import com.networknt.schema.SpecVersion;
+import com.networknt.schema.ValidationMessage;
+import java.io.ByteArrayInputStream;
+import java.io.ByteArrayOutputStream;
+import java.io.IOException;
+import java.nio.charset.StandardCharsets;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Set;
+import java.util.TreeSet;
+import java.util.stream.Collectors;
+import java.util.stream.Stream;
+import lyate.report.ReviewJson;
+import lyate.review.Verdict;
+import org.junit.jupiter.api.Test;
+import org.junit.jupiter.api.io.TempDir;
+
+/** The JSON that the program writes, the schema in docs and the page that explains it say the same. */
+class JsonSchemaTest {
+
+    private static final ObjectMapper JSON = new ObjectMapper();
+    private static final JsonNode SCHEMA = read(Path.of("docs/json.schema.json"));
+    private static final String CHECK = "check --base LDA --solvent THF --temperature -78 --site C5 --electrophile CI --format json --substrate ";
+    private static final String KETO_ESTER = "CC(=O)CC(=O)OCC";
+
+    @TempDir
+    private Path folder;
+
+    @Test
+    void aCheckIsWrittenAsTheSchemaSays() {
+        assertSound("review", run((CHECK + "[Na+].O=C1CCCCC1C(=O)[O-]").replace("--site C5 ", "").split(" ")));
+    }
+
+    @Test
+    void aReviewedSheetIsWrittenAsTheSchemaSays() throws IOException {
+        Path sheet = folder.resolve("sheet.csv");
+        Files.writeString(sheet, Files.readString(Path.of("docs/example-route.csv")) + "bad,C(,,LDA,1,THF,,,,,,\n");
+        Path result = folder.resolve("result.json");
+        run("review", sheet.toString(), "-o", result.toString());
+        JsonNode rows = read(result);
+        assertEquals(13, rows.size());
+        assertSound("row", rows);
+    }
+
+    @Test
+    void sitesAreWrittenAsTheSchemaSays() {
+        assertSound("answer", run("sites", "--format", "json", "--solvent", "DMSO", KETO_ESTER, "Nc1ccccc1", "C("));
+    }
+
+    @Test
+    void aRankingIsWrittenAsTheSchemaSays() {
+        assertSound("ranking", run("bases", "--format", "json", "--top", "3", "--solvent", "THF", "--substrate", KETO_ESTER));
+    }
+
+    @Test
+    void aNameThatIsNotInTheSchemaIsNoticed() {
+        JsonNode answer = run((CHECK.replace("C5", "C4") + KETO_ESTER).split(" "));
+        ((ObjectNode) answer.get(0).get("step")).put("colour", "red");
+        assertFalse(complaints("review", answer).isEmpty());
+    }
+
+    @Test
+    void aNameThatIsMissingIsNoticed() {
+        JsonNode answer = run((CHECK.replace("C5", "C4") + KETO_ESTER).split(" "));
+        ((ObjectNode) answer.get(0)).remove("log_k");
+        assertFalse(complaints("review", answer).isEmpty());
+    }
+
+    @Test
+    void versionAndVerdictsAreTheProgramsOwn() {
+        JsonNode review = SCHEMA.at("/$defs/review/properties");
+        assertEquals(ReviewJson.SCHEMA, review.at("/schema/const").asText());
+        List<String> verdicts = new ArrayList<>();
+        review.at("/verdict/enum").forEach(code -> verdicts.add(code.asText()));
+        assertEquals(Stream.of(Verdict.values()).map(Verdict::code).toList(), verdicts);
+    }
+
+    @Test
+    void thePageExplainsEveryName() throws IOException {
+        String page = Files.readString(Path.of("docs/json.md"));
+        assertTrue(page.contains("`" + ReviewJson.SCHEMA + "`"));
+        Set<String> names = new TreeSet<>();
+        SCHEMA.get("$defs").forEach(object -> object.path("properties").fieldNames().forEachRemaining(names::add));
+        assertTrue(names.size() > 40, names.toString());
+        assertEquals(List.of(), names.stream().filter(name -> !page.contains("| `" + name + "` |")).toList());
+    }
+
+    private static void assertSound(String kind, JsonNode array) {
+        assertTrue(array.isArray() && !array.isEmpty(), "an array with something in it");
+        assertEquals("", complaints(kind, array));
+    }
+
+    /** Every element against its own part of the schema, because that names the culprit. */
+    private static String complaints(String kind, JsonNode array) {
+        ObjectNode part = SCHEMA.deepCopy();
+        part.remove("anyOf");
+        part.putObject("items").put("$ref", "#/$defs/" + kind);
+        JsonSchema schema = JsonSchemaFactory.getInstance(SpecVersion.VersionFlag.V202012).getSchema(part);
+        return schema.validate(array).stream().map(ValidationMessage::getMessage).limit(5).collect(Collectors.joining("\n"));
+    }
+
+    private static JsonNode run(String... arguments) {
+        ByteArrayOutputStream out = new ByteArrayOutputStream();
+        ByteArrayOutputStream err = new ByteArrayOutputStream();
+        Lyate.run(Terminal.of(new ByteArrayInputStream(new byte[0]), out, err, false), arguments);
+        try {
+            return JSON.readTree(out.toString(StandardCharsets.UTF_8));
+        } catch (IOException e) {
+            throw new AssertionError(out + "\n" + err, e);
+        }
+    }
+
+    private static JsonNode read(Path file) {
+        try {
+            return JSON.readTree(Files.readString(file));
+        } catch (IOException e) {
+            throw new AssertionError(e.getMessage(), e);
+        }
+    }
+}
