@@ -15,8 +15,15 @@ record CouplingPath(Kind kind, int bonds, int ways) {
     /** What the shortest ways run through. */
     enum Kind {
         SAME_ATOM, SATURATED, CONJUGATED,
+        /** Saturated, and two substituents on the middle carbon press the ends together, as in diethylmalonic acid. */
+        CROWDED,
         /** Conjugated, and an anion at one end can hold a proton of the other end in a ring. */
         HYDROGEN_BONDED;
+
+        /** What the way is called where the ends do not meet. */
+        Kind plain() {
+            return this == CROWDED ? SATURATED : this == HYDROGEN_BONDED ? CONJUGATED : this;
+        }
 
         /** The word used in the table. */
         String word() {
@@ -58,7 +65,7 @@ record CouplingPath(Kind kind, int bonds, int ways) {
             }
             for (int atom = 0; atom < molecule.atomCount(); atom++) {
                 if (on(atom) && atom != from && atom != to && !conjugated(atom)) {
-                    return Kind.SATURATED;
+                    return crowded() ? Kind.CROWDED : Kind.SATURATED;
                 }
             }
             return closes() ? Kind.HYDROGEN_BONDED : Kind.CONJUGATED;
@@ -71,6 +78,16 @@ record CouplingPath(Kind kind, int bonds, int ways) {
             for (int neighbour : molecule.neighbours(atom)) {
                 if (molecule.atomicNumber(atom) <= 8 && molecule.bondOrder(atom, neighbour) > 1) {
                     return true;
+                }
+            }
+            return false;
+        }
+
+        private boolean crowded() {
+            for (int atom = 0; atom < molecule.atomCount(); atom++) {
+                boolean middle = on(atom) && Math.abs(after[atom] - before[atom]) <= 1;
+                if (middle && molecule.atomicNumber(atom) == 6 && molecule.neighbours(atom).length == 4) {
+                    return after[to] >= 4 && after[to] <= 6;
                 }
             }
             return false;

@@ -5,7 +5,6 @@ import java.util.List;
 import java.util.Optional;
 import java.util.Set;
 import java.util.stream.Collectors;
-import lyate.acidity.CouplingPath.Kind;
 import lyate.molecule.Molecule;
 import lyate.site.ProtonSite;
 import lyate.stock.Medium;
@@ -103,8 +102,8 @@ public final class SiteCoupling {
                 .filter(row -> row.media().contains(medium) || row.media().contains(CouplingRow.ANY)).toList();
         Optional<CouplingRow> row = group.stream().filter(candidate -> candidate.reaches(path))
                 .max(Comparator.comparingInt(CouplingRow::bonds).thenComparingInt(CouplingRow::ways));
-        if (row.isEmpty() && path.kind() == Kind.HYDROGEN_BONDED) {
-            return shift(medium, charge, new CouplingPath(Kind.CONJUGATED, path.bonds(), path.ways()));
+        if (row.isEmpty() && path.kind() != path.kind().plain()) {
+            return shift(medium, charge, new CouplingPath(path.kind().plain(), path.bonds(), path.ways()));
         }
         return row.or(() -> group.stream().min(Comparator.comparingInt(CouplingRow::bonds).thenComparingInt(CouplingRow::ways)))
                 .map(found -> along(found, path));

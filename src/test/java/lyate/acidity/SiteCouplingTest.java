@@ -47,6 +47,8 @@ class SiteCouplingTest {
         "OC(=O)CCC(=O)O,        O1, O8, 4.21, 5.64",
         "OC(=O)CCCC(=O)O,       O1, O9, 4.34, 5.42",
         "OC(=O)CCCCC(=O)O,      O1, O10, 4.43, 5.42",
+        "OC(=O)C(CC)(CC)C(=O)O, O1, O11, 2.21, 7.29",
+        "OC(=O)CC(C)(C)CC(=O)O, O1, O11, 3.70, 6.34",
         "OC(=O)c1ccccc1C(=O)O,  O1, O12, 2.95, 5.41",
         "OC(=O)c1cccc(C(=O)O)c1, O1, O11, 3.62, 4.60",
         "OC(=O)c1ccc(C(=O)O)cc1, O1, O10, 3.54, 4.46",
