@@ -15,10 +15,10 @@ final class CrossValidation {
      *
      * @param row       the held-out row
      * @param estimated the estimate, statistical factors included
-     * @param closeness similarity of the nearest anchor it was compared with
+     * @param distance  how far the nearest anchors were
      * @param missing   how many of its parts could only be described roughly
      */
-    record Outcome(TrainingRow row, double estimated, double closeness, int missing) {
+    record Outcome(TrainingRow row, double estimated, double distance, int missing) {
 
         double error() {
             return estimated - row.pKa();
@@ -37,7 +37,7 @@ final class CrossValidation {
                 if (fold(row.compound()) == held) {
                     Optional<Prediction> found = fit.model().predict(row.medium(), row.site());
                     found.ifPresent(prediction -> outcomes.add(new Outcome(row, prediction.pKa() + row.site().statistics(),
-                            prediction.comparison().closeness(), row.site().missing().size())));
+                            prediction.comparison().distance(), row.site().missing().size())));
                 }
             }
         }

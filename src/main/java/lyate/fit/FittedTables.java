@@ -37,7 +37,8 @@ final class FittedTables {
             """;
     private static final String SPREAD = """
             # Standard uncertainty of an estimate: sigma_alike beside a relative with the same surroundings, times
-            # exp(widening x (1 - similarity of the nearest relative)), times per_missing where parts of the molecule are not in the tables.
+            # exp(widening x distance), times per_missing where parts of the molecule are not in the tables. distance: 1 less the similarity
+            # of the nearest anchor, plus the share of the surroundings that no anchor has.
             # scope: a line of estimate-series.csv, or all for lines without a row. From the errors of the cross-validation
             # (n of them), made by lyate.fit.Fit.
             # version: 1

@@ -20,7 +20,7 @@ import lyate.stock.Medium;
  */
 final class SpreadFit {
 
-    private static final double WITHIN_ONE = 0.72;
+    private static final double WITHIN_ONE = 0.74;
     /** Values that count as much as the common level. */
     private static final double SHRINKAGE = 12;
     /** An error smaller than this says no more than this, pKa units. */
@@ -41,7 +41,7 @@ final class SpreadFit {
         lines(outcomes).forEach((line, own) -> levels.put(line,
                 (own.size() * level(own, widening, perMissing) + SHRINKAGE * common) / (own.size() + SHRINKAGE)));
         double[] ratios = outcomes.stream().mapToDouble(outcome -> Math.abs(outcome.error())
-                / curve(levels.get(line(outcome)), widening, perMissing, 1).sigma(outcome.closeness(), outcome.missing() > 0)).sorted().toArray();
+                / curve(levels.get(line(outcome)), widening, perMissing, 1).sigma(outcome.distance(), outcome.missing() > 0)).sorted().toArray();
         double factor = ratios[(int) (WITHIN_ONE * (ratios.length - 1))];
         Map<String, Curve> curves = new LinkedHashMap<>();
         curves.put(Spread.ANY, curve(common + 0.3, widening, perMissing, factor));
@@ -58,11 +58,11 @@ final class SpreadFit {
         double top = 0;
         double bottom = 0;
         for (List<Outcome> line : lines(outcomes).values()) {
-            double x = line.stream().mapToDouble(outcome -> 1 - outcome.closeness()).average().orElseThrow();
+            double x = line.stream().mapToDouble(outcome -> outcome.distance()).average().orElseThrow();
             double y = line.stream().mapToDouble(SpreadFit::logError).average().orElseThrow();
             for (Outcome outcome : line) {
-                top += (1 - outcome.closeness() - x) * (logError(outcome) - y);
-                bottom += (1 - outcome.closeness() - x) * (1 - outcome.closeness() - x);
+                top += (outcome.distance() - x) * (logError(outcome) - y);
+                bottom += (outcome.distance() - x) * (outcome.distance() - x);
             }
         }
         return bottom == 0 ? 0 : top / bottom;
@@ -75,11 +75,11 @@ final class SpreadFit {
     }
 
     private static double mean(List<Outcome> outcomes, double widening) {
-        return outcomes.stream().mapToDouble(outcome -> logError(outcome) - widening * (1 - outcome.closeness())).average().orElse(Double.NaN);
+        return outcomes.stream().mapToDouble(outcome -> logError(outcome) - widening * outcome.distance()).average().orElse(Double.NaN);
     }
 
     private static double level(List<Outcome> outcomes, double widening, double perMissing) {
-        return outcomes.stream().mapToDouble(outcome -> logError(outcome) - widening * (1 - outcome.closeness())
+        return outcomes.stream().mapToDouble(outcome -> logError(outcome) - widening * outcome.distance()
                 - (outcome.missing() > 0 ? Math.log(perMissing) : 0)).average().orElseThrow();
     }
 
@@ -98,7 +98,7 @@ final class SpreadFit {
     /** Which share of the errors lies within {@code sigmas} standard uncertainties. */
     static double coverage(Map<String, Curve> curves, List<Outcome> outcomes, double sigmas) {
         return outcomes.stream().filter(outcome -> Math.abs(outcome.error()) <= sigmas * curves.getOrDefault(line(outcome),
-                curves.get(Spread.ANY)).sigma(outcome.closeness(), outcome.missing() > 0)).count() / (double) outcomes.size();
+                curves.get(Spread.ANY)).sigma(outcome.distance(), outcome.missing() > 0)).count() / (double) outcomes.size();
     }
 
     static List<Outcome> in(Medium medium, List<Outcome> outcomes) {

@@ -30,8 +30,14 @@ public final class Anchors {
      * @param correction what the anchors add to its estimate, pKa units
      * @param nearest    indices of the anchors, most similar first
      * @param similarity similarity of each anchor, by index
+     * @param novelty    share of the surroundings, 0 to 1, that no anchor has
      */
-    public record Comparison(double correction, List<Integer> nearest, double[] similarity) {
+    public record Comparison(double correction, List<Integer> nearest, double[] similarity, double novelty) {
+
+        /** 0 beside an anchor with the same surroundings; grows as they differ and hold what no anchor has. */
+        public double distance() {
+            return 1 - closeness() + novelty;
+        }
 
         /** Similarity of the nearest anchor, 0 where there is none. */
         public double closeness() {
@@ -75,7 +81,7 @@ public final class Anchors {
         for (int i = 0; i < similarity.length; i++) {
             correction += anchors.get(i).weight() * pool.residual(similarity[i], distances[i]);
         }
-        return new Comparison(correction, nearest(similarity, count), similarity);
+        return new Comparison(correction, nearest(similarity, count), similarity, novelty(site.environment()));
     }
 
     /** Indices of the highest similarities, highest first. */
@@ -96,6 +102,14 @@ public final class Anchors {
             }
         }
         return Arrays.stream(best).boxed().toList();
+    }
+
+    private double novelty(Environment site) {
+        double unseen = 0;
+        for (int k = 0; k < site.codes().length; k++) {
+            unseen += byCode.containsKey(site.codes()[k]) ? 0 : site.weights()[k];
+        }
+        return unseen / site.total();
     }
 
     private double[] similarities(Environment site) {

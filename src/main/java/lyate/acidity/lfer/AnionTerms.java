@@ -20,6 +20,9 @@ final class AnionTerms {
     /** Lowering by a cyclopentadienide ring (cyclopentadiene, DMSO), and what each fused benzo ring takes away. */
     private static final double CYCLOPENTADIENIDE = 38;
     private static final double BENZO = 2.3;
+    /** Lowering by an aromatic ring, and the share of remote help that counts for a second ring (nitrophenylmethanes). */
+    private static final double ARYL = 13;
+    private static final double SECOND_RING = 0.3;
 
     private record Stabiliser(double strength, int atom, String name) {}
 
@@ -34,7 +37,7 @@ final class AnionTerms {
         groups.sort(Comparator.comparingDouble(group -> -group.strength()));
         double total = 0;
         for (int i = 0; i < groups.size(); i++) {
-            Stabiliser group = groups.get(i);
+            Stabiliser group = i == 0 ? groups.get(0) : afterOthers(t, groups.get(0), groups.get(i));
             double share = i == 0 ? 1 : i == 1 ? SECOND - SATURATION * groups.get(0).strength() : LATER;
             total += share * group.strength();
             terms.add("anion.total", Effect.RESONANCE, share * group.strength() / 10, group.atom(), group.name());
@@ -44,6 +47,12 @@ final class AnionTerms {
         }
         addRings(t, site, terms);
         terms.add("anion.square", Effect.RESONANCE, total * total / 1000, site);
+    }
+
+    /** A second aromatic ring cannot turn into the plane as well: what helps it from afar helps little. */
+    private static Stabiliser afterOthers(Topology t, Stabiliser first, Stabiliser group) {
+        boolean both = t.aromatic[first.atom()] && t.aromatic[group.atom()] && first.strength() > ARYL && group.strength() > ARYL;
+        return both ? new Stabiliser(ARYL + SECOND_RING * (group.strength() - ARYL), group.atom(), group.name()) : group;
     }
 
     private static List<Stabiliser> stabilisers(Facts facts, int site) {

@@ -54,7 +54,9 @@ final class ChainTerms {
             int second = t.child[next];
             if (second != site) {
                 Substituent beyond = facts.constants()[next];
-                terms.add("chain.second.induction", Effect.INDUCTION, beyond.induction(), second, beyond.name());
+                // a charge acts through space and is counted once, with the charges
+                double induction = ShapeTerms.charged(t, second) ? 0 : beyond.induction();
+                terms.add("chain.second.induction", Effect.INDUCTION, induction, second, beyond.name());
                 if (t.element[second] == 6 && !t.unsaturated(second)) {
                     terms.add("chain.alpha-branch", Effect.STERICS, 1, second);
                 } else if (t.element[second] != 6) {

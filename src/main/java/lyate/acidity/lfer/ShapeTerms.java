@@ -79,11 +79,16 @@ final class ShapeTerms {
 
     private static void addCharges(Topology t, int site, int[] distance, Terms terms) {
         for (int atom = 0; atom < t.atoms; atom++) {
-            if (atom != site && t.charge[atom] != 0 && !balanced(t, atom)) {
+            if (atom != site && charged(t, atom)) {
                 terms.add(t.charge[atom] > 0 ? "charge.positive" : "charge.negative", Effect.CHARGE,
                         t.charge[atom] / (double) distance[atom], atom);
             }
         }
+    }
+
+    /** Whether the atom carries a charge of its own, not one half of a charge-separated group. */
+    static boolean charged(Topology t, int atom) {
+        return t.charge[atom] != 0 && !balanced(t, atom);
     }
 
     /** Whether a neighbour carries the opposite charge, as in a nitro group or an N-oxide. */

@@ -32,14 +32,14 @@ public final class Spread {
      * How the uncertainty of one line grows.
      *
      * @param alike      standard uncertainty beside a relative with the same surroundings, pKa units
-     * @param widening   natural logarithm of the factor at no similarity at all
+     * @param widening   natural logarithm of the factor for each unit of {@link Anchors.Comparison#distance}
      * @param perMissing factor for the first part described roughly
      */
     public record Curve(double alike, double widening, double perMissing) {
 
-        /** The standard uncertainty at a closeness of 0 to 1. */
-        public double sigma(double closeness, boolean missing) {
-            return alike * Math.exp(widening * (1 - closeness)) * (missing ? perMissing : 1);
+        /** The standard uncertainty at a distance from the nearest anchors. */
+        public double sigma(double distance, boolean missing) {
+            return alike * Math.exp(widening * distance) * (missing ? perMissing : 1);
         }
     }
 

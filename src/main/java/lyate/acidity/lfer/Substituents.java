@@ -168,7 +168,8 @@ final class Substituents {
         int root = t.child[branch];
         for (int next = t.first[root]; next < t.first[root + 1]; next++) {
             boolean partOfRoot = t.order[next] == 2 || t.charge[t.child[next]] * t.charge[root] < 0;
-            if (next != t.reverse[branch] && !partOfRoot) {
+            // a charge acts through space: ShapeTerms counts it once, however many bonds lead to it
+            if (next != t.reverse[branch] && !partOfRoot && !ShapeTerms.charged(t, t.child[next])) {
                 sum += induction[next];
             }
         }
