@@ -16,9 +16,10 @@ final class CrossValidation {
      * @param row       the held-out row
      * @param estimated the estimate, statistical factors included
      * @param distance  how far the nearest anchors were
+     * @param misfit    how far those are from their own estimates
      * @param missing   how many of its parts could only be described roughly
      */
-    record Outcome(TrainingRow row, double estimated, double distance, int missing) {
+    record Outcome(TrainingRow row, double estimated, double distance, double misfit, int missing) {
 
         double error() {
             return estimated - row.pKa();
@@ -37,7 +38,7 @@ final class CrossValidation {
                 if (fold(row.compound()) == held) {
                     Optional<Prediction> found = fit.model().predict(row.medium(), row.site());
                     found.ifPresent(prediction -> outcomes.add(new Outcome(row, prediction.pKa() + row.site().statistics(),
-                            prediction.comparison().distance(), row.site().missing().size())));
+                            prediction.comparison().distance(), prediction.comparison().misfit(), row.site().missing().size())));
                 }
             }
         }

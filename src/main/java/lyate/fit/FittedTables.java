@@ -30,19 +30,20 @@ final class FittedTables {
             """;
     private static final String ANCHORS = """
             # Sites the fit has seen. weight: how much a site with the same surroundings moves with what this one differs by from its
-            # relationship (the dual coefficients of the fit; not a measured value). measured: the row of measured-acidities.csv that
+            # relationship (the dual coefficients of the fit; not a measured value). misfit: how far it is from what the fit makes of it
+            # when it is left out. measured: the row of measured-acidities.csv that
             # states its pKa, if there is one: estimates quote it as a relative. Made by lyate.fit.Fit.
             # version: 1
-            id,medium,pool,smiles,site,role,weight,measured,source
+            id,medium,pool,smiles,site,role,weight,misfit,measured,source
             """;
     private static final String SPREAD = """
             # Standard uncertainty of an estimate: sigma_alike beside a relative with the same surroundings, times
-            # exp(widening x distance), times per_missing where parts of the molecule are not in the tables. distance: 1 less the similarity
-            # of the nearest anchor, plus the share of the surroundings that no anchor has.
+            # exp(widening x distance), times ((0.1 + misfit of the nearest anchors) / 0.3) to the misfit_power, times per_missing where parts of the molecule are not in the tables. distance: 1 less the similarity
+            # of the nearest anchor, plus 2.5 times the share of the surroundings that no anchor has.
             # scope: a line of estimate-series.csv, or all for lines without a row. From the errors of the cross-validation
             # (n of them), made by lyate.fit.Fit.
             # version: 1
-            id,medium,scope,sigma_alike,widening,per_missing,n,source
+            id,medium,scope,sigma_alike,widening,misfit_power,per_missing,n,source
             """;
 
     private FittedTables() {}
@@ -73,9 +74,9 @@ final class FittedTables {
             List<Anchor> anchors = pool.anchors(measured);
             for (int i = 0; i < anchors.size(); i++) {
                 Anchor anchor = anchors.get(i);
-                text.append(String.format(Locale.ROOT, "%s-%s-%d,%s,%s,%s,%s,%s,%.4f,%s,%s%n", pool.pool.medium().id(), pool.pool.name(),
+                text.append(String.format(Locale.ROOT, "%s-%s-%d,%s,%s,%s,%s,%s,%.4f,%.2f,%s,%s%n", pool.pool.medium().id(), pool.pool.name(),
                         i + 1, pool.pool.medium().id(), pool.pool.name(), anchor.smiles(), anchor.label(), anchor.site().series().role().word(),
-                        anchor.weight(), anchor.measured(), SOURCE));
+                        anchor.weight(), anchor.misfit(), anchor.measured(), SOURCE));
             }
         }
         return unix(text);
@@ -86,8 +87,8 @@ final class FittedTables {
         spread.forEach((medium, curves) -> curves.forEach((scope, curve) -> {
             long n = outcomes.stream().filter(outcome -> outcome.row().medium().equals(medium)
                     && (scope.equals("all") || outcome.row().site().series().line().equals(scope))).count();
-            text.append(String.format(Locale.ROOT, "%s-%s,%s,%s,%.3f,%.2f,%.2f,%d,%s on %s%n", medium.id(), scope, medium.id(), scope,
-                    curve.alike(), curve.widening(), curve.perMissing(), n, SOURCE, setOf(medium)));
+            text.append(String.format(Locale.ROOT, "%s-%s,%s,%s,%.3f,%.2f,%.2f,%.2f,%d,%s on %s%n", medium.id(), scope, medium.id(), scope,
+                    curve.alike(), curve.widening(), curve.misfitPower(), curve.perMissing(), n, SOURCE, setOf(medium)));
         }));
         return unix(text);
     }

@@ -124,17 +124,13 @@ final class PoolFit {
         }
     }
 
-    /** What the fit would have missed each row by without it, pKa units. */
-    double[] leaveOneOut() {
-        return leaveOneOut.clone();
-    }
-
     /** The anchors of the residual; {@code measured} names the row of the measured table that states each value. */
     List<Anchor> anchors(MeasuredRows measured) {
         List<Anchor> anchors = new ArrayList<>();
         for (int i = 0; i < rows.size(); i++) {
             TrainingRow row = rows.get(i);
-            anchors.add(new Anchor(row.smiles(), row.label(), row.site(), weights[i], measured.idOf(row)));
+            anchors.add(new Anchor(row.smiles(), row.label(), row.site(), weights[i],
+                    Math.abs(leaveOneOut[i]), measured.idOf(row)));
         }
         return anchors;
     }

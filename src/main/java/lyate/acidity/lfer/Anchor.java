@@ -7,6 +7,7 @@ package lyate.acidity.lfer;
  * @param label    label of the site
  * @param site     its description
  * @param weight   pKa units per unit of {@link Pool#residual}
+ * @param misfit   how far the value is from what the fit makes of it without it, pKa units, 0 or more
  * @param measured row of {@code measured-acidities.csv} that states its value; empty where there is none
  */
-public record Anchor(String smiles, String label, SiteDescription site, double weight, String measured) {}
+public record Anchor(String smiles, String label, SiteDescription site, double weight, double misfit, String measured) {}

@@ -25,7 +25,8 @@ public final class AnchorTable {
 
     /** What {@code estimate-anchors.csv} looks like. */
     public static final Schema SCHEMA = Schema.of("estimate-anchors.csv", text("id"), word("medium", "water", "dmso"), text("pool"),
-            text("smiles"), text("site"), word("role", "acid", "base"), number("weight"), text("measured").optional(), text("source"));
+            text("smiles"), text("site"), word("role", "acid", "base"), number("weight"), number("misfit"),
+            text("measured").optional(), text("source"));
 
     private final Map<String, List<Row>> byPool;
     private final SiteDescriber describer;
@@ -72,7 +73,7 @@ public final class AnchorTable {
                 return new Reading(Optional.empty(), Optional.of(row.problem("site", "an atom of a series of estimate-series.csv")));
             }
             return new Reading(Optional.of(new Anchor(row.text("smiles"), row.text("site"), site.get(),
-                    row.number("weight").getAsDouble(), row.text("measured"))), Optional.empty());
+                    row.number("weight").getAsDouble(), row.number("misfit").getAsDouble(), row.text("measured"))), Optional.empty());
         } catch (MoleculeException e) {
             return new Reading(Optional.empty(), Optional.of(row.problem("smiles", "a structure (" + e.getMessage() + ")")));
         }

@@ -31,12 +31,15 @@ public final class Anchors {
      * @param nearest    indices of the anchors, most similar first
      * @param similarity similarity of each anchor, by index
      * @param novelty    share of the surroundings, 0 to 1, that no anchor has
+     * @param misfit     how far the nearest anchors themselves are from their own estimates, pKa units
      */
-    public record Comparison(double correction, List<Integer> nearest, double[] similarity, double novelty) {
+    public record Comparison(double correction, List<Integer> nearest, double[] similarity, double novelty, double misfit) {
+
+        private static final double NOVELTY = 2.5;
 
         /** 0 beside an anchor with the same surroundings; grows as they differ and hold what no anchor has. */
         public double distance() {
-            return 1 - closeness() + novelty;
+            return 1 - closeness() + NOVELTY * novelty;
         }
 
         /** Similarity of the nearest anchor, 0 where there is none. */
@@ -81,7 +84,8 @@ public final class Anchors {
         for (int i = 0; i < similarity.length; i++) {
             correction += anchors.get(i).weight() * pool.residual(similarity[i], distances[i]);
         }
-        return new Comparison(correction, nearest(similarity, count), similarity, novelty(site.environment()));
+        List<Integer> nearest = nearest(similarity, count);
+        return new Comparison(correction, nearest, similarity, novelty(site.environment()), misfit(nearest, similarity));
     }
 
     /** Indices of the highest similarities, highest first. */
@@ -102,6 +106,16 @@ public final class Anchors {
             }
         }
         return Arrays.stream(best).boxed().toList();
+    }
+
+    private double misfit(List<Integer> nearest, double[] similarity) {
+        double weighted = 0;
+        double total = 0;
+        for (int anchor : nearest) {
+            weighted += similarity[anchor] * anchors.get(anchor).misfit();
+            total += similarity[anchor];
+        }
+        return total == 0 ? 0 : weighted / total;
     }
 
     private double novelty(Environment site) {

@@ -71,7 +71,7 @@ public final class Coefficients {
     public record Line(Published.Line published, Map<String, Change> line, Map<String, Change> pool) {
 
         /** The coefficient of a descriptor. */
-        double value(String descriptor) {
+        public double value(String descriptor) {
             Change change = line.get(descriptor);
             if (change == null) {
                 change = pool.get(descriptor);

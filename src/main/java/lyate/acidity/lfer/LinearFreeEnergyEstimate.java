@@ -71,16 +71,16 @@ public final class LinearFreeEnergyEstimate implements SiteEstimate {
 
     private Acidity acidity(ProtonSite site, SiteDescription description, Prediction prediction) {
         Medium medium = prediction.pool().medium();
-        double distance = prediction.comparison().distance();
         Spread.Curve curve = spread.curve(medium, description.series());
         boolean rough = !description.missing().isEmpty();
+        double sigma = curve.sigma(prediction.comparison().distance(), prediction.comparison().misfit(), rough);
         double pKa = prediction.pKa() + description.statistics();
         String source = String.format(Locale.ROOT, "linear free-energy relationship of %s in %s; uncertainty %.2f beside a like "
-                + "compound, here x %.2f because the nearest measured relative is %.0f %% alike%s", description.series().name(),
-                medium.id(), curve.alike(), curve.sigma(distance, rough) / curve.alike(),
-                100 * prediction.comparison().closeness(),
+                + "compound, here x %.2f: the nearest relative is %.0f %% alike, the nearest ones are %.2f off their own estimates%s", description.series().name(),
+                medium.id(), curve.alike(), sigma / curve.alike(),
+                100 * prediction.comparison().closeness(), prediction.comparison().misfit(),
                 rough ? " and parts of the molecule are not in the tables" : "");
-        return new Acidity(pKa, curve.sigma(distance, rough), medium, Basis.ESTIMATED,
+        return new Acidity(pKa, sigma, medium, Basis.ESTIMATED,
                 contributions(site, description, prediction), description.missing(), relatives(prediction), source);
     }
 
