@@ -3,6 +3,7 @@ package lyate.fit;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import java.util.stream.Stream;
 import lyate.acidity.lfer.EstimateModel.Prediction;
 
 /** Estimates every named row by a fit that has seen nothing of its compound, in any file. */
@@ -32,7 +33,8 @@ final class CrossValidation {
         List<Outcome> outcomes = new ArrayList<>();
         for (int fold = 0; fold < FOLDS; fold++) {
             int held = fold;
-            ModelFit fit = ModelFit.of(start, files.placed.stream().filter(row -> fold(row.compound()) != held).toList(),
+            ModelFit fit = ModelFit.of(start, Stream.concat(files.placed.stream(), files.tabled.stream())
+                            .filter(row -> fold(row.compound()) != held).toList(),
                     files.unplaced.stream().filter(row -> fold(row.molecule().canonicalKey()) != held).toList());
             for (TrainingRow row : files.placed) {
                 if (fold(row.compound()) == held) {

@@ -7,6 +7,7 @@ import java.nio.file.Path;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.stream.Stream;
 import lyate.acidity.MeasuredAcidities;
 import lyate.acidity.lfer.Pools;
 import lyate.acidity.lfer.Published;
@@ -18,7 +19,7 @@ import lyate.table.TableFolders;
 
 /**
  * Fits the linear free-energy relationships: reads a folder of measured values ({@link TrainingFiles} says in which layout) and the
- * packaged tables, cross-validates, and writes {@code estimate-coefficients.csv}, {@code estimate-anchors.csv},
+ * packaged tables, the measured values among them, cross-validates, and writes {@code estimate-coefficients.csv}, {@code estimate-anchors.csv},
  * {@code estimate-spread.csv} and the report {@code estimate-accuracy.md}. Deterministic.
  *
  * <p>Usage: {@code java -cp target/lyate.jar lyate.fit.Fit FOLDER OUTPUT_FOLDER}
@@ -41,9 +42,11 @@ public final class Fit {
     static void run(TableFolders tables, Path folder, Path output) throws IOException {
         SiteDescriber describer = SiteDescriber.load(tables);
         TrainingFiles files = TrainingFiles.read(folder, describer);
+        MeasuredAcidities measured = MeasuredAcidities.load(tables);
+        files.add(measured);
         Published published = Published.load(tables);
         ModelFit.Start start = new ModelFit.Start(Pools.load(tables), published, describer,
-                MeasuredRows.of(MeasuredAcidities.load(tables)));
+                MeasuredRows.of(measured));
         List<Outcome> outcomes = CrossValidation.run(start, files);
         Map<Medium, Map<String, Curve>> spread = new LinkedHashMap<>();
         for (Medium medium : MEDIA) {
@@ -52,7 +55,7 @@ public final class Fit {
                 spread.put(medium, SpreadFit.of(here));
             }
         }
-        ModelFit fit = ModelFit.of(start, files.placed, files.unplaced);
+        ModelFit fit = ModelFit.of(start, Stream.concat(files.placed.stream(), files.tabled.stream()).toList(), files.unplaced);
         Files.createDirectories(output);
         write(output, "estimate-coefficients.csv", FittedTables.coefficients(fit, published));
         write(output, "estimate-anchors.csv", FittedTables.anchors(fit, start.measured()));

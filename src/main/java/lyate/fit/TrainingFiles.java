@@ -12,6 +12,7 @@ import java.util.OptionalInt;
 import java.util.Set;
 import java.util.stream.Collectors;
 import java.util.stream.Stream;
+import lyate.acidity.MeasuredAcidities;
 import lyate.acidity.lfer.SiteDescriber;
 import lyate.acidity.lfer.SiteDescription;
 import lyate.molecule.Molecule;
@@ -33,17 +34,21 @@ import org.apache.commons.csv.CSVRecord;
  * <li>{@code smiles,kind,step,pka,quality}: the site is not named. Only rows with step 1 of one component are used;
  * quality 2 counts as twice as uncertain as 0 and 1.
  * </ul>
- * Other columns are ignored.
+ * Other columns are ignored. The packaged table of measured values can be added.
  */
 final class TrainingFiles {
 
     private static final CSVFormat FORMAT = CSVFormat.RFC4180.builder().setHeader().setSkipHeaderRecord(true)
             .setCommentMarker('#').setIgnoreEmptyLines(true).setTrim(true).get();
     private static final double UNCERTAIN = 2;
+    /** Tabled values with a larger standard uncertainty count as uncertain, or are not used. */
+    private static final double VAGUE = 0.3;
+    private static final double TOO_VAGUE = 1;
 
     private final SiteDescriber describer;
     private final MoleculeReader reader = new MoleculeReader();
     final List<TrainingRow> placed = new ArrayList<>();
+    final List<TrainingRow> tabled = new ArrayList<>();
     final List<UnplacedRow> unplaced = new ArrayList<>();
     final List<String> passedOver = new ArrayList<>();
 
@@ -69,6 +74,23 @@ final class TrainingFiles {
         Set<String> named = placed.stream().filter(row -> row.medium().equals(Medium.WATER))
                 .map(row -> row.site().series().role() + row.compound()).collect(Collectors.toSet());
         unplaced.removeIf(row -> named.contains(row.role() + row.molecule().canonicalKey()));
+    }
+
+    /** Adds the packaged table's values in water and DMSO, but for compounds whose value the files state. */
+    void add(MeasuredAcidities table) {
+        Set<String> named = placed.stream().map(row -> row.medium().id() + row.site().series().role() + row.compound())
+                .collect(Collectors.toSet());
+        for (MeasuredAcidities.Value value : table.values()) {
+            Medium medium = value.acidity().medium();
+            boolean wanted = medium.equals(Medium.WATER) || medium.equals(Medium.DMSO);
+            if (wanted && value.acidity().sigma() <= TOO_VAGUE && named.add(medium.id() + value.role() + value.molecule().canonicalKey())) {
+                describer.describe(value.molecule(), value.role(), value.atom()).ifPresent(site -> tabled.add(new TrainingRow(
+                        MeasuredAcidities.SCHEMA.fileName() + " " + value.row().id(), value.row().text("smiles"), value.row().text("site"),
+                        value.molecule().canonicalKey(), "", false, medium, site, value.acidity().pKa(),
+                        value.acidity().sigma() > VAGUE ? UNCERTAIN : 1)));
+            }
+        }
+        unplaced.removeIf(row -> named.contains(Medium.WATER.id() + row.role() + row.molecule().canonicalKey()));
     }
 
     private void read(Path path) throws IOException {

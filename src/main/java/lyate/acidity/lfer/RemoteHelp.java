@@ -11,6 +11,8 @@ final class RemoteHelp {
 
     private static final int REACH = 4;
     private static final double PER_SIGMA = 15;
+    /** Taking up the charge itself (nitro, acyl) helps more than sigma minus of phenols says. */
+    private static final double ACCEPTANCE = 1.25;
     private static final double AZA_CONJUGATED = 7;
     private static final double AZA_OTHER = 3;
     private static final double ONIUM = 8;
@@ -40,7 +42,7 @@ final class RemoteHelp {
                     queue[tail++] = child;
                 } else if (t.order[next] == 1 && atom != root && t.charge[atom] == 0 && constants[next] != null) {
                     Substituent s = constants[next];
-                    help += PER_SIGMA * (s.induction() + (conjugated ? s.resonance() + s.acceptance() : 0.35 * s.resonance()));
+                    help += PER_SIGMA * (s.induction() + (conjugated ? s.resonance() + ACCEPTANCE * s.acceptance() : 0.35 * s.resonance()));
                 }
             }
         }

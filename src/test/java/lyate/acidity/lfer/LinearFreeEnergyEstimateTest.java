@@ -107,7 +107,7 @@ class LinearFreeEnergyEstimateTest {
         "n1ccc(C#N)cc1, N1, n1ccccc1, N1, n1ccc(N(C)C)cc1, N1",
         "N1CCOCC1, N1, N1CCNCC1, N1, N1CCCCC1, N1",
         "NCC#N, N1, NCCC#N, N1, NCCC, N1",
-        "n1cocc1, N1, Cn1ccnc1, N4, NC(=N)C, N3"})
+        "n1cocc1, N1, Cn1ccnc1, N5, NC(=N)C, N3"})
     void basesComeInTheOrderOfTheBook(String a, String siteA, String b, String siteB, String c, String siteC) {
         assertTrue(base(a, siteA) < base(b, siteB), a + " is the weaker base than " + b);
         assertTrue(base(b, siteB) < base(c, siteC), b + " is the weaker base than " + c);
@@ -142,7 +142,7 @@ class LinearFreeEnergyEstimateTest {
     @Test
     void uncertaintyGrowsAwayFromMeasuredRelatives() {
         Acidity close = Estimates.of("CCCCc1ccc(O)cc1", "O9", Role.ACID, Medium.WATER);
-        Acidity far = Estimates.of("O=S1(=O)N=C(C(F)(F)F)c2c(O)c(Br)cc(C#CC3CC3)c2N1", "O13", Role.ACID, Medium.WATER);
+        Acidity far = Estimates.of("O=S1(=O)N=C(C(F)(F)F)c2c(O)c(Br)cc(C#CC3CC3)c2N1", "O12", Role.ACID, Medium.WATER);
         assertTrue(far.sigma() > 2 * close.sigma(), far.sigma() + " and " + close.sigma());
     }
 
