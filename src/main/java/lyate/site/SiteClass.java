@@ -10,7 +10,7 @@ import lyate.molecule.AtomPattern;
  * @param name    what a chemist calls it
  * @param role    whether it loses or gains the proton
  * @param pattern SMARTS whose first atom is the site
- * @param family  the line of {@code media-transfer.csv} its values are carried over with, for example {@code oh-acid}
+ * @param family  the line of {@code media-transfer.csv} its values are carried over with, for example {@code phenol}
  * @param water   class value in water, if one is known
  * @param dmso    class value in DMSO, if one is known
  * @param hit     SMILES of an example that must end in this class
