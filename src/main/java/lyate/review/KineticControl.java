@@ -11,6 +11,8 @@ final class KineticControl {
 
     /** log10 units by which a kinetically favoured site leads its rival: both are tabulated as an order, not as a ratio. */
     private static final double LEAD = 2;
+    /** Standard deviations of the difference added to the lead: what the two pKa are in doubt must not undo an order of rates. */
+    private static final double SAFE = 2;
 
     private final KineticPreferences preferences;
 
@@ -52,13 +54,18 @@ final class KineticControl {
                 .sorted(Comparator.comparingDouble(order -> find(donors, order.loser()).logK())).toList();
         for (Order order : byLoser) {
             Donor winner = find(moved, order.winner());
-            double needed = find(moved, order.loser()).effectiveLogK() + LEAD - winner.effectiveLogK();
+            Donor loser = find(moved, order.loser());
+            double needed = loser.effectiveLogK() + LEAD + SAFE * Math.hypot(sigma(winner), sigma(loser)) - winner.effectiveLogK();
             if (needed > 0) {
                 moved.set(moved.indexOf(winner), winner.withAdvantage(winner.advantage() + needed));
             }
         }
         moved.sort(Comparator.comparingDouble(Donor::effectiveLogK).reversed());
         return moved;
+    }
+
+    private static double sigma(Donor donor) {
+        return donor.comparison().donor().sigma();
     }
 
     private static Donor find(List<Donor> donors, String label) {

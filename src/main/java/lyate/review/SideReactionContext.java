@@ -18,6 +18,9 @@ public record SideReactionContext(Base workingBase, List<Transfer> transfers, Op
     /** log10 K from which a proton counts as taken for good. */
     private static final double TAKEN = 2;
 
+    /** log10 K from which so little free base stays beside the anion that it cannot be drained by something irreversible. */
+    private static final double LASTING = 4;
+
     /** Highest pKa of a doubly activated C-H acid, which loses its proton as fast as O-H and N-H do. */
     private static final double FAST_CARBON_IN_WATER = 14;
     private static final double FAST_CARBON_IN_DMSO = 20;
@@ -30,8 +33,12 @@ public record SideReactionContext(Base workingBase, List<Transfer> transfers, Op
 
     /** Equivalents of base left after every proton it can take for good; one proton an atom. */
     double leftAfterAllProtons(Step step) {
-        return protonEquivalents(step) - transfers.stream()
-                .filter(transfer -> transfer.logK() >= TAKEN).mapToInt(transfer -> transfer.atoms().size()).sum();
+        return leftAfterProtons(step, TAKEN);
+    }
+
+    /** Equivalents of base left for what cannot be undone, after every proton whose equilibrium hides the base from it. */
+    double leftAfterLastingProtons(Step step) {
+        return leftAfterProtons(step, LASTING);
     }
 
     /** Equivalents of base left after the protons that go before anything else can happen. */
@@ -44,6 +51,11 @@ public record SideReactionContext(Base workingBase, List<Transfer> transfers, Op
     /** The transfer from an atom, if it is a donor. */
     Optional<Transfer> from(int atom) {
         return transfers.stream().filter(transfer -> transfer.atoms().contains(atom)).findFirst();
+    }
+
+    private double leftAfterProtons(Step step, double least) {
+        return protonEquivalents(step) - transfers.stream()
+                .filter(transfer -> transfer.logK() >= least).mapToInt(transfer -> transfer.atoms().size()).sum();
     }
 
     private static double protonEquivalents(Step step) {

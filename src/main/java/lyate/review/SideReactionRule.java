@@ -41,8 +41,8 @@ record SideReactionRule(String id, RulePlace place, Agent agent, Target target, 
     /** Whose atoms are looked at. */
     enum Target { SUBSTRATE, PARTNER }
 
-    /** Which protons are faster than the reaction. */
-    enum ProtonsFirst { NONE, FAST, ALL }
+    /** Which protons keep the base from the reaction; see the head of the table. */
+    enum ProtonsFirst { NONE, FAST, ALL, LASTING }
 
     /** Conditions that a pattern cannot say. */
     enum Condition {

@@ -33,7 +33,7 @@ final class SideReactionTable {
             word("pka_scale", "water", "dmso").optional(), number("pka_at_least").optional(), number("pka_at_most").optional(),
             number("acid_pka_at_most").optional(), list("solvents"), number("temperature_from").optional(),
             number("temperature_to").optional(),
-            word("protons_first", "none", "fast", "all"), number("base_left").optional(),
+            word("protons_first", "none", "fast", "all", "lasting"), number("base_left").optional(),
             number("log_k_from").optional(), number("log_k_to").optional(),
             list("unless"), text("unless_smarts").optional(), RuleCells.kind(), RuleCells.severity(),
             word("wins", "yes", "no"), text("sentence"), text("source"), text("hit"), text("miss"));

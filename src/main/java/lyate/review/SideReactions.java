@@ -109,6 +109,7 @@ public final class SideReactions {
             case NONE -> step.equivalents();
             case FAST -> context.leftAfterFastProtons(step);
             case ALL -> context.leftAfterAllProtons(step);
+            case LASTING -> context.leftAfterLastingProtons(step);
         };
         return left > 0 && left >= rule.baseLeft();
     }
