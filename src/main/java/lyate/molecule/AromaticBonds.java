@@ -15,7 +15,7 @@ final class AromaticBonds {
     /**
      * Gives aromatic bonds an order and their atoms the hydrogens that follow.
      *
-     * @throws MoleculeException where the hydrogens cannot be told from the drawing, as in pyrrole
+     * @throws MoleculeException where an atom is no element, or the hydrogens cannot be told from the drawing, as in pyrrole
      */
     static void settle(IAtomContainer molecule) throws MoleculeException {
         if (molecule instanceof IQueryAtomContainer) {
@@ -33,6 +33,7 @@ final class AromaticBonds {
             return;
         }
         for (IAtom atom : molecule.atoms()) {
+            Refusals.checkElement(atom);
             if (atom.getImplicitHydrogenCount() == null && atom.isAromatic()) {
                 atom.setImplicitHydrogenCount(hydrogens(atom));
             }

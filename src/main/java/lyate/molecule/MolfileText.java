@@ -44,6 +44,7 @@ record MolfileText(String text) {
         }
         IAtomContainer read = parse(old, String.join("\n", lines) + "\n");
         refuseStrangeBonds(read);
+        InputNumbers.assign(read);
         AromaticBonds.settle(read);
         return normaliser.normalise(text, read, List.of());
     }

@@ -41,7 +41,8 @@ final class Refusals {
                 + " heavy atoms are handled");
     }
 
-    private static void check(IAtom atom) throws MoleculeException {
+    /** @throws MoleculeException for an atom that is no element */
+    static void checkElement(IAtom atom) throws MoleculeException {
         if (atom instanceof IPseudoAtom pseudo) {
             throw new MoleculeException("atom " + InputNumbers.of(atom) + " is a placeholder (" + pseudo.getLabel()
                     + "), not an element: draw the whole structure", InputNumbers.of(atom));
@@ -50,6 +51,10 @@ final class Refusals {
             throw new MoleculeException("atom " + InputNumbers.of(atom)
                     + " is a query, not an element: draw one definite structure", InputNumbers.of(atom));
         }
+    }
+
+    private static void check(IAtom atom) throws MoleculeException {
+        checkElement(atom);
         if (atom.getFormalCharge() == null) {
             atom.setFormalCharge(0);
         }

@@ -97,6 +97,7 @@ class RefusalTest {
         "radical.mol|C2 is a radical; radicals cannot be judged",
         "query-bond.mol|the bond between C1 and C2 is not single, double, triple or aromatic",
         "atom-list.mol|atom 2 is a query, not an element: draw one definite structure",
+        "atom-list-aromatic.mol|atom 2 is a query, not an element: draw one definite structure",
         "r-group.mol|atom 2 is a placeholder (R1), not an element: draw the whole structure",
         "pyrrole-aromatic.mol|the aromatic bonds cannot be given alternating single and double orders; draw the ring with single and double bonds",
     })
