@@ -1,7 +1,10 @@
 package lyate.window;
 
+import java.lang.management.ManagementFactory;
+import java.lang.management.ThreadMXBean;
 import java.util.Arrays;
 import java.util.Locale;
+import java.util.Objects;
 import java.util.concurrent.CountDownLatch;
 import java.util.concurrent.TimeUnit;
 import java.util.concurrent.atomic.AtomicReference;
@@ -30,7 +33,9 @@ final class Latency {
             frame.setSize(1500, 920);
             frame.setVisible(true);
         });
-        Thread.sleep(3000);
+        while (bench.get().shown().isEmpty()) {
+            Thread.sleep(100);
+        }
         System.out.println("heavy atoms: " + bench.get().shown().orElseThrow().review().step().substrate().atomCount());
         report("equivalents typed", measure(bench.get(), StepField.EQUIVALENTS, "1.0", "1.1"));
         report("base changed", measure(bench.get(), StepField.BASE, "LDA", "NaH"));
@@ -40,8 +45,10 @@ final class Latency {
 
     private static double[] measure(Workbench bench, StepField field, String one, String other) throws Exception {
         double[] millis = new double[MEASURED];
+        double[] cpu = new double[MEASURED];
         for (int i = 0; i < WARM_UP + MEASURED; i++) {
             String text = i % 2 == 0 ? one : other;
+            long cpuBefore = cpuNanos();
             long start = System.nanoTime();
             CountDownLatch painted = new CountDownLatch(1);
             SwingUtilities.invokeAndWait(() -> {
@@ -53,9 +60,19 @@ final class Latency {
             }
             if (i >= WARM_UP) {
                 millis[i - WARM_UP] = (System.nanoTime() - start) / 1e6;
+                cpu[i - WARM_UP] = (cpuNanos() - cpuBefore) / 1e6;
             }
         }
+        report(field + ", processor time", cpu);
         return millis;
+    }
+
+    /** Time the processor gave to reviewing and to the event thread: what a busy machine does not change. */
+    private static long cpuNanos() {
+        ThreadMXBean threads = ManagementFactory.getThreadMXBean();
+        return Arrays.stream(threads.getThreadInfo(threads.getAllThreadIds())).filter(Objects::nonNull)
+                .filter(thread -> thread.getThreadName().equals("review") || thread.getThreadName().startsWith("AWT-EventQueue"))
+                .mapToLong(thread -> threads.getThreadCpuTime(thread.getThreadId())).sum();
     }
 
     private static void report(String what, double[] millis) {
