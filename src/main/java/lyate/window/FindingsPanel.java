@@ -107,7 +107,7 @@ final class FindingsPanel extends JPanel {
         panel.setBorder(BorderFactory.createEmptyBorder(gap, gap, gap, gap));
         panel.setBackground(theme.color("ground"));
         for (String sentence : sentences) {
-            WrappedText text = new WrappedText(sentence);
+            WrappedText text = new WrappedText(Words.sentence(sentence));
             text.setForeground(theme.color("ink"));
             panel.add(text);
         }

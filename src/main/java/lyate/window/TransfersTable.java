@@ -51,7 +51,7 @@ final class TransfersTable extends JPanel {
 
     /** Widths in letters of the font in use, so that they follow the scale. */
     private void sizeColumns() {
-        int[] letters = {5, 18, 6, 5, 8, 13, 7, 9, 14, 9, 60};
+        int[] letters = {5, 18, 6, 5, 8, 13, 7, 9, 14, 11, 60};
         int em = table.getFontMetrics(table.getFont()).charWidth('n');
         for (int i = 0; i < letters.length; i++) {
             TableColumn column = table.getColumnModel().getColumn(i);

@@ -78,7 +78,7 @@ final class VerdictHeader extends JPanel {
         String first = review.firstSite().equals(review.intendedSite()) ? "The proton at " + review.intendedSite() + " goes first"
                 : "Meant: " + review.intendedSite() + ". First to go: " + review.firstSite();
         return first + ". log K at " + review.intendedSite() + " " + Words.signed(review.logK()) + " with " + review.workingBase() + "; taken there "
-                + Words.percent(review.intendedPercent()) + ", elsewhere at most " + Words.percent(review.otherPercent()) + ".";
+                + Words.percent(review.intendedPercent()) + ", elsewhere up to " + Words.percent(review.otherPercent()) + ".";
     }
 
     private static String others(Review review) {
