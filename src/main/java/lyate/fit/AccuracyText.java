@@ -28,8 +28,8 @@ final class AccuracyText {
     }
 
     private static void addMedium(StringBuilder text, Medium medium, List<Outcome> outcomes, Map<String, Curve> curves) {
-        text.append("## ").append(medium.id()).append("\n\n| class | n | RMSE | median abs. error | within 1 sigma | within 2 sigma |\n")
-                .append("| --- | ---: | ---: | ---: | ---: | ---: |\n");
+        text.append("## ").append(medium.id()).append("\n\n| class | n | RMSE | median abs. error | within 1 sigma | within 2 sigma | RMSE, sound rows |\n")
+                .append("| --- | ---: | ---: | ---: | ---: | ---: | ---: |\n");
         add(text, "all rows", outcomes, curves);
         List<Outcome> plausible = outcomes.stream().filter(outcome -> outcome.row().plausible()).toList();
         if (plausible.size() < outcomes.size()) {
@@ -47,8 +47,9 @@ final class AccuracyText {
     }
 
     private static void add(StringBuilder text, String name, List<Outcome> outcomes, Map<String, Curve> curves) {
-        text.append(String.format(Locale.ROOT, "| %s | %d | %.2f | %.2f | %.0f %% | %.0f %% |%n", name, outcomes.size(),
+        text.append(String.format(Locale.ROOT, "| %s | %d | %.2f | %.2f | %.0f %% | %.0f %% | %.2f |%n", name, outcomes.size(),
                 SpreadFit.rootMeanSquare(outcomes), SpreadFit.medianError(outcomes),
-                100 * SpreadFit.coverage(curves, outcomes, 1), 100 * SpreadFit.coverage(curves, outcomes, 2)));
+                100 * SpreadFit.coverage(curves, outcomes, 1), 100 * SpreadFit.coverage(curves, outcomes, 2),
+                SpreadFit.rootMeanSquare(outcomes.stream().filter(outcome -> outcome.row().plausible()).toList())));
     }
 }

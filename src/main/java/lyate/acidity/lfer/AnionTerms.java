@@ -9,7 +9,7 @@ import lyate.acidity.Acidity.Effect;
  * Groups on the site that take up the charge of its anion, strongest first.
  *
  * <p>Each further group finds less left to do, the less the stronger the first one is: the second counts with
- * {@code 1.05 - 0.018 s1}, later ones with a fifth of their strength (fitted by eye to the series CH3X, CH2XY, CHXYZ of
+ * {@code 1.05 - 0.018 s1}, later ones with a fifth of their strength (read off the series CH3X, CH2XY, CHXYZ of
  * Bordwell, Acc. Chem. Res. 1988, 21, 456).
  */
 final class AnionTerms {
@@ -75,8 +75,6 @@ final class AnionTerms {
 
     /** Lactones and lactams, whose acyl group cannot turn away, and rings that the loss of the proton makes aromatic. */
     private static void addRings(Topology t, int site, Terms terms) {
-        int unsaturated = 0;
-        int carbonyl = -1;
         for (int branch = t.first[site]; branch < t.first[site + 1]; branch++) {
             String state = BindingState.of(t, branch);
             if (t.ringBond[branch] && (state.equals("ester") || state.equals("amide"))) {
@@ -85,11 +83,11 @@ final class AnionTerms {
         }
         if (t.element[site] == 6 && t.inRing[site]) {
             for (int[] ring : SixRing.around(t, site)) {
-                unsaturated = 0;
+                int unsaturated = 0;
+                int carbonyl = -1;
                 for (int atom : ring) {
-                    boolean oxo = t.oxo(atom) && !t.aromatic[atom];
                     unsaturated += atom != site && t.unsaturated(atom) ? 1 : 0;
-                    carbonyl = oxo ? atom : carbonyl;
+                    carbonyl = t.oxo(atom) && !t.aromatic[atom] ? atom : carbonyl;
                 }
                 if (unsaturated == 5 && carbonyl >= 0) {
                     terms.add("anion.aromatic", Effect.RESONANCE, 1, carbonyl);
