@@ -24,7 +24,7 @@ final class DrawingFigure {
     private static final double MARGIN_X = 104;
     private static final double MARGIN_Y = 46;
     private static final double LARGEST_BOND = 38;
-    private static final double LARGEST_HEIGHT = 330;
+    private static final double LARGEST_HEIGHT = 380;
     private static final double FONT = 11.5;
     private static final double LINE = 15;
     private static final double EDGE = 6;

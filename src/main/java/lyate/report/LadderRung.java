@@ -6,6 +6,7 @@ import java.util.List;
 import java.util.Optional;
 import lyate.review.Review;
 import lyate.review.Transfer;
+import lyate.stock.Base;
 import lyate.stock.KnownPKa;
 import lyate.stock.Medium;
 
@@ -25,6 +26,7 @@ record LadderRung(String name, double pKa, double sigma, String value, Optional<
     private static final double OF_INTEREST = 12;
     private static final double LEAST_OF_INTEREST = 3;
     private static final double LONG_AXIS = 36;
+    private static final int LONG_NAME = 15;
     private static final double ROOM_KELVIN = 298.15;
 
     /** Everything near enough to be of interest, highest pKa first; the anchor is the intended site. */
@@ -35,7 +37,7 @@ record LadderRung(String name, double pKa, double sigma, String value, Optional<
         double basePKa = anchor.transfer().acidity().pKa() + anchor.transfer().logK() * toRoom;
         double sigma = Math.sqrt(Math.max(0, Math.pow(anchor.transfer().sigmaLogK() * toRoom, 2) - Math.pow(anchor.transfer().acidity().sigma(), 2)));
         List<LadderRung> rungs = new ArrayList<>();
-        rungs.add(new LadderRung(review.workingBase(), basePKa, sigma, Words.withSigma(basePKa, sigma), Optional.empty(), true));
+        rungs.add(new LadderRung(baseName(review), basePKa, sigma, Words.withSigma(basePKa, sigma), Optional.empty(), true));
         sites.forEach(site -> rungs.add(rung(site.letter() + " " + site.transfer().donor(), site.transfer(), Optional.of(site), medium, basePKa, toRoom)));
         review.transfers().stream().filter(transfer -> transfer.atoms().isEmpty())
                 .forEach(transfer -> rungs.add(rung(transfer.donor(), transfer, Optional.empty(), medium, basePKa, toRoom)));
@@ -49,6 +51,13 @@ record LadderRung(String name, double pKa, double sigma, String value, Optional<
         double air = Math.max(LEAST_OF_INTEREST, Math.min(OF_INTEREST, (LONG_AXIS - (high - low)) / 2));
         return rungs.stream().filter(rung -> rung.pKa() >= low - air && rung.pKa() <= high + air)
                 .sorted(Comparator.comparingDouble(LadderRung::pKa).reversed()).toList();
+    }
+
+    /** A name too long for the picture gives way to an abbreviation, where the base is the one that was added. */
+    private static String baseName(Review review) {
+        Base base = review.step().base();
+        boolean abbreviate = base.name().length() > LONG_NAME && review.workingBase().equals(base.name());
+        return abbreviate ? base.aliases().stream().findFirst().orElse(base.name()) : review.workingBase();
     }
 
     private static LadderRung solvent(Review review, KnownPKa known) {

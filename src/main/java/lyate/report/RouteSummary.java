@@ -26,8 +26,8 @@ final class RouteSummary {
 
     private static void judged(Html html, Review review) {
         Step step = review.step();
-        html.element("td", step.base().name() + " in " + step.solvent().name() + ", " + Words.equivalents(step.equivalents()) + ", "
-                + Words.celsius(step.temperatureCelsius()));
+        html.element("td", Words.celsius(step.temperatureCelsius()) + ": " + step.base().name() + " (" + Words.equivalents(step.equivalents())
+                + ") in " + step.solvent().name());
         html.open("td").markup(Signs.of(review.verdict())).element("strong", Words.verdict(review.verdict())).close();
         html.element("td", Words.probability(review.probability()));
         html.element("td", review.intendedSite() + (review.firstSite().equals(review.intendedSite()) ? "" : "; first: " + review.firstSite()));

@@ -22,6 +22,9 @@ final class StepSources {
      */
     record Use(String what, String value, String source) {}
 
+    /** Heat of fewer protons than this, mmol, is nobody's concern. */
+    private static final double WORTH_A_LINE = 0.001;
+
     private StepSources() {}
 
     static List<Use> of(StepFacts facts) {
@@ -40,7 +43,7 @@ final class StepSources {
                         Words.withSigma(known.getValue().pKa(), known.getValue().sigma()) + " in " + Words.medium(known.getKey()), known.getValue().source())));
         uses.add(new Use("data of " + review.step().base().name(), review.step().base().stock(), review.step().base().source()));
         uses.add(new Use("data of " + review.step().solvent().name(), "", review.step().solvent().source()));
-        facts.gasAndHeat().heat().forEach(share -> uses.add(new Use("heat of " + share.donor(),
+        facts.gasAndHeat().heat().stream().filter(share -> share.milliMole() > WORTH_A_LINE).forEach(share -> uses.add(new Use("heat of " + share.donor(),
                 Words.number(share.kiloJoulePerMole()) + " kJ/mol, " + share.how(), share.source())));
         return uses.stream().distinct().toList();
     }
