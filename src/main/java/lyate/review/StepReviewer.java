@@ -94,13 +94,21 @@ public final class StepReviewer implements Reviewer {
         EquilibriumFindings.rules().forEach(rule -> findings.addAll(rule.find(situation)));
         SiteFindings.rules().forEach(rule -> findings.addAll(rule.find(situation)));
         ScaleFindings.rules().forEach(rule -> findings.addAll(rule.find(situation)));
+        SolventFindings.rules().forEach(rule -> findings.addAll(rule.find(situation)));
         reactions.forEach(reaction -> findings.add(reaction.finding()));
+        findings.addAll(inAcidSolvent(step));
         solventRules.of(step.base(), step.solvent(), step.temperatureCelsius()).stream()
                 .filter(effect -> !effect.destroysBase() || situation.workingBase().levelled())
                 .forEach(effect -> findings.add(effect.finding()));
         findings.addAll(hazards.of(step.base(), step.solvent(), step.temperatureCelsius(), situation.baseTakesProtons()));
         findings.sort(Comparator.comparing(Finding::severity));
         return findings;
+    }
+
+    /** What the solvent itself does to the substrate where it is an acid. */
+    private List<Finding> inAcidSolvent(Step step) {
+        return step.solvent().donorPKa(Medium.WATER)
+                .map(acid -> sideReactions.underAcid(step.substrate(), acid.pKa(), step.temperatureCelsius())).orElse(List.of());
     }
 
     private static Solvent waterOf(Stockroom stockroom) {
