@@ -1,6 +1,5 @@
 package lyate.acidity.lfer;
 
-import java.util.Locale;
 import java.util.Map;
 
 /** Says a descriptor in words for a recipe. */
@@ -26,7 +25,7 @@ final class DescriptorWords {
         for (String part : term.name().split("\\.")) {
             words.append(words.isEmpty() ? "" : " ").append(WORDS.getOrDefault(part, part.replace('-', ' ')));
         }
-        words.append(String.format(Locale.ROOT, " %.2f", term.value()));
+        words.append(' ').append(Decimals.two(term.value()));
         return term.note().isEmpty() ? words.toString() : words.append(" (").append(term.note()).append(')').toString();
     }
 }

@@ -3,7 +3,6 @@ package lyate.acidity.lfer;
 import java.util.ArrayList;
 import java.util.HashMap;
 import java.util.List;
-import java.util.Locale;
 import java.util.Map;
 import java.util.Optional;
 import lyate.acidity.Acidity;
@@ -75,11 +74,11 @@ public final class LinearFreeEnergyEstimate implements SiteEstimate {
         boolean rough = !description.missing().isEmpty();
         double sigma = curve.sigma(prediction.comparison().distance(), prediction.comparison().misfit(), rough);
         double pKa = prediction.pKa() + description.statistics();
-        String source = String.format(Locale.ROOT, "linear free-energy relationship of %s in %s; uncertainty %.2f beside a like "
-                + "compound, here x %.2f: the nearest relative is %.0f %% alike, the nearest ones are %.2f off their own estimates%s", description.series().name(),
-                medium.id(), curve.alike(), sigma / curve.alike(),
-                100 * prediction.comparison().closeness(), prediction.comparison().misfit(),
-                rough ? " and parts of the molecule are not in the tables" : "");
+        String source = "linear free-energy relationship of " + description.series().name() + " in " + medium.id()
+                + "; uncertainty " + Decimals.two(curve.alike()) + " beside a like compound, here x " + Decimals.two(sigma / curve.alike())
+                + ": the nearest relative is " + Math.round(100 * prediction.comparison().closeness())
+                + " % alike, the nearest ones are " + Decimals.two(prediction.comparison().misfit()) + " off their own estimates"
+                + (rough ? " and parts of the molecule are not in the tables" : "");
         return new Acidity(pKa, sigma, medium, Basis.ESTIMATED,
                 contributions(site, description, prediction), description.missing(), relatives(prediction), source);
     }
