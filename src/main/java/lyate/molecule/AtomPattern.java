@@ -1,7 +1,6 @@
 package lyate.molecule;
 
 import java.util.Arrays;
-import org.openscience.cdk.interfaces.IBond;
 import org.openscience.cdk.isomorphism.DfPattern;
 import org.openscience.cdk.isomorphism.matchers.QueryAtom;
 import org.openscience.cdk.isomorphism.matchers.QueryAtomContainer;
@@ -34,14 +33,7 @@ public final class AtomPattern {
      */
     public static AtomPattern compile(String smarts) throws MoleculeException {
         QueryAtomContainer query = parse(smarts);
-        if (query.isEmpty()) {
-            throw new MoleculeException("the pattern is empty");
-        }
-        for (IBond bond : query.bonds()) {
-            if (bond.getBegin().equals(bond.getEnd())) {
-                throw new MoleculeException("the pattern has a ring bond from an atom to itself\n" + smarts);
-            }
-        }
+        PatternCheck.check(query);
         RootFilter filter = RootFilter.of(((QueryAtom) query.getAtom(0)).getExpression());
         AtomTest test = PatternPlan.of(query).<AtomTest>map(plan -> plan::matches).orElseGet(() -> byToolkit(query));
         return new AtomPattern(smarts, filter, Surroundings.askedBy(query), test);

@@ -95,9 +95,11 @@ class AtomPatternTest {
         assertEquals(reason + "\n" + smarts + "\n" + " ".repeat(column) + "^", message);
     }
 
-    @Test
-    void emptyPatternIsRefused() {
-        assertThrows(MoleculeException.class, () -> AtomPattern.compile(""));
+    @ParameterizedTest
+    @CsvSource(delimiter = '|', value = {"''|the pattern, or one nested in it, is empty", "[$(C),$()]|the pattern, or one nested in it, is empty",
+        "C1CC1CC11|the pattern has a ring bond from an atom to itself"})
+    void patternThatNothingCanMatchIsRefused(String smarts, String reason) {
+        assertEquals(reason, assertThrows(MoleculeException.class, () -> AtomPattern.compile(smarts)).getMessage());
     }
 
     @Test
