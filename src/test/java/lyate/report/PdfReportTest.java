@@ -3,8 +3,10 @@ package lyate.report;
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertFalse;
 import static org.junit.jupiter.api.Assertions.assertNotNull;
+import static org.junit.jupiter.api.Assertions.assertThrows;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
+import java.io.ByteArrayOutputStream;
 import java.io.IOException;
 import java.util.ArrayList;
 import java.util.List;
@@ -114,6 +116,17 @@ class PdfReportTest {
             assertTrue(text.contains("<script>alert(1)</script>"));
             assertTrue(text.contains("<imgsrc='file:/etc/passwd'>"));
             assertTrue(text.contains("\";}@importurl(file:/etc/passwd);<b>"));
+        }
+    }
+
+    @Test
+    void moreStepsThanFitAreRefusedInWordsBeforeMemoryRunsOut() throws IOException {
+        try (PdfReport report = new PdfReport(new ByteArrayOutputStream(), Reports.context("Long"), 2)) {
+            for (ReviewedRow row : DEMO.subList(0, 3)) {
+                report.write(row);
+            }
+            String said = assertThrows(IOException.class, report::finish).getMessage();
+            assertTrue(said.startsWith("a PDF of 3 steps needs more memory than there is; at most 2 fit"), said);
         }
     }
 
