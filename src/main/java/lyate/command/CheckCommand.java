@@ -4,6 +4,7 @@ import java.io.IOException;
 import java.util.concurrent.Callable;
 import java.util.function.Supplier;
 import lyate.molecule.MoleculeReader;
+import lyate.report.DoseText;
 import lyate.report.HtmlReport;
 import lyate.report.JsonList;
 import lyate.report.ReportContext;
@@ -11,9 +12,9 @@ import lyate.report.ResultWriter;
 import lyate.report.ReviewJson;
 import lyate.report.ReviewText;
 import lyate.report.SheetCsv;
+import lyate.review.DoseResponse;
 import lyate.review.Review;
 import lyate.review.ReviewException;
-import lyate.review.Reviewer;
 import lyate.review.StepReviewer;
 import lyate.sheet.ReviewedRow;
 import lyate.sheet.RowException;
@@ -55,10 +56,10 @@ final class CheckCommand implements Callable<Integer> {
         StepReader reader = new StepReader(MoleculeReader.load(folders), Stockroom.load(folders));
         SheetRow row = step.row(base);
         try {
-            Reviewer reviewer = StepReviewer.load(folders);
+            StepReviewer reviewer = StepReviewer.load(folders);
             Review review = reviewer.review(reader.read(row));
             String title = review.step().base().name() + " in " + review.step().solvent().name();
-            write(row, review, () -> ReportContext.of(title, ProgramVersion.text(), folders, reviewer));
+            write(row, review, reviewer.doseResponse(review.step()), () -> ReportContext.of(title, ProgramVersion.text(), folders, reviewer));
             return 0;
         } catch (RowException e) {
             terminal.tell(StepOptions.words(e));
@@ -68,9 +69,12 @@ final class CheckCommand implements Callable<Integer> {
         return Failures.SOME_INPUT_NOT_USED;
     }
 
-    private void write(SheetRow row, Review review, Supplier<ReportContext> context) throws IOException {
+    private void write(SheetRow row, Review review, DoseResponse dose, Supplier<ReportContext> context) throws IOException {
         switch (format) {
-            case TEXT -> new ReviewText(terminal.outWriter()).write(review);
+            case TEXT -> {
+                new ReviewText(terminal.outWriter()).write(review);
+                new DoseText(terminal.outWriter()).write(dose, review.intendedSite());
+            }
             case CSV -> new SheetCsv(terminal.outWriter(), row.header()).write(ReviewedRow.of(row, review));
             case JSON -> {
                 ResultWriter<Review> json = new JsonList<>(terminal.outWriter(), ReviewJson::describe);

@@ -7,6 +7,7 @@ import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.function.DoubleFunction;
 import java.util.function.DoubleUnaryOperator;
+import java.util.function.ToDoubleFunction;
 import org.hipparchus.analysis.solvers.BrentSolver;
 
 /**
@@ -64,13 +65,18 @@ public final class DoseCurve {
 
     /** Fewest equivalents at which that fraction of a place's protons has gone; empty where the curve does not get there. */
     public OptionalDouble equivalentsTaking(double fraction, int holder, int place) {
+        return equivalentsReaching(fraction, point -> point.taken(holder, place));
+    }
+
+    /**
+     * Fewest equivalents at which something that grows with the dose reaches a level; empty where the curve does not get
+     * there.
+     */
+    public OptionalDouble equivalentsReaching(double level, ToDoubleFunction<DosePoint> value) {
         DosePoint last = points.get(0);
-        if (last.taken(holder, place) >= fraction) {
-            return OptionalDouble.of(last.equivalents());
-        }
         for (DosePoint point : points) {
-            if (point.taken(holder, place) >= fraction) {
-                return OptionalDouble.of(crossing(fraction, holder, place, last.equivalents(), point.equivalents()));
+            if (value.applyAsDouble(point) >= level) {
+                return OptionalDouble.of(crossing(level, value, last.equivalents(), point.equivalents()));
             }
             last = point;
         }
@@ -122,9 +128,9 @@ public final class DoseCurve {
      */
     public record Passing(String holder, int place, double equivalents) {}
 
-    private double crossing(double fraction, int holder, int place, double below, double atOrAbove) {
-        DoubleUnaryOperator beyond = equivalents -> solve(equivalents).taken(holder, place) - fraction;
-        if (beyond.applyAsDouble(atOrAbove) == 0) {
+    private double crossing(double level, ToDoubleFunction<DosePoint> value, double below, double atOrAbove) {
+        DoubleUnaryOperator beyond = equivalents -> value.applyAsDouble(solve(equivalents)) - level;
+        if (below == atOrAbove || beyond.applyAsDouble(atOrAbove) == 0) {
             return atOrAbove;
         }
         return new BrentSolver(CROSSING_ACCURACY).solve(200, beyond::applyAsDouble, below, atOrAbove);

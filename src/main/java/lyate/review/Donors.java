@@ -35,17 +35,22 @@ final class Donors {
      * @throws ReviewException where the substrate has no proton to give, or none with a known pKa
      */
     List<Donor> of(Step step, WorkingBase base) throws ReviewException {
-        Molecule substrate = step.substrate();
+        List<Donor> donors = of(step.substrate(), step, base);
+        if (donors.isEmpty()) {
+            throw new ReviewException("the substrate has no proton whose pKa can be set against " + base.name());
+        }
+        return donors;
+    }
+
+    /** The same for any molecule in the flask; may be empty. */
+    List<Donor> of(Molecule molecule, Step step, WorkingBase base) {
         ScaleChoice scale = new ScaleChoice(step.solvent());
         double kelvin = step.temperatureCelsius() + 273.15;
         List<Donor> donors = new ArrayList<>();
-        for (ProtonSite site : finder.sites(substrate, Role.ACID)) {
-            scale.compare(base.pKa(), base.strong(), medium -> acidity.acidity(substrate, site, medium), site.siteClass().family())
-                    .ifPresent(comparison -> donors.add(new Donor(site, substrate.label(site.atom()), comparison,
+        for (ProtonSite site : finder.sites(molecule, Role.ACID)) {
+            scale.compare(base.pKa(), base.strong(), medium -> acidity.acidity(molecule, site, medium), site.siteClass().family())
+                    .ifPresent(comparison -> donors.add(new Donor(site, molecule.label(site.atom()), comparison,
                             atTemperature(comparison, site, base, kelvin), 0)));
-        }
-        if (donors.isEmpty()) {
-            throw new ReviewException("the substrate has no proton whose pKa can be set against " + base.name());
         }
         donors.sort(Comparator.comparingDouble(Donor::effectiveLogK).reversed());
         return donors;

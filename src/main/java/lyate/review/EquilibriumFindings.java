@@ -27,7 +27,7 @@ final class EquilibriumFindings {
     static List<FindingRule> rules() {
         return List.of(EquilibriumFindings::unintended, EquilibriumFindings::secondEquivalent,
                 EquilibriumFindings::doseShort, EquilibriumFindings::excess, EquilibriumFindings::tooWeak,
-                EquilibriumFindings::levelled, EquilibriumFindings::moisture, EquilibriumFindings::slow);
+                EquilibriumFindings::levelled, EquilibriumFindings::moisture, EquilibriumFindings::partner, EquilibriumFindings::slow);
     }
 
     private static List<Finding> unintended(Situation situation) {
@@ -123,6 +123,16 @@ final class EquilibriumFindings {
                 say("%.0f ppm of water in %s use up %.0f %% of the base.", situation.step().waterPpm(),
                         situation.step().solvent().name(), spent),
                 List.of(say("substrate at %.3g mol/L", situation.step().concentrationMolar()))));
+    }
+
+    private static List<Finding> partner(Situation situation) {
+        double taken = situation.shares().percentOfPartnerTaken();
+        if (taken <= LEFT_ALONE_PERCENT + smallExcess(situation) || situation.workingBase().levelled()) {
+            return List.of();
+        }
+        return List.of(finding(CAUTION, FindingKind.PARTNER_CONSUMED, situation.intended(),
+                say("The partner has acidic protons of its own: %.0f %% of it loses one if it is there while the base is.", taken),
+                List.of("as much of it as of the substrate")));
     }
 
     private static List<Finding> slow(Situation situation) {

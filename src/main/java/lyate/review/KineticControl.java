@@ -55,13 +55,21 @@ final class KineticControl {
         for (Order order : byLoser) {
             Donor winner = find(moved, order.winner());
             Donor loser = find(moved, order.loser());
-            double needed = loser.effectiveLogK() + LEAD + SAFE * Math.hypot(sigma(winner), sigma(loser)) - winner.effectiveLogK();
+            double wanted = loser.effectiveLogK() + LEAD + SAFE * Math.hypot(sigma(winner), sigma(loser));
+            double needed = Math.min(wanted, belowStronger(moved, winner, loser)) - winner.effectiveLogK();
             if (needed > 0) {
                 moved.set(moved.indexOf(winner), winner.withAdvantage(winner.advantage() + needed));
             }
         }
         moved.sort(Comparator.comparingDouble(Donor::effectiveLogK).reversed());
         return moved;
+    }
+
+    /** An order of two sites says nothing of a third that is more acidic than both: the winner stays behind it. */
+    private static double belowStronger(List<Donor> donors, Donor winner, Donor loser) {
+        double stronger = Math.max(winner.effectiveLogK(), loser.effectiveLogK());
+        return donors.stream().filter(donor -> donor != winner && donor != loser && donor.effectiveLogK() > stronger)
+                .mapToDouble(donor -> donor.effectiveLogK() - VerdictRule.CLEAR).min().orElse(Double.POSITIVE_INFINITY);
     }
 
     private static double sigma(Donor donor) {

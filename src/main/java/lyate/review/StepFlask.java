@@ -26,52 +26,82 @@ final class StepFlask {
     private static final String BASE = "base";
     private static final String SOLVENT = "solvent";
     private static final String WATER = "water";
+    private static final String PARTNER = "partner";
     /** Where the working base stands on the common axis; any number would do. */
     private static final double REFERENCE = 0;
     /** Molar mass of water, g/mol. */
     private static final double WATER_MOLAR_MASS = 18.015;
 
-    private StepFlask() {}
+    private final Step step;
+    private final WorkingBase base;
+    private final SubstrateProtons substrate;
+    private final Optional<SubstrateProtons> partner;
+    private final Optional<Double> logKWater;
+    private final double toTemperature;
 
     /**
-     * Where the protons are at equilibrium.
+     * A flask ready to be filled.
      *
-     * @param protons   the substrate's
-     * @param donors    the same by site
+     * @param substrate its protons
+     * @param partner   those of the partner, where the step names one; there is as much of it as of the substrate
      * @param logKWater log10 K of the working base against water at 25 degrees C
      */
-    static ProtonShares settle(Step step, WorkingBase base, SubstrateProtons protons, List<Donor> donors, Optional<Double> logKWater) {
-        double kelvin = step.temperatureCelsius() + 273.15;
-        double toTemperature = Flask.ROOM_KELVIN / kelvin;
+    StepFlask(Step step, WorkingBase base, SubstrateProtons substrate, Optional<SubstrateProtons> partner, Optional<Double> logKWater) {
+        this.step = step;
+        this.base = base;
+        this.substrate = substrate;
+        this.partner = partner;
+        this.logKWater = logKWater;
+        this.toTemperature = Flask.ROOM_KELVIN / (step.temperatureCelsius() + 273.15);
+    }
+
+    /** Where the protons are at the amounts of the step. */
+    ProtonShares settle(List<Donor> donors) {
+        Equilibrium settled = ProtonBalance.solve(at(step.equivalents()));
+        Map<String, Double> taken = new LinkedHashMap<>();
+        donors.forEach(donor -> taken.put(donor.label(), 100 * taken(settled, donor)));
+        double partnerTaken = partner.map(there -> 100 * settled.of(PARTNER).deprotonated(0)).orElse(0.0);
+        return new ProtonShares(taken, partnerTaken, spentOn(WATER, settled), spentOn(SOLVENT, settled));
+    }
+
+    /** Share of the substrate molecules whose site has lost a proton, 0 to 1. */
+    double taken(Equilibrium settled, Donor donor) {
+        HolderState state = settled.of(SUBSTRATE);
+        return Math.min(1, substrate.placesOf(donor).stream().mapToDouble(state::deprotonated).sum());
+    }
+
+    /** The flask with that many moles of base per mole of substrate; the holders keep their order. */
+    Flask at(double equivalents) {
         List<ProtonHolder> holders = new ArrayList<>();
-        holders.add(protons.holder(SUBSTRATE, step.concentrationMolar(), REFERENCE));
-        holders.add(baseHolder(step, base, toTemperature));
-        logKWater.ifPresent(logK -> holders.add(ProtonHolder.acid(WATER, waterMolar(step), placed(logK * toTemperature))));
+        holders.add(substrate.holder(SUBSTRATE, step.concentrationMolar(), REFERENCE));
+        holders.add(baseHolder(baseMolar(equivalents)));
+        logKWater.ifPresent(logK -> holders.add(ProtonHolder.acid(WATER, waterMolar(), placed(logK * toTemperature))));
         if (!base.levelled()) {
             base.logKSolvent().ifPresent(logK ->
                     holders.add(ProtonHolder.acid(SOLVENT, step.solvent().molarity(), placed(logK * toTemperature))));
         }
-        return shares(ProtonBalance.solve(new Flask(holders, kelvin, step.solvent().scale().id())), protons, donors, baseMolar(step));
+        partner.ifPresent(there -> holders.add(there.holder(PARTNER, step.concentrationMolar(), REFERENCE)));
+        return new Flask(holders, step.temperatureCelsius() + 273.15, step.solvent().scale().id());
     }
 
     /** Protons that the base takes in its first stage, mol/L. */
-    private static double baseMolar(Step step) {
-        return step.concentrationMolar() * step.equivalents() * step.base().protonsPerFormula();
+    private double baseMolar(double equivalents) {
+        return step.concentrationMolar() * equivalents * step.base().protonsPerFormula();
     }
 
     /** The base with its further stages, where the table has them: carbonate goes on to take a second proton. */
-    private static ProtonHolder baseHolder(Step step, WorkingBase base, double toTemperature) {
+    private ProtonHolder baseHolder(double molar) {
         Optional<KnownPKa> first = step.base().pKa(Medium.WATER);
         List<KnownPKa> further = step.base().furtherStages();
         if (base.levelled() || first.isEmpty() || further.isEmpty()) {
-            return ProtonHolder.base(BASE, baseMolar(step), REFERENCE);
+            return ProtonHolder.base(BASE, molar, REFERENCE);
         }
         double[] stages = new double[further.size() + 1];
         for (int i = 0; i < further.size(); i++) {
             stages[further.size() - 1 - i] = REFERENCE + (further.get(i).pKa() - first.get().pKa()) * toTemperature;
         }
         stages[further.size()] = REFERENCE;
-        return ProtonHolder.stages(BASE, baseMolar(step), 0, stages);
+        return ProtonHolder.stages(BASE, molar, 0, stages);
     }
 
     private static double placed(double logK) {
@@ -80,23 +110,14 @@ final class StepFlask {
     }
 
     /** Water in the solvent, mol/L; in water itself the solvent stands for it. */
-    static double waterMolar(Step step) {
+    private double waterMolar() {
         return step.waterPpm() * 1e-6 * 1000 * step.solvent().density() / WATER_MOLAR_MASS;
     }
 
-    private static ProtonShares shares(Equilibrium settled, SubstrateProtons protons, List<Donor> donors, double baseMolar) {
-        Map<String, Double> taken = new LinkedHashMap<>();
-        HolderState substrate = settled.of(SUBSTRATE);
-        for (Donor donor : donors) {
-            double lost = protons.placesOf(donor).stream().mapToDouble(substrate::deprotonated).sum();
-            taken.put(donor.label(), 100 * Math.min(1, lost));
-        }
-        return new ProtonShares(taken, spentOn(WATER, settled, baseMolar), spentOn(SOLVENT, settled, baseMolar));
-    }
-
-    private static double spentOn(String name, Equilibrium settled, double baseAmount) {
+    private double spentOn(String name, Equilibrium settled) {
+        double baseMolar = baseMolar(step.equivalents());
         return settled.flask().holders().stream().filter(holder -> holder.name().equals(name))
                 .mapToDouble(holder -> holder.amount() * settled.of(name).deprotonated(0))
-                .map(taken -> baseAmount > 0 ? 100 * Math.min(1, taken / baseAmount) : 0).findFirst().orElse(0);
+                .map(taken -> baseMolar > 0 ? 100 * Math.min(1, taken / baseMolar) : 0).findFirst().orElse(0);
     }
 }

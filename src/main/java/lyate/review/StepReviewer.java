@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
 import java.util.OptionalInt;
 import lyate.acidity.AcidityEstimator;
 import lyate.acidity.IonisationEnthalpies;
@@ -56,21 +57,42 @@ public final class StepReviewer implements Reviewer {
 
     @Override
     public Review review(Step step) throws ReviewException {
+        Contest contest = contest(step);
+        ProtonShares shares = contest.flask().settle(contest.sites());
+        List<Transfer> transfers = new Transfers(step, shares).of(contest.sites());
+        List<SideReaction> reactions = sideReactions(step, contest.base(), transfers, contest.intended());
+
+        World world = World.of(step, contest.base(), contest.protons(), contest.sites(), contest.intended());
+        Map<Verdict, Double> probabilities = withSideReactions(odds.of(contest.sites(), world), reactions);
+        Situation situation = new Situation(step, contest.base(), contest.sites(), contest.intended(), shares, contest.orders(),
+                VerdictOdds.verdict(probabilities));
+        return new ReviewWriter(situation, world, probabilities, transfers).write(findings(situation, reactions));
+    }
+
+    /**
+     * How far every site goes as more base goes in; the step's own equivalents do not matter.
+     *
+     * @throws ReviewException as {@link #review(Step)}
+     */
+    public DoseResponse doseResponse(Step step) throws ReviewException {
+        Contest contest = contest(step);
+        return DoseResponse.of(contest.flask(), contest.sites(), contest.intended());
+    }
+
+    /** Who competes for the base in a step: the sites, the one meant first to ask about, and the flask they are in. */
+    private record Contest(WorkingBase base, List<Donor> sites, List<KineticControl.Order> orders, Donor intended,
+                           SubstrateProtons protons, StepFlask flask) {}
+
+    private Contest contest(Step step) throws ReviewException {
         WorkingBase base = workingBases.of(step);
         List<Donor> atEquilibrium = donors.of(step, base);
         List<KineticControl.Order> orders = kinetics.orders(step, base, atEquilibrium);
         List<Donor> sites = KineticControl.ahead(atEquilibrium, orders);
-        Donor intended = Donors.intended(step, sites);
         SubstrateProtons protons = new SubstrateProtons(step.substrate(), coupling, sites);
-        ProtonShares shares = StepFlask.settle(step, base, protons, sites, workingBases.logK(base, water, step.solvent()));
-        List<Transfer> transfers = new Transfers(step, shares).of(sites);
-        List<SideReaction> reactions = sideReactions(step, base, transfers, intended);
-
-        World world = World.of(step, base, protons, sites, intended);
-        Map<Verdict, Double> probabilities = withSideReactions(odds.of(sites, world), reactions);
-        Situation situation = new Situation(step, base, sites, intended, shares, orders,
-                VerdictOdds.verdict(probabilities));
-        return new ReviewWriter(situation, world, probabilities, transfers).write(findings(situation, reactions));
+        Optional<SubstrateProtons> partner = step.partner().map(molecule -> new SubstrateProtons(molecule, coupling, donors.of(molecule, step, base)));
+        StepFlask flask = new StepFlask(step, base, protons, partner.filter(there -> !there.isEmpty()),
+                workingBases.logK(base, water, step.solvent()));
+        return new Contest(base, sites, orders, Donors.intended(step, sites), protons, flask);
     }
 
     private List<SideReaction> sideReactions(Step step, WorkingBase base, List<Transfer> transfers, Donor intended) {

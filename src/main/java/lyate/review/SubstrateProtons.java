@@ -42,6 +42,11 @@ final class SubstrateProtons {
         }
     }
 
+    /** Whether there is no proton to give. */
+    boolean isEmpty() {
+        return places.isEmpty();
+    }
+
     /** pKa units by which the loss of one site's proton raises the pKa of another, at the temperature of the step. */
     double raise(Donor gone, Donor other) {
         return coupling.shift(substrate, gone.site(), other.site(), gone.comparison().donor().medium()) * toTemperature(gone);
