@@ -20,7 +20,12 @@ public final class ReviewText implements ResultWriter<Review> {
 
     @Override
     public void write(Review review) throws IOException {
+        List<String> stops = review.findings().stream().filter(finding -> finding.severity() == Finding.Severity.STOP)
+                .map(finding -> finding.kind().code()).distinct().toList();
         line("%s (%s %%): %s", review.verdict().code(), Numbers.percent(review.probability()), review.verdict().meaning());
+        if (!stops.isEmpty()) {
+            line("stop: %s (see below)", String.join(", ", stops));
+        }
         line("");
         step(review);
         line("");

@@ -10,8 +10,8 @@ import lyate.stock.Solvent;
 import lyate.stock.Stockroom;
 
 /**
- * Ranks the whole stockroom for one deprotonation: by the probability that the base does just that, then by what speaks
- * against it, then by how little stronger than needed it is.
+ * Ranks the whole stockroom for one deprotonation: by the probability that the base does just that, then by whether it
+ * dissolves and by what speaks against it, then by how little stronger than needed it is.
  */
 public final class BaseChoice {
 
@@ -46,7 +46,7 @@ public final class BaseChoice {
         if (ranked.isEmpty() && refusal.isPresent()) {
             throw refusal.get();
         }
-        ranked.sort(Comparator.comparing(RankedBase::suits).reversed()
+        ranked.sort(Comparator.comparing(RankedBase::suits).reversed().thenComparing(RankedBase::isSlow)
                 .thenComparing(Comparator.comparingLong((RankedBase choice) -> Math.round(selective(choice) / SAME_PROBABILITY)).reversed())
                 .thenComparing(RankedBase::stops).thenComparing(RankedBase::cautions)
                 .thenComparing(choice -> choice.review().logK()));
@@ -83,7 +83,8 @@ public final class BaseChoice {
     private static String why(Review review) {
         String numbers = String.format(Locale.ROOT, "log K %.1f at %s, probability %.0f %%", review.logK(), review.intendedSite(),
                 100 * review.probability());
-        String against = review.findings().stream().filter(finding -> finding.severity() != Finding.Severity.NOTE).findFirst()
+        String against = review.findings().stream()
+                .filter(finding -> finding.severity() != Finding.Severity.NOTE || finding.kind() == FindingKind.SLOW_TRANSFER).findFirst()
                 .map(finding -> "; " + finding.sentence()).orElse("");
         return review.verdict().meaning() + " (" + numbers + ")" + against;
     }

@@ -26,6 +26,11 @@ public record RankedBase(Base base, Review review, String why) {
         return count(Finding.Severity.CAUTION);
     }
 
+    /** Whether the tables say that the base hardly reacts there, for example because it does not dissolve. */
+    public boolean isSlow() {
+        return review.findings().stream().anyMatch(finding -> finding.kind() == FindingKind.SLOW_TRANSFER);
+    }
+
     private long count(Finding.Severity severity) {
         return review.findings().stream().filter(finding -> finding.severity() == severity).count();
     }
