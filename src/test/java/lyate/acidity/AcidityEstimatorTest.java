@@ -80,6 +80,13 @@ class AcidityEstimatorTest {
     }
 
     @Test
+    void whereNoneIsNearItsDataTheLastAnswers() {
+        AcidityEstimator estimator = new AcidityEstimator(MeasuredAcidities.none(), TRANSFER,
+                List.of(always(5, 1.9, Medium.WATER), always(6, 2, Medium.WATER)));
+        assertEquals(6, acidity(estimator, "CC(=O)O", "O4", Medium.WATER).orElseThrow().pKa());
+    }
+
+    @Test
     void withoutMeasuredTheTableIsIgnored() {
         Acidity acetic = acidity(ESTIMATOR.withoutMeasured(), "CC(=O)O", "O4", Medium.WATER).orElseThrow();
         assertEquals(8, acetic.pKa(), "the class value");
