@@ -5,9 +5,11 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import lyate.flask.Completion;
 import lyate.flask.Equilibrium;
 import lyate.flask.Flask;
 import lyate.flask.HolderState;
+import lyate.flask.IrreversibleBase;
 import lyate.flask.ProtonBalance;
 import lyate.flask.ProtonHolder;
 import lyate.flask.ProtonPlace;
@@ -70,18 +72,25 @@ final class StepFlask {
         return Math.min(1, substrate.placesOf(donor).stream().mapToDouble(state::deprotonated).sum());
     }
 
-    /** The flask with that many moles of base per mole of substrate; the holders keep their order. */
+    /**
+     * The flask with that many moles of base per mole of substrate; the holders keep their order. A base whose protonation
+     * cannot be undone has taken its protons already.
+     */
     Flask at(double equivalents) {
         List<ProtonHolder> holders = new ArrayList<>();
         holders.add(substrate.holder(SUBSTRATE, step.concentrationMolar(), REFERENCE));
-        holders.add(baseHolder(baseMolar(equivalents)));
+        boolean completes = step.base().family().irreversible() && !base.levelled();
+        if (!completes) {
+            holders.add(baseHolder(baseMolar(equivalents)));
+        }
         logKWater.ifPresent(logK -> holders.add(ProtonHolder.acid(WATER, waterMolar(), placed(logK * toTemperature))));
         if (!base.levelled()) {
             base.logKSolvent().ifPresent(logK ->
                     holders.add(ProtonHolder.acid(SOLVENT, step.solvent().molarity(), placed(logK * toTemperature))));
         }
         partner.ifPresent(there -> holders.add(there.holder(PARTNER, step.concentrationMolar(), REFERENCE)));
-        return new Flask(holders, step.temperatureCelsius() + 273.15, step.solvent().scale().id());
+        Flask flask = new Flask(holders, step.temperatureCelsius() + 273.15, step.solvent().scale().id());
+        return completes ? Completion.of(flask, new IrreversibleBase(BASE, baseMolar(equivalents), REFERENCE)).after() : flask;
     }
 
     /** Protons that the base takes in its first stage, mol/L. */

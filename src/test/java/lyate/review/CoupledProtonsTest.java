@@ -43,6 +43,13 @@ class CoupledProtonsTest {
         assertTrue(taken > 99, "taken " + taken + " %");
     }
 
+    /** Hydrogen does not come back (common practice): what the hydride takes, it takes mole for mole. */
+    @Test
+    void aHydrideTakesItsProtonsMoleForMole() throws Exception {
+        assertEquals(70, review("O=C1CCCCC1", "C3", "NaH", 0.7, "THF", 25).intendedPercent(), 1);
+        assertEquals(100, review("Oc1ccccc1", "O1", "NaH", 1.0, "THF", 25).intendedPercent(), 1);
+    }
+
     private static Review review(String substrate, String site, String base, double equivalents, String solvent, double celsius) throws Exception {
         return REVIEWER.review(new Step("1", new MoleculeReader().read(substrate), Optional.of(site), STOCKROOM.base(base),
                 equivalents, STOCKROOM.solvent(solvent), celsius, 0.2, 20, Optional.empty()));
