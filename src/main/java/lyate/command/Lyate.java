@@ -1,5 +1,6 @@
 package lyate.command;
 
+import java.awt.GraphicsEnvironment;
 import lyate.table.TableFolders;
 import lyate.window.WorkbenchFrame;
 import picocli.CommandLine;
@@ -11,7 +12,10 @@ public final class Lyate {
 
     /** Runs the command line, or opens the window where there are no arguments. */
     public static void main(String[] arguments) {
-        if (arguments.length == 0) {
+        if (arguments.length == 0 && GraphicsEnvironment.isHeadless()) {
+            System.err.println("There is no display for the window; 'lyate --help' lists the commands that need none.");
+            System.exit(Failures.SOME_INPUT_NOT_USED);
+        } else if (arguments.length == 0) {
             WorkbenchFrame.open(TableFolders.packaged());
         } else {
             System.exit(run(Terminal.ofSystem(), arguments));
