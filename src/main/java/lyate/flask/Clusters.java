@@ -13,7 +13,8 @@ import java.util.stream.IntStream;
  * <p>Up to {@value #LARGEST} coupled places nothing is lost. Beyond that the most strongly coupled places stay together
  * and a weaker coupling that crosses clusters is charged in full to the less acidic of its two places: it loses its
  * proton second and so meets the charge the first one left. That is exact where the two pKa values lie far apart; where
- * they do not, a cut coupling misplaces a pKa by at most its own size.
+ * they do not, a cut coupling misplaces a pKa by about its own size; in long chains of strongly coupled places of like pKa the
+ * fractions themselves can be far off.
  */
 final class Clusters {
 
