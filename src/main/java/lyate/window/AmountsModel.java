@@ -4,24 +4,22 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
 import java.util.OptionalDouble;
-import javax.swing.table.AbstractTableModel;
 import lyate.bench.Amounts;
 import lyate.bench.Amounts.Spent;
 import lyate.review.Step;
 
 /** What to weigh and measure out, a row each. */
-final class AmountsModel extends AbstractTableModel {
-
-    private static final List<String> TITLES = List.of("What", "mmol", "g", "mL", "Remark");
+final class AmountsModel extends RowsModel<AmountsModel.Line> {
 
     /** A row as written. */
     record Line(String what, String milliMole, String grams, String milliLitre, String remark) {}
 
-    private List<Line> lines = List.of();
+    AmountsModel() {
+        super("What", "mmol", "g", "mL", "Remark");
+    }
 
     void show(Step step, Amounts amounts) {
-        lines = lines(step, amounts);
-        fireTableDataChanged();
+        showRows(lines(step, amounts));
     }
 
     static List<Line> lines(Step step, Amounts amounts) {
@@ -56,23 +54,8 @@ final class AmountsModel extends AbstractTableModel {
     }
 
     @Override
-    public int getRowCount() {
-        return lines.size();
-    }
-
-    @Override
-    public int getColumnCount() {
-        return TITLES.size();
-    }
-
-    @Override
-    public String getColumnName(int column) {
-        return TITLES.get(column);
-    }
-
-    @Override
     public Object getValueAt(int row, int column) {
-        Line line = lines.get(row);
+        Line line = row(row);
         return switch (column) {
             case 0 -> line.what();
             case 1 -> line.milliMole();

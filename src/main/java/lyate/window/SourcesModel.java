@@ -4,7 +4,6 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
 import java.util.TreeMap;
-import javax.swing.table.AbstractTableModel;
 import lyate.acidity.Acidity.Relative;
 import lyate.review.Finding;
 import lyate.review.Review;
@@ -13,18 +12,17 @@ import lyate.stock.KnownPKa;
 import lyate.stock.Medium;
 
 /** Every value the review uses, with where it comes from. */
-final class SourcesModel extends AbstractTableModel {
-
-    private static final List<String> TITLES = List.of("Used for", "Value", "Source");
+final class SourcesModel extends RowsModel<SourcesModel.Use> {
 
     /** One used value. */
     record Use(String what, String value, String source) {}
 
-    private List<Use> uses = List.of();
+    SourcesModel() {
+        super("Used for", "Value", "Source");
+    }
 
     void show(Shown shown) {
-        uses = uses(shown);
-        fireTableDataChanged();
+        showRows(uses(shown));
     }
 
     static List<Use> uses(Shown shown) {
@@ -51,23 +49,8 @@ final class SourcesModel extends AbstractTableModel {
     }
 
     @Override
-    public int getRowCount() {
-        return uses.size();
-    }
-
-    @Override
-    public int getColumnCount() {
-        return TITLES.size();
-    }
-
-    @Override
-    public String getColumnName(int column) {
-        return TITLES.get(column);
-    }
-
-    @Override
     public Object getValueAt(int row, int column) {
-        Use use = uses.get(row);
+        Use use = row(row);
         return column == 0 ? use.what() : column == 1 ? use.value() : use.source();
     }
 }
