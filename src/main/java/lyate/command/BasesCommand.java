@@ -53,7 +53,7 @@ final class BasesCommand implements Callable<Integer> {
         StepReader reader = new StepReader(MoleculeReader.load(folders), stockroom);
         try {
             Step asked = reader.read(step.row(stockroom.bases().get(0).name()));
-            write(new BaseChoice(StepReviewer.load(folders), stockroom).rank(asked));
+            write(new BaseChoice(StepReviewer.load(folders, stockroom), stockroom).rank(asked));
             return 0;
         } catch (RowException e) {
             terminal.tell(StepOptions.words(e));

@@ -53,10 +53,11 @@ final class CheckCommand implements Callable<Integer> {
     @Override
     public Integer call() throws IOException {
         TableFolders folders = tables.folders();
-        StepReader reader = new StepReader(MoleculeReader.load(folders), Stockroom.load(folders));
+        Stockroom stockroom = Stockroom.load(folders);
+        StepReader reader = new StepReader(MoleculeReader.load(folders), stockroom);
         SheetRow row = step.row(base);
         try {
-            StepReviewer reviewer = StepReviewer.load(folders);
+            StepReviewer reviewer = StepReviewer.load(folders, stockroom);
             Review review = reviewer.review(reader.read(row));
             String title = review.step().base().name() + " in " + review.step().solvent().name();
             write(row, review, reviewer.doseResponse(review.step()), () -> ReportContext.of(title, ProgramVersion.text(), folders, reviewer));

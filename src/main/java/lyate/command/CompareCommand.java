@@ -87,9 +87,10 @@ final class CompareCommand implements Callable<Integer> {
     }
 
     private List<ReviewedRow> reviewed(Path sheet, TableFolders folders) throws IOException, SheetException {
-        StepReader steps = new StepReader(MoleculeReader.load(folders), Stockroom.load(folders));
+        Stockroom stockroom = Stockroom.load(folders);
+        StepReader steps = new StepReader(MoleculeReader.load(folders), stockroom);
         List<ReviewedRow> rows = new ArrayList<>();
-        new BatchReview(steps, StepReviewer.load(folders)).run(RouteSheet.read(sheet).rows().iterator(),
+        new BatchReview(steps, StepReviewer.load(folders, stockroom)).run(RouteSheet.read(sheet).rows().iterator(),
                 Runtime.getRuntime().availableProcessors(), row -> {
                     rows.add(row);
                     if (row.review().isEmpty()) {

@@ -72,8 +72,9 @@ final class ReviewCommand implements Callable<Integer> {
             throw new ParameterException(spec.commandLine(), "--threads: found " + workers + ", expected at least 1");
         }
         TableFolders folders = tables.folders();
-        StepReader steps = new StepReader(MoleculeReader.load(folders), Stockroom.load(folders));
-        Reviewer reviewer = StepReviewer.load(folders);
+        Stockroom stockroom = Stockroom.load(folders);
+        StepReader steps = new StepReader(MoleculeReader.load(folders), stockroom);
+        Reviewer reviewer = StepReviewer.load(folders, stockroom);
         BatchReview batch = new BatchReview(steps, reviewer);
         try (BufferedReader text = sheet.equals("-") ? terminal.reader() : Files.newBufferedReader(Path.of(sheet), StandardCharsets.UTF_8);
                 ResultTarget target = new ResultTarget(Optional.ofNullable(output), terminal);

@@ -12,7 +12,6 @@ import lyate.site.ProtonSite;
 import lyate.site.Role;
 import lyate.site.SiteFinder;
 import lyate.stock.Base;
-import lyate.stock.BaseFamily;
 import lyate.stock.KnownPKa;
 import lyate.stock.Medium;
 
@@ -33,15 +32,11 @@ final class BaseStrength {
         if (known.isPresent()) {
             return known;
         }
-        if (medium.equals(Medium.DMSO) && base.pKa(Medium.THF).isPresent() && isIonPairFamily(base.family())) {
+        if (medium.equals(Medium.DMSO) && base.pKa(Medium.THF).isPresent() && base.family().strong()) {
             // Common practice: lithium amide values in THF are set against DMSO values of the acids.
             return base.pKa(Medium.THF);
         }
         return estimated(base, medium);
-    }
-
-    private static boolean isIonPairFamily(BaseFamily family) {
-        return family.strong();
     }
 
     /** The most acidic proton of the conjugate acid. */

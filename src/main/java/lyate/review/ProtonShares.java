@@ -8,9 +8,8 @@ import java.util.Map;
  * @param percentTaken share of the substrate molecules whose site has lost a proton, by site label
  * @param percentOfPartnerTaken share of the partner's most acidic site that has lost its proton
  * @param percentOfBaseSpentOnWater share of the base that moisture uses up
- * @param percentOfSolventTaken share of the base that ends as the solvent's lyate ion
  */
-record ProtonShares(Map<String, Double> percentTaken, double percentOfPartnerTaken, double percentOfBaseSpentOnWater, double percentOfSolventTaken) {
+record ProtonShares(Map<String, Double> percentTaken, double percentOfPartnerTaken, double percentOfBaseSpentOnWater) {
 
     ProtonShares {
         percentTaken = Map.copyOf(percentTaken);

@@ -63,7 +63,7 @@ final class StepFlask {
         Map<String, Double> taken = new LinkedHashMap<>();
         donors.forEach(donor -> taken.put(donor.label(), 100 * taken(settled, donor)));
         double partnerTaken = partner.map(there -> 100 * settled.of(PARTNER).deprotonated(0)).orElse(0.0);
-        return new ProtonShares(taken, partnerTaken, spentOn(WATER, settled), spentOn(SOLVENT, settled));
+        return new ProtonShares(taken, partnerTaken, spentOnWater(settled));
     }
 
     /** Share of the substrate molecules whose site has lost a proton, 0 to 1. */
@@ -123,10 +123,11 @@ final class StepFlask {
         return step.waterPpm() * 1e-6 * 1000 * step.solvent().density() / WATER_MOLAR_MASS;
     }
 
-    private double spentOn(String name, Equilibrium settled) {
+    /** Percent of the base that moisture uses up. */
+    private double spentOnWater(Equilibrium settled) {
         double baseMolar = baseMolar(step.equivalents());
-        return settled.flask().holders().stream().filter(holder -> holder.name().equals(name))
-                .mapToDouble(holder -> holder.amount() * settled.of(name).deprotonated(0))
+        return settled.flask().holders().stream().filter(holder -> holder.name().equals(WATER))
+                .mapToDouble(holder -> holder.amount() * settled.of(WATER).deprotonated(0))
                 .map(taken -> baseMolar > 0 ? 100 * Math.min(1, taken / baseMolar) : 0).findFirst().orElse(0);
     }
 }

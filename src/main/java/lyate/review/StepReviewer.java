@@ -51,7 +51,12 @@ public final class StepReviewer implements Reviewer {
      * @throws lyate.table.TableException naming every bad cell
      */
     public static StepReviewer load(TableFolders folders) {
-        return new StepReviewer(folders, Stockroom.load(folders), new SiteFinder(SiteClasses.load(folders)),
+        return load(folders, Stockroom.load(folders));
+    }
+
+    /** The same with a stockroom that is loaded already. */
+    public static StepReviewer load(TableFolders folders, Stockroom stockroom) {
+        return new StepReviewer(folders, stockroom, new SiteFinder(SiteClasses.load(folders)),
                 AcidityEstimator.load(folders));
     }
 
