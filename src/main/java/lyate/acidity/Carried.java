@@ -29,6 +29,6 @@ final class Carried {
         }
         contributions.add(new Contribution(text, Effect.MEDIUM, shift, List.of()));
         return new Acidity(pKa, sigma, to, Basis.TRANSFERRED, contributions, missing, value.relatives(),
-                value.source() + "; carried from " + value.medium().id() + " by " + path);
+                value.source() + "; carried from " + value.medium().symbol() + " by " + path);
     }
 }

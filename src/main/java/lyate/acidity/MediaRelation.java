@@ -76,10 +76,10 @@ public record MediaRelation(Medium from, Medium to, String family, double slope,
         return Math.max(0, Math.max(validFrom - pKa, pKa - validTo));
     }
 
-    /** For example {@code dmso = 1.62 x water + 4.8 (carboxylic-acid, +/- 0.5, n = 21)}. */
+    /** For example {@code DMSO = 1.62 x water + 4.8 (carboxylic-acid, +/- 0.5, n = 21)}. */
     @Override
     public String toString() {
-        return String.format(Locale.ROOT, "%s = %.2f x %s %s %.1f (%s, +/- %.1f, n = %d)", to.id(), slope, from.id(),
+        return String.format(Locale.ROOT, "%s = %.2f x %s %s %.1f (%s, +/- %.1f, n = %d)", to.symbol(), slope, from.symbol(),
                 intercept < 0 ? "-" : "+", Math.abs(intercept), family, standardError, pairs);
     }
 }

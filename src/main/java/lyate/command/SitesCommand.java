@@ -67,7 +67,7 @@ final class SitesCommand implements Callable<Integer> {
     @Override
     public Integer call() throws IOException {
         SiteSurvey survey = survey();
-        ResultWriter<Answer> writer = writer(survey.solvent().id());
+        ResultWriter<Answer> writer = writer(survey.solvent());
         AtomicInteger refused = new AtomicInteger();
         int threads = terminal.interactive() ? 1 : Runtime.getRuntime().availableProcessors();
         new OrderedWork(threads).run(questions(), survey::answer, answer -> {
@@ -97,11 +97,11 @@ final class SitesCommand implements Callable<Integer> {
         }
     }
 
-    private ResultWriter<Answer> writer(String solventId) throws IOException {
+    private ResultWriter<Answer> writer(Solvent asked) throws IOException {
         return switch (format) {
-            case TEXT -> new SiteText(terminal.outWriter(), solventId);
-            case CSV -> new SiteCsv(terminal.outWriter(), solventId);
-            case JSON -> new JsonList<>(terminal.outWriter(), answer -> SiteJson.describe(answer, solventId));
+            case TEXT -> new SiteText(terminal.outWriter(), asked.name());
+            case CSV -> new SiteCsv(terminal.outWriter(), asked.id());
+            case JSON -> new JsonList<>(terminal.outWriter(), answer -> SiteJson.describe(answer, asked.id()));
         };
     }
 

@@ -42,7 +42,7 @@ final class ChangeReasons {
             Set<String> media = new TreeSet<>();
             before.step().base().pKas().keySet().forEach(medium -> media.add(medium.id()));
             after.step().base().pKas().keySet().forEach(medium -> media.add(medium.id()));
-            media.forEach(id -> difference("pKa of the conjugate acid of " + after.step().base().name() + " in " + id,
+            media.forEach(id -> difference("pKa of the conjugate acid of " + after.step().base().name() + " in " + Words.medium(new Medium(id)),
                     value(before.step().base().pKa(new Medium(id))), value(after.step().base().pKa(new Medium(id)))));
         }
         if (before.step().substrate().canonicalKey().equals(after.step().substrate().canonicalKey())) {

@@ -42,13 +42,13 @@ public final class ReviewText implements ResultWriter<Review> {
             line("                 %s", warning);
         }
         line("  intended site  %s", review.intendedSite());
-        line("  first to go    %s", review.firstSite());
+        line("  first to go    %s", review.sideReactionWins() && review.firstSite().equals("none") ? "none: a side reaction takes the base" : review.firstSite());
         line("  base           %s, %s equiv", step.base().name(), Numbers.fixed(step.equivalents(), 2));
         line("  working base   %s", review.workingBase());
         line("  conditions     %s, %s °C, %s M, %s ppm water", step.solvent().name(), Numbers.fixed(step.temperatureCelsius(), 0),
                 Numbers.fixed(step.concentrationMolar(), 2), Numbers.fixed(step.waterPpm(), 0));
-        line("  log K          %s at the intended site; %s %% of it taken, at most %s %% of any other",
-                Numbers.fixed(review.logK(), 1), Numbers.fixed(review.intendedPercent(), 1), Numbers.fixed(review.otherPercent(), 1));
+        line("  log K          %s at the intended site; %s%s %% of it taken, at most %s %% of any other",
+                Numbers.fixed(review.logK(), 1), review.sideReactionWins() ? "the side reaction left aside, " : "", Numbers.fixed(review.intendedPercent(), 1), Numbers.fixed(review.otherPercent(), 1));
     }
 
     private void transfers(List<Transfer> transfers) throws IOException {

@@ -70,7 +70,7 @@ final class StepSection {
     private String whatGoes() {
         String first = review.firstSite().equals(review.intendedSite()) ? "The proton at " + review.intendedSite() + " goes first"
                 : "Meant: " + review.intendedSite() + "; first to go: " + review.firstSite();
-        return first + ". At " + review.intendedSite() + " log K is " + Words.signed(review.logK()) + " and "
+        return first + ". At " + review.intendedSite() + " log K is " + Words.signed(review.logK()) + " and " + (review.sideReactionWins() ? "the side reaction left aside, " : "")
                 + Words.percent(review.intendedPercent()) + " is taken; elsewhere at most " + Words.percent(review.otherPercent()) + ".";
     }
 

@@ -77,12 +77,7 @@ final class Words {
     }
 
     static String medium(Medium medium) {
-        return switch (medium.id()) {
-            case "dmso" -> "DMSO";
-            case "mecn" -> "MeCN";
-            case "thf" -> "THF";
-            default -> medium.id();
-        };
+        return medium.symbol();
     }
 
     /** For example {@code Wrong site}. */

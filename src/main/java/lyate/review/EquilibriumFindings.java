@@ -148,7 +148,7 @@ final class EquilibriumFindings {
 
     private static String compared(Donor donor) {
         return say("%s: pKa %.1f ± %.1f in %s against %.1f, log K %.1f", donor.label(), donor.comparison().donor().pKa(),
-                donor.comparison().donor().sigma(), donor.comparison().donor().medium().id(),
+                donor.comparison().donor().sigma(), donor.comparison().donor().medium().symbol(),
                 donor.comparison().acceptor().pKa(), donor.logK());
     }
 

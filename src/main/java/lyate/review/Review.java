@@ -14,8 +14,8 @@ import java.util.Map;
  * @param firstSite       label of the site whose proton goes first; {@code solvent}, {@code water} or {@code none}
  * @param workingBase     the base that is really in the flask, in words
  * @param logK            log10 K at the intended site against the working base
- * @param intendedPercent share of the intended protons taken at equilibrium
- * @param otherPercent    highest share taken at any other site of the substrate
+ * @param intendedPercent share of the intended protons taken at equilibrium, any side reaction left aside
+ * @param otherPercent    highest share taken at any other site of the substrate, likewise
  * @param transfers       every donor, most acidic first
  * @param findings        most severe first
  * @param explanation     which numbers and which rule gave the verdict, and what would change it
@@ -32,5 +32,10 @@ public record Review(Step step, Verdict verdict, double probability, Map<Verdict
         findings = List.copyOf(findings);
         explanation = List.copyOf(explanation);
         assumptions = List.copyOf(assumptions);
+    }
+
+    /** Whether a side reaction wins, so that the shares taken are what would be, were it left aside. */
+    public boolean sideReactionWins() {
+        return verdict == Verdict.INCOMPATIBLE;
     }
 }

@@ -24,7 +24,7 @@ final class ScaleFindings {
         }
         return List.of(new Finding(Severity.NOTE, FindingKind.SCALE_TRANSFER,
                 String.format(Locale.ROOT, "The pKa of %s in %s was carried over from another medium; its error grew to %.1f.",
-                        intended.label(), intended.comparison().donor().medium().id(), intended.comparison().donor().sigma()),
+                        intended.label(), intended.comparison().donor().medium().symbol(), intended.comparison().donor().sigma()),
                 List.of(intended.comparison().donor().source()), intended.site().equivalent(), RULE));
     }
 
@@ -36,8 +36,8 @@ final class ScaleFindings {
         Comparison other = intended.comparison().other().orElseThrow();
         return List.of(new Finding(Severity.NOTE, FindingKind.SCALES_DISAGREE,
                 String.format(Locale.ROOT, "The scales disagree at %s: log K is %.1f in %s, which decides, and %.1f in %s.",
-                        intended.label(), intended.comparison().logK(), intended.comparison().donor().medium().id(),
-                        other.logK(), other.donor().medium().id()),
+                        intended.label(), intended.comparison().logK(), intended.comparison().donor().medium().symbol(),
+                        other.logK(), other.donor().medium().symbol()),
                 List.of(intended.comparison().reason(), other.reason()), intended.site().equivalent(), RULE));
     }
 }

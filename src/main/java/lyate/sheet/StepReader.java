@@ -30,12 +30,12 @@ public final class StepReader {
 
     private final MoleculeReader molecules;
     private final Stockroom stockroom;
-    private final ReactionReader reactions;
+    /** Made for the first reaction: it looks at everything on the shelf, and most sheets have none. */
+    private ReactionReader reactions;
 
     public StepReader(MoleculeReader molecules, Stockroom stockroom) {
         this.molecules = molecules;
         this.stockroom = stockroom;
-        this.reactions = new ReactionReader(molecules, stockroom);
     }
 
     /**
@@ -70,11 +70,18 @@ public final class StepReader {
             return Optional.empty();
         }
         try {
-            return Optional.of(reactions.read(text));
+            return Optional.of(reactions().read(text));
         } catch (MoleculeException e) {
             problems.add(new Problem(SheetColumn.REACTION, e.getMessage()));
             return Optional.empty();
         }
+    }
+
+    private synchronized ReactionReader reactions() {
+        if (reactions == null) {
+            reactions = new ReactionReader(molecules, stockroom);
+        }
+        return reactions;
     }
 
     private Molecule substrate(SheetRow row, List<Problem> problems) {

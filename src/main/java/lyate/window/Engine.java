@@ -6,8 +6,10 @@ import java.util.concurrent.CompletionException;
 import java.util.function.Consumer;
 import javax.swing.SwingUtilities;
 import lyate.bench.Enthalpies;
+import lyate.molecule.MoleculeReader;
 import lyate.review.Reviewer;
 import lyate.review.StepReviewer;
+import lyate.sheet.StepReader;
 import lyate.stock.Base;
 import lyate.stock.Medium;
 import lyate.stock.Solvent;
@@ -22,33 +24,37 @@ import lyate.table.TableFolders;
 final class Engine {
 
     private final TableFolders folders;
+    private final CompletableFuture<MoleculeReader> molecules;
     private final CompletableFuture<Stockroom> stockroom;
+    private final CompletableFuture<StepReader> steps;
     private final CompletableFuture<Reviewer> reviewer;
     private final CompletableFuture<Enthalpies> enthalpies;
 
-    private Engine(TableFolders folders, CompletableFuture<Stockroom> stockroom, CompletableFuture<Reviewer> reviewer,
-                   CompletableFuture<Enthalpies> enthalpies) {
+    private Engine(TableFolders folders, CompletableFuture<MoleculeReader> molecules, CompletableFuture<Stockroom> stockroom,
+                   CompletableFuture<Reviewer> reviewer, CompletableFuture<Enthalpies> enthalpies) {
         this.folders = folders;
+        this.molecules = molecules;
         this.stockroom = stockroom;
+        this.steps = molecules.thenCombine(stockroom, StepReader::new);
         this.reviewer = reviewer;
         this.enthalpies = enthalpies;
     }
 
     /** An engine whose parts are there already. */
     Engine(TableFolders folders, Stockroom stockroom, Reviewer reviewer, Enthalpies enthalpies) {
-        this(folders, CompletableFuture.completedFuture(stockroom), CompletableFuture.completedFuture(reviewer),
+        this(folders, CompletableFuture.completedFuture(MoleculeReader.load(folders)), CompletableFuture.completedFuture(stockroom), CompletableFuture.completedFuture(reviewer),
                 CompletableFuture.completedFuture(enthalpies));
     }
 
     /** Starts reading the tables and returns at once. */
     static Engine load(TableFolders folders) {
-        return new Engine(folders, CompletableFuture.supplyAsync(() -> Stockroom.load(folders)),
+        return new Engine(folders, CompletableFuture.supplyAsync(() -> MoleculeReader.load(folders)), CompletableFuture.supplyAsync(() -> Stockroom.load(folders)),
                 CompletableFuture.supplyAsync(() -> StepReviewer.load(folders)), CompletableFuture.supplyAsync(() -> Enthalpies.load(folders)));
     }
 
     /** Tells, on the event thread, why the tables cannot be read; never called where they can. */
     void onFailure(Consumer<String> told) {
-        CompletableFuture.allOf(stockroom, reviewer, enthalpies).whenComplete((nothing, failure) -> {
+        CompletableFuture.allOf(molecules, stockroom, reviewer, enthalpies).whenComplete((nothing, failure) -> {
             if (failure != null) {
                 String words = String.valueOf(failure instanceof CompletionException ? failure.getCause().getMessage() : failure.getMessage());
                 SwingUtilities.invokeLater(() -> told.accept(words));
@@ -59,6 +65,16 @@ final class Engine {
     /** Where the tables are. */
     TableFolders folders() {
         return folders;
+    }
+
+    /** What turns text into a molecule. */
+    MoleculeReader molecules() {
+        return molecules.join();
+    }
+
+    /** What turns a row of a sheet into a step. */
+    StepReader steps() {
+        return steps.join();
     }
 
     /** What there is to choose from. */

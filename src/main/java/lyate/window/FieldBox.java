@@ -17,6 +17,7 @@ final class FieldBox extends JPanel {
     private final JTextField text = new JTextField();
     private final HintLine line;
     private final int width;
+    private String usual = "";
     private boolean quiet;
 
     /** @param width width at 100 %, already scaled */
@@ -91,10 +92,17 @@ final class FieldBox extends JPanel {
         }
     }
 
-    /** Up and down keys change the last digit written; a bare number moves by a sensible step. */
+    /** Says in grey what an empty field stands for. */
+    void setUsual(double value) {
+        usual = BigDecimal.valueOf(value).stripTrailingZeros().toPlainString();
+        text.putClientProperty("JTextField.placeholderText", usual);
+        text.repaint();
+    }
+
+    /** Up and down keys move the number, or the usual one where none is written, by a sensible step. */
     private void stepBy(int steps) {
         try {
-            BigDecimal value = new BigDecimal(text.getText().strip());
+            BigDecimal value = new BigDecimal(text.getText().isBlank() ? usual : text.getText().strip());
             BigDecimal step = switch (kind) {
                 case TEMPERATURE -> BigDecimal.valueOf(5);
                 case WATER -> BigDecimal.TEN;

@@ -63,13 +63,13 @@ final class FindingsPanel extends JPanel {
         safety.setBackground(theme.color("line.soft"));
         column.add(new VerdictHeader(review, theme.palette()));
         List<Finding> chemistry = review.findings().stream().filter(finding -> !SAFETY.contains(finding.kind())).toList();
-        if (!review.explanation().isEmpty()) {
-            column.add(section("Why, and what would change it"));
-            column.add(lines(review.explanation()));
-        }
         column.add(section(chemistry.isEmpty() ? "No findings" : "Findings"));
         for (Finding finding : chemistry) {
             column.add(new FindingRow(finding, review.step().substrate(), theme, finding.severity() == Finding.Severity.STOP, highlight));
+        }
+        if (!review.explanation().isEmpty()) {
+            column.add(section("Why, and what would change it"));
+            column.add(lines(review.explanation()));
         }
         if (!review.assumptions().isEmpty()) {
             column.add(section("Assumed"));

@@ -12,6 +12,7 @@ import javax.swing.UIManager;
 final class Pane extends JPanel {
 
     private final JLabel heading;
+    private final Veil veil;
     private final Theme theme;
     private final String title;
 
@@ -32,7 +33,8 @@ final class Pane extends JPanel {
             top.add(tool, BorderLayout.EAST);
         }
         add(top, BorderLayout.NORTH);
-        add(content);
+        veil = new Veil(content, theme);
+        add(veil);
         dress();
         theme.onChange(this::dress);
     }
@@ -40,6 +42,11 @@ final class Pane extends JPanel {
     /** A remark behind the title; empty for none. */
     void note(String words) {
         heading.setText(words.isEmpty() ? title : title + "  \u2013  " + words);
+    }
+
+    /** Greys the content, or shows it plainly again. */
+    void veil(boolean set) {
+        veil.set(set);
     }
 
     private void dress() {

@@ -27,19 +27,21 @@ final class PreferencesWindow extends JDialog {
     private static final int[] PERCENT = {100, 110, 125, 150, 175, 200, 250, 300};
 
     private final transient Theme theme;
+    private final transient LookKeeper looks;
     private final transient WindowMemory memory;
-    private final JComboBox<String> look = new JComboBox<>(new String[] {"Light", "Dark"});
+    private final JComboBox<Look> look = new JComboBox<>(Look.values());
     private final JComboBox<String> size = new JComboBox<>();
     private final Map<StepField, JTextField> usual = new EnumMap<>(StepField.class);
     private final JTextField tables = new JTextField(28);
     private final JPanel form = new JPanel(new GridBagLayout());
     private int rows;
 
-    PreferencesWindow(Frame owner, Theme theme, WindowMemory memory) {
+    PreferencesWindow(Frame owner, Theme theme, LookKeeper looks, WindowMemory memory) {
         super(owner, "Preferences", true);
         this.theme = theme;
+        this.looks = looks;
         this.memory = memory;
-        look.setSelectedIndex(theme.palette().dark() ? 1 : 0);
+        look.setSelectedItem(memory.look());
         for (int percent : PERCENT) {
             size.addItem(percent + " %");
         }
@@ -104,19 +106,15 @@ final class PreferencesWindow extends JDialog {
     }
 
     private void keep() {
-        boolean dark = look.getSelectedIndex() == 1;
         float zoom = size.getSelectedIndex() < 0 ? UIScale.getZoomFactor() : PERCENT[size.getSelectedIndex()] / 100f;
         usual.forEach((field, text) -> memory.put("new." + field.name(), text.getText().strip()));
         memory.put("tables", tables.getText().strip());
-        memory.put("dark", Boolean.toString(dark));
         memory.put("zoom", Float.toString(zoom));
+        looks.choose((Look) look.getSelectedItem());
         memory.save();
         dispose();
         if (UIScale.setZoomFactor(zoom)) {
             FlatLaf.updateUI();
-        }
-        if (dark != theme.palette().dark()) {
-            theme.switchTo(dark);
         }
     }
 }

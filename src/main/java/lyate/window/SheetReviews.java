@@ -25,14 +25,14 @@ final class SheetReviews implements AutoCloseable {
      */
     record Judged(Optional<Verdict> verdict, String sentence) {}
 
-    private final StepReader reader;
+    private final FieldReader reader;
     private final Reviewer reviewer;
     private final IntConsumer onProgress;
     private final Background background = new Background("sheet");
     private final Map<StepText, Judged> judged = new ConcurrentHashMap<>();
 
     /** @param onProgress told on the event thread how many rows are still to do */
-    SheetReviews(StepReader reader, Reviewer reviewer, IntConsumer onProgress) {
+    SheetReviews(FieldReader reader, Reviewer reviewer, IntConsumer onProgress) {
         this.reader = reader;
         this.reviewer = reviewer;
         this.onProgress = onProgress;

@@ -28,6 +28,12 @@ final class StepCells {
         return new StepText(fields, row.text(SheetColumn.SITE));
     }
 
+    /** The field in which a cell of that column is shown; what has no field of its own belongs to the substrate. */
+    static StepField field(String header) {
+        return COLUMNS.entrySet().stream().filter(entry -> entry.getValue().header().equals(header)).map(Map.Entry::getKey).findFirst()
+                .orElse(StepField.SUBSTRATE);
+    }
+
     /** The sheet with one row saying something else; cells that say the same stay untouched. */
     static RouteSheet write(RouteSheet sheet, int row, StepText text) {
         StepText before = text(sheet.rows().get(row));

@@ -24,7 +24,7 @@ final class StepPresenter implements AutoCloseable {
     /** Long enough to swallow key repeats, short enough not to be noticed. */
     private static final int SETTLE_MILLIS = 25;
 
-    private final StepReader reader;
+    private final FieldReader reader;
     private final Reviewer reviewer;
     private final Consumer<Outcome> receiver;
     private final AtomicLong latest = new AtomicLong();
@@ -36,7 +36,7 @@ final class StepPresenter implements AutoCloseable {
     /** The last drawing, kept because the layout is the dearest part; touched by the worker alone. */
     private Drawn drawn;
 
-    StepPresenter(StepReader reader, Reviewer reviewer, Consumer<Outcome> receiver) {
+    StepPresenter(FieldReader reader, Reviewer reviewer, Consumer<Outcome> receiver) {
         this.reader = reader;
         this.reviewer = reviewer;
         this.receiver = receiver;

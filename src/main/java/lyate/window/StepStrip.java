@@ -12,6 +12,8 @@ import javax.swing.BorderFactory;
 import javax.swing.JPanel;
 import lyate.molecule.Molecule;
 import lyate.review.Step;
+import lyate.sheet.StepReader;
+import lyate.sheet.UsualWater;
 
 /** The row of fields at the top; tells its listener the step as typed after every edit. */
 final class StepStrip extends JPanel {
@@ -45,6 +47,9 @@ final class StepStrip extends JPanel {
             add(boxes.get(field), new GridBagConstraints(field.ordinal(), 0, 1, 1, weight, 0, GridBagConstraints.NORTH,
                     GridBagConstraints.HORIZONTAL, new Insets(0, 0, 0, last ? 0 : theme.space("gap")), 0, 0));
         }
+        boxes.get(StepField.EQUIVALENTS).setUsual(StepReader.USUAL_EQUIVALENTS);
+        boxes.get(StepField.TEMPERATURE).setUsual(StepReader.USUAL_TEMPERATURE);
+        boxes.get(StepField.CONCENTRATION).setUsual(StepReader.USUAL_CONCENTRATION);
         hints = new HintRow(theme, List.copyOf(boxes.values()));
         add(hints, new GridBagConstraints(0, 1, StepField.values().length, 1, 1, 0, GridBagConstraints.NORTH,
                 GridBagConstraints.HORIZONTAL, new Insets(0, 0, 0, 0), 0, 0));
@@ -85,6 +90,7 @@ final class StepStrip extends JPanel {
                 box.line().hint(outcome.shown().map(shown -> understood(field, shown.review().step())).orElse(""));
             }
         });
+        outcome.shown().map(shown -> shown.review().step().solvent()).ifPresent(solvent -> boxes.get(StepField.WATER).setUsual(UsualWater.ppm(solvent)));
         hints.repaint();
     }
 

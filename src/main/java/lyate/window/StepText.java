@@ -26,9 +26,7 @@ record StepText(Map<StepField, String> fields, String site) {
                 StepField.BASE, "NaH",
                 StepField.EQUIVALENTS, "1.05",
                 StepField.SOLVENT, "DMF",
-                StepField.TEMPERATURE, "0",
-                StepField.CONCENTRATION, "0.3",
-                StepField.WATER, "100"), "N7");
+                StepField.TEMPERATURE, "0"), "N7");
     }
 
     /** Blanks at the ends say nothing, except in a molfile, whose first lines may be empty. */

@@ -33,7 +33,7 @@ final class StepsPanel extends JPanel {
     private final JPanel running = new JPanel(new BorderLayout());
     private boolean updating;
 
-    StepsPanel(Theme theme, SheetDocument document, StepReader reader, Reviewer reviewer) {
+    StepsPanel(Theme theme, SheetDocument document, FieldReader reader, Reviewer reviewer) {
         super(new BorderLayout());
         this.theme = theme;
         this.document = document;

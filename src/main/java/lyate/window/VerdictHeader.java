@@ -77,7 +77,7 @@ final class VerdictHeader extends JPanel {
     private static String facts(Review review) {
         String first = review.firstSite().equals(review.intendedSite()) ? "The proton at " + review.intendedSite() + " goes first"
                 : "Meant: " + review.intendedSite() + ". First to go: " + review.firstSite();
-        return first + ". log K at " + review.intendedSite() + " " + Words.signed(review.logK()) + " with " + review.workingBase() + "; taken there "
+        return first + ". log K at " + review.intendedSite() + " " + Words.signed(review.logK()) + " with " + review.workingBase() + "; " + (review.sideReactionWins() ? "the side reaction left aside, taken there " : "taken there ")
                 + Words.percent(review.intendedPercent()) + ", elsewhere up to " + Words.percent(review.otherPercent()) + ".";
     }
 

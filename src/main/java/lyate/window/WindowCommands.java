@@ -20,14 +20,16 @@ final class WindowCommands implements WindowMenu.Commands {
     private final SheetDocument document;
     private final SheetFiles files;
     private final Theme theme;
+    private final LookKeeper looks;
     private final WindowMemory memory;
 
-    WindowCommands(JFrame frame, Workbench bench, SheetDocument document, SheetFiles files, Theme theme, WindowMemory memory) {
+    WindowCommands(JFrame frame, Workbench bench, SheetDocument document, SheetFiles files, Theme theme, LookKeeper looks, WindowMemory memory) {
         this.frame = frame;
         this.bench = bench;
         this.document = document;
         this.files = files;
         this.theme = theme;
+        this.looks = looks;
         this.memory = memory;
     }
 
@@ -147,9 +149,13 @@ final class WindowCommands implements WindowMenu.Commands {
     }
 
     @Override
-    public void setDark(boolean dark) {
-        theme.switchTo(dark);
-        memory.put("dark", Boolean.toString(dark));
+    public Look look() {
+        return memory.look();
+    }
+
+    @Override
+    public void choose(Look look) {
+        looks.choose(look);
     }
 
     @Override
@@ -159,7 +165,7 @@ final class WindowCommands implements WindowMenu.Commands {
 
     @Override
     public void preferences() {
-        new PreferencesWindow(frame, theme, memory).setVisible(true);
+        new PreferencesWindow(frame, theme, looks, memory).setVisible(true);
     }
 
     @Override

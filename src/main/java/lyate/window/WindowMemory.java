@@ -98,8 +98,22 @@ final class WindowMemory {
         properties.setProperty(key, value);
     }
 
+    /** What the window was last time. */
     boolean isDark() {
         return Boolean.parseBoolean(get("dark", "false"));
+    }
+
+    void setDark(boolean dark) {
+        put("dark", Boolean.toString(dark));
+    }
+
+    /** What the user wants. */
+    Look look() {
+        return Look.of(get("look", ""));
+    }
+
+    void setLook(Look look) {
+        put("look", look.stored());
     }
 
     float zoom() {

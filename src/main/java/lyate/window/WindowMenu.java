@@ -7,10 +7,10 @@ import java.awt.event.InputEvent;
 import java.awt.event.KeyEvent;
 import java.nio.file.Path;
 import java.util.List;
-import javax.swing.JCheckBoxMenuItem;
 import javax.swing.JMenu;
 import javax.swing.JMenuBar;
 import javax.swing.JMenuItem;
+import javax.swing.JRadioButtonMenuItem;
 import javax.swing.KeyStroke;
 import javax.swing.event.MenuEvent;
 import javax.swing.event.MenuListener;
@@ -75,7 +75,9 @@ final class WindowMenu extends JMenuBar {
 
         void fit();
 
-        void setDark(boolean dark);
+        Look look();
+
+        void choose(Look look);
 
         void zoomed(float zoom);
 
@@ -117,17 +119,23 @@ final class WindowMenu extends JMenuBar {
         return menu;
     }
 
-    /** Filled whenever it opens. */
     private JMenu recent() {
         JMenu menu = menu("Recent", 'R');
+        filledWhenOpened(menu, () -> {
+            commands.recent().forEach(file -> menu.add(item(file.getFileName() + "  \u2013  " + file.getParent(), '\0', null, () -> commands.open(file))));
+            if (menu.getItemCount() == 0) {
+                menu.add(item("none yet", '\0', null, () -> {})).setEnabled(false);
+            }
+        });
+        return menu;
+    }
+
+    private static void filledWhenOpened(JMenu menu, Runnable fill) {
         menu.addMenuListener(new MenuListener() {
             @Override
             public void menuSelected(MenuEvent event) {
                 menu.removeAll();
-                commands.recent().forEach(file -> menu.add(item(file.getFileName() + "  \u2013  " + file.getParent(), '\0', null, () -> commands.open(file))));
-                if (menu.getItemCount() == 0) {
-                    menu.add(item("none yet", '\0', null, () -> {})).setEnabled(false);
-                }
+                fill.run();
             }
 
             @Override
@@ -136,7 +144,6 @@ final class WindowMenu extends JMenuBar {
             @Override
             public void menuCanceled(MenuEvent event) {}
         });
-        return menu;
     }
 
     private JMenu edit() {
@@ -172,12 +179,16 @@ final class WindowMenu extends JMenuBar {
 
     private JMenu view(Theme theme) {
         JMenu menu = menu("View", 'V');
-        JCheckBoxMenuItem darkItem = new JCheckBoxMenuItem("Dark", theme.palette().dark());
-        theme.onChange(() -> darkItem.setSelected(theme.palette().dark()));
-        darkItem.setMnemonic('D');
-        darkItem.setAccelerator(key(KeyEvent.VK_D, COMMAND));
-        darkItem.addActionListener(event -> commands.setDark(darkItem.isSelected()));
-        menu.add(darkItem);
+        JMenu colours = menu("Colours", 'C');
+        filledWhenOpened(colours, () -> {
+            for (Look look : Look.values()) {
+                JRadioButtonMenuItem item = new JRadioButtonMenuItem(look.toString(), commands.look() == look);
+                item.addActionListener(event -> commands.choose(look));
+                colours.add(item);
+            }
+        });
+        menu.add(colours);
+        menu.add(item("Swap light and dark", 'D', key(KeyEvent.VK_D, COMMAND), () -> commands.choose(theme.palette().dark() ? Look.LIGHT : Look.DARK)));
         menu.addSeparator();
         menu.add(item("Larger", 'L', key(KeyEvent.VK_PLUS, COMMAND), () -> zoom(UIScale.zoomIn())));
         menu.add(item("Smaller", 'S', key(KeyEvent.VK_MINUS, COMMAND), () -> zoom(UIScale.zoomOut())));

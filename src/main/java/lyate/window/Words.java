@@ -63,12 +63,7 @@ final class Words {
 
     /** The medium as it is written on an axis. */
     static String medium(Medium medium) {
-        return switch (medium.id()) {
-            case "dmso" -> "DMSO";
-            case "mecn" -> "MeCN";
-            case "thf" -> "THF";
-            default -> medium.id();
-        };
+        return medium.symbol();
     }
 
     /** First letter capital. */

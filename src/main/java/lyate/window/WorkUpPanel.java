@@ -23,7 +23,6 @@ import lyate.bench.Quench;
 import lyate.bench.WorkUp.Parting;
 import lyate.molecule.Molecule;
 import lyate.molecule.MoleculeException;
-import lyate.molecule.MoleculeReader;
 import lyate.sheet.Quantity;
 import lyate.stock.Acid;
 import lyate.stock.Medium;
@@ -149,7 +148,7 @@ final class WorkUpPanel extends LazyTab {
         String problem = "";
         if (!product.getText().isBlank()) {
             try {
-                molecule = Optional.of(new MoleculeReader().read(product.getText()));
+                molecule = Optional.of(engine.molecules().read(product.getText()));
             } catch (MoleculeException e) {
                 problem = CaretMessage.of(e.getMessage()).sentence();
             }

@@ -13,7 +13,6 @@ import javax.swing.JOptionPane;
 import javax.swing.JPanel;
 import javax.swing.JSplitPane;
 import javax.swing.Timer;
-import lyate.molecule.MoleculeReader;
 import lyate.review.Reviewer;
 import lyate.stock.Base;
 
@@ -22,6 +21,7 @@ final class Workbench extends JPanel implements Drawer.Wishes, AutoCloseable {
 
     /** A result that takes longer is announced. */
     private static final int PATIENCE_MILLIS = 300;
+    private static final String OUTDATED = "of the last step that could be read";
     private static final String PICTURES = "pictures";
     private static final String EMPTY = "empty";
 
@@ -32,13 +32,17 @@ final class Workbench extends JPanel implements Drawer.Wishes, AutoCloseable {
     private final SubstrateView substrate;
     private final Pane substratePane;
     private final AcidityLadder ladder;
-    private final CompareField compare;
+    private final Pane ladderPane;
     private final FindingsPanel findings;
+    private final Pane verdictPane;
+    private final Veil drawerVeil;
     private final Drawer drawer;
     private final StepPresenter presenter;
     private final CardLayout cards = new CardLayout();
     private final JPanel middle = new JPanel(cards);
     private final Timer patience;
+    /** A text half typed for a moment only shall not make the window flicker. */
+    private final Timer doubt;
     private StepText asked;
     private StepText answered = new StepText(Map.of(), "");
     private Runnable painted;
@@ -47,7 +51,7 @@ final class Workbench extends JPanel implements Drawer.Wishes, AutoCloseable {
     Workbench(Theme theme, Engine engine, SheetDocument document) {
         super(new BorderLayout());
         this.document = document;
-        StepReader reader = new StepReader(new MoleculeReader(), engine::stockroom);
+        FieldReader reader = new FieldReader(engine::steps);
         Reviewer reviewer = step -> engine.reviewer().review(step);
         presenter = new StepPresenter(reader, reviewer, this::receive);
         strip = new StepStrip(theme, engine, document.state().text(), document::edit);
@@ -55,9 +59,11 @@ final class Workbench extends JPanel implements Drawer.Wishes, AutoCloseable {
         substratePane = new Pane("Substrate", substrate, theme);
         ladder = new AcidityLadder(theme, engine::water, this::intend, this::take);
         ladder.setTransferHandler(new BaseDrop(engine, this::compare));
-        compare = new CompareField(theme, engine, this::compare);
+        ladderPane = new Pane("Acidity ladder", ladder, new CompareField(theme, engine, this::compare), theme);
         findings = new FindingsPanel(theme, substrate::highlight);
+        verdictPane = new Pane("Verdict", findings, theme);
         drawer = new Drawer(theme, engine, this);
+        drawerVeil = new Veil(drawer, theme);
         middle.add(pictures(theme), PICTURES);
         middle.add(new EmptyView(theme, example -> document.edit(strip.text().with(StepField.SUBSTRATE, example).withSite(""))), EMPTY);
         add(strip, BorderLayout.NORTH);
@@ -69,15 +75,17 @@ final class Workbench extends JPanel implements Drawer.Wishes, AutoCloseable {
         add(middle);
         patience = new Timer(PATIENCE_MILLIS, event -> substratePane.note("working \u2026"));
         patience.setRepeats(false);
+        doubt = new Timer(PATIENCE_MILLIS, event -> outdated(true));
+        doubt.setRepeats(false);
         document.onChange(this::follow);
         presenter.submit(document.state().text());
         patience.start();
     }
 
     private JComponent pictures(Theme theme) {
-        JSplitPane right = split(JSplitPane.HORIZONTAL_SPLIT, new Pane("Acidity ladder", ladder, compare, theme), new Pane("Findings", findings, theme), 0.58);
+        JSplitPane right = split(JSplitPane.HORIZONTAL_SPLIT, ladderPane, verdictPane, 0.58);
         JSplitPane top = split(JSplitPane.HORIZONTAL_SPLIT, substratePane, right, 0.38);
-        return split(JSplitPane.VERTICAL_SPLIT, top, drawer, 0.74);
+        return split(JSplitPane.VERTICAL_SPLIT, top, drawerVeil, 0.74);
     }
 
     private static JSplitPane split(int orientation, JComponent first, JComponent second, double share) {
@@ -142,13 +150,31 @@ final class Workbench extends JPanel implements Drawer.Wishes, AutoCloseable {
         patience.stop();
         answered = outcome.text();
         strip.report(outcome);
-        substratePane.note(outcome.shown().isEmpty() ? "the last step that could be read" : "");
-        if (outcome.text().get(StepField.SUBSTRATE).isEmpty()) {
-            shown = Optional.empty();
-            cards.show(middle, EMPTY);
+        substratePane.note("");
+        boolean blank = outcome.text().get(StepField.SUBSTRATE).isEmpty();
+        if (outcome.shown().isEmpty() && !blank) {
+            doubt.restart();
             return;
         }
+        doubt.stop();
+        outdated(false);
+        if (blank) {
+            shown = Optional.empty();
+            cards.show(middle, EMPTY);
+        }
         outcome.shown().ifPresent(this::show);
+    }
+
+    /** Marks everything on screen as belonging to an earlier text than the fields now hold, or takes the mark away. */
+    private void outdated(boolean is) {
+        List.of(substratePane, ladderPane, verdictPane).forEach(pane -> pane.note(is ? OUTDATED : ""));
+        verdictPane.veil(is);
+        drawerVeil.set(is);
+    }
+
+    /** Whether what is on screen is marked as not belonging to what the fields say. */
+    boolean isOutdated() {
+        return drawerVeil.isSet();
     }
 
     private void show(Shown next) {
@@ -214,6 +240,8 @@ final class Workbench extends JPanel implements Drawer.Wishes, AutoCloseable {
 
     @Override
     public void close() {
+        patience.stop();
+        doubt.stop();
         steps.close();
         drawer.close();
         presenter.close();

@@ -21,6 +21,7 @@ public final class WorkbenchFrame extends JFrame {
 
     private final transient WindowMemory memory;
     private final transient Theme theme;
+    private final transient LookKeeper looks;
     private transient Workbench bench;
     private transient SheetFiles files;
     private transient Recovery recovery;
@@ -29,6 +30,7 @@ public final class WorkbenchFrame extends JFrame {
         super("Lyate");
         this.memory = memory;
         this.theme = new Theme(memory.isDark());
+        this.looks = new LookKeeper(theme, memory, () -> SystemLook.ofDesktop().isDark());
         theme.install();
         UIScale.setZoomFactor(memory.zoom());
         // Long enough to read how an estimate adds up.
@@ -41,6 +43,11 @@ public final class WorkbenchFrame extends JFrame {
                 if (files == null || files.mayLeave()) {
                     dispose();
                 }
+            }
+
+            @Override
+            public void windowActivated(WindowEvent event) {
+                looks.follow();
             }
 
             @Override
@@ -84,7 +91,7 @@ public final class WorkbenchFrame extends JFrame {
         files = new SheetFiles(this, document, memory);
         bench = new Workbench(theme, engine, document);
         recovery = new Recovery(memory.recoveryFolder(), document);
-        setJMenuBar(new WindowMenu(new WindowCommands(this, bench, document, files, theme, memory), theme));
+        setJMenuBar(new WindowMenu(new WindowCommands(this, bench, document, files, theme, looks, memory), theme));
         document.onChange(() -> setTitle(title(document)));
         setTitle(title(document));
         add(bench, BorderLayout.CENTER);

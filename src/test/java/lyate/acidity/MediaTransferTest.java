@@ -54,7 +54,7 @@ class MediaTransferTest {
         List<Contribution> medium = carried.contributions().stream().filter(term -> term.effect() == Effect.MEDIUM).toList();
         assertEquals(1, medium.size());
         assertEquals(19, medium.get(0).value(), 1e-12);
-        assertTrue(medium.get(0).text().contains("dmso = 2.00 x water") && medium.get(0).text().contains("mecn = 1.00 x dmso"),
+        assertTrue(medium.get(0).text().contains("DMSO = 2.00 x water") && medium.get(0).text().contains("MeCN = 1.00 x DMSO"),
                 medium.get(0).text());
         assertTrue(carried.source().contains("carried from water"), carried.source());
     }

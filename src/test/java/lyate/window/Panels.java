@@ -5,6 +5,7 @@ import lyate.molecule.MoleculeDrawing;
 import lyate.molecule.MoleculeReader;
 import lyate.review.Review;
 import lyate.review.ReviewException;
+import lyate.sheet.StepReader;
 import lyate.stock.Stockroom;
 import lyate.table.TableFolders;
 
@@ -26,7 +27,7 @@ final class Panels {
     /** What the window would show for a typed step, judged by the invented reviewer. */
     static Shown shown(StepText text) {
         try {
-            Review review = new InventedReviewer().review(new StepReader(new MoleculeReader(), () -> Stockroom.load(TableFolders.packaged()))
+            Review review = new InventedReviewer().review(new FieldReader(() -> new StepReader(new MoleculeReader(), Stockroom.load(TableFolders.packaged())))
                     .read(text).step().orElseThrow());
             return new Shown(review, MoleculeDrawing.of(review.step().substrate()));
         } catch (ReviewException e) {

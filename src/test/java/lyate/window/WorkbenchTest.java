@@ -84,8 +84,10 @@ class WorkbenchTest {
         type(StepField.SUBSTRATE, "O=C(C1CC");
         waitFor(bench -> bench.strip().box(StepField.SUBSTRATE).line().isProblem());
         assertEquals("O=C(C1CCC1)Nc1ccc(C)c(O)c1", onEventThread(() -> bench.shown().orElseThrow().review().step().substrate().input()));
+        waitFor(Workbench::isOutdated);
         type(StepField.SUBSTRATE, "CCO");
         waitFor(bench -> bench.shown().orElseThrow().review().step().substrate().input().equals("CCO"));
+        assertFalse(onEventThread(bench::isOutdated));
         assertFalse(onEventThread(() -> bench.strip().box(StepField.SUBSTRATE).line().isProblem()));
     }
 

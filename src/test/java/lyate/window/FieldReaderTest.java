@@ -6,16 +6,17 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 import java.util.Set;
 import lyate.molecule.MoleculeReader;
 import lyate.review.Step;
+import lyate.sheet.StepReader;
 import lyate.stock.Stockroom;
 import lyate.table.TableFolders;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
 
-class StepReaderTest {
+class FieldReaderTest {
 
     private static final Stockroom STOCKROOM = Stockroom.load(TableFolders.packaged());
-    private final StepReader reader = new StepReader(new MoleculeReader(), () -> STOCKROOM);
+    private final FieldReader reader = new FieldReader(() -> new StepReader(new MoleculeReader(), STOCKROOM));
 
     @Test
     void theDemoStepCanBeRead() {
@@ -23,7 +24,8 @@ class StepReaderTest {
         assertEquals("nah", step.base().id());
         assertEquals("dmf", step.solvent().id());
         assertEquals("N7", step.intendedSite().orElseThrow());
-        assertEquals(0.3, step.concentrationMolar());
+        assertEquals(0.2, step.concentrationMolar());
+        assertEquals(step.solvent().typicalWaterPpm().orElseThrow(), step.waterPpm());
     }
 
     @ParameterizedTest
@@ -33,6 +35,18 @@ class StepReaderTest {
         StepReading reading = reader.read(StepText.demo().with(field, text));
         assertTrue(reading.step().isEmpty());
         assertEquals(Set.of(field), reading.problems().keySet());
+    }
+
+    @Test
+    void aPartnerIsFoundByItsNameAsInASheet() {
+        Step step = reader.read(StepText.demo().with(StepField.PARTNER, "methyl iodide")).step().orElseThrow();
+        assertEquals("CI", step.partner().orElseThrow().input());
+    }
+
+    @Test
+    void aSiteTheSubstrateLacksIsSaidBelowTheSubstrate() {
+        StepReading reading = reader.read(StepText.demo().withSite("N99"));
+        assertTrue(reading.problems().get(StepField.SUBSTRATE).contains("N99"));
     }
 
     @Test
