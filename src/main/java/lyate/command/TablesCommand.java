@@ -10,8 +10,10 @@ import java.util.function.Consumer;
 import lyate.bench.Enthalpies;
 import lyate.bench.QuenchHazards;
 import lyate.molecule.MoleculeReader;
+import lyate.review.AcidHazards;
 import lyate.review.RuleExamples;
 import lyate.review.StepReviewer;
+import lyate.stock.Stockroom;
 import lyate.table.NearestNames;
 import lyate.table.TableException;
 import lyate.table.TableFolders;
@@ -30,7 +32,7 @@ final class TablesCommand implements Callable<Integer> {
 
     /** Together they read every table once. */
     private static final List<Consumer<TableFolders>> READERS = List.of(StepReviewer::load, MoleculeReader::load,
-            Enthalpies::load, QuenchHazards::load);
+            Enthalpies::load, QuenchHazards::load, folders -> AcidHazards.load(folders, Stockroom.load(folders)));
 
     private final Terminal terminal;
 

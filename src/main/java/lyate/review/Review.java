@@ -24,7 +24,8 @@ import java.util.Map;
 public record Review(Step step, Verdict verdict, double probability, Map<Verdict, Double> probabilities,
                      String intendedSite, String firstSite, String workingBase, double logK,
                      double intendedPercent, double otherPercent, List<Transfer> transfers,
-                     List<Finding> findings, List<String> explanation, List<String> assumptions) {
+                     List<Finding> findings, List<String> explanation, List<String> assumptions)
+        implements Judgement {
 
     public Review {
         probabilities = Map.copyOf(probabilities);

@@ -10,6 +10,7 @@ import java.util.Set;
 import java.util.regex.Matcher;
 import java.util.regex.Pattern;
 import java.util.stream.Collectors;
+import lyate.stock.Acid;
 import lyate.stock.Base;
 import lyate.stock.Medium;
 import lyate.stock.Solvent;
@@ -30,6 +31,7 @@ final class RuleCells {
 
     private final Set<String> baseWords;
     private final Set<String> solventWords;
+    private final Set<String> acidWords;
     private final List<TableProblem> problems;
 
     RuleCells(Stockroom stockroom, List<TableProblem> problems) {
@@ -37,6 +39,7 @@ final class RuleCells {
                 .collect(Collectors.toSet());
         this.solventWords = stockroom.solvents().stream().map(Solvent::id).collect(Collectors.toSet());
         Arrays.stream(Solvent.Kind.values()).map(Surroundings::word).forEach(solventWords::add);
+        this.acidWords = stockroom.acids().stream().map(Acid::id).collect(Collectors.toSet());
         this.problems = problems;
     }
 
@@ -56,6 +59,16 @@ final class RuleCells {
     static Optional<Finding.Severity> severity(Row row) {
         String word = row.text("severity");
         return word.equals(SILENT) ? Optional.empty() : Optional.of(Finding.Severity.valueOf(word.toUpperCase(Locale.ROOT)));
+    }
+
+    /** Ids of the acids a row names. */
+    List<String> acids(Row row) {
+        return known(row, "acids", acidWords);
+    }
+
+    /** Solvents a row names, at any temperature. */
+    Surroundings solvents(Row row) {
+        return new Surroundings(known(row, "solvents", solventWords), OptionalDouble.empty(), OptionalDouble.empty());
     }
 
     Surroundings surroundings(Row row) {
@@ -91,9 +104,22 @@ final class RuleCells {
 
     /** A sentence of a table with the names of the step put in; a name at its front gets its capital: n-Butyllithium. */
     static String fill(String sentence, Base base, Solvent solvent) {
-        String filled = sentence.replace("{base}", base.name()).replace("{solvent}", solvent.name());
-        Matcher front = FRONT.matcher(filled);
-        return sentence.startsWith("{") && front.lookingAt()
-                ? front.group(1) + front.group(2).toUpperCase(Locale.ROOT) + filled.substring(front.end()) : filled;
+        return fill(sentence, "{base}", base.name(), solvent);
+    }
+
+    /** The same for a sentence about an acid. */
+    static String fill(String sentence, Acid acid, Solvent solvent) {
+        return fill(sentence, "{acid}", acid.name(), solvent);
+    }
+
+    private static String fill(String sentence, String placeholder, String name, Solvent solvent) {
+        String filled = sentence.replace(placeholder, name).replace("{solvent}", solvent.name());
+        return sentence.startsWith("{") ? capital(filled) : filled;
+    }
+
+    /** The text with a capital where its first word begins: n-Butyllithium. */
+    static String capital(String text) {
+        Matcher front = FRONT.matcher(text);
+        return front.lookingAt() ? front.group(1) + front.group(2).toUpperCase(Locale.ROOT) + text.substring(front.end()) : text;
     }
 }

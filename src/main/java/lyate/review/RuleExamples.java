@@ -29,6 +29,7 @@ public final class RuleExamples {
     private final SideReactions sideReactions;
     private final BaseSolventRules solventRules;
     private final BaseHazards hazards;
+    private final AcidHazards acidHazards;
     private final SiteFinder sites;
     private final AcidityEstimator acidity;
 
@@ -37,6 +38,7 @@ public final class RuleExamples {
         this.sideReactions = SideReactions.load(folders, stockroom);
         this.solventRules = BaseSolventRules.load(folders, stockroom);
         this.hazards = BaseHazards.load(folders, stockroom);
+        this.acidHazards = AcidHazards.load(folders, stockroom);
         this.sites = new SiteFinder(SiteClasses.load(folders));
         this.acidity = AcidityEstimator.load(folders);
     }
@@ -58,6 +60,8 @@ public final class RuleExamples {
         solventRules.rules().stream().filter(rule -> rule.place().own()).forEach(rule ->
                 check(rule.place(), rule.hit(), rule.miss(), example -> () -> decides(rule, example), problems));
         hazards.rules().stream().filter(rule -> rule.place().own()).forEach(rule ->
+                check(rule.place(), rule.hit(), rule.miss(), example -> () -> decides(rule, example), problems));
+        acidHazards.rules().stream().filter(rule -> rule.place().own()).forEach(rule ->
                 check(rule.place(), rule.hit(), rule.miss(), example -> () -> decides(rule, example), problems));
         return problems;
     }
@@ -92,6 +96,10 @@ public final class RuleExamples {
         return hazards;
     }
 
+    AcidHazards acidHazards() {
+        return acidHazards;
+    }
+
     /**
      * Whether a rule decides at some atom of {@code substrate|base|solvent|temperature[|equivalents[|site]]}, for a rule about
      * acids of {@code substrate|acid pKa|temperature}.
@@ -124,6 +132,12 @@ public final class RuleExamples {
     boolean decides(BaseHazards.Rule rule, String text) throws Exception {
         RuleExample example = RuleExample.of(text);
         return hazards.deciding(example.base(0, stockroom), example.solvent(1, stockroom), example.number(2), true).contains(rule);
+    }
+
+    /** Whether a rule decides for {@code acid|solvent}. */
+    boolean decides(AcidHazards.Rule rule, String text) throws Exception {
+        RuleExample example = RuleExample.of(text);
+        return acidHazards.deciding(stockroom.acid(example.text(0)), example.solvent(1, stockroom)).containsValue(rule);
     }
 
     /** Every acid site against the base, in DMSO for strong bases out of reach of protic solvents, else in water. */

@@ -68,7 +68,7 @@ public final class StepReviewer implements Reviewer {
         List<SideReaction> reactions = sideReactions(step, contest.base(), transfers, contest.intended());
 
         World world = World.of(step, contest.base(), contest.protons(), contest.sites(), contest.intended());
-        Map<Verdict, Double> probabilities = withSideReactions(odds.of(contest.sites(), world), reactions);
+        Map<Verdict, Double> probabilities = withSideReactions(odds.of(contest.sites().stream().map(VerdictOdds.Uncertain::of).toList(), world), reactions);
         Situation situation = new Situation(step, contest.base(), contest.sites(), contest.intended(), shares, contest.orders(),
                 VerdictOdds.verdict(probabilities));
         return new ReviewWriter(situation, world, probabilities, transfers).write(findings(situation, reactions));

@@ -23,9 +23,24 @@ final class VerdictOdds {
 
     private final UncertaintyPropagation propagation = new UncertaintyPropagation();
 
-    /** Probability of each verdict that occurs, most probable first. */
-    Map<Verdict, Double> of(List<Donor> donors, World mean) {
-        return propagation.probabilities(errors(donors), shifts -> VerdictRule.judge(shifted(mean, shifts)));
+    /**
+     * How uncertain the log K of one site is.
+     *
+     * @param sigma   standard uncertainty of the site's own pKa
+     * @param partner that of the base or acid it is set against, felt by every site
+     * @param family  family of the site's class
+     */
+    record Uncertain(double sigma, double partner, String family) {
+
+        static Uncertain of(Donor donor) {
+            return new Uncertain(donor.comparison().donor().sigma(), donor.comparison().acceptor().sigma(),
+                    donor.site().siteClass().family());
+        }
+    }
+
+    /** Probability of each verdict that occurs, most probable first; sites in the order of the world's constants. */
+    Map<Verdict, Double> of(List<Uncertain> sites, World mean) {
+        return propagation.probabilities(errors(sites), shifts -> VerdictRule.judge(shifted(mean, shifts)));
     }
 
     /** The most probable verdict, or {@link Verdict#UNDECIDED} where none is probable enough. */
@@ -42,24 +57,16 @@ final class VerdictOdds {
         return mean.withLogK(logK);
     }
 
-    private static PKaErrors errors(List<Donor> donors) {
+    private static PKaErrors errors(List<Uncertain> sites) {
         List<PKaErrors.Shared> shared = new ArrayList<>();
-        shared.add(loadings(donors, donor -> donor.comparison().acceptor().sigma()));
-        for (String family : donors.stream().map(VerdictOdds::family).collect(Collectors.toCollection(LinkedHashSet::new))) {
-            shared.add(loadings(donors, donor -> family(donor).equals(family) ? SHARED * sigma(donor) : 0));
+        shared.add(loadings(sites, Uncertain::partner));
+        for (String family : sites.stream().map(Uncertain::family).collect(Collectors.toCollection(LinkedHashSet::new))) {
+            shared.add(loadings(sites, site -> site.family().equals(family) ? SHARED * site.sigma() : 0));
         }
-        return new PKaErrors(donors.stream().map(donor -> SHARED * sigma(donor)).toList(), shared);
+        return new PKaErrors(sites.stream().map(site -> SHARED * site.sigma()).toList(), shared);
     }
 
-    private static PKaErrors.Shared loadings(List<Donor> donors, ToDoubleFunction<Donor> loading) {
-        return new PKaErrors.Shared(donors.stream().map(loading::applyAsDouble).toList());
-    }
-
-    private static double sigma(Donor donor) {
-        return donor.comparison().donor().sigma();
-    }
-
-    private static String family(Donor donor) {
-        return donor.site().siteClass().family();
+    private static PKaErrors.Shared loadings(List<Uncertain> sites, ToDoubleFunction<Uncertain> loading) {
+        return new PKaErrors.Shared(sites.stream().map(loading::applyAsDouble).toList());
     }
 }

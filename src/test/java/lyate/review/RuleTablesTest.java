@@ -33,6 +33,10 @@ class RuleTablesTest {
         return EXAMPLES.hazards().rules().stream();
     }
 
+    static Stream<AcidHazards.Rule> acidHazards() {
+        return EXAMPLES.acidHazards().rules().stream();
+    }
+
     @Test
     void thereAreRulesEnough() {
         assertTrue(sideReactions().count() >= 150, sideReactions().count() + " side reactions");
@@ -56,6 +60,13 @@ class RuleTablesTest {
     @ParameterizedTest
     @MethodSource("hazards")
     void aHazardIsRaisedByItsHitAlone(BaseHazards.Rule rule) throws Exception {
+        assertTrue(EXAMPLES.decides(rule, rule.hit()), rule.id() + " is not what decides for " + rule.hit());
+        assertFalse(EXAMPLES.decides(rule, rule.miss()), rule.id() + " is raised by " + rule.miss());
+    }
+
+    @ParameterizedTest
+    @MethodSource("acidHazards")
+    void anAcidHazardIsRaisedByItsHitAlone(AcidHazards.Rule rule) throws Exception {
         assertTrue(EXAMPLES.decides(rule, rule.hit()), rule.id() + " is not what decides for " + rule.hit());
         assertFalse(EXAMPLES.decides(rule, rule.miss()), rule.id() + " is raised by " + rule.miss());
     }

@@ -1,0 +1,28 @@
+package lyate.review;
+
+import java.util.List;
+
+/** What every kind of review answers: of a deprotonation ({@link Review}) or of a protonation ({@link Protonation}). */
+public interface Judgement {
+
+    /** The answer. */
+    Verdict verdict();
+
+    /** Probability of that verdict, 0 to 1. */
+    double probability();
+
+    /** log10 K at the intended site. */
+    double logK();
+
+    /** Label of the site that reacts first; {@code solvent}, {@code water} or {@code none}. */
+    String firstSite();
+
+    /** Share of the intended site that has reacted at equilibrium, per cent. */
+    double intendedPercent();
+
+    /** Highest share that has reacted at any other site of the substrate, per cent. */
+    double otherPercent();
+
+    /** Most severe first. */
+    List<Finding> findings();
+}
