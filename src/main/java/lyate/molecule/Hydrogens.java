@@ -44,6 +44,7 @@ final class Hydrogens {
     }
 
     /** A centre told apart only by an isotope of hydrogen is none any more. */
+    @SuppressWarnings("rawtypes") // the toolkit asks for a list of the raw type
     private static void forgetLostCentres(IAtomContainer molecule) {
         List<IStereoElement> kept = new ArrayList<>();
         for (IStereoElement<?, ?> element : molecule.stereoElements()) {

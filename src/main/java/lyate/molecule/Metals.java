@@ -35,6 +35,7 @@ final class Metals {
         }
     }
 
+    @SuppressWarnings("rawtypes") // the toolkit asks for a list of the raw type
     private static void breakBond(IAtomContainer molecule, IBond bond, IAtom metal, IAtom other) {
         List<IStereoElement> kept = new ArrayList<>();
         molecule.stereoElements().forEach(element -> {

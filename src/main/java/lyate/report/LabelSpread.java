@@ -6,6 +6,8 @@ public final class LabelSpread {
     private LabelSpread() {}
 
     /**
+     * Spreads the labels; the total of the squared moves is as small as the order and the room allow.
+     *
      * @param wanted  where the middles of the labels would like to be, ascending
      * @param height  room of one label
      * @param low     lowest edge allowed

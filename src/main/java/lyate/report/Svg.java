@@ -95,7 +95,7 @@ final class Svg {
     private Svg shape(String name, String colour, double stroke, String[] more, Object... geometry) {
         body.append('<').append(name).append(String.format(Locale.ROOT, " stroke=\"%s\" stroke-width=\"%.1f\"", colour, stroke));
         for (int i = 0; i < geometry.length; i += 2) {
-            body.append(String.format(Locale.ROOT, " %s=\"%.1f\"", geometry[i], geometry[i + 1]));
+            body.append(String.format(Locale.ROOT, " %s=\"%.1f\"", geometry[i], ((Number) geometry[i + 1]).doubleValue()));
         }
         attributes(more);
         body.append("/>\n");

@@ -64,7 +64,7 @@ public final class StepReviewer implements Reviewer {
     public Review review(Step step) throws ReviewException {
         Contest contest = contest(step);
         ProtonShares shares = contest.flask().settle(contest.sites());
-        List<Transfer> transfers = new Transfers(step, shares).of(contest.sites());
+        List<Transfer> transfers = new Transfers(shares).of(contest.sites());
         List<SideReaction> reactions = sideReactions(step, contest.base(), transfers, contest.intended());
 
         World world = World.of(step, contest.base(), contest.protons(), contest.sites(), contest.intended());

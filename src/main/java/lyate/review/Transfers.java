@@ -5,11 +5,9 @@ import java.util.List;
 /** Puts the donors of a step into the rows that users see. */
 final class Transfers {
 
-    private final Step step;
     private final ProtonShares shares;
 
-    Transfers(Step step, ProtonShares shares) {
-        this.step = step;
+    Transfers(ProtonShares shares) {
         this.shares = shares;
     }
 

@@ -35,7 +35,11 @@ public final class ReactionReader {
         this.solvents = stockroom.solvents().stream().map(solvent -> new Shelved<>(solvent, parts(solvent.smiles()))).toList();
     }
 
-    /** @throws MoleculeException where it is not a reaction or has no usable reactant */
+    /**
+     * Reads a reaction SMILES and tells apart what is substrate, base and solvent.
+     *
+     * @throws MoleculeException where it is not a reaction or has no usable reactant
+     */
     public Reaction read(String text) throws MoleculeException {
         String[] sides = text.strip().split("\\s", 2)[0].split(">", -1);
         if (sides.length != 3) {

@@ -1,7 +1,7 @@
 package lyate.table;
 
-import java.io.StringReader;
 import java.io.IOException;
+import java.io.StringReader;
 import java.io.UncheckedIOException;
 import java.util.ArrayList;
 import java.util.HashMap;

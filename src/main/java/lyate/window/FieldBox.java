@@ -39,7 +39,7 @@ final class FieldBox extends JPanel {
             text.putClientProperty("JTextField.placeholderText", kind.hint());
             text.putClientProperty("JTextField.showClearButton", true);
         }
-        text.getDocument().putProperty("filterNewlines", Boolean.FALSE);
+        text.getDocument().putProperty("filterNewlines", false);
         text.getDocument().addDocumentListener(new DocumentListener() {
             @Override
             public void insertUpdate(DocumentEvent event) {

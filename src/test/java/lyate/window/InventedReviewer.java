@@ -47,7 +47,7 @@ final class InventedReviewer implements Reviewer {
         boolean right = intended.equals(first);
         return new Review(step, right ? Verdict.SELECTIVE : Verdict.WRONG_SITE, 0.93,
                 Map.of(Verdict.WRONG_SITE, right ? 0.0 : 0.93, Verdict.SELECTIVE, right ? 0.93 : 0.0, Verdict.UNDECIDED, 0.07),
-                intended, first, step.base().name(), meant.logK(), meant.percentTaken(), right ? 2 : 100, transfers, findings(step),
+                intended, first, step.base().name(), meant.logK(), meant.percentTaken(), right ? 2 : 100, transfers, findings(),
                 List.of("A second equivalent would take both protons.", "The scale in DMSO decides because the base is strong."),
                 List.of("The solvent is as dry as stated."));
     }
@@ -68,7 +68,7 @@ final class InventedReviewer implements Reviewer {
         return new Transfer(donor, atoms, acidity, logK, 1.2, -5.708 * logK, taken, "DMSO scale: strong base");
     }
 
-    private static List<Finding> findings(Step step) {
+    private static List<Finding> findings() {
         return List.of(
                 new Finding(Severity.STOP, FindingKind.UNINTENDED_DEPROTONATION, "The base is used up by a proton that was not meant.",
                         List.of("pKa 17.4 against 21.1 in DMSO", "1.05 eq. of base"), List.of(0), "follows from the pKa values"),

@@ -56,7 +56,7 @@ final class BranchKeys {
     }
 
     private static long label(Topology t, int atom, int hydrogens, int degree) {
-        return ((t.element[atom] * 16L + hydrogens) * 16 + t.charge[atom] + 8) * 32 + degree * 2 + (t.aromatic[atom] ? 1 : 0);
+        return ((t.element[atom] * 16L + hydrogens) * 16 + t.charge[atom] + 8) * 32 + degree * 2L + (t.aromatic[atom] ? 1 : 0);
     }
 
     private static long bond(int order) {

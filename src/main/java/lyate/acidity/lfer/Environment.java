@@ -34,7 +34,7 @@ public record Environment(long[] codes, double[] weights, double total) {
             long place = BranchKeys.mix(d, nodes[atom]);
             codes[n] = place;
             weights[n++] = weight;
-            codes[n] = BranchKeys.mix(place, t.hydrogens[atom] * 100 + t.degree(atom) * 10L + (t.inRing[atom] ? 1 : 0));
+            codes[n] = BranchKeys.mix(place, t.hydrogens[atom] * 100L + t.degree(atom) * 10L + (t.inRing[atom] ? 1 : 0));
             weights[n++] = weight;
             long around = 0;
             for (int branch = t.first[atom]; branch < t.first[atom + 1]; branch++) {

@@ -36,7 +36,7 @@ final class RingTerms {
     /**
      * Adds the terms of the aromatic system around {@code anchor}.
      *
-     * @param site the proton site, inside the system (then the anchor itself) or outside; never counted as a substituent
+     * @param anchor the ring atom that is the proton site or carries it
      * @param from the atom outside the system through which the site is reached, or -1
      */
     static void add(Facts facts, String prefix, int anchor, int from, Terms terms) {
@@ -58,7 +58,7 @@ final class RingTerms {
             for (int branch = t.first[atom]; branch < t.first[atom + 1]; branch++) {
                 int child = t.child[branch];
                 if (distance[child] == Integer.MAX_VALUE && child != from) {
-                    addSubstituent(place, atom, branch);
+                    addSubstituent(place, branch);
                 }
             }
         }
@@ -85,7 +85,7 @@ final class RingTerms {
         }
     }
 
-    private void addSubstituent(String place, int atom, int branch) {
+    private void addSubstituent(String place, int branch) {
         Substituent s = facts.constants()[branch];
         int child = t.child[branch];
         String who = s.name();

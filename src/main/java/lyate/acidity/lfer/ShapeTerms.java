@@ -12,7 +12,7 @@ final class ShapeTerms {
         int[] distance = t.distances(site);
         addRings(t, site, terms);
         addCrowding(t, site, distance, terms);
-        addHydrogenBonds(facts, site, distance, terms);
+        addHydrogenBonds(facts, distance, terms);
         addCharges(t, site, distance, terms);
     }
 
@@ -55,7 +55,7 @@ final class ShapeTerms {
         terms.add("shape.head-both-ortho", Effect.STERICS, Math.max(0, terms.value("head-ring.ortho.count") - 1), site);
     }
 
-    private static void addHydrogenBonds(Facts facts, int site, int[] distance, Terms terms) {
+    private static void addHydrogenBonds(Facts facts, int[] distance, Terms terms) {
         Topology t = facts.topology();
         boolean[] seen = new boolean[4];
         for (int atom = 0; atom < t.atoms; atom++) {

@@ -2,7 +2,6 @@ package lyate.acidity.lfer;
 
 import static lyate.table.Column.number;
 import static lyate.table.Column.text;
-import static lyate.table.Column.word;
 
 import java.util.ArrayList;
 import java.util.Arrays;
