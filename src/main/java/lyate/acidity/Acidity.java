@@ -14,10 +14,13 @@ import lyate.stock.Medium;
  * @param contributions for an estimate: what it adds up from, class value first; empty for a measured value
  * @param missing       what the estimate could not account for, in words
  * @param relatives     nearest measured relatives
+ * @param spread        where the uncertainty comes from, in words
+ * @param alternatives  other ways to a value for the same site and medium, that of its class among them
  * @param source        citation or method
  */
 public record Acidity(double pKa, double sigma, Medium medium, Basis basis, List<Contribution> contributions,
-                      List<String> missing, List<Relative> relatives, String source) {
+                      List<String> missing, List<Relative> relatives, String spread, List<Alternative> alternatives,
+                      String source) {
 
     /** How a value was obtained. */
     public enum Basis {
@@ -57,14 +60,52 @@ public record Acidity(double pKa, double sigma, Medium medium, Basis basis, List
      */
     public record Relative(String smiles, String site, double pKa, double similarity, String source) {}
 
+    /**
+     * A value that another way leads to.
+     *
+     * @param text  for example {@code class value: phenol O-H}
+     * @param pKa   its value
+     * @param sigma its standard uncertainty
+     */
+    public record Alternative(String text, double pKa, double sigma) {}
+
     public Acidity {
         contributions = List.copyOf(contributions);
         missing = List.copyOf(missing);
         relatives = List.copyOf(relatives);
+        alternatives = List.copyOf(alternatives);
     }
 
     /** A value taken from a table. */
     public static Acidity measured(double pKa, double sigma, Medium medium, String source) {
-        return new Acidity(pKa, sigma, medium, Basis.MEASURED, List.of(), List.of(), List.of(), source);
+        return new Acidity(pKa, sigma, medium, Basis.MEASURED, List.of(), List.of(), List.of(),
+                "of the measurement, as the table states it", List.of(), source);
+    }
+
+    /** The same value beside other ways to it. */
+    Acidity beside(List<Alternative> others) {
+        return new Acidity(pKa, sigma, medium, basis, contributions, missing, relatives, spread, others, source);
+    }
+
+    /** The same value taken apart into these terms. */
+    Acidity from(List<Contribution> terms) {
+        return new Acidity(pKa, sigma, medium, basis, terms, missing, relatives, spread, alternatives, source);
+    }
+
+    /** This value as one of several ways. */
+    Alternative alternative() {
+        String way = contributions.isEmpty() ? basis.word() : basis == Basis.TRANSFERRED ? contributions.get(contributions.size() - 1).text()
+                : contributions.size() == 1 ? contributions.get(0).text() : source;
+        return new Alternative(way, pKa, sigma);
+    }
+
+    /** The same value with these measured relatives. */
+    Acidity withRelatives(List<Relative> known) {
+        return new Acidity(pKa, sigma, medium, basis, contributions, missing, known, spread, alternatives, source);
+    }
+
+    /** The same value, and why it was preferred. */
+    Acidity because(String reason) {
+        return new Acidity(pKa, sigma, medium, basis, contributions, missing, relatives, spread, alternatives, source + reason);
     }
 }

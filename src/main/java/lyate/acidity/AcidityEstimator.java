@@ -4,7 +4,7 @@ import java.util.List;
 import java.util.Locale;
 import java.util.Optional;
 import java.util.stream.Stream;
-import lyate.acidity.Acidity.Basis;
+import lyate.acidity.Acidity.Alternative;
 import lyate.acidity.Acidity.Contribution;
 import lyate.acidity.Acidity.Effect;
 import lyate.acidity.lfer.LinearFreeEnergyEstimate;
@@ -56,6 +56,10 @@ public final class AcidityEstimator {
 
     /** The pKa of the site in the medium, or empty where there is no way to know. */
     public Optional<Acidity> acidity(Molecule molecule, ProtonSite site, Medium medium) {
+        return best(molecule, site, medium).map(acidity -> ClassValueEstimate.besideClassValue(acidity, site.siteClass()));
+    }
+
+    private Optional<Acidity> best(Molecule molecule, ProtonSite site, Medium medium) {
         List<Acidity> known = measured.inAnyMedium(molecule, site);
         Optional<Acidity> here = known.stream().filter(acidity -> acidity.medium().equals(medium)).findFirst();
         if (here.isPresent()) {
@@ -95,8 +99,7 @@ public final class AcidityEstimator {
     private static Acidity startOfRecipe(Acidity acidity, ProtonSite site) {
         Contribution value = new Contribution("measured in " + acidity.medium().id(), Effect.ATOM, acidity.pKa(),
                 List.of(site.atom()));
-        return new Acidity(acidity.pKa(), acidity.sigma(), acidity.medium(), Basis.MEASURED, List.of(value),
-                acidity.missing(), acidity.relatives(), acidity.source());
+        return acidity.from(List.of(value));
     }
 
     private static Acidity surer(Acidity first, Acidity second) {
@@ -105,7 +108,9 @@ public final class AcidityEstimator {
         Acidity other = firstIsSurer ? second : first;
         String why = String.format(Locale.ROOT, "; preferred to the %s value %.1f, whose uncertainty of %.1f is larger",
                 other.basis().word(), other.pKa(), other.sigma());
-        return new Acidity(chosen.pKa(), chosen.sigma(), chosen.medium(), chosen.basis(), chosen.contributions(),
-                chosen.missing(), chosen.relatives(), chosen.source() + why);
+        List<Alternative> alternatives = Stream.of(Stream.of(other.alternative()), chosen.alternatives().stream(),
+                other.alternatives().stream()).flatMap(way -> way).toList();
+        Acidity value = chosen.because(why).beside(alternatives);
+        return value.relatives().isEmpty() ? value.withRelatives(other.relatives()) : value;
     }
 }

@@ -2,6 +2,7 @@ package lyate.acidity;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Locale;
 import lyate.acidity.Acidity.Basis;
 import lyate.acidity.Acidity.Contribution;
 import lyate.acidity.Acidity.Effect;
@@ -28,7 +29,9 @@ final class Carried {
             shift += before.value();
         }
         contributions.add(new Contribution(text, Effect.MEDIUM, shift, List.of()));
-        return new Acidity(pKa, sigma, to, Basis.TRANSFERRED, contributions, missing, value.relatives(),
+        String spread = String.format(Locale.ROOT, "%.2f in %s (%s), then %s, in quadrature", value.sigma(), value.medium().symbol(),
+                value.spread(), path);
+        return new Acidity(pKa, sigma, to, Basis.TRANSFERRED, contributions, missing, value.relatives(), spread, List.of(),
                 value.source() + "; carried from " + value.medium().symbol() + " by " + path);
     }
 }

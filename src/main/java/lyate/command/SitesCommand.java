@@ -10,6 +10,7 @@ import java.util.stream.IntStream;
 import lyate.acidity.AcidityEstimator;
 import lyate.molecule.MoleculeReader;
 import lyate.report.JsonList;
+import lyate.report.RecipeCsv;
 import lyate.report.ResultWriter;
 import lyate.report.SiteCsv;
 import lyate.report.SiteJson;
@@ -53,6 +54,10 @@ final class SitesCommand implements Callable<Integer> {
 
     @Option(names = "--estimate-only", description = "Leaves the table of measured values out.")
     private boolean estimateOnly;
+
+    @Option(names = "--explain", description = {"Takes every pKa apart: contributions with kind and atoms, other ways to it, what was missing,",
+        "measured relatives, and where the uncertainty comes from. JSON always holds this."})
+    private boolean explain;
 
     @Option(names = "--format", paramLabel = "FORMAT", defaultValue = "text", description = "text, csv or json (default: text).")
     private Format format;
@@ -99,8 +104,8 @@ final class SitesCommand implements Callable<Integer> {
 
     private ResultWriter<Answer> writer(Solvent asked) throws IOException {
         return switch (format) {
-            case TEXT -> new SiteText(terminal.outWriter(), asked.name());
-            case CSV -> new SiteCsv(terminal.outWriter(), asked.id());
+            case TEXT -> new SiteText(terminal.outWriter(), asked.name(), explain);
+            case CSV -> explain ? new RecipeCsv(terminal.outWriter(), asked.id()) : new SiteCsv(terminal.outWriter(), asked.id());
             case JSON -> new JsonList<>(terminal.outWriter(), answer -> SiteJson.describe(answer, asked.id()));
         };
     }

@@ -59,6 +59,8 @@ public final class SiteJson {
         object.put("contributions", acidity.contributions().stream().map(term -> contribution(molecule, term)).toList());
         object.put("missing", acidity.missing());
         object.put("relatives", acidity.relatives().stream().map(SiteJson::relative).toList());
+        object.put("uncertainty", acidity.spread());
+        object.put("other_ways", acidity.alternatives().stream().map(SiteJson::otherWay).toList());
         return object;
     }
 
@@ -69,6 +71,14 @@ public final class SiteJson {
         object.put("effect", term.effect().name().toLowerCase(Locale.ROOT).replace('_', '-'));
         object.put("value", Numbers.rounded(term.value(), 3));
         object.put("atoms", atoms);
+        return object;
+    }
+
+    private static Map<String, Object> otherWay(Acidity.Alternative way) {
+        Map<String, Object> object = new LinkedHashMap<>();
+        object.put("text", way.text());
+        object.put("pka", Numbers.rounded(way.pKa(), 3));
+        object.put("sigma", Numbers.rounded(way.sigma(), 3));
         return object;
     }
 

@@ -15,10 +15,13 @@ public final class SiteText implements ResultWriter<Answer> {
 
     private final Appendable out;
     private final String solvent;
+    private final boolean explained;
 
-    public SiteText(Appendable out, String solvent) {
+    /** @param explained whether each pKa is taken apart */
+    public SiteText(Appendable out, String solvent, boolean explained) {
         this.out = out;
         this.solvent = solvent;
+        this.explained = explained;
     }
 
     @Override
@@ -54,6 +57,9 @@ public final class SiteText implements ResultWriter<Answer> {
                 row.id(), row.pattern().smarts()));
         if (found.acidity().isPresent()) {
             out.append(" ".repeat(14)).append(found.acidity().get().source()).append('\n');
+            if (explained) {
+                RecipeText.write(Recipe.of(found.acidity().get(), molecule::label), " ".repeat(14), out);
+            }
         }
     }
 

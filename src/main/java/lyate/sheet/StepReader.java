@@ -1,8 +1,10 @@
 package lyate.sheet;
 
 import java.util.ArrayList;
+import java.util.HashSet;
 import java.util.List;
 import java.util.Optional;
+import java.util.Set;
 import java.util.stream.Collectors;
 import java.util.stream.IntStream;
 import lyate.molecule.Molecule;
@@ -136,11 +138,19 @@ public final class StepReader {
             return Optional.empty();
         }
         if (substrate.atomLabelled(label).isEmpty()) {
-            String atoms = IntStream.range(0, substrate.atomCount()).limit(60).mapToObj(substrate::label)
-                    .collect(Collectors.joining(", "));
-            problems.add(new Problem(SheetColumn.SITE, "there is no atom '" + label + "' in the substrate; it has " + atoms));
+            problems.add(new Problem(SheetColumn.SITE, "there is no atom '" + label + "' in the substrate; its protons are on "
+                    + protons(substrate)));
         }
         return Optional.of(label);
+    }
+
+    /** The first of each kind of atom that carries hydrogen. */
+    private static String protons(Molecule substrate) {
+        Set<Long> seen = new HashSet<>();
+        String atoms = IntStream.range(0, substrate.atomCount())
+                .filter(atom -> substrate.hydrogens(atom) > 0 && seen.add(substrate.symmetryClass(atom)))
+                .mapToObj(substrate::label).collect(Collectors.joining(", "));
+        return atoms.isEmpty() ? "no atom" : atoms;
     }
 
     private Optional<Molecule> partner(SheetRow row, List<Problem> problems) {

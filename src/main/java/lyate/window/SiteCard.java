@@ -1,10 +1,9 @@
 package lyate.window;
 
 import com.formdev.flatlaf.util.UIScale;
-import java.util.Locale;
 import lyate.acidity.Acidity;
-import lyate.acidity.Acidity.Contribution;
-import lyate.acidity.Acidity.Relative;
+import lyate.report.Recipe;
+import lyate.report.Recipe.Line;
 
 /** The card shown over a site: its pKa taken apart. */
 final class SiteCard {
@@ -22,37 +21,37 @@ final class SiteCard {
                 .append(escape(Words.percent(site.transfer().percentTaken()))).append(" taken by ").append(escape(shown.review().workingBase()))
                 .append(", log K ").append(Words.signed(site.transfer().logK())).append("<br>")
                 .append(escape(Words.sentence(site.transfer().decidedBy()))).append('.');
-        if (!acidity.contributions().isEmpty()) {
-            recipe(acidity, html);
-        }
-        for (String missing : acidity.missing()) {
-            html.append("<br>Not accounted for: ").append(escape(missing));
-        }
-        if (!acidity.relatives().isEmpty()) {
-            relatives(acidity, html);
-        }
-        return html.append("<hr>").append(escape(acidity.source())).append("</div></html>").toString();
-    }
-
-    /** The terms of the estimate, as a sum. */
-    private static void recipe(Acidity acidity, StringBuilder html) {
+        Recipe recipe = Recipe.of(acidity, shown.review().step().substrate()::label);
         html.append("<hr><table width='100%' cellpadding=1 cellspacing=0>");
-        boolean first = true;
-        for (Contribution term : acidity.contributions()) {
-            row(html, escape(term.text()), term.effect().name().toLowerCase(Locale.ROOT).replace('_', ' '),
-                    first ? Words.oneDecimal(term.value()) : Words.signed(term.value()));
-            first = false;
+        for (Line line : recipe.lines()) {
+            boolean first = line == recipe.lines().get(0);
+            row(html, left(line), escape(line.effect()), right(line, first));
         }
-        row(html, "<b>pKa</b>", "", "<b>" + Words.withSigma(acidity) + "</b>");
-        html.append("</table>");
+        return html.append("</table><hr>").append(escape(acidity.source())).append("</div></html>").toString();
     }
 
-    private static void relatives(Acidity acidity, StringBuilder html) {
-        html.append("<hr>Nearest measured compounds<table width='100%' cellpadding=1 cellspacing=0>");
-        for (Relative relative : acidity.relatives()) {
-            row(html, escape(relative.smiles()), escape(relative.site()), Words.oneDecimal(relative.pKa()));
-        }
-        html.append("</table>");
+    private static String left(Line line) {
+        String text = escape(line.text());
+        String atoms = line.atoms().isEmpty() ? "" : " (" + escape(String.join(" ", line.atoms())) + ")";
+        return switch (line.part()) {
+            case CONTRIBUTION -> text + atoms;
+            case PKA -> "<b>pKa</b>";
+            case OTHER_WAY -> "another way: " + text;
+            case MISSING -> "not accounted for: " + text;
+            case RELATIVE -> "measured: " + text + atoms;
+            case UNCERTAINTY -> "uncertainty: " + text;
+        };
+    }
+
+    private static String right(Line line, boolean first) {
+        return switch (line.part()) {
+            case CONTRIBUTION -> first ? Words.oneDecimal(line.value().getAsDouble()) : Words.signed(line.value().getAsDouble());
+            case PKA -> "<b>" + Words.withSigma(line.value().getAsDouble(), line.sigma().getAsDouble()) + "</b>";
+            case OTHER_WAY -> Words.withSigma(line.value().getAsDouble(), line.sigma().getAsDouble());
+            case RELATIVE -> Words.oneDecimal(line.value().getAsDouble());
+            case UNCERTAINTY -> Words.oneDecimal(line.sigma().getAsDouble());
+            case MISSING -> "";
+        };
     }
 
     private static void row(StringBuilder html, String left, String middle, String right) {

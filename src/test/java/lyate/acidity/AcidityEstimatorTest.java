@@ -26,7 +26,7 @@ class AcidityEstimatorTest {
 
     private static SiteEstimate always(double pKa, double sigma, Medium only) {
         return (molecule, site, medium) -> medium.equals(only) ? Optional.of(new Acidity(pKa, sigma, medium, Basis.ESTIMATED,
-                List.of(new Contribution("made up", Effect.ATOM, pKa, List.of())), List.of(), List.of(), "made up")) : Optional.empty();
+                List.of(new Contribution("made up", Effect.ATOM, pKa, List.of())), List.of(), List.of(), "made up", List.of(), "made up")) : Optional.empty();
     }
 
     private static Optional<Acidity> acidity(AcidityEstimator estimator, String smiles, String label, Medium medium) {

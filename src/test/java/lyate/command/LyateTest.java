@@ -53,6 +53,36 @@ class LyateTest {
     }
 
     @Test
+    void explainedSitesAreTakenApartInText() {
+        String text = run("", "sites", "--explain", "--estimate-only", "COc1ccc(O)cc1").out();
+        assertTrue(text.contains("class value: alkoxy or amino phenol O-H"), text);
+        assertTrue(text.contains("aromatic ring"), text);
+        assertTrue(text.lines().anyMatch(line -> line.matches(" +[-+]?\\d+\\.\\d\\d  resonance .*\\[.*O2.*]")), text);
+        assertTrue(text.contains("measured relative: "), text);
+        assertTrue(text.contains("uncertainty: "), text);
+        assertFalse(run("", "sites", "--estimate-only", "COc1ccc(O)cc1").out().contains("uncertainty: "));
+    }
+
+    @Test
+    void explainedSitesAreTakenApartInCsv() throws IOException {
+        List<CSVRecord> rows = csv(run("", "sites", "--explain", "--estimate-only", "--format", "csv", "COc1ccc(O)cc1", "C(").out());
+        List<CSVRecord> phenol = rows.stream().filter(row -> row.get("site").equals("O7") && row.get("role").equals("acid")).toList();
+        double sum = phenol.stream().filter(row -> row.get("part").equals("contribution")).mapToDouble(row -> Double.parseDouble(row.get("value"))).sum();
+        CSVRecord pKa = phenol.stream().filter(row -> row.get("part").equals("pka")).findFirst().orElseThrow();
+        // the terms are rounded to two decimals each
+        assertEquals(Double.parseDouble(pKa.get("value")), sum, 0.005 * phenol.size());
+        assertTrue(phenol.stream().anyMatch(row -> row.get("effect").equals("resonance") && row.get("atoms").contains("O2")), phenol.toString());
+        assertEquals(List.of("uncertainty"), phenol.stream().skip(phenol.size() - 1L).map(row -> row.get("part")).toList());
+        assertEquals("refused", rows.get(rows.size() - 1).get("part"));
+    }
+
+    @Test
+    void aSiteThatDoesNotExistIsAnsweredWithTheProtons() {
+        String err = run("", "check", "--substrate", "CC(=O)OCC", "--base", "LDA", "--solvent", "THF", "--site", "C99").err();
+        assertTrue(err.contains("there is no atom 'C99' in the substrate; its protons are on C1, C5, C6"), err);
+    }
+
+    @Test
     void estimateOnlyLeavesMeasuredValuesOut() throws IOException {
         Run run = run("", "sites", "--estimate-only", "--format", "csv", "CC(=O)O");
         assertTrue(csv(run.out()).stream().noneMatch(row -> row.get("basis").equals("measured")));

@@ -63,7 +63,8 @@ final class InventedReviewer implements Reviewer {
     private static Transfer transfer(String donor, List<Integer> atoms, double pKa, double basePKa, double equivalents) {
         double logK = basePKa - pKa;
         Acidity acidity = new Acidity(pKa, 0.8, Medium.DMSO, Basis.ESTIMATED, List.of(new Contribution("class value", Effect.ATOM, pKa + 1, atoms),
-                new Contribution("ortho methyl", Effect.STERICS, -1, atoms)), List.of(), List.of(), "invented for a test");
+                new Contribution("ortho methyl", Effect.STERICS, -1, atoms)), List.of(), List.of(), "invented spread",
+                List.of(), "invented for a test");
         double taken = logK < 0 || donor.equals("solvent") ? 0 : donor.startsWith("O") || equivalents > 1.9 ? 99.95 : 5;
         return new Transfer(donor, atoms, acidity, logK, 1.2, -5.708 * logK, taken, "DMSO scale: strong base");
     }

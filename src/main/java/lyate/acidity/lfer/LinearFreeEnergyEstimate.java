@@ -74,13 +74,14 @@ public final class LinearFreeEnergyEstimate implements SiteEstimate {
         boolean rough = !description.missing().isEmpty();
         double sigma = curve.sigma(prediction.comparison().distance(), prediction.comparison().misfit(), rough);
         double pKa = prediction.pKa() + description.statistics();
-        String source = "linear free-energy relationship of " + description.series().name() + " in " + medium.id()
-                + "; uncertainty " + Decimals.two(curve.alike()) + " beside a like compound, here x " + Decimals.two(sigma / curve.alike())
+        String spread = "cross-validation of " + description.series().name() + ": " + Decimals.two(curve.alike())
+                + " beside a like compound, here x " + Decimals.two(sigma / curve.alike())
                 + ": the nearest relative is " + Math.round(100 * prediction.comparison().closeness())
                 + " % alike, the nearest ones are " + Decimals.two(prediction.comparison().misfit()) + " off their own estimates"
                 + (rough ? " and parts of the molecule are not in the tables" : "");
-        return new Acidity(pKa, sigma, medium, Basis.ESTIMATED,
-                contributions(site, description, prediction), description.missing(), relatives(prediction), source);
+        return new Acidity(pKa, sigma, medium, Basis.ESTIMATED, contributions(site, description, prediction), description.missing(),
+                relatives(prediction), spread, List.of(),
+                "linear free-energy relationship of " + description.series().name() + " in " + medium.symbol());
     }
 
     private List<Contribution> contributions(ProtonSite site, SiteDescription description, Prediction prediction) {
