@@ -28,7 +28,7 @@ import lyate.table.TableProblem;
 
 /**
  * The pKa values of {@code measured-acidities.csv}, found by structure and only at the site they were measured at.
- * How the structure is drawn does not matter ({@link ProtonPlace}). Immutable; safe to share between threads.
+ * How the structure is drawn does not matter ({@link ProtonSkeleton}). Immutable; safe to share between threads.
  */
 public final class MeasuredAcidities {
 
@@ -47,7 +47,7 @@ public final class MeasuredAcidities {
      * @param place    what it is found by
      * @param acidity  its value
      */
-    public record Value(Row row, Molecule molecule, Role role, int atom, ProtonPlace place, Acidity acidity) {}
+    public record Value(Row row, Molecule molecule, Role role, int atom, ProtonSkeleton place, Acidity acidity) {}
 
     private final List<Value> values;
     private final Map<Long, List<Value>> byHash = new HashMap<>();
@@ -57,7 +57,7 @@ public final class MeasuredAcidities {
     private MeasuredAcidities(List<Value> values) {
         this.values = List.copyOf(values);
         for (Value value : values) {
-            formulas.add(ProtonPlace.formula(value.molecule(), value.role()));
+            formulas.add(ProtonSkeleton.formula(value.molecule(), value.role()));
             byHash.computeIfAbsent(value.place().hash(), key -> new ArrayList<>()).add(0, value);
         }
     }
@@ -94,11 +94,11 @@ public final class MeasuredAcidities {
 
     /** The values measured for this proton, one per medium, ordered by the medium's id. */
     public List<Acidity> inAnyMedium(Molecule molecule, ProtonSite site) {
-        return formulas.contains(ProtonPlace.formula(molecule, site.role()))
-                ? inAnyMedium(ProtonPlace.of(molecule, site.role(), site.atom())) : List.of();
+        return formulas.contains(ProtonSkeleton.formula(molecule, site.role()))
+                ? inAnyMedium(ProtonSkeleton.of(molecule, site.role(), site.atom())) : List.of();
     }
 
-    private List<Acidity> inAnyMedium(ProtonPlace place) {
+    private List<Acidity> inAnyMedium(ProtonSkeleton place) {
         Map<String, Acidity> found = new TreeMap<>();
         for (Value value : byHash.getOrDefault(place.hash(), List.of())) {
             if (value.place().sameAs(place)) {
@@ -134,7 +134,7 @@ public final class MeasuredAcidities {
         }
         Acidity acidity = Acidity.measured(row.number("pka").getAsDouble(), row.number("sigma").getAsDouble(),
                 new Medium(row.text("medium")), row.text("source"));
-        ProtonPlace place = ProtonPlace.of(molecule, role, atom.getAsInt());
+        ProtonSkeleton place = ProtonSkeleton.of(molecule, role, atom.getAsInt());
         return new Reading(Optional.of(new Value(row, molecule, role, atom.getAsInt(), place, acidity)), Optional.empty());
     }
 }

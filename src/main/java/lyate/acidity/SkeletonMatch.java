@@ -7,13 +7,13 @@ import java.util.List;
 /** Looks for a one-to-one map of atoms that keeps colours and bonds; the proton's atoms have colours of their own. */
 final class SkeletonMatch {
 
-    private final ProtonPlace left;
-    private final ProtonPlace right;
+    private final ProtonSkeleton left;
+    private final ProtonSkeleton right;
     private final int[] image;
     private final boolean[] taken;
     private final List<Integer> order;
 
-    SkeletonMatch(ProtonPlace left, ProtonPlace right) {
+    SkeletonMatch(ProtonSkeleton left, ProtonSkeleton right) {
         this.left = left;
         this.right = right;
         this.image = new int[left.size()];
@@ -58,7 +58,7 @@ final class SkeletonMatch {
     }
 
     /** Every atom but the first follows one of its neighbours, so that few candidates fit. */
-    private static List<Integer> outwardsFromTheProton(ProtonPlace place) {
+    private static List<Integer> outwardsFromTheProton(ProtonSkeleton place) {
         boolean[] seen = new boolean[place.size()];
         List<Integer> order = new ArrayList<>(List.of(place.start()));
         seen[place.start()] = true;

@@ -13,7 +13,7 @@ import java.util.Optional;
 import java.util.TreeMap;
 import java.util.stream.Stream;
 import lyate.acidity.MeasuredAcidities;
-import lyate.acidity.ProtonPlace;
+import lyate.acidity.ProtonSkeleton;
 import lyate.molecule.Molecule;
 import lyate.molecule.MoleculeException;
 import lyate.molecule.MoleculeReader;
@@ -38,7 +38,7 @@ final class KnownAcids {
     private static final double LARGEST_SIGMA = 0.8;
 
     /** One proton: the family of its site and every value by medium id. */
-    record Acid(ProtonPlace place, String family, Map<String, List<Double>> values) {
+    record Acid(ProtonSkeleton place, String family, Map<String, List<Double>> values) {
 
         /** Mean of the values in a medium. */
         Optional<Double> in(String medium) {
@@ -113,7 +113,7 @@ final class KnownAcids {
             passedOver.add(where + ": " + molecule.label(atom) + " has no site class as " + role.word());
             return;
         }
-        ProtonPlace place = ProtonPlace.of(molecule, role, atom);
+        ProtonSkeleton place = ProtonSkeleton.of(molecule, role, atom);
         List<Acid> alike = acids.computeIfAbsent(place.hash(), key -> new ArrayList<>());
         Acid acid = alike.stream().filter(known -> known.place().sameAs(place)).findFirst().orElseGet(() -> {
             Acid fresh = new Acid(place, site.get().siteClass().family(), new TreeMap<>());

@@ -112,8 +112,8 @@ class MeasuredAciditiesTest {
     void constitutionalIsomersAreToldApart() {
         assertFalse(find("C1CCC2CCCCC2N1", "N10", Role.BASE, Medium.WATER)
                 .equals(find("C1CCCN1", "N5", Role.BASE, Medium.WATER)));
-        ProtonPlace decalin = ProtonPlace.of(Sites.molecule("C1CCC2CCCCC2C1"), Role.ACID, 3);
-        ProtonPlace bicyclopentyl = ProtonPlace.of(Sites.molecule("C1CCC(C1)C1CCCC1"), Role.ACID, 3);
+        ProtonSkeleton decalin = ProtonSkeleton.of(Sites.molecule("C1CCC2CCCCC2C1"), Role.ACID, 3);
+        ProtonSkeleton bicyclopentyl = ProtonSkeleton.of(Sites.molecule("C1CCC(C1)C1CCCC1"), Role.ACID, 3);
         assertFalse(decalin.sameAs(bicyclopentyl), "same atoms, same neighbours, other rings");
     }
 

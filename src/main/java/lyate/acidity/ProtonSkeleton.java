@@ -12,7 +12,7 @@ import lyate.site.Role;
  * isotopes) give the same place, and so do an acid's proton and the one its drawn conjugate base would take up.
  * Protons that move freely ({@link MobileProtons}) are counted for their atoms together. Immutable.
  */
-public final class ProtonPlace {
+public final class ProtonSkeleton {
 
     private static final int ROUNDS = 6;
     private static final int SHARED = 99;
@@ -24,7 +24,7 @@ public final class ProtonPlace {
     private final long formula;
     private final long hash;
 
-    private ProtonPlace(Molecule molecule, Role role, int site) {
+    private ProtonSkeleton(Molecule molecule, Role role, int site) {
         int count = molecule.atomCount();
         this.start = site;
         this.kinds = new int[count];
@@ -39,12 +39,12 @@ public final class ProtonPlace {
         }
         this.formula = formula(molecule, role);
         this.colours = refine();
-        this.hash = mix(Arrays.stream(colours).map(ProtonPlace::mix).sum() + formula);
+        this.hash = mix(Arrays.stream(colours).map(ProtonSkeleton::mix).sum() + formula);
     }
 
     /** The place of a site's proton: the one that leaves, or the one that arrives. */
-    public static ProtonPlace of(Molecule molecule, Role role, int atom) {
-        return new ProtonPlace(molecule, role, atom);
+    public static ProtonSkeleton of(Molecule molecule, Role role, int atom) {
+        return new ProtonSkeleton(molecule, role, atom);
     }
 
     /** A number that is the same for equal elemental composition and charge of the acid; quick to get. */
@@ -67,7 +67,7 @@ public final class ProtonPlace {
     }
 
     /** Whether both are the same proton of the same acid. */
-    public boolean sameAs(ProtonPlace other) {
+    public boolean sameAs(ProtonSkeleton other) {
         return hash == other.hash && formula == other.formula && kinds.length == other.kinds.length
                 && new SkeletonMatch(this, other).exists();
     }
@@ -86,7 +86,7 @@ public final class ProtonPlace {
     }
 
     private long[] refine() {
-        long[] current = Arrays.stream(kinds).mapToLong(ProtonPlace::mix).toArray();
+        long[] current = Arrays.stream(kinds).mapToLong(ProtonSkeleton::mix).toArray();
         for (int round = 0; round < Math.min(ROUNDS, kinds.length); round++) {
             long[] next = new long[kinds.length];
             for (int atom = 0; atom < kinds.length; atom++) {
