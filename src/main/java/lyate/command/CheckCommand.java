@@ -76,7 +76,7 @@ final class CheckCommand implements Callable<Integer> {
                 new ReviewText(terminal.outWriter()).write(review);
                 new DoseText(terminal.outWriter()).write(dose, review.intendedSite());
             }
-            case CSV -> new SheetCsv(terminal.outWriter(), row.header()).write(ReviewedRow.of(row, review));
+            case CSV -> new SheetCsv(terminal.outWriter(), row.header()).begin().write(ReviewedRow.of(row, review));
             case JSON -> {
                 ResultWriter<Review> json = new JsonList<>(terminal.outWriter(), ReviewJson::describe);
                 json.write(review);

@@ -1,6 +1,7 @@
 package lyate.command;
 
 import java.awt.GraphicsEnvironment;
+import java.io.IOException;
 import lyate.table.TableFolders;
 import lyate.window.WorkbenchFrame;
 import picocli.CommandLine;
@@ -37,7 +38,15 @@ public final class Lyate {
                 .setParameterExceptionHandler(Failures::wrongUsage)
                 .setExecutionExceptionHandler(Failures::failed);
         int code = command.execute(arguments);
-        terminal.flush();
+        try {
+            terminal.flushResults();
+        } catch (IOException e) {
+            if (code == 0) {
+                terminal.errWriter().println("lyate: " + e.getMessage());
+            }
+            code = Math.max(code, Failures.SOME_INPUT_NOT_USED);
+        }
+        terminal.errWriter().flush();
         return code;
     }
 }

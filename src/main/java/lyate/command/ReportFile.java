@@ -22,13 +22,13 @@ abstract class ReportFile implements ResultWriter<ReviewedRow>, AutoCloseable {
     public void close() throws IOException {}
 
     /** @throws ParameterException where the name does not say which kind of document is meant */
-    static ReportFile open(Optional<Path> file, Terminal terminal, CommandSpec spec, Supplier<ReportContext> context) throws IOException {
+    static ReportFile open(Optional<Path> file, CommandSpec spec, Supplier<ReportContext> context) throws IOException {
         if (file.isEmpty()) {
             return new None();
         }
         String name = file.get().toString().toLowerCase(Locale.ROOT);
         if (name.endsWith(".html")) {
-            return new Web(new ResultTarget(file, terminal), context.get());
+            return new Web(ResultTarget.whole(file.get()), context.get());
         }
         if (name.endsWith(".pdf")) {
             return new Pages(file.get(), context.get());

@@ -1,6 +1,5 @@
 package lyate.command;
 
-import java.util.EnumMap;
 import java.util.List;
 import java.util.Map;
 import java.util.stream.Collectors;
@@ -9,6 +8,7 @@ import lyate.sheet.RowException;
 import lyate.sheet.SheetColumn;
 import lyate.sheet.SheetHeader;
 import lyate.sheet.SheetRow;
+import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Option;
 
 /** What a deprotonation is described by, shared by the commands that judge one. */
@@ -21,25 +21,15 @@ final class StepOptions {
     private String substrate;
     @Option(names = "--solvent", required = true, paramLabel = "S", description = "By name or abbreviation, for example THF.")
     private String solvent;
-    @Option(names = "--site", paramLabel = "C3", defaultValue = "", description = "The proton that is meant to go (default: the most acidic).")
-    private String site;
-    @Option(names = "--equiv", paramLabel = "N", defaultValue = "", description = "Moles of base per mole of substrate (default: 1.0).")
-    private String equivalents;
-    @Option(names = "--temperature", paramLabel = "T", defaultValue = "", description = "Degrees Celsius (default: 25).")
-    private String temperature;
-    @Option(names = "--concentration", paramLabel = "C", defaultValue = "", description = "Substrate, mol/L (default: 0.2).")
-    private String concentration;
-    @Option(names = "--water-ppm", paramLabel = "W", defaultValue = "", description = "Water in the solvent, mass ppm (default: what a well-kept bottle holds).")
-    private String waterPpm;
-    @Option(names = "--electrophile", paramLabel = "E", defaultValue = "", description = "Electrophile or additive in the same flask, by name or structure.")
-    private String electrophile;
+    @Mixin
+    private ConditionOptions conditions;
 
     /** The options as the one row of a sheet, so that both are read by the same rules. */
     SheetRow row(String base) {
-        Map<SheetColumn, String> cells = new EnumMap<>(Map.of(SheetColumn.SUBSTRATE, substrate, SheetColumn.SITE, site,
-                SheetColumn.BASE, base, SheetColumn.BASE_EQUIV, equivalents, SheetColumn.SOLVENT, solvent,
-                SheetColumn.TEMPERATURE, temperature, SheetColumn.CONCENTRATION, concentration,
-                SheetColumn.WATER, waterPpm, SheetColumn.ELECTROPHILE, electrophile));
+        Map<SheetColumn, String> cells = conditions.cells();
+        cells.put(SheetColumn.SUBSTRATE, substrate);
+        cells.put(SheetColumn.BASE, base);
+        cells.put(SheetColumn.SOLVENT, solvent);
         List<String> names = cells.keySet().stream().map(SheetColumn::header).toList();
         return new SheetRow(new SheetHeader(names), 1, 1, List.copyOf(cells.values()), "");
     }

@@ -21,7 +21,12 @@ final class SafeCsv {
     }
 
     void row(List<String> cells) throws IOException {
-        out.append(FORMAT.format(cells.stream().map(SafeCsv::safe).toArray())).append('\n');
+        out.append(text(cells)).append('\n');
+    }
+
+    /** A record without its line end. */
+    static String text(List<String> cells) {
+        return FORMAT.format(cells.stream().map(SafeCsv::safe).toArray());
     }
 
     static String safe(String cell) {

@@ -3,7 +3,6 @@ package lyate.sheet;
 import java.io.IOException;
 import java.io.Reader;
 import java.io.UncheckedIOException;
-import java.util.Iterator;
 import java.util.List;
 import java.util.NoSuchElementException;
 
@@ -11,7 +10,11 @@ import java.util.NoSuchElementException;
  * Reads a route sheet row by row; keeps none of them. Tolerates a byte order mark, any line ends, semicolons or tabs,
  * comment lines, missing columns and line breaks in quoted cells. A row that cannot be taken apart says so itself.
  */
-public final class SheetReader implements Iterator<SheetRow> {
+public final class SheetReader implements RowSource {
+
+    /** What a decoder puts where the bytes are no letter. */
+    private static final char NO_LETTER = '\uFFFD';
+    private static final String NOT_UTF_8 = "the input is not UTF-8 text; save it as CSV UTF-8";
 
     private final RecordCutter cutter;
     private final Dialect dialect;
@@ -29,10 +32,17 @@ public final class SheetReader implements Iterator<SheetRow> {
     public SheetReader(Reader sheet) throws IOException, SheetException {
         this.cutter = new RecordCutter(sheet);
         this.headerRecord = firstRecord();
+        checkLetters();
         this.dialect = Dialect.of(headerRecord.text());
         this.header = new SheetHeader(headerCells());
         header.check();
         this.next = cutter.next();
+    }
+
+    private void checkLetters() throws SheetException {
+        if (headerRecord.text().indexOf(NO_LETTER) >= 0 || headerRecord.text().indexOf('\0') >= 0) {
+            throw new SheetException(NOT_UTF_8);
+        }
     }
 
     private RawRecord firstRecord() throws IOException, SheetException {
@@ -55,7 +65,7 @@ public final class SheetReader implements Iterator<SheetRow> {
         }
     }
 
-    /** The columns. */
+    @Override
     public SheetHeader header() {
         return header;
     }
@@ -101,7 +111,8 @@ public final class SheetReader implements Iterator<SheetRow> {
         try {
             List<String> cells = dialect.cells(raw.text());
             boolean excess = cells.stream().skip(header.names().size()).anyMatch(cell -> !cell.isEmpty());
-            String problem = excess ? cells.size() + " cells, but the header has " + header.names().size() + " columns" : "";
+            String problem = excess ? cells.size() + " cells, but the header has " + header.names().size() + " columns"
+                    : raw.text().indexOf(NO_LETTER) >= 0 ? NOT_UTF_8 : "";
             return new SheetRow(header, number, raw.line(), cells, problem);
         } catch (IOException e) {
             return new SheetRow(header, number, raw.line(), List.of(), "a quoted cell is not closed, or text follows its closing quote");

@@ -3,13 +3,15 @@ package lyate.sheet;
 import java.util.ArrayList;
 import java.util.Collections;
 import java.util.List;
+import java.util.stream.Collectors;
+import java.util.stream.Stream;
 
 /**
  * One row of a route sheet.
  *
  * @param header  the columns
  * @param number  1-based, comment and blank lines not counted
- * @param line    1-based line of the file on which it begins
+ * @param line    1-based line of the file on which it begins; 0 where it has none
  * @param cells   trimmed text of every column, in the order of the header
  * @param problem why the row cannot be taken apart into cells, in words; empty for a sound one
  */
@@ -35,7 +37,8 @@ public record SheetRow(SheetHeader header, int number, int line, List<String> ce
 
     /** The place for messages, for example {@code row 3 (A003, line 5)}. */
     public String place() {
-        String step = text(SheetColumn.STEP);
-        return "row " + number + " (" + (step.isEmpty() ? "" : step + ", ") + "line " + line + ")";
+        String where = Stream.of(text(SheetColumn.STEP), line > 0 ? "line " + line : "").filter(part -> !part.isEmpty())
+                .collect(Collectors.joining(", "));
+        return "row " + number + (where.isEmpty() ? "" : " (" + where + ")");
     }
 }

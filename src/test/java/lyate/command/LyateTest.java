@@ -238,8 +238,18 @@ class LyateTest {
     }
 
     @Test
-    void sheetThatIsNotUtf8() throws IOException {
-        Path sheet = Files.write(folder.resolve("latin.csv"), "substrate,notes\nCCO,d\u00e9j\u00e0\n".getBytes(StandardCharsets.ISO_8859_1));
+    void lettersThatAreNotUtf8CostTheirRow() throws IOException {
+        Path sheet = Files.write(folder.resolve("latin.csv"), "substrate,base,solvent,notes\nCCO,NaH,THF,d\u00e9j\u00e0\nCCO,NaH,THF,ici\n"
+                .getBytes(StandardCharsets.ISO_8859_1));
+        Run run = run("", "review", sheet.toString());
+        assertEquals(1, run.code());
+        assertTrue(run.err().startsWith("row 1 (line 2): the input is not UTF-8 text; save it as CSV UTF-8"), run.err());
+        assertTrue(run.out().contains("CCO,NaH,THF,ici,selective"), run.out());
+    }
+
+    @Test
+    void sheetInAnotherEncodingAltogetherIsRefusedInWords() throws IOException {
+        Path sheet = Files.write(folder.resolve("wide.csv"), "substrate,notes\nCCO,x\n".getBytes(StandardCharsets.UTF_16));
         Run run = run("", "review", sheet.toString());
         assertEquals(1, run.code());
         assertEquals("lyate review: the input is not UTF-8 text; save it as CSV UTF-8\n", run.err().replace("\r", ""));

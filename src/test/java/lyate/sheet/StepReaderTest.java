@@ -70,7 +70,9 @@ class StepReaderTest {
     @Test
     void badStructureShowsThePlace() {
         RowException refused = assertThrows(RowException.class, () -> read("substrate,base,solvent", "CC(C,LDA,THF"));
-        assertEquals("column substrate: not SMILES: unclosed branch detected, SMILES may be truncated\nCC(C\n   ^", refused.getMessage());
+        assertEquals("not SMILES: unclosed branch detected, SMILES may be truncated\nCC(C\n   ^", refused.problems().get(0).reason());
+        assertEquals("column substrate: not SMILES: unclosed branch detected, SMILES may be truncated, at character 4 of 'CC(C'",
+                refused.getMessage());
     }
 
     @ParameterizedTest
