@@ -45,8 +45,7 @@ final class BatchProgress {
         long now = System.nanoTime();
         if (terminal.watched() && now - shown > NANOS_BETWEEN) {
             shown = now;
-            terminal.errWriter().print(CLEAR + words(rows, (now - start) / NANOS));
-            terminal.errWriter().flush();
+            show(CLEAR + words(rows, (now - start) / NANOS));
         }
     }
 
@@ -85,7 +84,12 @@ final class BatchProgress {
 
     private void clear() {
         if (terminal.watched() && shown != start) {
-            terminal.errWriter().print(CLEAR);
+            show(CLEAR);
         }
+    }
+
+    private void show(String text) {
+        terminal.errWriter().print(text);
+        terminal.errWriter().flush();
     }
 }
