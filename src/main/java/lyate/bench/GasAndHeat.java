@@ -25,6 +25,8 @@ import lyate.stock.Solvent;
 public record GasAndHeat(Optional<GivenOffGas> gas, List<HeatShare> heat, List<String> withoutHeat,
                          OptionalDouble temperatureRise, OptionalDouble highestTemperature, List<String> cautions) {
 
+    /** Litres. */
+    private static final double WORTH_SAYING = 0.005;
     private static final double ROOM_CELSIUS = 25;
     private static final double ATMOSPHERE = 101.325;
     /** This close to the boiling point counts as boiling: hot spots, vapour carried off by the gas. */
@@ -100,9 +102,9 @@ public record GasAndHeat(Optional<GivenOffGas> gas, List<HeatShare> heat, List<S
     }
 
     private static String gasLine(GivenOffGas gas) {
-        return say("Gives off %.3g L of %s (%.0f degrees C, %.1f kPa) as the base reacts and up to %.3g L more when the rest is"
-                + " destroyed: keep the vessel vented, let the rate of addition set the rate of the gas, and lead it away.",
-                gas.litresInStep(), gas.name(), gas.celsius(), gas.kiloPascal(), gas.litresAtQuench());
+        String later = gas.litresAtQuench() < WORTH_SAYING ? "" : say(" and up to %.3g L more when the rest is destroyed", gas.litresAtQuench());
+        return say("Gives off %.3g L of %s (%.0f degrees C, %.1f kPa) as the base reacts%s: keep the vessel vented, let the rate of"
+                + " addition set the rate of the gas, and lead it away.", gas.litresInStep(), gas.name(), gas.celsius(), gas.kiloPascal(), later);
     }
 
     private static String say(String format, Object... values) {

@@ -3,6 +3,7 @@ package lyate.bench;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
+import java.util.function.DoublePredicate;
 
 /**
  * At which pH a product and what accompanies it go which way.
@@ -51,6 +52,32 @@ public record WorkUp(AqueousForm product, List<CurvePoint> curve, List<Parting> 
             return String.format(Locale.ROOT, "Between pH %.1f and %.1f %s goes into the organic layer and %s stays in the water.",
                     first.fromPH(), first.toPH(), first.organicLayer(), first.water());
         }
+    }
+
+    /** Where the product itself goes, for example {@code The product goes into the organic layer from pH 0 to 7.9; it stays in the water from pH 11.9 to 14.} */
+    public String productSentence() {
+        String organic = ranges(share -> share >= ExtractionWindow.CLEAN);
+        String water = ranges(share -> share <= 1 - ExtractionWindow.CLEAN);
+        String first = organic.isEmpty() ? "At no pH is the product uncharged to 99 %" : "The product goes into the organic layer " + organic;
+        return first + (water.isEmpty() ? "." : "; it stays in the water " + water + ".");
+    }
+
+    private String ranges(DoublePredicate wanted) {
+        List<String> ranges = new ArrayList<>();
+        double from = Double.NaN;
+        for (int i = 0; i < curve.size(); i++) {
+            CurvePoint point = curve.get(i);
+            boolean here = wanted.test(point.uncharged());
+            if (here && Double.isNaN(from)) {
+                from = point.pH();
+            }
+            boolean last = i == curve.size() - 1 || !wanted.test(curve.get(i + 1).uncharged());
+            if (here && last) {
+                ranges.add(String.format(Locale.ROOT, "from pH %.1f to %.1f", from, point.pH()));
+                from = Double.NaN;
+            }
+        }
+        return String.join(" and ", ranges);
     }
 
     public WorkUp {

@@ -85,7 +85,7 @@ public final class BaseChoice {
                 100 * review.probability());
         String against = review.findings().stream()
                 .filter(finding -> finding.severity() != Finding.Severity.NOTE || finding.kind() == FindingKind.SLOW_TRANSFER).findFirst()
-                .map(finding -> "; " + finding.sentence()).orElse("");
-        return review.verdict().meaning() + " (" + numbers + ")" + against;
+                .map(finding -> finding.sentence() + " ").orElse("");
+        return against + Character.toUpperCase(review.verdict().meaning().charAt(0)) + review.verdict().meaning().substring(1) + " (" + numbers + ").";
     }
 }

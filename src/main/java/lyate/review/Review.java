@@ -35,6 +35,11 @@ public record Review(Step step, Verdict verdict, double probability, Map<Verdict
         assumptions = List.copyOf(assumptions);
     }
 
+    /** Whether the solvent leaves nothing of the base that could take a proton; log K is that of the base as it was. */
+    public boolean baseDestroyed() {
+        return workingBase.startsWith(WorkingBase.NOTHING);
+    }
+
     /** Whether a side reaction wins, so that the shares taken are what would be, were it left aside. */
     public boolean sideReactionWins() {
         return verdict == Verdict.INCOMPATIBLE;

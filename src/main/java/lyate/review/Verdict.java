@@ -4,7 +4,7 @@ import java.util.Locale;
 
 /** What becomes of the intended proton. */
 public enum Verdict {
-    SELECTIVE("the intended proton is taken; of the others only those that have to go first"),
+    SELECTIVE("the intended proton is taken, and no other without need"),
     PARTIAL("a real equilibrium at the intended site: fine for catalysis, not for making the anion in full"),
     TOO_WEAK("the base does not reach the intended proton, and nothing else takes the base"),
     WRONG_SITE("a more acidic proton of the substrate takes the base first"),

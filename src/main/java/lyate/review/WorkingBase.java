@@ -23,6 +23,9 @@ import lyate.stock.Solvent;
 record WorkingBase(String name, Optional<Base> shelfBase, Function<Medium, Optional<KnownPKa>> pKa, boolean strong,
                    boolean levelled, boolean destroyed, Optional<Double> logKSolvent) {
 
+    /** How the name begins where nothing is left. */
+    static final String NOTHING = "nothing";
+
     /** A base as it was added. */
     static WorkingBase asAdded(Base base, Function<Medium, Optional<KnownPKa>> pKa, Optional<Double> logKSolvent) {
         return new WorkingBase(base.name(), Optional.of(base), pKa, base.family().strong(), false, false, logKSolvent);
@@ -36,7 +39,7 @@ record WorkingBase(String name, Optional<Base> shelfBase, Function<Medium, Optio
 
     /** Nothing that could take a proton is left; judged by the strength it had. */
     static WorkingBase destroyed(Base base, Solvent solvent, Function<Medium, Optional<KnownPKa>> pKa) {
-        return new WorkingBase("nothing: " + solvent.name() + " destroys " + base.name(), Optional.of(base), pKa,
+        return new WorkingBase(NOTHING + ": " + solvent.name() + " destroys " + base.name(), Optional.of(base), pKa,
                 base.family().strong(), true, true, Optional.empty());
     }
 }

@@ -2,8 +2,8 @@ package lyate.window;
 
 import java.awt.Cursor;
 import java.awt.Dimension;
-import java.awt.Graphics;
 import java.awt.Graphics2D;
+import java.awt.Graphics;
 import java.awt.RenderingHints;
 import java.awt.event.MouseAdapter;
 import java.awt.event.MouseEvent;
@@ -15,6 +15,7 @@ import java.util.stream.Stream;
 import javax.swing.JPanel;
 import javax.swing.ToolTipManager;
 import javax.swing.UIManager;
+import lyate.report.Words;
 import lyate.stock.Base;
 import lyate.stock.Medium;
 import lyate.stock.Solvent;

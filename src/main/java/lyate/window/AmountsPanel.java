@@ -12,7 +12,6 @@ import javax.swing.JComboBox;
 import javax.swing.JLabel;
 import javax.swing.JPanel;
 import javax.swing.JScrollPane;
-import javax.swing.JTable;
 import javax.swing.JTextField;
 import javax.swing.event.DocumentEvent;
 import javax.swing.event.DocumentListener;
@@ -20,6 +19,7 @@ import lyate.bench.Amounts;
 import lyate.bench.Batch;
 import lyate.bench.GasAndHeat;
 import lyate.molecule.Molecule;
+import lyate.report.Words;
 import lyate.review.Review;
 
 /** What to weigh and measure out for a batch, and the gas and heat it sets free. */
@@ -71,13 +71,11 @@ final class AmountsPanel extends JPanel {
     }
 
     private JScrollPane table() {
-        JTable table = new JTable(model);
-        table.setFillsViewportHeight(true);
-        table.getAccessibleContext().setAccessibleName("Amounts");
-        PaddedCell.dress(table, 32, -10, -10, -10, 44);
-        JScrollPane scroll = new JScrollPane(table);
-        scroll.setBorder(BorderFactory.createEmptyBorder());
-        return scroll;
+        RowsTable table = new RowsTable(model, "Amounts", theme);
+        // The rows follow one another as they are counted.
+        table.setAutoCreateRowSorter(false);
+        table.setRowSorter(null);
+        return table.scrolled();
     }
 
     private void listen(JTextField field) {
@@ -137,7 +135,7 @@ final class AmountsPanel extends JPanel {
 
     private void say(Amounts amounts, GasAndHeat gasAndHeat) {
         List<String> lines = new ArrayList<>(amounts.warnings());
-        gasAndHeat.kiloJoule().ifPresent(heat -> lines.add("Heat if all the base went in at once: " + AmountsModel.number(heat) + " kJ."));
+        gasAndHeat.kiloJoule().ifPresent(heat -> lines.add("Heat if all the base went in at once: " + Words.number(heat) + " kJ."));
         lines.addAll(gasAndHeat.cautions());
         words.removeAll();
         words.setLayout(new StackLayout(theme.space("small")));

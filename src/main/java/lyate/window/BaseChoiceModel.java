@@ -1,50 +1,42 @@
 package lyate.window;
 
+import java.util.Arrays;
 import java.util.List;
-import javax.swing.table.AbstractTableModel;
+import lyate.report.Words;
 import lyate.review.RankedBase;
 import lyate.review.Verdict;
 import lyate.stock.Base;
 
-/** The stockroom ranked for the step. */
-final class BaseChoiceModel extends AbstractTableModel {
+/** The stockroom ranked for the step, a base a row. */
+final class BaseChoiceModel extends RowsModel<RankedBase> {
 
     /** Columns, in order. */
     enum Column {
-        RANK("Rank", Integer.class, 4), BASE("Base", String.class, 22), VERDICT("Verdict", Verdict.class, 14), PROBABILITY("Probability", Double.class, 10),
-        LOG_K("log K", Double.class, 8), AGAINST("Stops / cautions", String.class, 13), WHY("Why", String.class, 90);
+        RANK("Rank", Integer.class, -4), BASE("Base", String.class, 24), VERDICT("Verdict", Verdict.class, 14), PROBABILITY("Probability", Double.class, -10),
+        LOG_K("log K", Double.class, -8), AGAINST("Stops / cautions", String.class, 17), WHY("Why", String.class, 90);
 
-        private final String title;
-        private final Class<?> kind;
-        private final int letters;
+        private final Head head;
 
         Column(String title, Class<?> kind, int letters) {
-            this.title = title;
-            this.kind = kind;
-            this.letters = letters;
-        }
-
-        /** Width in letters. */
-        int letters() {
-            return letters;
+            this.head = new Head(title, kind, letters);
         }
     }
 
-    private List<RankedBase> ranked = List.of();
+    private String chosen = "";
 
-    void show(List<RankedBase> next) {
-        ranked = List.copyOf(next);
-        fireTableDataChanged();
+    BaseChoiceModel() {
+        super(Arrays.stream(Column.values()).map(column -> column.head).toList());
     }
 
-    Base base(int row) {
-        return ranked.get(row).base();
+    void show(List<RankedBase> ranked) {
+        showRows(ranked);
     }
 
-    /** Row of a base, or -1. */
-    int rowOf(Base base) {
-        for (int row = 0; row < ranked.size(); row++) {
-            if (ranked.get(row).base().id().equals(base.id())) {
+    /** Marks the base of the step; returns its row, or -1. */
+    int choose(Base base) {
+        chosen = base.id();
+        for (int row = 0; row < getRowCount(); row++) {
+            if (isStressed(row)) {
                 return row;
             }
         }
@@ -52,36 +44,31 @@ final class BaseChoiceModel extends AbstractTableModel {
     }
 
     @Override
-    public int getRowCount() {
-        return ranked.size();
-    }
-
-    @Override
-    public int getColumnCount() {
-        return Column.values().length;
-    }
-
-    @Override
-    public String getColumnName(int column) {
-        return Column.values()[column].title;
-    }
-
-    @Override
-    public Class<?> getColumnClass(int column) {
-        return Column.values()[column].kind;
+    boolean isStressed(int row) {
+        return row(row).base().id().equals(chosen);
     }
 
     @Override
     public Object getValueAt(int row, int column) {
-        RankedBase choice = ranked.get(row);
+        RankedBase choice = row(row);
         return switch (Column.values()[column]) {
             case RANK -> row + 1;
-            case BASE -> choice.base().name().length() > Column.BASE.letters ? StockWords.shortName(choice.base()) : choice.base().name();
+            case BASE -> choice.base().name().length() > Column.BASE.head.letters() ? StockWords.shortName(choice.base()) : choice.base().name();
             case VERDICT -> choice.review().verdict();
-            case PROBABILITY -> 100 * choice.review().probability();
+            case PROBABILITY -> choice.review().probability();
             case LOG_K -> choice.review().logK();
             case AGAINST -> choice.stops() + " / " + choice.cautions();
             case WHY -> choice.why();
+        };
+    }
+
+    @Override
+    String text(int column, Object value) {
+        return switch (Column.values()[column]) {
+            case VERDICT -> Words.verdict((Verdict) value);
+            case PROBABILITY -> Words.probability((Double) value);
+            case LOG_K -> Words.signed((Double) value);
+            default -> String.valueOf(value);
         };
     }
 }

@@ -1,7 +1,5 @@
 package lyate.window;
 
-import java.awt.Component;
-import java.awt.Font;
 import java.awt.event.MouseAdapter;
 import java.awt.event.MouseEvent;
 import java.util.List;
@@ -10,10 +8,6 @@ import java.util.concurrent.CancellationException;
 import java.util.concurrent.atomic.AtomicInteger;
 import java.util.function.BooleanSupplier;
 import java.util.function.Consumer;
-import javax.swing.BorderFactory;
-import javax.swing.JScrollPane;
-import javax.swing.JTable;
-import javax.swing.SwingConstants;
 import javax.swing.SwingUtilities;
 import javax.swing.table.DefaultTableCellRenderer;
 import lyate.review.BaseChoice;
@@ -28,27 +22,23 @@ import lyate.stock.Solvent;
 /** The stockroom ranked for the step: Enter or a double click takes a base, L or dragging puts it on the ladder. */
 final class BaseChoicePanel extends LazyTab {
 
-    private final Theme theme;
     private final transient Engine engine;
     private final transient Consumer<Base> onBase;
     private final BaseChoiceModel model = new BaseChoiceModel();
-    private final JTable table = new JTable(model);
+    private final RowsTable table;
 
     BaseChoicePanel(Theme theme, Engine engine, Consumer<Base> onBase, Consumer<Base> onCompare) {
         super("base choice");
-        this.theme = theme;
         this.engine = engine;
         this.onBase = onBase;
-        table.setAutoCreateRowSorter(true);
-        table.setFillsViewportHeight(true);
+        this.table = new RowsTable(model, "Base choice", theme) {
+            @Override
+            void decorate(DefaultTableCellRenderer cell, Object value) {
+                cell.setIcon(value instanceof Verdict verdict ? new VerdictIcon(verdict, theme.palette(), getFont().getSize()) : null);
+            }
+        };
         table.setDragEnabled(true);
-        table.setTransferHandler(new BaseDrag(() -> selected().name()));
-        table.setDefaultRenderer(Object.class, new Cell());
-        table.setDefaultRenderer(String.class, new Cell());
-        table.setDefaultRenderer(Double.class, new Cell());
-        table.setDefaultRenderer(Integer.class, new Cell());
-        table.setDefaultRenderer(Verdict.class, new Cell());
-        table.getAccessibleContext().setAccessibleName("Base choice");
+        table.setTransferHandler(new TextCopy(() -> selected().name()));
         Keys.bind(table, "ENTER", this::take);
         Keys.bind(table, "L", () -> {
             if (table.getSelectedRow() >= 0) {
@@ -63,11 +53,7 @@ final class BaseChoicePanel extends LazyTab {
                 }
             }
         });
-        JScrollPane scroll = new JScrollPane(table);
-        scroll.setBorder(BorderFactory.createEmptyBorder());
-        add(scroll);
-        sizeColumns();
-        theme.onChange(this::sizeColumns);
+        add(table.scrolled());
     }
 
     @Override
@@ -116,7 +102,7 @@ final class BaseChoicePanel extends LazyTab {
     /** Selects the base of the step. */
     @Override
     void refresh() {
-        int row = model.rowOf(shown().review().step().base());
+        int row = model.choose(shown().review().step().base());
         if (row >= 0) {
             int viewRow = table.convertRowIndexToView(row);
             table.setRowSelectionInterval(viewRow, viewRow);
@@ -125,48 +111,12 @@ final class BaseChoicePanel extends LazyTab {
     }
 
     private Base selected() {
-        return model.base(table.convertRowIndexToModel(table.getSelectedRow()));
+        return model.row(table.selectedModelRow()).base();
     }
 
     private void take() {
         if (table.getSelectedRow() >= 0) {
             onBase.accept(selected());
         }
-    }
-
-    private void sizeColumns() {
-        int em = table.getFontMetrics(table.getFont()).charWidth('n');
-        for (BaseChoiceModel.Column column : BaseChoiceModel.Column.values()) {
-            table.getColumnModel().getColumn(column.ordinal()).setPreferredWidth((column.letters() + 2) * em);
-            if (column != BaseChoiceModel.Column.WHY) {
-                table.getColumnModel().getColumn(column.ordinal()).setMaxWidth((column.letters() + 2) * em * 2);
-            }
-        }
-    }
-
-    private final class Cell extends DefaultTableCellRenderer {
-        private final int gap = getFont().getSize() / 2;
-
-        @Override
-        public Component getTableCellRendererComponent(JTable owner, Object value, boolean selected, boolean focused, int row, int column) {
-            BaseChoiceModel.Column kind = BaseChoiceModel.Column.values()[owner.convertColumnIndexToModel(column)];
-            super.getTableCellRendererComponent(owner, text(kind, value), selected, focused, row, column);
-            setBorder(BorderFactory.createEmptyBorder(0, gap, 0, gap));
-            setHorizontalAlignment(value instanceof Number ? SwingConstants.RIGHT : SwingConstants.LEFT);
-            boolean chosen = model.base(owner.convertRowIndexToModel(row)).id().equals(shown().review().step().base().id());
-            setFont(owner.getFont().deriveFont(chosen ? Font.BOLD : Font.PLAIN));
-            setIcon(value instanceof Verdict verdict ? new VerdictIcon(verdict, theme.palette(), owner.getFont().getSize()) : null);
-            setToolTipText(kind == BaseChoiceModel.Column.WHY ? String.valueOf(value) : null);
-            return this;
-        }
-    }
-
-    private static String text(BaseChoiceModel.Column column, Object value) {
-        return switch (column) {
-            case VERDICT -> VerdictHeader.name((Verdict) value);
-            case PROBABILITY -> Words.percent((Double) value);
-            case LOG_K -> Words.signed((Double) value);
-            default -> String.valueOf(value);
-        };
     }
 }

@@ -36,7 +36,7 @@ final class DoseChart {
     JFreeChart chart(DoseSweep sweep, Shown shown) {
         XYSeriesCollection data = new XYSeriesCollection();
         JFreeChart chart = ChartFactory.createXYLineChart(null, "equivalents of " + StockWords.shortName(shown.review().step().base()),
-                "protons taken / %", data);
+                "% taken", data);
         XYPlot plot = chart.getXYPlot();
         XYLineAndShapeRenderer renderer = new XYLineAndShapeRenderer(true, false);
         plot.setRenderer(renderer);

@@ -2,10 +2,7 @@ package lyate.window;
 
 import java.util.List;
 import java.util.Optional;
-import javax.swing.BorderFactory;
-import javax.swing.JScrollPane;
 import javax.swing.JTabbedPane;
-import javax.swing.JTable;
 import lyate.stock.Base;
 
 /** The tables and charts below the pictures. */
@@ -42,24 +39,13 @@ final class Drawer extends JTabbedPane implements AutoCloseable {
         addTab("Equivalents", null, dose, "what more or less base would do");
         addTab("Amounts", null, amounts, "what to weigh and measure out, gas and heat");
         addTab("Work-up", null, workUp, "acid for the quench, pH for the extraction");
-        addTab("Sources", null, table(sources, "Sources"), "every value used, with its citation");
+        addTab("Sources", null, new RowsTable(sources, "Sources", theme).scrolled(), "every value used, with its citation");
         addChangeListener(event -> {
             if (getSelectedComponent() instanceof LazyTab tab) {
                 tab.lookedAt();
             }
         });
         getAccessibleContext().setAccessibleName("Drawer");
-    }
-
-    private static JScrollPane table(SourcesModel model, String name) {
-        JTable table = new JTable(model);
-        table.setAutoCreateRowSorter(true);
-        table.setFillsViewportHeight(true);
-        table.getAccessibleContext().setAccessibleName(name);
-        PaddedCell.dress(table, 36, 28, 90);
-        JScrollPane scroll = new JScrollPane(table);
-        scroll.setBorder(BorderFactory.createEmptyBorder());
-        return scroll;
     }
 
     /** The chart in view, if there is one. */

@@ -39,6 +39,10 @@ final class FieldBox extends JPanel {
             text.putClientProperty("JTextField.placeholderText", kind.hint());
             text.putClientProperty("JTextField.showClearButton", true);
         }
+        if (kind != StepField.SUBSTRATE) {
+            // What stands there is replaced more often than mended.
+            text.putClientProperty("JTextField.selectAllOnFocusPolicy", "always");
+        }
         text.getDocument().putProperty("filterNewlines", false);
         text.getDocument().addDocumentListener(new DocumentListener() {
             @Override

@@ -12,6 +12,7 @@ import javax.swing.JLabel;
 import javax.swing.JPanel;
 import javax.swing.UIManager;
 import lyate.molecule.Molecule;
+import lyate.report.Words;
 import lyate.review.Finding;
 
 /** One finding: severity, sentence, and on demand the evidence and the source. Pointing at it marks its atoms. */

@@ -14,6 +14,7 @@ import javax.swing.JLabel;
 import javax.swing.JPanel;
 import javax.swing.JScrollPane;
 import javax.swing.UIManager;
+import lyate.report.Words;
 import lyate.review.Finding;
 import lyate.review.FindingKind;
 import lyate.review.Review;

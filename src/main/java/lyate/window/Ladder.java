@@ -5,6 +5,7 @@ import java.util.Comparator;
 import java.util.List;
 import java.util.Locale;
 import java.util.Optional;
+import lyate.report.Words;
 import lyate.review.Step;
 import lyate.review.Transfer;
 import lyate.stock.Base;
@@ -67,6 +68,9 @@ record Ladder(Medium medium, List<Rung> rungs, double basePKa, String beyond) {
     /** The abbreviation where the base in the flask is the one that was chosen. */
     private static String workingBase(Shown shown) {
         Base base = shown.review().step().base();
+        if (shown.review().baseDestroyed()) {
+            return StockWords.shortName(base) + " (gone)";
+        }
         return shown.review().workingBase().equals(base.name()) ? StockWords.shortName(base) : shown.review().workingBase();
     }
 

@@ -13,6 +13,7 @@ import java.awt.geom.Rectangle2D;
 import java.util.Comparator;
 import java.util.List;
 import java.util.Optional;
+import lyate.report.Words;
 
 /** The acidity ladder laid out for one size: axis in the middle, sites left, everything that takes or offers a proton right. */
 final class LadderPicture {
@@ -42,8 +43,9 @@ final class LadderPicture {
         List<Rung> others = ladder.rungs().stream().filter(rung -> !rung.left()).toList();
         this.brief = widest(sites, measure, false) + apart + widest(others, measure, false) > size.width;
         double left = widest(sites, measure, brief);
+        // Names on the right are the longer ones and bear shortening; letters and values on the left do not.
         double spare = (size.width - left - apart - widest(others, measure, brief)) / 2;
-        this.leftRail = left + Math.max(-left / 4, spare);
+        this.leftRail = left + Math.max(0, spare);
         this.rightRail = leftRail + apart;
         this.marks = new LadderMarks(palette);
         this.labels = LadderLabel.place(ladder.rungs(), axis, line + palette.space("small"),

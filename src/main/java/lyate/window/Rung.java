@@ -22,7 +22,7 @@ record Rung(Kind kind, String name, double pKa, double sigma, String text, Optio
 
     /** The value without its uncertainty. */
     String brief() {
-        return text.replaceFirst(" \u00b1 [0-9.]+", "");
+        return text.replaceFirst(".\u00b1.[0-9.]+", "");
     }
 
     boolean left() {

@@ -8,6 +8,7 @@ import java.util.concurrent.ConcurrentHashMap;
 import java.util.function.BooleanSupplier;
 import java.util.function.IntConsumer;
 import javax.swing.SwingUtilities;
+import lyate.report.Words;
 import lyate.review.Review;
 import lyate.review.ReviewException;
 import lyate.review.Reviewer;
@@ -83,7 +84,7 @@ final class SheetReviews implements AutoCloseable {
                 return new Judged(Optional.empty(), String.join("; ", reading.problems().values()));
             }
             Review review = reviewer.review(reading.step().get());
-            return new Judged(Optional.of(review.verdict()), Words.percent(100 * review.probability()));
+            return new Judged(Optional.of(review.verdict()), Words.probability(review.probability()));
         } catch (ReviewException e) {
             return new Judged(Optional.empty(), e.getMessage());
         } catch (RuntimeException e) {

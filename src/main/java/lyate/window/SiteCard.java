@@ -4,6 +4,7 @@ import com.formdev.flatlaf.util.UIScale;
 import lyate.acidity.Acidity;
 import lyate.report.Recipe;
 import lyate.report.Recipe.Line;
+import lyate.report.Words;
 
 /** The card shown over a site: its pKa taken apart. */
 final class SiteCard {

@@ -1,5 +1,6 @@
 package lyate.window;
 
+import lyate.report.Words;
 import lyate.review.Transfer;
 
 /**

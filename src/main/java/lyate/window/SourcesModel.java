@@ -5,6 +5,7 @@ import java.util.List;
 import java.util.Map;
 import java.util.TreeMap;
 import lyate.acidity.Acidity.Relative;
+import lyate.report.Words;
 import lyate.review.Finding;
 import lyate.review.Review;
 import lyate.review.Transfer;
@@ -18,7 +19,7 @@ final class SourcesModel extends RowsModel<SourcesModel.Use> {
     record Use(String what, String value, String source) {}
 
     SourcesModel() {
-        super("Used for", "Value", "Source");
+        super(List.of(new Head("Used for", 36), new Head("Value", 28), new Head("Source", 90)));
     }
 
     void show(Shown shown) {

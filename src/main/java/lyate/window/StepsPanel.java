@@ -16,6 +16,7 @@ import javax.swing.JScrollPane;
 import javax.swing.ListCellRenderer;
 import javax.swing.ListSelectionModel;
 import lyate.review.Finding.Severity;
+import lyate.report.Words;
 import lyate.review.Reviewer;
 import lyate.sheet.SheetColumn;
 import lyate.sheet.SheetRow;
@@ -139,7 +140,7 @@ final class StepsPanel extends JPanel {
         @Override
         public Component getListCellRendererComponent(JList<? extends SheetRow> owner, SheetRow row, int index, boolean selected, boolean focused) {
             Judged judged = reviews.of(row).orElse(null);
-            String verdict = judged == null ? "\u2026" : judged.verdict().map(known -> VerdictHeader.name(known) + " " + judged.sentence()).orElse("cannot be judged");
+            String verdict = judged == null ? "\u2026" : judged.verdict().map(known -> Words.verdict(known) + " " + judged.sentence()).orElse("cannot be judged");
             name.setText(row.name() + "  \u2013  " + verdict);
             int size = owner.getFont().getSize();
             name.setIcon(judged == null ? null : judged.verdict().<Icon>map(known -> new VerdictIcon(known, theme.palette(), size))

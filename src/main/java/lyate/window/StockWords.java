@@ -1,10 +1,12 @@
 package lyate.window;
 
+import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
 import java.util.Locale;
 import java.util.Map;
 import java.util.stream.Collectors;
+import lyate.report.Words;
 import lyate.stock.Base;
 import lyate.stock.KnownPKa;
 import lyate.stock.Medium;
@@ -18,6 +20,7 @@ final class StockWords {
     private static final List<Medium> ORDER = List.of(Medium.WATER, Medium.DMSO, Medium.ACETONITRILE, Medium.THF);
 
     private static final int LABEL_LETTERS = 8;
+    private static final int FIELD_LETTERS = 26;
 
     private StockWords() {}
 
@@ -28,11 +31,20 @@ final class StockWords {
     }
 
     static Hit hit(Base base) {
-        return new Hit(base.name(), String.join(", ", base.aliases()), pKas(base));
+        return hit(base, pKas(base));
     }
 
     static Hit hit(Solvent solvent) {
-        return new Hit(solvent.name(), String.join(", ", solvent.aliases()), boiling(solvent));
+        return hit(solvent, boiling(solvent));
+    }
+
+    /** Under the name that is handy to read in a field, with all others after it. */
+    private static Hit hit(Named thing, String value) {
+        List<String> names = new ArrayList<>(thing.aliases());
+        names.add(0, thing.name());
+        String handy = names.stream().filter(name -> name.length() <= FIELD_LETTERS).findFirst().orElse(thing.name());
+        names.remove(handy);
+        return new Hit(handy, String.join(", ", names), value);
     }
 
     /** For example {@code pKaH 35.3 DMSO}: the strongest claim first would be a choice, so every known scale is named. */
@@ -49,6 +61,6 @@ final class StockWords {
 
     /** The line below the solvent field. */
     static String line(Solvent solvent) {
-        return boiling(solvent) + ", scale: " + Words.medium(solvent.scale());
+        return solvent.name() + ", " + boiling(solvent);
     }
 }

@@ -3,6 +3,7 @@ package lyate.window;
 import java.awt.BorderLayout;
 import java.awt.Component;
 import java.awt.Dimension;
+import java.awt.Font;
 import java.awt.Point;
 import java.awt.event.FocusAdapter;
 import java.awt.event.FocusEvent;
@@ -32,7 +33,13 @@ final class Suggestions {
     private final Theme theme;
     private final Function<String, List<Hit>> search;
     private final DefaultListModel<Hit> hits = new DefaultListModel<>();
-    private final JList<Hit> list = new JList<>(hits);
+    private final JList<Hit> list = new JList<>(hits) {
+        /** A row is never wider than the popup: the value at its right edge must be in sight. */
+        @Override
+        public boolean getScrollableTracksViewportWidth() {
+            return true;
+        }
+    };
     private final JPopupMenu popup = new JPopupMenu();
     private final Runnable onTake;
     private boolean taking;
@@ -134,25 +141,29 @@ final class Suggestions {
 
     /** Name in bold, aliases after it, value at the right edge. */
     private static final class Row extends JPanel implements ListCellRenderer<Hit> {
-        private final JLabel words = new JLabel();
+        private final JLabel name = new JLabel();
+        private final JLabel aliases = new JLabel();
         private final JLabel value = new JLabel();
 
         Row(Theme theme) {
             super(new BorderLayout(theme.space("gap"), 0));
             setBorder(javax.swing.BorderFactory.createEmptyBorder(theme.space("tiny"), theme.space("gap"), theme.space("tiny"), theme.space("gap")));
-            add(words);
+            add(name, BorderLayout.WEST);
+            add(aliases);
             add(value, BorderLayout.EAST);
         }
 
         @Override
         public Component getListCellRendererComponent(JList<? extends Hit> owner, Hit hit, int index, boolean selected, boolean focused) {
-            words.setText("<html><b>" + SiteCard.escape(hit.name()) + "</b>&nbsp; " + SiteCard.escape(hit.aliases()) + "</html>");
+            name.setText(hit.name());
+            aliases.setText(hit.aliases());
             value.setText(hit.value());
             setBackground(selected ? owner.getSelectionBackground() : owner.getBackground());
-            words.setForeground(selected ? owner.getSelectionForeground() : owner.getForeground());
-            value.setForeground(words.getForeground());
-            words.setFont(owner.getFont());
-            value.setFont(owner.getFont());
+            for (JLabel label : List.of(name, aliases, value)) {
+                label.setForeground(selected ? owner.getSelectionForeground() : owner.getForeground());
+                label.setFont(owner.getFont());
+            }
+            name.setFont(owner.getFont().deriveFont(Font.BOLD));
             getAccessibleContext().setAccessibleName(hit.name() + ", " + hit.value());
             return this;
         }

@@ -1,60 +1,39 @@
 package lyate.window;
 
-import java.util.List;
-import javax.swing.table.AbstractTableModel;
+import java.util.Arrays;
+import lyate.report.Words;
 import lyate.review.Transfer;
 
-/** Every donor against the base, a row each; cells keep their numbers so that sorting is by value. */
-final class TransfersModel extends AbstractTableModel {
+/** Every donor against the base, a row each. */
+final class TransfersModel extends RowsModel<Transfer> {
 
     /** Columns of the table, in order. */
     enum Column {
-        SITE("Site", String.class), DONOR("Donor", String.class), PKA("pKa", Double.class), SIGMA("\u00b1", Double.class),
-        MEDIUM("Scale", String.class), BASIS("Value is", String.class), LOG_K("log K", Double.class), K("K", Double.class),
-        DELTA_G("\u0394G / kJ mol\u207b\u00b9", Double.class), TAKEN("Taken", Double.class), DECIDED("Which scale decides, and why", String.class);
+        SITE("Site", String.class, 5), DONOR("Donor", String.class, 18), PKA("pKa", Double.class, -6), SIGMA("\u00b1", Double.class, -5),
+        MEDIUM("Scale", String.class, 8), BASIS("Value is", String.class, 13), LOG_K("log K", Double.class, -7), K("K", Double.class, -9),
+        DELTA_G("\u0394G / kJ mol\u207b\u00b9", Double.class, -14), TAKEN("Taken", Double.class, -11), DECIDED("Which scale decides, and why", String.class, 60);
 
-        private final String title;
-        private final Class<?> kind;
+        private final Head head;
 
-        Column(String title, Class<?> kind) {
-            this.title = title;
-            this.kind = kind;
+        Column(String title, Class<?> kind, int letters) {
+            this.head = new Head(title, kind, letters);
         }
     }
 
     private Shown shown;
 
+    TransfersModel() {
+        super(Arrays.stream(Column.values()).map(column -> column.head).toList());
+    }
+
     void show(Shown next) {
         shown = next;
-        fireTableDataChanged();
+        showRows(next.review().transfers());
     }
 
-    Transfer row(int row) {
-        return shown.review().transfers().get(row);
-    }
-
-    boolean isIntended(int row) {
+    @Override
+    boolean isStressed(int row) {
         return row(row).donor().equals(shown.review().intendedSite());
-    }
-
-    @Override
-    public int getRowCount() {
-        return shown == null ? 0 : shown.review().transfers().size();
-    }
-
-    @Override
-    public int getColumnCount() {
-        return Column.values().length;
-    }
-
-    @Override
-    public String getColumnName(int column) {
-        return Column.values()[column].title;
-    }
-
-    @Override
-    public Class<?> getColumnClass(int column) {
-        return Column.values()[column].kind;
     }
 
     @Override
@@ -62,7 +41,7 @@ final class TransfersModel extends AbstractTableModel {
         Transfer transfer = row(row);
         return switch (Column.values()[column]) {
             case SITE -> shown.tags().letterOf(transfer);
-            case DONOR -> transfer.donor() + (isIntended(row) ? " (intended)" : "");
+            case DONOR -> transfer.donor() + (isStressed(row) ? " (intended)" : "");
             case PKA -> transfer.acidity().pKa();
             case SIGMA -> transfer.acidity().sigma();
             case MEDIUM -> Words.medium(transfer.acidity().medium());
@@ -75,7 +54,7 @@ final class TransfersModel extends AbstractTableModel {
         };
     }
 
-    /** A cell as it is written. */
+    @Override
     String text(int column, Object value) {
         if (!(value instanceof Double number)) {
             return String.valueOf(value);
@@ -86,10 +65,5 @@ final class TransfersModel extends AbstractTableModel {
             case TAKEN -> Words.percent(number);
             default -> Words.oneDecimal(number);
         };
-    }
-
-    /** Column titles, for tests and copies. */
-    static List<String> titles() {
-        return List.of(Column.values()).stream().map(column -> column.title).toList();
     }
 }

@@ -10,6 +10,7 @@ import javax.swing.BorderFactory;
 import javax.swing.JLabel;
 import javax.swing.JPanel;
 import javax.swing.UIManager;
+import lyate.report.Words;
 import lyate.review.Review;
 import lyate.review.Verdict;
 
@@ -48,7 +49,7 @@ final class VerdictHeader extends JPanel {
     }
 
     private static JPanel title(Review review, Palette palette, Font plain) {
-        JLabel name = new JLabel(name(review.verdict()));
+        JLabel name = new JLabel(Words.verdict(review.verdict()));
         name.setFont(plain.deriveFont(Font.BOLD, plain.getSize2D() * 1.5f));
         name.setForeground(palette.color(VerdictIcon.accent(review.verdict())));
         JLabel probability = new JLabel(probability(review));
@@ -62,30 +63,27 @@ final class VerdictHeader extends JPanel {
         return line;
     }
 
-    /** The verdict as a heading, for example {@code Wrong site}. */
-    static String name(Verdict verdict) {
-        return Words.sentence(verdict.code().replace('-', ' '));
-    }
-
     private static String probability(Review review) {
         if (review.verdict() == Verdict.UNDECIDED) {
             return "no verdict is likely enough";
         }
-        return "probability " + (review.probability() > 0.99 ? ">\u00a099\u00a0%" : Math.round(review.probability() * 100) + "\u00a0%");
+        return "probability " + Words.probability(review.probability());
     }
 
     private static String facts(Review review) {
         String first = review.firstSite().equals(review.intendedSite()) ? "The proton at " + review.intendedSite() + " goes first"
                 : "Meant: " + review.intendedSite() + ". First to go: " + review.firstSite();
-        return first + ". log K at " + review.intendedSite() + " " + Words.signed(review.logK()) + " with " + review.workingBase() + "; " + (review.sideReactionWins() ? "the side reaction left aside, taken there " : "taken there ")
-                + Words.percent(review.intendedPercent()) + ", elsewhere up to " + Words.percent(review.otherPercent()) + ".";
+        String base = review.baseDestroyed() ? review.step().base().name() + ", were any left" : review.workingBase();
+        return first + ". log K at " + review.intendedSite() + " " + Words.signed(review.logK()) + " with " + base + "; "
+                + (review.sideReactionWins() ? "the side reaction left aside, " : "") + "taken there " + Words.percent(review.intendedPercent())
+                + ", the most at another site " + Words.percent(review.otherPercent()) + ".";
     }
 
     private static String others(Review review) {
         String text = review.probabilities().entrySet().stream()
                 .filter(entry -> entry.getKey() != review.verdict() && entry.getValue() >= WORTH_A_WORD)
                 .sorted(Map.Entry.<Verdict, Double>comparingByValue(Comparator.reverseOrder()))
-                .map(entry -> name(entry.getKey()).toLowerCase(Locale.ROOT) + " " + Math.round(entry.getValue() * 100) + " %")
+                .map(entry -> Words.verdict(entry.getKey()).toLowerCase(Locale.ROOT) + " " + Words.probability(entry.getValue()))
                 .collect(Collectors.joining(", "));
         return text.isEmpty() ? "" : (review.verdict() == Verdict.UNDECIDED ? "Possible: " : "Otherwise: ") + text + ".";
     }

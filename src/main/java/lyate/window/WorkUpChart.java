@@ -34,7 +34,7 @@ final class WorkUpChart {
 
     JFreeChart chart(WorkUpKit.Answer answer, double pH) {
         XYSeriesCollection data = new XYSeriesCollection();
-        JFreeChart chart = ChartFactory.createXYLineChart(null, "pH of the water", "uncharged / %", data);
+        JFreeChart chart = ChartFactory.createXYLineChart(null, "pH of the water", "% uncharged", data);
         XYPlot plot = chart.getXYPlot();
         XYLineAndShapeRenderer renderer = new XYLineAndShapeRenderer(true, false);
         plot.setRenderer(renderer);

@@ -23,6 +23,7 @@ import lyate.bench.Quench;
 import lyate.bench.WorkUp.Parting;
 import lyate.molecule.Molecule;
 import lyate.molecule.MoleculeException;
+import lyate.report.Words;
 import lyate.sheet.Quantity;
 import lyate.stock.Acid;
 import lyate.stock.Medium;
@@ -185,6 +186,7 @@ final class WorkUpPanel extends LazyTab {
 
     static List<String> lines(Answer answer) {
         List<String> lines = new ArrayList<>();
+        lines.add(answer.workUp().productSentence());
         answer.workUp().partings().stream().map(Parting::sentence).forEach(lines::add);
         if (!answer.refusal().isEmpty()) {
             lines.add("No quench: " + answer.refusal() + ".");
@@ -204,9 +206,9 @@ final class WorkUpPanel extends LazyTab {
     }
 
     private static String acidLine(Quench quench) {
-        StringBuilder line = new StringBuilder("Acid to pH " + Words.oneDecimal(quench.pH()) + ": " + AmountsModel.number(quench.acid().milliMole()) + " mmol");
-        quench.acid().grams().ifPresent(grams -> line.append(", ").append(AmountsModel.number(grams)).append(" g"));
-        quench.acid().milliLitre().ifPresent(volume -> line.append(", ").append(AmountsModel.number(volume)).append(" mL"));
+        StringBuilder line = new StringBuilder("Acid to pH " + Words.oneDecimal(quench.pH()) + ": " + Words.number(quench.acid().milliMole()) + " mmol");
+        quench.acid().grams().ifPresent(grams -> line.append(", ").append(Words.number(grams)).append(" g"));
+        quench.acid().milliLitre().ifPresent(volume -> line.append(", ").append(Words.number(volume)).append(" mL"));
         return line.append(" (").append(quench.acid().form()).append(").").toString();
     }
 }

@@ -21,7 +21,7 @@ final class Workbench extends JPanel implements Drawer.Wishes, AutoCloseable {
 
     /** A result that takes longer is announced. */
     private static final int PATIENCE_MILLIS = 300;
-    private static final String OUTDATED = "of the last step that could be read";
+    private static final String OUTDATED = "of the last readable step";
     private static final String PICTURES = "pictures";
     private static final String EMPTY = "empty";
 
@@ -85,7 +85,7 @@ final class Workbench extends JPanel implements Drawer.Wishes, AutoCloseable {
     private JComponent pictures(Theme theme) {
         JSplitPane right = split(JSplitPane.HORIZONTAL_SPLIT, ladderPane, verdictPane, 0.58);
         JSplitPane top = split(JSplitPane.HORIZONTAL_SPLIT, substratePane, right, 0.38);
-        return split(JSplitPane.VERTICAL_SPLIT, top, drawerVeil, 0.74);
+        return split(JSplitPane.VERTICAL_SPLIT, top, drawerVeil, 0.68);
     }
 
     private static JSplitPane split(int orientation, JComponent first, JComponent second, double share) {
@@ -167,7 +167,7 @@ final class Workbench extends JPanel implements Drawer.Wishes, AutoCloseable {
 
     /** Marks everything on screen as belonging to an earlier text than the fields now hold, or takes the mark away. */
     private void outdated(boolean is) {
-        List.of(substratePane, ladderPane, verdictPane).forEach(pane -> pane.note(is ? OUTDATED : ""));
+        List.of(substratePane, verdictPane).forEach(pane -> pane.note(is ? OUTDATED : ""));
         verdictPane.veil(is);
         drawerVeil.set(is);
     }

@@ -6,13 +6,13 @@ import java.util.function.Supplier;
 import javax.swing.JComponent;
 import javax.swing.TransferHandler;
 
-/** Lets a base be dragged out of a table, or copied, by its name. */
-final class BaseDrag extends TransferHandler {
+/** Lets a text be copied or dragged out of a component. */
+final class TextCopy extends TransferHandler {
 
-    private final transient Supplier<String> name;
+    private final transient Supplier<String> text;
 
-    BaseDrag(Supplier<String> name) {
-        this.name = name;
+    TextCopy(Supplier<String> text) {
+        this.text = text;
     }
 
     @Override
@@ -22,6 +22,6 @@ final class BaseDrag extends TransferHandler {
 
     @Override
     protected Transferable createTransferable(JComponent component) {
-        return new StringSelection(name.get());
+        return new StringSelection(text.get());
     }
 }
