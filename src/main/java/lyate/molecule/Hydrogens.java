@@ -1,11 +1,9 @@
 package lyate.molecule;
 
-import java.util.ArrayList;
 import java.util.List;
 import org.openscience.cdk.CDKConstants;
 import org.openscience.cdk.interfaces.IAtom;
 import org.openscience.cdk.interfaces.IAtomContainer;
-import org.openscience.cdk.interfaces.IStereoElement;
 import org.openscience.cdk.tools.manipulator.AtomContainerManipulator;
 
 /** Hydrogens drawn as atoms become a count on the atom they are bound to. */
@@ -39,20 +37,6 @@ final class Hydrogens {
         if (drawn) {
             molecule.removeProperty(CDKConstants.CTAB_SGROUPS);
             AtomContainerManipulator.suppressHydrogens(molecule);
-            forgetLostCentres(molecule);
         }
-    }
-
-    /** A centre told apart only by an isotope of hydrogen is none any more. */
-    @SuppressWarnings("rawtypes") // the toolkit asks for a list of the raw type
-    private static void forgetLostCentres(IAtomContainer molecule) {
-        List<IStereoElement> kept = new ArrayList<>();
-        for (IStereoElement<?, ?> element : molecule.stereoElements()) {
-            boolean lost = element.getFocus() instanceof IAtom focus && focus.getImplicitHydrogenCount() > 1;
-            if (!lost) {
-                kept.add(element);
-            }
-        }
-        molecule.setStereoElements(kept);
     }
 }

@@ -28,6 +28,7 @@ final class Normaliser {
         InputNumbers.assign(read);
         Refusals.check(read);
         Hydrogens.fold(read, warnings);
+        StereoMarks.forgetMeaningless(read);
         Metals.split(read, warnings);
         List<IAtom> odd = Valence.oddAtoms(read);
         variants.apply(read, odd, warnings);

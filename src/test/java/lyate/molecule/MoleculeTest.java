@@ -73,6 +73,7 @@ class MoleculeTest {
     void onlyTetrahedralAtomsAreStereocentres() throws MoleculeException {
         assertEquals(List.of(4), reader.read("C/C=C/C[C@H](F)Cl").stereocentres());
         assertEquals(List.of(), reader.read("CC=[C@]=CC").stereocentres());
+        assertEquals("O=COO", reader.read("C(=O)[O@]O").smiles(), "an axis needs two double bonds");
     }
 
     @Test
