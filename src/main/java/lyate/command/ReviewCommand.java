@@ -31,7 +31,7 @@ import picocli.CommandLine.Spec;
 @Command(name = "review", mixinStandardHelpOptions = true, sortOptions = false, description = {
     "Reviews every step of a route sheet and writes the sheet back with its verdicts.", "",
     "Columns read: step, substrate, site, base, base_equiv, solvent, temperature_C, concentration_M, water_ppm, electrophile,"
-    + " notes; reaction (reaction SMILES) may stand in place of substrate. Other columns pass through.",
+    + " amount_mmol or amount_g, base_titrated_M, notes; reaction (reaction SMILES) may stand in place of substrate. Other columns pass through.",
     "Columns added: verdict, probability, log_k, first_site, intended_percent, other_percent, findings.",
     "A row that cannot be used is named on standard error; the others are still reviewed.", "",
     "A .smi or .sdf file is a list of substrates, all set against the conditions given as options.", ""})

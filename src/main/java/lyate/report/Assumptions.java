@@ -34,7 +34,12 @@ final class Assumptions {
         if (step.temperatureCelsius() != 25) {
             said.add("log K at the temperature of the step is log K at 25 \u00b0C times 298.15 K/T (isocoulombic transfer).");
         }
-        said.add("Amounts are for " + Words.chosen(ReportContext.MILLIMOLE) + " mmol of substrate; strengths are those of the label.");
+        if (row.text(SheetColumn.AMOUNT_MILLIMOLE).isEmpty() && row.text(SheetColumn.AMOUNT_GRAMS).isEmpty()) {
+            said.add("No amount given: " + Words.chosen(ReportContext.MILLIMOLE) + " mmol of substrate taken.");
+        }
+        if (row.text(SheetColumn.BASE_TITRATED).isEmpty()) {
+            said.add("No titrated strength given: the base is as strong as its label says.");
+        }
         said.addAll(review.assumptions());
         return said;
     }

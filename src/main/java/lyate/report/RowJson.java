@@ -3,7 +3,9 @@ package lyate.report;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import lyate.bench.Amounts;
 import lyate.sheet.ReviewedRow;
+import lyate.sheet.StepScale;
 
 /** A reviewed row as a JSON object: its cells as given, then the review or the reason there is none. */
 public final class RowJson {
@@ -20,8 +22,11 @@ public final class RowJson {
         Map<String, Object> object = new LinkedHashMap<>();
         object.put("row", reviewed.row().number());
         object.put("given", given);
-        reviewed.review().ifPresentOrElse(review -> object.put("review", ReviewJson.describe(review)),
-                () -> object.put("problem", reviewed.problem()));
+        reviewed.review().ifPresentOrElse(review -> {
+            object.put("review", ReviewJson.describe(review));
+            StepScale scale = StepScale.of(reviewed.row(), review.step().substrate());
+            scale.batch().ifPresent(batch -> object.put("amounts", AmountsJson.describe(Amounts.of(review, batch, scale.titrated()))));
+        }, () -> object.put("problem", reviewed.problem()));
         return object;
     }
 }

@@ -2,13 +2,13 @@ package lyate.report;
 
 import java.util.List;
 import java.util.Optional;
-import java.util.OptionalDouble;
 import lyate.bench.Amounts;
 import lyate.bench.Batch;
 import lyate.bench.GasAndHeat;
 import lyate.review.Review;
 import lyate.review.ReviewException;
 import lyate.sheet.ReviewedRow;
+import lyate.sheet.StepScale;
 
 /**
  * Everything a report says about one judged step.
@@ -17,14 +17,16 @@ import lyate.sheet.ReviewedRow;
  * @param review    the judgement
  * @param sites     the substrate's sites under their letters
  * @param doses     what other amounts of base would do; empty where the step cannot be judged at other doses
- * @param amounts   for {@link ReportContext#MILLIMOLE} of substrate
+ * @param amounts   for what the row states, else for {@link ReportContext#MILLIMOLE} of substrate
  * @param gasAndHeat for the same amounts
  */
 record StepFacts(ReviewedRow row, Review review, List<LetteredSite> sites, Optional<DoseSweep> doses, Amounts amounts,
                  GasAndHeat gasAndHeat) {
 
     static StepFacts of(ReviewedRow row, Review review, ReportContext context) {
-        Amounts amounts = Amounts.of(review, Batch.ofMilliMole(review.step().substrate(), ReportContext.MILLIMOLE), OptionalDouble.empty());
+        StepScale scale = StepScale.of(row.row(), review.step().substrate());
+        Batch batch = scale.batch().orElseGet(() -> Batch.ofMilliMole(review.step().substrate(), ReportContext.MILLIMOLE));
+        Amounts amounts = Amounts.of(review, batch, scale.titrated());
         return new StepFacts(row, review, LetteredSite.of(review), doses(review, context), amounts,
                 GasAndHeat.of(review, amounts, context.enthalpies()));
     }

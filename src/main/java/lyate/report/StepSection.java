@@ -172,7 +172,7 @@ final class StepSection {
     private void amounts() {
         Amounts amounts = facts.amounts();
         html.open("div", "class", "whole").element("h3", "Amounts");
-        HtmlTable table = new HtmlTable(html, "amounts", "For " + Words.chosen(ReportContext.MILLIMOLE) + " mmol of substrate",
+        HtmlTable table = new HtmlTable(html, "amounts", "For " + Words.chosen(amounts.batch().milliMole()) + " mmol of substrate",
                 List.of("What", "mmol", "g", "mL", "Remark"));
         table.row("substrate", Words.number(amounts.batch().milliMole()), Words.number(amounts.batch().grams()), "", "counter-ions included");
         table.row(step.solvent().name(), "", "", Words.number(amounts.solventMilliLitre()), "for " + Words.chosen(step.concentrationMolar()) + " mol/L");

@@ -25,6 +25,12 @@ public enum SheetColumn {
     WATER("water_ppm"),
     /** Electrophile or additive in the same flask. */
     ELECTROPHILE("electrophile"),
+    /** Substrate used, mmol. */
+    AMOUNT_MILLIMOLE("amount_mmol"),
+    /** Substrate used as weighed out, g; in place of mmol. */
+    AMOUNT_GRAMS("amount_g"),
+    /** Strength of the base found by titration, mol/L. */
+    BASE_TITRATED("base_titrated_M"),
     /** Whatever the chemist wants to remember. */
     NOTES("notes"),
     /** Reaction SMILES, in place of substrate. */

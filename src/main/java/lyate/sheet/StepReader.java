@@ -60,6 +60,7 @@ public final class StepReader {
         double concentration = number(row, SheetColumn.CONCENTRATION, Quantity.CONCENTRATION, USUAL_CONCENTRATION, problems);
         double water = number(row, SheetColumn.WATER, Quantity.WATER_PPM, UsualWater.ppm(solvent), problems);
         Optional<Molecule> partner = partner(row, problems);
+        StepScale.check(row, problems);
         if (!problems.isEmpty()) {
             throw new RowException(problems);
         }

@@ -56,6 +56,20 @@ class JsonSchemaTest {
     }
 
     @Test
+    void amountsOfASheetAreWrittenAsTheSchemaSays() throws IOException {
+        Path sheet = Files.writeString(folder.resolve("sheet.csv"), "substrate,base,solvent,base_equiv,amount_g,base_titrated_M\n"
+                + "[Na+].CC(=O)CC(=O)[O-],NaH,THF,2.2,5,\nCC(C)=O,n-BuLi,THF,1.05,\"0,58\",1.45\nCC(C)=O,LDA,THF,1.05,,\n");
+        Path result = folder.resolve("result.json");
+        run("review", sheet.toString(), "-o", result.toString());
+        JsonNode rows = read(result);
+        assertSound("row", rows);
+        // 0.58 g of propanone, 58.08 g/mol; 1.05 equivalents of it in a solution of 1.45 mol/L
+        assertEquals(9.986, rows.get(1).at("/amounts/substrate_mmol").asDouble(), 0.002);
+        assertEquals(1.05 * 9.986 / 1.45, rows.get(1).at("/amounts/base/mL").asDouble(), 0.002);
+        assertFalse(rows.get(2).has("amounts"));
+    }
+
+    @Test
     void sitesAreWrittenAsTheSchemaSays() {
         assertSound("answer", run("sites", "--format", "json", "--solvent", "DMSO", KETO_ESTER, "Nc1ccccc1", "C("));
     }

@@ -48,7 +48,7 @@ class RouteSheetTest {
         RouteSheet two = RouteSheet.parse("substrate,base\nCCO,NaH").withRow(List.of("CO", "KOH"));
         assertEquals("substrate,base\nCCO,NaH\nCO,KOH\n", two.text());
         assertEquals("substrate,base\nCO,KOH\n", two.withoutRow(0).text().replace("base\n\n", "base\n"));
-        assertEquals(12, RouteSheet.empty().header().names().size());
+        assertEquals(15, RouteSheet.empty().header().names().size());
     }
 
     @Test

@@ -77,7 +77,7 @@ class SheetReaderTest {
     @CsvSource(delimiter = '|', value = {
         "step,structure,base|the header has neither a column substrate nor a column reaction; it has step, structure, base. Not known: structure (perhaps substrate).",
         "substrate,base,Base|the header has the column base twice",
-        "''|the sheet is empty; its first line should be step,substrate,site,base,base_equiv,solvent,temperature_C,concentration_M,water_ppm,electrophile,notes,reaction",
+        "''|the sheet is empty; its first line should be step,substrate,site,base,base_equiv,solvent,temperature_C,concentration_M,water_ppm,electrophile,amount_mmol,amount_g,base_titrated_M,notes,reaction",
         "'\"substrate,base'|line 1: the quotes of the header are not in order",
     })
     void sheetsThatCannotBeUsed(String text, String reason) {
