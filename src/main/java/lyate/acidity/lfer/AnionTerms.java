@@ -45,8 +45,18 @@ final class AnionTerms {
                 terms.add(i == 1 ? "anion.second" : "anion.later", Effect.RESONANCE, group.strength() / 10, group.atom(), group.name());
             }
         }
+        addFluorine(t, site, terms);
         addRings(t, site, terms);
         terms.add("anion.square", Effect.RESONANCE, total * total / 1000, site);
+    }
+
+    /** The lone pairs of fluorine repel the charge of a flat carbanion (Adolph & Kamlet, J. Am. Chem. Soc. 1966, 88, 4761). */
+    private static void addFluorine(Topology t, int site, Terms terms) {
+        for (int branch = t.first[site]; branch < t.first[site + 1]; branch++) {
+            if (t.element[site] == 6 && t.element[t.child[branch]] == 9) {
+                terms.add("anion.fluorine", Effect.RESONANCE, 1, t.child[branch]);
+            }
+        }
     }
 
     /** A second aromatic ring cannot turn into the plane as well: what helps it from afar helps little. */

@@ -11,7 +11,7 @@ final class DescriptorWords {
             Map.entry("head-third-ring", "on the ring two bonds off,"), Map.entry("chain", "along the chain,"),
             Map.entry("head", "on the unsaturated neighbour,"), Map.entry("vinylogous", "at the far end of the double bond,"),
             Map.entry("anion", "taking up the charge,"), Map.entry("shape", "shape,"), Map.entry("site", "at the site,"),
-            Map.entry("hydrogen-bond", "hydrogen bond,"), Map.entry("charge", "charge,"),
+            Map.entry("hydrogen-bond", "hydrogen bond,"), Map.entry("charge", "charge,"), Map.entry("amidine", "on the nitrogen atoms,"), Map.entry("pairs", "several groups, saturating"),
             Map.entry("far", "further ring (conjugated)"), Map.entry("away", "further ring"), Map.entry("second", "one atom off"),
             Map.entry("third", "two atoms off"), Map.entry("aza", "ring nitrogen"), Map.entry("oxa", "ring oxygen"),
             Map.entry("thia", "ring sulfur"), Map.entry("azole-n", "ring NH or NR"), Map.entry("total", "all groups, saturating"),

@@ -11,6 +11,7 @@ final class Descriptors {
             RingTerms.add(facts, "ring", site, -1, terms);
         }
         ChainTerms.add(facts, site, terms);
+        AmidineTerms.add(facts, site, terms);
         ShapeTerms.add(facts, site, terms);
         return terms;
     }

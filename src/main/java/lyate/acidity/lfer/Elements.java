@@ -1,9 +1,13 @@
 package lyate.acidity.lfer;
 
-/** Symbols of the elements that substituent tables name. */
+/** Elements by the names that substituent tables use. */
 final class Elements {
 
     private Elements() {}
+
+    static boolean halogen(int atomicNumber) {
+        return atomicNumber == 9 || atomicNumber == 17 || atomicNumber == 35 || atomicNumber == 53;
+    }
 
     /** The symbol, or {@code *} for an element without constants of its own. */
     static String symbol(int atomicNumber) {

@@ -6,7 +6,8 @@ import lyate.acidity.Acidity.Effect;
 /**
  * Hammett terms of one aromatic system: every substituent, ring heteroatom and fused ring by its position to the anchor.
  *
- * <p>Positions: ortho, meta and para within a ring of the anchor; peri across a fusion atom; beyond that {@code far} where an
+ * <p>Positions: ortho, meta and para within a ring of the anchor ({@code cross} where only a ring carbonyl group or a nitrogen with three
+ * neighbours leads to the para atom, so that nothing is conjugated); peri across a fusion atom; beyond that {@code far} where an
  * alternating system carries the site's charge to the atom (odd distance) and {@code away} where it does not.
  */
 final class RingTerms {
@@ -19,8 +20,11 @@ final class RingTerms {
     private final int anchor;
     private final Terms terms;
     private final int[] distance;
+    private final int[] conjugated;
     private final boolean[] sharesRing;
     private int smallestRing;
+    private double inductionSum;
+    private double inductionSquares;
 
     private RingTerms(Facts facts, String prefix, int anchor, Terms terms) {
         this.facts = facts;
@@ -29,6 +33,7 @@ final class RingTerms {
         this.anchor = anchor;
         this.terms = terms;
         this.distance = walk(anchor, -1);
+        this.conjugated = conjugatedDistances();
         this.sharesRing = new boolean[t.atoms];
         markRings();
     }
@@ -62,6 +67,8 @@ final class RingTerms {
                 }
             }
         }
+        // each further group finds less charge to act on: the sum over pairs is 0 for a single substituent
+        terms.add(prefix + ".pairs", Effect.INDUCTION, (inductionSum * inductionSum - inductionSquares) / 2, anchor);
     }
 
     private void addRingAtom(String place, int atom) {
@@ -96,6 +103,8 @@ final class RingTerms {
         if (!s.listed() && !(t.element[child] == 6 && !t.unsaturated(child))) {
             terms.miss("substituent constants of the group at " + facts.molecule().label(child) + ", taken from its atoms");
         }
+        inductionSum += s.induction();
+        inductionSquares += s.induction() * s.induction();
         terms.add(place + ".induction", Effect.INDUCTION, s.induction(), child, who);
         terms.add(place + ".resonance", Effect.RESONANCE, s.resonance(), child, who);
         terms.add(place + ".acceptance", Effect.RESONANCE, s.acceptance(), child, who);
@@ -112,7 +121,7 @@ final class RingTerms {
             return "ipso";
         }
         if (sharesRing[atom]) {
-            return d == 1 ? "ortho" : d == 2 ? "meta" : "para";
+            return d == 1 ? "ortho" : d == 2 ? "meta" : conjugated[atom] == d ? "para" : "cross";
         }
         return d == 2 ? "peri" : d % 2 == 1 ? "far" : "away";
     }
@@ -147,8 +156,26 @@ final class RingTerms {
         }
     }
 
-    /** Distances over aromatic bonds, not through {@code barred}. */
+    /** Distances over aromatic bonds, but not through ring carbonyl groups and nitrogen atoms with three neighbours. */
+    private int[] conjugatedDistances() {
+        boolean[] ends = new boolean[t.atoms];
+        boolean any = false;
+        for (int atom = 0; atom < t.atoms; atom++) {
+            if (distance[atom] > 0 && distance[atom] < LARGEST_RING) {
+                boolean pyrrolic = t.element[atom] == 7 && t.charge[atom] == 0 && t.degree(atom) + t.hydrogens[atom] == 3;
+                ends[atom] = pyrrolic || t.element[atom] == 6 && t.oxo(atom);
+                any |= ends[atom];
+            }
+        }
+        return any ? walk(anchor, -1, ends) : distance;
+    }
+
     private int[] walk(int from, int barred) {
+        return walk(from, barred, new boolean[t.atoms]);
+    }
+
+    /** Distances over aromatic bonds, not through {@code barred} and not beyond the atoms in {@code ends}. */
+    private int[] walk(int from, int barred, boolean[] ends) {
         int[] steps = new int[t.atoms];
         Arrays.fill(steps, Integer.MAX_VALUE);
         int[] queue = new int[t.atoms];
@@ -157,7 +184,7 @@ final class RingTerms {
         queue[tail++] = from;
         for (int head = 0; head < tail; head++) {
             int atom = queue[head];
-            for (int branch = t.first[atom]; branch < t.first[atom + 1]; branch++) {
+            for (int branch = t.first[atom]; !ends[atom] && branch < t.first[atom + 1]; branch++) {
                 int child = t.child[branch];
                 if (t.order[branch] == Topology.AROMATIC && child != barred && steps[child] == Integer.MAX_VALUE) {
                     steps[child] = steps[atom] + 1;

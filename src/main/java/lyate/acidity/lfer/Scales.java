@@ -8,7 +8,7 @@ public final class Scales {
     /** The typical step of a descriptor, by the last word of its name. */
     public static double of(String descriptor) {
         return switch (descriptor.substring(descriptor.lastIndexOf('.') + 1)) {
-            case "induction" -> 0.25;
+            case "induction", "pairs" -> 0.25;
             case "resonance", "acceptance" -> 0.3;
             case "donation" -> 0.4;
             case "bulk", "second-shell" -> 2;

@@ -20,6 +20,7 @@ final class ShapeTerms {
         int smallest = 0;
         int ringBonds = 0;
         int alphaRing = 0;
+        int cyclopropyl = 0;
         for (int branch = t.first[site]; branch < t.first[site + 1]; branch++) {
             int size = t.smallestRing(branch);
             ringBonds += t.ringBond[branch] ? 1 : 0;
@@ -28,6 +29,7 @@ final class ShapeTerms {
             }
             if (!t.ringBond[branch] && t.inRing[t.child[branch]] && !t.aromatic[t.child[branch]]) {
                 alphaRing++;
+                cyclopropyl += threeRing(t, t.child[branch]) ? 1 : 0;
             }
         }
         if (ringBonds > 0 && !t.aromatic[site]) {
@@ -35,6 +37,16 @@ final class ShapeTerms {
             terms.add("shape.bridgehead", Effect.STERICS, Math.max(0, ringBonds - 2), site);
         }
         terms.add("shape.on-ring", Effect.STERICS, alphaRing, site);
+        terms.add("shape.on-cyclopropane", Effect.ORBITAL, cyclopropyl, site);
+    }
+
+    private static boolean threeRing(Topology t, int atom) {
+        for (int branch = t.first[atom]; branch < t.first[atom + 1]; branch++) {
+            if (t.ringBond[branch] && t.smallestRing(branch) == 3) {
+                return true;
+            }
+        }
+        return false;
     }
 
     private static void addCrowding(Topology t, int site, int[] distance, Terms terms) {
