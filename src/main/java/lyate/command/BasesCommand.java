@@ -4,11 +4,7 @@ import java.io.IOException;
 import java.util.List;
 import java.util.concurrent.Callable;
 import lyate.molecule.MoleculeReader;
-import lyate.report.JsonList;
-import lyate.report.Placed;
-import lyate.report.RankingCsv;
-import lyate.report.RankingText;
-import lyate.report.ResultWriter;
+import lyate.report.RejectedText;
 import lyate.review.BaseChoice;
 import lyate.review.RankedBase;
 import lyate.review.ReviewException;
@@ -53,25 +49,18 @@ final class BasesCommand implements Callable<Integer> {
         StepReader reader = new StepReader(MoleculeReader.load(folders), stockroom);
         try {
             Step asked = reader.read(step.row(stockroom.bases().get(0).name()));
-            write(new BaseChoice(StepReviewer.load(folders, stockroom), stockroom).rank(asked));
+            BaseChoice choice = new BaseChoice(StepReviewer.load(folders, stockroom), stockroom);
+            List<RankedBase> ranked = choice.rank(asked);
+            Ranking.write(terminal, format, "base", ranked, top);
+            if (format == Format.TEXT) {
+                new RejectedText(terminal.outWriter()).write(BaseChoice.rejected(ranked), choice.betterSolvent(ranked));
+            }
             return 0;
         } catch (RowException e) {
             terminal.tell(StepOptions.words(e));
         } catch (ReviewException e) {
-            terminal.tell(e.getMessage());
+            terminal.tell(e.getMessage() + "; to protonate a basic site ask 'lyate acids'");
         }
         return Failures.SOME_INPUT_NOT_USED;
-    }
-
-    private void write(List<RankedBase> ranked) throws IOException {
-        ResultWriter<Placed> writer = switch (format) {
-            case TEXT -> new RankingText(terminal.outWriter());
-            case CSV -> new RankingCsv(terminal.outWriter());
-            case JSON -> new JsonList<>(terminal.outWriter(), Placed::describe);
-        };
-        for (int place = 1; place <= ranked.size() && (top <= 0 || place <= top); place++) {
-            writer.write(new Placed(place, ranked.get(place - 1)));
-        }
-        writer.finish();
     }
 }

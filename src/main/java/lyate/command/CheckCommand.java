@@ -1,40 +1,67 @@
 package lyate.command;
 
 import java.io.IOException;
+import java.util.Optional;
 import java.util.concurrent.Callable;
 import java.util.function.Supplier;
 import lyate.molecule.MoleculeReader;
 import lyate.report.DoseText;
 import lyate.report.HtmlReport;
 import lyate.report.JsonList;
+import lyate.report.ProtonationJson;
+import lyate.report.ProtonationText;
 import lyate.report.ReportContext;
 import lyate.report.ResultWriter;
 import lyate.report.ReviewJson;
 import lyate.report.ReviewText;
 import lyate.report.SheetCsv;
+import lyate.review.AcidStep;
 import lyate.review.DoseResponse;
+import lyate.review.Protonation;
+import lyate.review.ProtonationReviewer;
 import lyate.review.Review;
 import lyate.review.ReviewException;
+import lyate.review.Step;
 import lyate.review.StepReviewer;
 import lyate.sheet.ReviewedRow;
 import lyate.sheet.RowException;
 import lyate.sheet.SheetRow;
 import lyate.sheet.StepReader;
+import lyate.stock.Acid;
 import lyate.stock.Stockroom;
+import lyate.stock.UnknownNameException;
 import lyate.table.TableFolders;
+import picocli.CommandLine.ArgGroup;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Mixin;
+import picocli.CommandLine.Model.CommandSpec;
 import picocli.CommandLine.Option;
+import picocli.CommandLine.ParameterException;
+import picocli.CommandLine.Spec;
 
 /** {@code lyate check}. */
 @Command(name = "check", mixinStandardHelpOptions = true, sortOptions = false, description = {
-    "Says what becomes of one deprotonation: which proton goes, how far, and what else the base does.", ""})
+    "Says what becomes of one deprotonation: which proton goes, how far, and what else the base does.",
+    "With an acid in place of the base: whether it makes a salt of a basic site.", ""})
 final class CheckCommand implements Callable<Integer> {
 
     private final Terminal terminal;
 
-    @Option(names = "--base", required = true, paramLabel = "B", description = "By name or abbreviation, for example LDA.")
-    private String base;
+    @ArgGroup(exclusive = true, multiplicity = "1")
+    private Reagent reagent;
+
+    /** A base for a deprotonation or an acid for a protonation. */
+    private static final class Reagent {
+
+        @Option(names = "--base", paramLabel = "B", description = "By name or abbreviation, for example LDA.")
+        private String base;
+
+        @Option(names = "--acid", paramLabel = "A", description = "In place of a base: judges how far this acid protonates a basic site.")
+        private String acid;
+    }
+
+    @Spec
+    private CommandSpec spec;
 
     @Mixin
     private StepOptions step;
@@ -54,20 +81,51 @@ final class CheckCommand implements Callable<Integer> {
     public Integer call() throws IOException {
         TableFolders folders = tables.folders();
         Stockroom stockroom = Stockroom.load(folders);
-        StepReader reader = new StepReader(MoleculeReader.load(folders), stockroom);
-        SheetRow row = step.row(base);
         try {
-            StepReviewer reviewer = StepReviewer.load(folders, stockroom);
-            Review review = reviewer.review(reader.read(row));
-            String title = review.step().base().name() + " in " + review.step().solvent().name();
-            write(row, review, reviewer.doseResponse(review.step()), () -> ReportContext.of(title, ProgramVersion.text(), folders, reviewer));
+            Optional<Acid> acid = acid(stockroom);
+            if (acid.isPresent()) {
+                protonation(folders, stockroom, acid.get());
+            } else {
+                deprotonation(folders, stockroom);
+            }
             return 0;
         } catch (RowException e) {
             terminal.tell(StepOptions.words(e));
+        } catch (UnknownNameException e) {
+            terminal.tell("--acid: " + e.getMessage());
         } catch (ReviewException e) {
             terminal.tell(e.getMessage());
         }
         return Failures.SOME_INPUT_NOT_USED;
+    }
+
+    /** The acid meant; also where an acid was named as the base and no base goes by that name. */
+    private Optional<Acid> acid(Stockroom stockroom) throws UnknownNameException {
+        return reagent.acid != null ? Optional.of(stockroom.acid(reagent.acid)) : stockroom.acidNamedAsBase(reagent.base);
+    }
+
+    private void deprotonation(TableFolders folders, Stockroom stockroom) throws IOException, RowException, ReviewException {
+        SheetRow row = step.row(reagent.base);
+        StepReviewer reviewer = StepReviewer.load(folders, stockroom);
+        Review review = reviewer.review(new StepReader(MoleculeReader.load(folders), stockroom).read(row));
+        String title = review.step().base().name() + " in " + review.step().solvent().name();
+        write(row, review, reviewer.doseResponse(review.step()), () -> ReportContext.of(title, ProgramVersion.text(), folders, reviewer));
+    }
+
+    private void protonation(TableFolders folders, Stockroom stockroom, Acid acid) throws IOException, RowException, ReviewException {
+        // Both kinds of step are read by the same rules; the base is a placeholder that the acid takes the place of.
+        Step read = new StepReader(MoleculeReader.load(folders), stockroom).read(step.row(stockroom.bases().get(0).name()));
+        Protonation protonation = ProtonationReviewer.load(folders, stockroom).review(AcidStep.of(read, acid));
+        switch (format) {
+            case TEXT -> new ProtonationText(terminal.outWriter()).write(protonation);
+            case CSV -> new SheetCsv(terminal.outWriter(), step.row(acid.name()).header()).write(step.row(acid.name()), protonation);
+            case JSON -> {
+                ResultWriter<Protonation> json = new JsonList<>(terminal.outWriter(), ProtonationJson::describe);
+                json.write(protonation);
+                json.finish();
+            }
+            default -> throw new ParameterException(spec.commandLine(), "--format: a protonation can be written as text, csv or json");
+        }
     }
 
     private void write(SheetRow row, Review review, DoseResponse dose, Supplier<ReportContext> context) throws IOException {

@@ -29,6 +29,7 @@ public final class Lyate {
                 .addSubcommand(new SitesCommand(terminal))
                 .addSubcommand(new CheckCommand(terminal))
                 .addSubcommand(new BasesCommand(terminal))
+                .addSubcommand(new AcidsCommand(terminal))
                 .addSubcommand(new ReviewCommand(terminal))
                 .addSubcommand(new CompareCommand(terminal))
                 .addSubcommand(new AccuracyCommand(terminal))

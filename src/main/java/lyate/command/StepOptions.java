@@ -1,5 +1,6 @@
 package lyate.command;
 
+import java.util.EnumMap;
 import java.util.List;
 import java.util.Map;
 import java.util.stream.Collectors;
@@ -30,6 +31,12 @@ final class StepOptions {
         cells.put(SheetColumn.SUBSTRATE, substrate);
         cells.put(SheetColumn.BASE, base);
         cells.put(SheetColumn.SOLVENT, solvent);
+        return row(cells);
+    }
+
+    /** Cells as the one row of a sheet. */
+    static SheetRow row(Map<SheetColumn, String> given) {
+        Map<SheetColumn, String> cells = new EnumMap<>(given);
         List<String> names = cells.keySet().stream().map(SheetColumn::header).toList();
         return new SheetRow(new SheetHeader(names), 1, 1, List.copyOf(cells.values()), "");
     }

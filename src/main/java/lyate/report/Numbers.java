@@ -19,10 +19,6 @@ final class Numbers {
         return text.matches("-0(\\.0*)?") ? text.substring(1) : text;
     }
 
-    /** A probability in percent; nothing that rests on estimates is certain. */
-    static String percent(double probability) {
-        return probability > 0.99 ? "> 99" : fixed(100 * probability, 0);
-    }
 
     /** Rounded to so many decimals for JSON; null for a number that is not finite. */
     static Double rounded(double value, int decimals) {

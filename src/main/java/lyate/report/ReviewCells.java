@@ -3,7 +3,7 @@ package lyate.report;
 import java.util.Collections;
 import java.util.List;
 import java.util.stream.Collectors;
-import lyate.review.Review;
+import lyate.review.Judgement;
 
 /** The columns a review adds to a row. */
 final class ReviewCells {
@@ -13,7 +13,7 @@ final class ReviewCells {
 
     private ReviewCells() {}
 
-    static List<String> of(Review review) {
+    static List<String> of(Judgement review) {
         String findings = review.findings().stream().map(finding -> finding.kind().code()).distinct()
                 .collect(Collectors.joining(";"));
         return List.of(review.verdict().code(), Numbers.fixed(review.probability(), 3), Numbers.fixed(review.logK(), 2),

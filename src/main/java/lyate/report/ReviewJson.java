@@ -81,7 +81,7 @@ public final class ReviewJson {
         return object;
     }
 
-    private static Map<String, Object> finding(Molecule molecule, Finding finding) {
+    static Map<String, Object> finding(Molecule molecule, Finding finding) {
         Map<String, Object> object = new LinkedHashMap<>();
         object.put("severity", finding.severity().word());
         object.put("kind", finding.kind().code());

@@ -3,6 +3,7 @@ package lyate.report;
 import java.io.IOException;
 import java.util.ArrayList;
 import java.util.List;
+import lyate.review.Judgement;
 import lyate.sheet.ReviewedRow;
 import lyate.sheet.SheetHeader;
 import lyate.sheet.SheetRow;
@@ -47,8 +48,17 @@ public final class SheetCsv implements ResultWriter<ReviewedRow> {
 
     @Override
     public void write(ReviewedRow reviewed) throws IOException {
-        List<String> cells = new ArrayList<>(given(reviewed.row()));
-        cells.addAll(reviewed.review().map(ReviewCells::of).orElseGet(ReviewCells::none));
+        write(reviewed.row(), reviewed.review().map(ReviewCells::of).orElseGet(ReviewCells::none));
+    }
+
+    /** Writes a row and what became of it. */
+    public void write(SheetRow row, Judgement judgement) throws IOException {
+        write(row, ReviewCells.of(judgement));
+    }
+
+    private void write(SheetRow row, List<String> added) throws IOException {
+        List<String> cells = new ArrayList<>(given(row));
+        cells.addAll(added);
         csv.row(cells);
     }
 

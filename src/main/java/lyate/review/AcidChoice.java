@@ -52,11 +52,13 @@ public final class AcidChoice {
 
     /** Verdict and numbers, then what speaks against it: harm to the substrate before the hazards of handling. */
     private static String why(Protonation protonation) {
-        String numbers = String.format(Locale.ROOT, "pKa difference %.1f at %s, probability %.0f %%", protonation.logK(),
-                protonation.intendedSite(), 100 * protonation.probability());
+        String numbers = String.format(Locale.ROOT, "pKa difference %.1f at %s, probability %s", protonation.logK(),
+                protonation.intendedSite(), protonation.probabilityInWords());
         List<Finding> notable = protonation.findings().stream().filter(finding -> finding.severity() != Finding.Severity.NOTE).toList();
         Optional<Finding> first = notable.stream().filter(RankedAcid::harm).findFirst().or(() -> notable.stream().findFirst());
-        String unusual = protonation.step().acid().uses().contains("salt") ? "" : "; not an acid usually made salts with";
-        return protonation.meaning() + " (" + numbers + ")" + unusual + first.map(finding -> "; " + finding.sentence()).orElse("");
+        String unusual = protonation.step().acid().uses().contains("salt") ? "" : "Not an acid usually made salts with. ";
+        String against = first.map(finding -> finding.sentence() + " ").orElse("");
+        return against + unusual + Character.toUpperCase(protonation.meaning().charAt(0)) + protonation.meaning().substring(1)
+                + " (" + numbers + ").";
     }
 }

@@ -44,4 +44,10 @@ record Donor(ProtonSite site, String label, Comparison comparison, TransferTherm
     double effectiveLogK() {
         return logK() + advantage;
     }
+
+    /** The same by the scale that does not decide, where there is one. */
+    double effectiveLogKOnOtherScale() {
+        return comparison.other().map(other -> other.logK() * Flask.ROOM_KELVIN / transfer.temperatureKelvin() + advantage)
+                .orElseGet(this::effectiveLogK);
+    }
 }

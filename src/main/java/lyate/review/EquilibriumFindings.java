@@ -97,7 +97,7 @@ final class EquilibriumFindings {
             return List.of();
         }
         return List.of(finding(STOP, FindingKind.TOO_WEAK, situation.intended(),
-                say("%s does not reach %s: log K is %.1f.", situation.step().base().name(), situation.intended().label(),
+                say("%s does not reach %s: log K is %.1f.", RuleCells.capital(situation.step().base().name()), situation.intended().label(),
                         situation.intended().logK()),
                 List.of(compared(situation.intended()), situation.intended().comparison().reason())));
     }
@@ -110,7 +110,7 @@ final class EquilibriumFindings {
         String logK = situation.workingBase().logKSolvent().map(value -> say("log K against the solvent %.1f", value))
                 .orElse("the solvent destroys it");
         return List.of(finding(severity, FindingKind.LEVELLED, situation.intended(),
-                say("%s meets %s first; what works afterwards is %s.", situation.step().base().name(),
+                say("%s meets %s first; what works afterwards is %s.", RuleCells.capital(situation.step().base().name()),
                         situation.step().solvent().name(), situation.workingBase().name()), List.of(logK)));
     }
 
@@ -143,7 +143,7 @@ final class EquilibriumFindings {
         }
         return List.of(finding(NOTE, FindingKind.SLOW_TRANSFER, situation.intended(),
                 say("%s is a solid and %s a C-H: the proton moves slowly, give it time and stirring.",
-                        situation.step().base().name(), situation.intended().label()), List.of(compared(situation.intended()))));
+                        RuleCells.capital(situation.step().base().name()), situation.intended().label()), List.of(compared(situation.intended()))));
     }
 
     private static String compared(Donor donor) {

@@ -1,6 +1,7 @@
 package lyate.review;
 
 import java.util.List;
+import java.util.Locale;
 
 /** What every kind of review answers: of a deprotonation ({@link Review}) or of a protonation ({@link Protonation}). */
 public interface Judgement {
@@ -10,6 +11,11 @@ public interface Judgement {
 
     /** Probability of that verdict, 0 to 1. */
     double probability();
+
+    /** That probability in words; nothing that rests on estimates is certain. */
+    default String probabilityInWords() {
+        return probability() > 0.99 ? "> 99 %" : String.format(Locale.ROOT, "%.0f %%", 100 * probability());
+    }
 
     /** log10 K at the intended site. */
     double logK();

@@ -55,7 +55,7 @@ public record Protonation(AcidStep step, Verdict verdict, double probability, Ma
     /** What the verdict means for a protonation, in words. */
     public String meaning() {
         return switch (verdict) {
-            case SELECTIVE -> "the intended site takes the proton: a salt, by the rule of practice that the pKa differ by 3 or more";
+            case SELECTIVE -> "a salt: the pKa differ by 3 or more, the rule of practice";
             case PARTIAL -> "the proton is shared, or another site shares it: a salt may form or may not";
             case TOO_WEAK -> "the acid does not protonate the intended site";
             case WRONG_SITE -> "a more basic site of the substrate takes the proton first";

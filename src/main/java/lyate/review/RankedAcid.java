@@ -1,6 +1,7 @@
 package lyate.review;
 
 import lyate.stock.Acid;
+import lyate.stock.Named;
 
 /**
  * An acid of the stockroom, judged for a protonation.
@@ -9,11 +10,22 @@ import lyate.stock.Acid;
  * @param protonation what it would do
  * @param why         one line: why it stands where it stands
  */
-public record RankedAcid(Acid acid, Protonation protonation, String why) {
+public record RankedAcid(Acid acid, Protonation protonation, String why) implements Ranked {
 
     private static final String SALT = "salt";
 
+    @Override
+    public Named reagent() {
+        return acid;
+    }
+
+    @Override
+    public Judgement judgement() {
+        return protonation;
+    }
+
     /** Whether it would make the salt without hurting the substrate. */
+    @Override
     public boolean suits() {
         return protonation.verdict() == Verdict.SELECTIVE && isUsual() && stops() == 0 && harms() == 0;
     }

@@ -1,6 +1,7 @@
 package lyate.review;
 
 import lyate.stock.Base;
+import lyate.stock.Named;
 
 /**
  * A base of the stockroom, judged for a step.
@@ -9,9 +10,20 @@ import lyate.stock.Base;
  * @param review what it would do
  * @param why    one line: why it stands where it stands
  */
-public record RankedBase(Base base, Review review, String why) {
+public record RankedBase(Base base, Review review, String why) implements Ranked {
+
+    @Override
+    public Named reagent() {
+        return base;
+    }
+
+    @Override
+    public Judgement judgement() {
+        return review;
+    }
 
     /** Whether it would do the job. */
+    @Override
     public boolean suits() {
         return review.verdict() == Verdict.SELECTIVE && stops() == 0;
     }

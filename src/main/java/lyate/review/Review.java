@@ -20,11 +20,14 @@ import java.util.Map;
  * @param findings        most severe first
  * @param explanation     which numbers and which rule gave the verdict, and what would change it
  * @param assumptions     what was assumed where the step said nothing
+ * @param onOtherScale    probability of every verdict if the scale that does not decide were right; empty where the scales
+ *                        agree
  */
 public record Review(Step step, Verdict verdict, double probability, Map<Verdict, Double> probabilities,
                      String intendedSite, String firstSite, String workingBase, double logK,
                      double intendedPercent, double otherPercent, List<Transfer> transfers,
-                     List<Finding> findings, List<String> explanation, List<String> assumptions)
+                     List<Finding> findings, List<String> explanation, List<String> assumptions,
+                     Map<Verdict, Double> onOtherScale)
         implements Judgement {
 
     public Review {
@@ -33,6 +36,21 @@ public record Review(Step step, Verdict verdict, double probability, Map<Verdict
         findings = List.copyOf(findings);
         explanation = List.copyOf(explanation);
         assumptions = List.copyOf(assumptions);
+        onOtherScale = Map.copyOf(onOtherScale);
+    }
+
+    /** A review whose scales agree. */
+    public Review(Step step, Verdict verdict, double probability, Map<Verdict, Double> probabilities, String intendedSite,
+                  String firstSite, String workingBase, double logK, double intendedPercent, double otherPercent,
+                  List<Transfer> transfers, List<Finding> findings, List<String> explanation, List<String> assumptions) {
+        this(step, verdict, probability, probabilities, intendedSite, firstSite, workingBase, logK, intendedPercent, otherPercent,
+                transfers, findings, explanation, assumptions, Map.of());
+    }
+
+    /** Probability of a verdict with both scales given the same weight where they disagree; what a ranking goes by. */
+    public double onEitherScale(Verdict asked) {
+        double deciding = probabilities.getOrDefault(asked, 0.0);
+        return onOtherScale.isEmpty() ? deciding : (deciding + onOtherScale.getOrDefault(asked, 0.0)) / 2;
     }
 
     /** Whether the solvent leaves nothing of the base that could take a proton; log K is that of the base as it was. */

@@ -13,12 +13,15 @@ final class ReviewWriter {
     private final World world;
     private final Map<Verdict, Double> probabilities;
     private final List<Transfer> transfers;
+    private final Map<Verdict, Double> onOtherScale;
 
-    ReviewWriter(Situation situation, World world, Map<Verdict, Double> probabilities, List<Transfer> transfers) {
+    ReviewWriter(Situation situation, World world, Map<Verdict, Double> probabilities, List<Transfer> transfers,
+                 Map<Verdict, Double> onOtherScale) {
         this.situation = situation;
         this.world = world;
         this.probabilities = probabilities;
         this.transfers = transfers;
+        this.onOtherScale = onOtherScale;
     }
 
     Review write(List<Finding> findings) {
@@ -27,7 +30,7 @@ final class ReviewWriter {
                 probabilities.values().stream().mapToDouble(Double::doubleValue).max().orElse(0));
         return new Review(situation.step(), situation.verdict(), probability, probabilities, intended.label(), firstSite(findings),
                 situation.workingBase().name(), intended.logK(), situation.shares().percentTaken(intended),
-                highestOther(), transfers, findings, explanation(), Assumptions.of(situation));
+                highestOther(), transfers, findings, explanation(), Assumptions.of(situation), onOtherScale);
     }
 
     private String firstSite(List<Finding> findings) {

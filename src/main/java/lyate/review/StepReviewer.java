@@ -68,10 +68,13 @@ public final class StepReviewer implements Reviewer {
         List<SideReaction> reactions = sideReactions(step, contest.base(), transfers, contest.intended());
 
         World world = World.of(step, contest.base(), contest.protons(), contest.sites(), contest.intended());
-        Map<Verdict, Double> probabilities = withSideReactions(odds.of(contest.sites().stream().map(VerdictOdds.Uncertain::of).toList(), world), reactions);
+        List<VerdictOdds.Uncertain> uncertain = contest.sites().stream().map(VerdictOdds.Uncertain::of).toList();
+        Map<Verdict, Double> probabilities = withSideReactions(odds.of(uncertain, world), reactions);
+        Map<Verdict, Double> onOtherScale = contest.intended().comparison().scalesDisagree()
+                ? withSideReactions(odds.of(uncertain, world.onOtherScale(contest.sites())), reactions) : Map.of();
         Situation situation = new Situation(step, contest.base(), contest.sites(), contest.intended(), shares, contest.orders(),
                 VerdictOdds.verdict(probabilities));
-        return new ReviewWriter(situation, world, probabilities, transfers).write(findings(situation, reactions));
+        return new ReviewWriter(situation, world, probabilities, transfers, onOtherScale).write(findings(situation, reactions));
     }
 
     /**

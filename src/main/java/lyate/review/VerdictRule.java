@@ -38,6 +38,11 @@ final class VerdictRule {
             return new World(others, protons, intended, shift, equivalents, levelled, destroyed);
         }
 
+        /** The same world by the scale that does not decide, for those sites that have one. */
+        World onOtherScale(List<Donor> sites) {
+            return withLogK(sites.stream().mapToDouble(Donor::effectiveLogKOnOtherScale).toArray());
+        }
+
         /** The world in which every pKa is exactly its best value. */
         static World of(Step step, WorkingBase base, SubstrateProtons substrate, List<Donor> sites, Donor intended) {
             double[] logK = sites.stream().mapToDouble(Donor::effectiveLogK).toArray();

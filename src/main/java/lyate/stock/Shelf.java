@@ -8,6 +8,7 @@ import java.util.HashSet;
 import java.util.List;
 import java.util.Locale;
 import java.util.Map;
+import java.util.Optional;
 import java.util.Set;
 import lyate.table.NearestNames;
 import lyate.table.TableException;
@@ -17,6 +18,8 @@ import lyate.table.TableProblem;
 final class Shelf<T extends Named> {
 
     private static final int NEAREST = 5;
+    /** So many names at least are looked at for each thing that is told. */
+    private static final int MOST_NAMES = 8;
 
     private final String what;
     private final List<T> things;
@@ -50,13 +53,20 @@ final class Shelf<T extends Named> {
         return things;
     }
 
+    Optional<T> lookUp(String name) {
+        return Optional.ofNullable(byKey.get(key(name)));
+    }
+
     T find(String name) throws UnknownNameException {
-        T thing = byKey.get(key(name));
-        if (thing == null) {
-            List<String> known = things.stream().flatMap(Named::names).toList();
-            throw new UnknownNameException(what, name, NearestNames.of(name, known, NEAREST));
-        }
-        return thing;
+        return lookUp(name).orElseThrow(() -> new UnknownNameException(what, name, nearest(name)));
+    }
+
+    /** The nearest names, one for each thing and each spelling that differs in more than case and punctuation. */
+    private List<String> nearest(String name) {
+        List<String> known = things.stream().flatMap(Named::names).toList();
+        Set<Object> told = new HashSet<>();
+        return NearestNames.of(name, known, NEAREST * MOST_NAMES).stream().filter(near -> told.add(byKey.get(key(near))))
+                .limit(NEAREST).toList();
     }
 
     /** What a text typed so far may mean: whole name, start of a name, start of a word, inside a name; then as on the shelf. */

@@ -1,6 +1,7 @@
 package lyate.stock;
 
 import java.util.List;
+import java.util.Optional;
 import lyate.table.TableException;
 import lyate.table.TableFolders;
 
@@ -78,6 +79,11 @@ public final class Stockroom {
      */
     public Acid acid(String name) throws UnknownNameException {
         return acids.find(name);
+    }
+
+    /** The acid of that name where it is no base's name: somebody put an acid where a base belongs, to protonate something. */
+    public Optional<Acid> acidNamedAsBase(String name) {
+        return bases.lookUp(name).isPresent() ? Optional.empty() : acids.lookUp(name);
     }
 
     /**

@@ -80,6 +80,12 @@ class JsonSchemaTest {
     }
 
     @Test
+    void protonationsAndTheirRankingAreWrittenAsTheSchemaSays() {
+        assertSound("protonation", run("check", "--acid", "TFA", "--format", "json", "--solvent", "acetone", "--substrate", "CCN(CC)CC"));
+        assertSound("acid_ranking", run("acids", "--format", "json", "--top", "3", "--solvent", "acetone", "--substrate", "CCN(CC)CC"));
+    }
+
+    @Test
     void aNameThatIsNotInTheSchemaIsNoticed() {
         JsonNode answer = run((CHECK.replace("C5", "C4") + KETO_ESTER).split(" "));
         ((ObjectNode) answer.get(0).get("step")).put("colour", "red");
