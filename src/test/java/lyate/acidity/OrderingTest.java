@@ -1,0 +1,49 @@
+package lyate.acidity;
+
+import static org.junit.jupiter.api.Assertions.assertTrue;
+
+import lyate.molecule.Molecule;
+import lyate.site.ProtonSite;
+import lyate.site.Role;
+import lyate.site.SiteClasses;
+import lyate.site.SiteFinder;
+import lyate.stock.Medium;
+import lyate.table.TableFolders;
+import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.CsvFileSource;
+
+/** Whose proton goes first, by what every chemist knows, whether the values behind it are measured or estimated. */
+class OrderingTest {
+
+    private static final TableFolders TABLES = TableFolders.packaged();
+    private static final SiteFinder FINDER = new SiteFinder(SiteClasses.load(TABLES));
+    private static final AcidityEstimator ESTIMATOR = AcidityEstimator.load(TABLES);
+
+    @ParameterizedTest(name = "{0} in {2}: {3} {4} below {5} {6}")
+    @CsvFileSource(resources = "orderings.csv", numLinesToSkip = 2)
+    void theLowerOneIsLower(String rule, String role, String medium, String lower, String lowerSite, String higher, String higherSite) {
+        assertBelow(ESTIMATOR, role, medium, lower, lowerSite, higher, higherSite);
+    }
+
+    @ParameterizedTest(name = "{0} in {2}: {3} {4} below {5} {6}")
+    @CsvFileSource(resources = "orderings.csv", numLinesToSkip = 2)
+    void andSoWithoutMeasuredValues(String rule, String role, String medium, String lower, String lowerSite, String higher,
+                                    String higherSite) {
+        assertBelow(ESTIMATOR.withoutMeasured(), role, medium, lower, lowerSite, higher, higherSite);
+    }
+
+    private static void assertBelow(AcidityEstimator estimator, String role, String medium, String lower, String lowerSite,
+                                    String higher, String higherSite) {
+        double first = pKa(estimator, role, medium, lower, lowerSite);
+        double second = pKa(estimator, role, medium, higher, higherSite);
+        assertTrue(first < second, first + " is not below " + second);
+    }
+
+    private static double pKa(AcidityEstimator estimator, String role, String medium, String smiles, String label) {
+        Molecule molecule = Sites.molecule(smiles);
+        int atom = molecule.atomLabelled(label).orElseThrow();
+        ProtonSite site = FINDER.sites(molecule, role.equals("acid") ? Role.ACID : Role.BASE).stream()
+                .filter(each -> each.equivalent().contains(atom)).findFirst().orElseThrow();
+        return estimator.acidity(molecule, site, new Medium(medium)).orElseThrow().pKa();
+    }
+}
