@@ -12,6 +12,7 @@ import lyate.molecule.Molecule;
 import lyate.site.ProtonSite;
 import lyate.site.SiteClass;
 import lyate.stock.Medium;
+import lyate.table.Table;
 import lyate.table.TableFolders;
 
 /**
@@ -45,8 +46,9 @@ public final class AcidityEstimator {
 
     /** The estimator of the tables in these folders. */
     public static AcidityEstimator load(TableFolders folders) {
-        return new AcidityEstimator(MeasuredAcidities.load(folders), MediaTransfer.load(folders),
-                List.of(LinearFreeEnergyEstimate.load(folders), new ClassValueEstimate()));
+        Table measured = Table.read(MeasuredAcidities.SCHEMA, folders);
+        return new AcidityEstimator(MeasuredAcidities.of(measured), MediaTransfer.load(folders),
+                List.of(LinearFreeEnergyEstimate.load(folders, measured), new ClassValueEstimate()));
     }
 
     /** The same without the table of measured values: what it says of a molecule nobody has measured. */

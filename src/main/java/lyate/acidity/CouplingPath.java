@@ -1,6 +1,5 @@
 package lyate.acidity;
 
-import java.util.Locale;
 import lyate.molecule.Molecule;
 
 /**
@@ -14,11 +13,17 @@ record CouplingPath(Kind kind, int bonds, int ways) {
 
     /** What the shortest ways run through. */
     enum Kind {
-        SAME_ATOM, SATURATED, CONJUGATED,
+        SAME_ATOM("same-atom"), SATURATED("saturated"), CONJUGATED("conjugated"),
         /** Saturated, and two substituents on the middle carbon press the ends together, as in diethylmalonic acid. */
-        CROWDED,
+        CROWDED("crowded"),
         /** Conjugated, and an anion at one end can hold a proton of the other end in a ring. */
-        HYDROGEN_BONDED;
+        HYDROGEN_BONDED("hydrogen-bonded");
+
+        private final String word;
+
+        Kind(String word) {
+            this.word = word;
+        }
 
         /** What the way is called where the ends do not meet. */
         Kind plain() {
@@ -27,7 +32,7 @@ record CouplingPath(Kind kind, int bonds, int ways) {
 
         /** The word used in the table. */
         String word() {
-            return name().toLowerCase(Locale.ROOT).replace('_', '-');
+            return word;
         }
     }
 

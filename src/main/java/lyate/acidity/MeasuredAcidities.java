@@ -6,19 +6,20 @@ import static lyate.table.Column.word;
 
 import java.util.ArrayList;
 import java.util.HashMap;
-import java.util.HashSet;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalInt;
-import java.util.Set;
+import java.util.OptionalLong;
 import java.util.TreeMap;
+import lyate.molecule.HeavyAtoms;
 import lyate.molecule.Molecule;
 import lyate.molecule.MoleculeException;
 import lyate.molecule.MoleculeReader;
 import lyate.site.ProtonSite;
 import lyate.site.Role;
 import lyate.stock.Medium;
+import lyate.table.Lazy;
 import lyate.table.Row;
 import lyate.table.Schema;
 import lyate.table.Table;
@@ -49,32 +50,49 @@ public final class MeasuredAcidities {
      */
     public record Value(Row row, Molecule molecule, Role role, int atom, ProtonSkeleton place, Acidity acidity) {}
 
-    private final List<Value> values;
-    private final Map<Long, List<Value>> byHash = new HashMap<>();
-    private final Set<Long> formulas = new HashSet<>();
+    private final List<Lazy<Value>> values;
+    /** By {@link HeavyAtoms}, later rows first. */
+    private final Map<Long, List<Lazy<Value>>> byHeavyAtoms = new HashMap<>();
 
     /** Later values of the same proton in the same medium replace earlier ones. */
-    private MeasuredAcidities(List<Value> values) {
-        this.values = List.copyOf(values);
-        for (Value value : values) {
-            formulas.add(ProtonSkeleton.formula(value.molecule(), value.role()));
-            byHash.computeIfAbsent(value.place().hash(), key -> new ArrayList<>()).add(0, value);
+    private MeasuredAcidities(List<Entry> entries) {
+        this.values = entries.stream().map(Entry::value).toList();
+        for (Entry entry : entries) {
+            byHeavyAtoms.computeIfAbsent(entry.heavyAtoms(), key -> new ArrayList<>()).add(0, entry.value());
         }
     }
 
+    /** A value and the heavy atoms of its structure, by which it is found; the structure is read when they are asked for. */
+    private record Entry(long heavyAtoms, Lazy<Value> value) {}
+
     /**
-     * Loads the table and reads its structures.
+     * Loads the table and reads the structures of the rows somebody added; the packaged ones are held by tests.
      *
      * @throws TableException for a bad cell, a structure that cannot be read, or a site it does not have
      */
     public static MeasuredAcidities load(TableFolders folders) {
+        return of(Table.read(SCHEMA, folders));
+    }
+
+    /** The same of a table that is read already. */
+    static MeasuredAcidities of(Table table) {
         MoleculeReader reader = new MoleculeReader();
-        List<Reading> readings = Table.read(SCHEMA, folders).rows().parallelStream().map(row -> read(row, reader)).toList();
-        List<TableProblem> problems = readings.stream().flatMap(reading -> reading.problem().stream()).toList();
+        List<TableProblem> problems = new ArrayList<>();
+        List<Entry> entries = new ArrayList<>();
+        for (Row row : table.rows()) {
+            OptionalLong heavyAtoms = row.file().equals(SCHEMA.fileName()) ? HeavyAtoms.ofSmiles(row.text("smiles")) : OptionalLong.empty();
+            if (heavyAtoms.isPresent()) {
+                entries.add(new Entry(heavyAtoms.getAsLong(), Lazy.of(() -> readSound(row, reader))));
+            } else {
+                Reading reading = read(row, reader);
+                reading.problem().ifPresent(problems::add);
+                reading.value().ifPresent(value -> entries.add(new Entry(HeavyAtoms.of(value.molecule()), Lazy.known(value))));
+            }
+        }
         if (!problems.isEmpty()) {
             throw new TableException(problems);
         }
-        return new MeasuredAcidities(readings.stream().flatMap(reading -> reading.value().stream()).toList());
+        return new MeasuredAcidities(entries);
     }
 
     /** A table without a row. */
@@ -84,7 +102,7 @@ public final class MeasuredAcidities {
 
     /** Every row. */
     public List<Value> values() {
-        return values;
+        return values.parallelStream().map(Lazy::get).toList();
     }
 
     /** The value measured for this proton in this medium. */
@@ -94,13 +112,18 @@ public final class MeasuredAcidities {
 
     /** The values measured for this proton, one per medium, ordered by the medium's id. */
     public List<Acidity> inAnyMedium(Molecule molecule, ProtonSite site) {
-        return formulas.contains(ProtonSkeleton.formula(molecule, site.role()))
-                ? inAnyMedium(ProtonSkeleton.of(molecule, site.role(), site.atom())) : List.of();
+        List<Lazy<Value>> alike = byHeavyAtoms.get(HeavyAtoms.of(molecule));
+        if (alike == null) {
+            return List.of();
+        }
+        long formula = ProtonSkeleton.formula(molecule, site.role());
+        List<Value> isomers = alike.stream().map(Lazy::get).filter(value -> value.place().formula() == formula).toList();
+        return isomers.isEmpty() ? List.of() : at(ProtonSkeleton.of(molecule, site.role(), site.atom()), isomers);
     }
 
-    private List<Acidity> inAnyMedium(ProtonSkeleton place) {
+    private static List<Acidity> at(ProtonSkeleton place, List<Value> isomers) {
         Map<String, Acidity> found = new TreeMap<>();
-        for (Value value : byHash.getOrDefault(place.hash(), List.of())) {
+        for (Value value : isomers) {
             if (value.place().sameAs(place)) {
                 found.putIfAbsent(value.acidity().medium().id(), value.acidity());
             }
@@ -114,6 +137,11 @@ public final class MeasuredAcidities {
         static Reading problem(Row row, String column, String expected) {
             return new Reading(Optional.empty(), Optional.of(row.problem(column, expected)));
         }
+    }
+
+    private static Value readSound(Row row, MoleculeReader reader) {
+        Reading reading = read(row, reader);
+        return reading.value().orElseThrow(() -> new TableException(List.of(reading.problem().orElseThrow())));
     }
 
     private static Reading read(Row row, MoleculeReader reader) {

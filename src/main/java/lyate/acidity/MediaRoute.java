@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
 import java.util.stream.Collectors;
+import lyate.table.Lazy;
 
 /**
  * A value and the lines it may be carried along; no line where it is where it should be already.
@@ -17,10 +18,14 @@ import java.util.stream.Collectors;
 record MediaRoute(Acidity start, List<Step> steps, double pKa, double sigma, long makeshifts) {
 
     /** A line and the words for it, which are put together only once. */
-    record Step(MediaRelation line, String words) {
+    record Step(MediaRelation line, Lazy<String> inWords) {
 
         static Step of(MediaRelation line) {
-            return new Step(line, line.toString());
+            return new Step(line, Lazy.of(line::toString));
+        }
+
+        String words() {
+            return inWords.get();
         }
     }
 

@@ -61,6 +61,11 @@ public final class ProtonSkeleton {
         return mix(heavy + mix(1000 + hydrogens) + 31 * mix(5000 + charge));
     }
 
+    /** Equal for equal elemental composition and charge of the acid. */
+    long formula() {
+        return formula;
+    }
+
     /** Equal places have equal hashes; unequal ones nearly always differ. */
     public long hash() {
         return hash;

@@ -58,7 +58,7 @@ public record Completion(Flask after, List<Consumed> consumed, double leftOver) 
             if (holder.amount() == 0) {
                 continue;
             }
-            List<Species> clusters = Clusters.of(holder).stream().map(cluster -> new Species(cluster, 1)).toList();
+            List<Species> clusters = holder.clusters().stream().map(cluster -> new Species(cluster, 1)).toList();
             double held = holder.protonsHeld();
             for (Uptake uptake : Uptake.strongestFirst(clusters)) {
                 double here = Math.min(held, uptake.protons());

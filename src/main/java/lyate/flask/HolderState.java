@@ -32,7 +32,7 @@ public final class HolderState {
 
     /** A holder at a proton level that something else sets: a buffer, the pH of a work-up. */
     public static HolderState at(ProtonHolder holder, double level) {
-        return new HolderState(holder, Clusters.of(holder), level);
+        return new HolderState(holder, holder.clusters(), level);
     }
 
     /** What this is the state of. */

@@ -15,7 +15,7 @@ public final class ProtonBalance {
     public static Equilibrium solve(Flask flask) {
         List<List<BindingPolynomial>> polynomials = new ArrayList<>(flask.holders().size());
         for (ProtonHolder holder : flask.holders()) {
-            polynomials.add(Clusters.of(holder));
+            polynomials.add(holder.clusters());
         }
         List<Species> species = Species.of(flask.holders(), polynomials);
         DoubleDouble protons = DoubleDouble.ZERO;

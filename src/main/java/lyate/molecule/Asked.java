@@ -22,6 +22,9 @@ record Asked(long[] sets) {
 
     /** Both. */
     Asked and(Asked other) {
+        if (sets.length == 1 && other.sets.length == 1) {
+            return of(sets[0] | other.sets[0]);
+        }
         return smallest(Arrays.stream(sets).flatMap(one -> Arrays.stream(other.sets).map(two -> one | two)));
     }
 
@@ -31,14 +34,43 @@ record Asked(long[] sets) {
     }
 
     Asked map(LongUnaryOperator change) {
+        if (sets.length == 1) {
+            return of(change.applyAsLong(sets[0]));
+        }
         return smallest(Arrays.stream(sets).map(change));
     }
 
     private static Asked smallest(LongStream all) {
-        long[] distinct = all.distinct().toArray();
-        long[] kept = Arrays.stream(distinct)
-                .filter(set -> Arrays.stream(distinct).noneMatch(other -> other != set && (other & ~set) == 0)).toArray();
-        return kept.length <= MOST ? new Asked(kept) : of(Arrays.stream(kept).reduce(-1L, (one, two) -> one & two));
+        long[] sets = all.toArray();
+        long common = -1;
+        int kept = 0;
+        for (int i = 0; i < sets.length; i++) {
+            if (!covered(sets, i)) {
+                common &= sets[i];
+                kept++;
+            }
+        }
+        if (kept > MOST) {
+            return of(common);
+        }
+        long[] least = new long[kept];
+        for (int i = sets.length - 1; i >= 0; i--) {
+            if (!covered(sets, i)) {
+                least[--kept] = sets[i];
+            }
+        }
+        return new Asked(least);
+    }
+
+    /** Whether another set asks for less, or an earlier one for the same. */
+    private static boolean covered(long[] sets, int which) {
+        for (int other = 0; other < sets.length; other++) {
+            boolean within = (sets[other] & ~sets[which]) == 0;
+            if (within && (sets[other] != sets[which] || other < which)) {
+                return true;
+            }
+        }
+        return false;
     }
 
     /** Whether bits answer what is asked. */

@@ -1,6 +1,7 @@
 package lyate.molecule;
 
 import java.util.Arrays;
+import lyate.table.Lazy;
 import org.openscience.cdk.isomorphism.DfPattern;
 import org.openscience.cdk.isomorphism.matchers.QueryAtom;
 import org.openscience.cdk.isomorphism.matchers.QueryAtomContainer;
@@ -17,9 +18,10 @@ public final class AtomPattern {
     private final String smarts;
     private final RootFilter filter;
     private final long[] asked;
-    private final AtomTest test;
+    /** Worked out for the first atom that passes the filters: most patterns of a table never meet one. */
+    private final Lazy<AtomTest> test;
 
-    private AtomPattern(String smarts, RootFilter filter, long[] asked, AtomTest test) {
+    private AtomPattern(String smarts, RootFilter filter, long[] asked, Lazy<AtomTest> test) {
         this.smarts = smarts;
         this.filter = filter;
         this.asked = asked;
@@ -35,8 +37,11 @@ public final class AtomPattern {
         QueryAtomContainer query = parse(smarts);
         PatternCheck.check(query);
         RootFilter filter = RootFilter.of(((QueryAtom) query.getAtom(0)).getExpression());
-        AtomTest test = PatternPlan.of(query).<AtomTest>map(plan -> plan::matches).orElseGet(() -> byToolkit(query));
-        return new AtomPattern(smarts, filter, Surroundings.askedBy(query), test);
+        return new AtomPattern(smarts, filter, Surroundings.askedBy(query), Lazy.of(() -> test(query)));
+    }
+
+    private static AtomTest test(QueryAtomContainer query) {
+        return PatternPlan.of(query).<AtomTest>map(plan -> plan::matches).orElseGet(() -> byToolkit(query));
     }
 
     private static AtomTest byToolkit(QueryAtomContainer query) {
@@ -63,7 +68,7 @@ public final class AtomPattern {
     public boolean matches(Molecule molecule, int atom) {
         AtomFacts facts = molecule.facts();
         return filter.admits(facts.rootCodes[atom]) && Asked.answered(asked, facts.surroundings[atom])
-                && test.fits(molecule, atom);
+                && test.get().fits(molecule, atom);
     }
 
     /** Bits of {@link Surroundings} without which no first atom can do. */

@@ -1,6 +1,7 @@
 package lyate.molecule;
 
 import java.util.List;
+import java.util.concurrent.atomic.AtomicReferenceArray;
 import java.util.stream.IntStream;
 
 /**
@@ -10,8 +11,8 @@ import java.util.stream.IntStream;
 public final class LastMatch {
 
     private final AtomPattern[] patterns;
-    /** By root code: the patterns that admit it, last first. */
-    private final Candidates[] byRootCode;
+    /** By root code: the patterns that admit it, last first; filled where molecules have such atoms. */
+    private final AtomicReferenceArray<Candidates> byRootCode = new AtomicReferenceArray<>(RootFilter.CODES);
 
     /**
      * Patterns to try.
@@ -24,10 +25,18 @@ public final class LastMatch {
     /** @param patterns general ones first */
     public LastMatch(List<AtomPattern> patterns) {
         this.patterns = patterns.toArray(AtomPattern[]::new);
-        this.byRootCode = IntStream.range(0, RootFilter.CODES).mapToObj(this::admitting).toArray(Candidates[]::new);
     }
 
     private Candidates admitting(int code) {
+        Candidates known = byRootCode.get(code);
+        if (known == null) {
+            known = select(code);
+            byRootCode.set(code, known);
+        }
+        return known;
+    }
+
+    private Candidates select(int code) {
         int[] indices = IntStream.range(0, patterns.length).map(i -> patterns.length - 1 - i)
                 .filter(i -> patterns[i].admits(code)).toArray();
         return new Candidates(indices, IntStream.of(indices).mapToLong(i -> patterns[i].needed()).toArray());
@@ -36,7 +45,7 @@ public final class LastMatch {
     /** Index of the last pattern that fits with its first atom on {@code atom}, or -1. */
     public int index(Molecule molecule, int atom) {
         AtomFacts facts = molecule.facts();
-        Candidates candidates = byRootCode[facts.rootCodes[atom]];
+        Candidates candidates = admitting(facts.rootCodes[atom]);
         long missing = ~facts.surroundings[atom];
         long[] needed = candidates.needed();
         for (int i = 0; i < needed.length; i++) {

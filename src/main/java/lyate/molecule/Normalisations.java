@@ -3,6 +3,7 @@ package lyate.molecule;
 import java.util.ArrayList;
 import java.util.List;
 import lyate.table.Column;
+import lyate.table.Lazy;
 import lyate.table.Row;
 import lyate.table.Schema;
 import lyate.table.Table;
@@ -37,11 +38,28 @@ record Normalisations(List<Rewrite> rows) {
     /**
      * One row.
      *
-     * @param what      the variant, in words
-     * @param odd       what its first atom must be, or the row need not be tried
+     * @param what   the variant, in words
+     * @param change compiled when first needed: most molecules have nothing to redraw
+     */
+    record Rewrite(String what, Lazy<Change> change) {}
+
+    /**
+     * A compiled transformation.
+     *
+     * @param odd       what its first atom must be, or it need not be tried
      * @param transform the change, applied everywhere at once
      */
-    record Rewrite(String what, Expr odd, Transform transform) {
+    record Change(Expr odd, Transform transform) {
+
+        /** @throws MoleculeException for text that is no SMIRKS */
+        static Change compile(String smirks) throws MoleculeException {
+            Transform transform = new Transform();
+            QueryAtomContainer left = new QueryAtomContainer(SilentChemObjectBuilder.getInstance());
+            if (!Smirks.parse(transform, smirks) || !Smarts.parse(left, smirks.substring(0, smirks.indexOf(">>")))) {
+                throw new MoleculeException("a SMIRKS (" + transform.message() + ")");
+            }
+            return new Change(((QueryAtom) left.getAtom(0)).getExpression(), transform);
+        }
 
         boolean worthTrying(List<IAtom> oddAtoms) {
             for (IAtom atom : oddAtoms) {
@@ -54,7 +72,7 @@ record Normalisations(List<Rewrite> rows) {
     }
 
     /**
-     * Loads the table and compiles its transformations.
+     * Loads the table and compiles the transformations somebody added; the packaged ones are held by tests.
      *
      * @throws TableException for a bad cell or a transformation that does not compile
      */
@@ -62,13 +80,14 @@ record Normalisations(List<Rewrite> rows) {
         List<TableProblem> problems = new ArrayList<>();
         List<Rewrite> rows = new ArrayList<>();
         for (Row row : Table.read(SCHEMA, folders).rows()) {
-            Transform transform = new Transform();
-            String text = row.text("transformation");
-            QueryAtomContainer left = new QueryAtomContainer(SilentChemObjectBuilder.getInstance());
-            if (Smirks.parse(transform, text) && Smarts.parse(left, text.substring(0, text.indexOf(">>")))) {
-                rows.add(new Rewrite(row.text("what"), ((QueryAtom) left.getAtom(0)).getExpression(), transform));
-            } else {
-                problems.add(row.problem("transformation", "a SMIRKS (" + transform.message() + ")"));
+            Rewrite rewrite = new Rewrite(row.text("what"), Lazy.of(() -> compile(row)));
+            try {
+                if (!row.file().equals(SCHEMA.fileName())) {
+                    rewrite.change().get();
+                }
+                rows.add(rewrite);
+            } catch (TableException e) {
+                problems.addAll(e.problems());
             }
         }
         if (!problems.isEmpty()) {
@@ -77,10 +96,22 @@ record Normalisations(List<Rewrite> rows) {
         return new Normalisations(rows);
     }
 
+    private static Change compile(Row row) {
+        try {
+            return Change.compile(row.text("transformation"));
+        } catch (MoleculeException e) {
+            throw new TableException(List.of(row.problem("transformation", e.getMessage())));
+        }
+    }
+
     /** Changes the molecule where a row fits and says so in {@code warnings}. */
     void apply(IAtomContainer molecule, List<IAtom> oddAtoms, List<String> warnings) {
+        if (oddAtoms.isEmpty()) {
+            return;
+        }
         for (Rewrite row : rows) {
-            if (row.worthTrying(oddAtoms) && row.transform().apply(molecule)) {
+            Change change = row.change().get();
+            if (change.worthTrying(oddAtoms) && change.transform().apply(molecule)) {
                 warnings.add("redrawn: " + row.what());
             }
         }

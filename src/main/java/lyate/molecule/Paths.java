@@ -1,8 +1,6 @@
 package lyate.molecule;
 
-import java.util.ArrayDeque;
 import java.util.Arrays;
-import java.util.Deque;
 
 /** Shortest ways through the bonds, on adjacency lists. */
 final class Paths {
@@ -14,14 +12,14 @@ final class Paths {
         int[] distances = new int[neighbours.length];
         Arrays.fill(distances, -1);
         distances[from] = 0;
-        Deque<Integer> waiting = new ArrayDeque<>();
-        waiting.add(from);
-        while (!waiting.isEmpty()) {
-            int atom = waiting.remove();
-            for (int neighbour : neighbours[atom]) {
+        int[] queue = new int[neighbours.length];
+        int reached = 0;
+        queue[reached++] = from;
+        for (int i = 0; i < reached; i++) {
+            for (int neighbour : neighbours[queue[i]]) {
                 if (distances[neighbour] < 0) {
-                    distances[neighbour] = distances[atom] + 1;
-                    waiting.add(neighbour);
+                    distances[neighbour] = distances[queue[i]] + 1;
+                    queue[reached++] = neighbour;
                 }
             }
         }

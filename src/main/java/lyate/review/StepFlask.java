@@ -37,7 +37,8 @@ final class StepFlask {
     private final Step step;
     private final WorkingBase base;
     private final SubstrateProtons substrate;
-    private final Optional<SubstrateProtons> partner;
+    private final ProtonHolder substrateHolder;
+    private final Optional<ProtonHolder> partnerHolder;
     private final Optional<Double> logKWater;
     private final double toTemperature;
 
@@ -52,7 +53,8 @@ final class StepFlask {
         this.step = step;
         this.base = base;
         this.substrate = substrate;
-        this.partner = partner;
+        this.substrateHolder = substrate.holder(SUBSTRATE, step.concentrationMolar(), REFERENCE);
+        this.partnerHolder = partner.map(there -> there.holder(PARTNER, step.concentrationMolar(), REFERENCE));
         this.logKWater = logKWater;
         this.toTemperature = Flask.ROOM_KELVIN / (step.temperatureCelsius() + 273.15);
     }
@@ -62,7 +64,7 @@ final class StepFlask {
         Equilibrium settled = ProtonBalance.solve(at(step.equivalents()));
         Map<String, Double> taken = new LinkedHashMap<>();
         donors.forEach(donor -> taken.put(donor.label(), 100 * taken(settled, donor)));
-        double partnerTaken = partner.map(there -> 100 * settled.of(PARTNER).deprotonated(0)).orElse(0.0);
+        double partnerTaken = partnerHolder.map(there -> 100 * settled.of(PARTNER).deprotonated(0)).orElse(0.0);
         return new ProtonShares(taken, partnerTaken, spentOnWater(settled));
     }
 
@@ -78,7 +80,7 @@ final class StepFlask {
      */
     Flask at(double equivalents) {
         List<ProtonHolder> holders = new ArrayList<>();
-        holders.add(substrate.holder(SUBSTRATE, step.concentrationMolar(), REFERENCE));
+        holders.add(substrateHolder);
         boolean completes = step.base().family().irreversible() && !base.levelled();
         if (!completes) {
             holders.add(baseHolder(baseMolar(equivalents)));
@@ -88,7 +90,7 @@ final class StepFlask {
             base.logKSolvent().ifPresent(logK ->
                     holders.add(ProtonHolder.acid(SOLVENT, step.solvent().molarity(), placed(logK * toTemperature))));
         }
-        partner.ifPresent(there -> holders.add(there.holder(PARTNER, step.concentrationMolar(), REFERENCE)));
+        partnerHolder.ifPresent(holders::add);
         Flask flask = new Flask(holders, step.temperatureCelsius() + 273.15, step.solvent().scale().id());
         return completes ? Completion.of(flask, new IrreversibleBase(BASE, baseMolar(equivalents), REFERENCE)).after() : flask;
     }

@@ -16,6 +16,7 @@ import lyate.stock.Base;
 import lyate.stock.Solvent;
 import lyate.stock.Stockroom;
 import lyate.stock.UnknownNameException;
+import lyate.table.Lazy;
 
 /**
  * Turns a row into the step it means. Where the row says nothing: 1.0 equivalent of base, 25 degrees Celsius, 0.2 mol/L,
@@ -32,12 +33,12 @@ public final class StepReader {
 
     private final MoleculeReader molecules;
     private final Stockroom stockroom;
-    /** Made for the first reaction: it looks at everything on the shelf, and most sheets have none. */
-    private ReactionReader reactions;
+    private final Lazy<ReactionReader> reactions;
 
     public StepReader(MoleculeReader molecules, Stockroom stockroom) {
         this.molecules = molecules;
         this.stockroom = stockroom;
+        this.reactions = Lazy.of(() -> new ReactionReader(molecules, stockroom));
     }
 
     /**
@@ -73,18 +74,11 @@ public final class StepReader {
             return Optional.empty();
         }
         try {
-            return Optional.of(reactions().read(text));
+            return Optional.of(reactions.get().read(text));
         } catch (MoleculeException e) {
             problems.add(new Problem(SheetColumn.REACTION, e.getMessage()));
             return Optional.empty();
         }
-    }
-
-    private synchronized ReactionReader reactions() {
-        if (reactions == null) {
-            reactions = new ReactionReader(molecules, stockroom);
-        }
-        return reactions;
     }
 
     private Molecule substrate(SheetRow row, List<Problem> problems) {

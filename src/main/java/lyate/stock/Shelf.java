@@ -100,6 +100,20 @@ final class Shelf<T extends Named> {
 
     /** Name without case, accents, spaces and punctuation; subscript digits are plain ones. */
     static String key(String name) {
+        StringBuilder key = new StringBuilder(name.length());
+        for (int i = 0; i < name.length(); i++) {
+            char letter = name.charAt(i);
+            if (letter < ' ' || letter > '~') {
+                return keyBeyondAscii(name);
+            }
+            if (Character.isLetterOrDigit(letter)) {
+                key.append(Character.toLowerCase(letter));
+            }
+        }
+        return key.toString();
+    }
+
+    private static String keyBeyondAscii(String name) {
         String plain = Normalizer.normalize(name, Normalizer.Form.NFKD).replaceAll("\\p{M}", "");
         return plain.toLowerCase(Locale.ROOT).replaceAll("[\\s\\p{Punct}\\p{Pd}\u2019\u2032\u00b7\u22c5]", "");
     }

@@ -22,6 +22,20 @@ final class CellCheck {
     }
 
     private static boolean isNumber(String cell) {
-        return NUMBER.matcher(cell).matches() && Double.isFinite(Double.parseDouble(cell));
+        return plainDecimal(cell) || NUMBER.matcher(cell).matches() && Double.isFinite(Double.parseDouble(cell));
+    }
+
+    /** What most numbers look like, told without the pattern: tables hold tens of thousands. */
+    private static boolean plainDecimal(String cell) {
+        int points = 0;
+        int from = cell.charAt(0) == '-' ? 1 : 0;
+        for (int i = from; i < cell.length(); i++) {
+            char letter = cell.charAt(i);
+            points += letter == '.' ? 1 : 0;
+            if (letter != '.' && (letter < '0' || letter > '9')) {
+                return false;
+            }
+        }
+        return points <= 1 && cell.length() - from > points && cell.length() < 300;
     }
 }

@@ -6,16 +6,18 @@ import java.util.Map;
 import java.util.OptionalDouble;
 
 /**
- * One row whose cells already passed the schema.
+ * One row whose cells already passed the schema. Immutable.
  *
  * @param source file the row stands in
- * @param line    1-based line on which the row begins
- * @param cells  trimmed cell text by column name, empty text for an empty cell
+ * @param line   1-based line on which the row begins
+ * @param places index of each column among the cells, shared by the rows of a table
+ * @param cells  trimmed cell text, empty text for an empty cell
  */
-public record Row(TableText source, int line, Map<String, String> cells) {
+public record Row(TableText source, int line, Map<String, Integer> places, List<String> cells) {
 
     public Row {
-        cells = Map.copyOf(cells);
+        places = Map.copyOf(places);
+        cells = List.copyOf(cells);
     }
 
     /** Name of the file the row stands in. */
@@ -30,11 +32,11 @@ public record Row(TableText source, int line, Map<String, String> cells) {
 
     /** Cell text, empty where the cell is empty. */
     public String text(String column) {
-        String cell = cells.get(column);
-        if (cell == null) {
-            throw new IllegalArgumentException("no column " + column + " in " + file() + "; there are " + cells.keySet());
+        Integer place = places.get(column);
+        if (place == null) {
+            throw new IllegalArgumentException("no column " + column + " in " + file() + "; there are " + places.keySet());
         }
-        return cell;
+        return cells.get(place);
     }
 
     /** Whether the cell holds anything. */

@@ -4,10 +4,11 @@ import java.io.IOException;
 import java.io.StringReader;
 import java.io.UncheckedIOException;
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.HashMap;
-import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.stream.Collectors;
 import org.apache.commons.csv.CSVFormat;
 import org.apache.commons.csv.CSVParser;
 import org.apache.commons.csv.CSVRecord;
@@ -22,11 +23,18 @@ final class TableParser {
     private final TableText source;
     private final List<TableProblem> problems;
     private final Map<String, Integer> lineOfId = new HashMap<>();
+    /** Index of each schema column among the cells of a row. */
+    private final Map<String, Integer> places;
+    /** Index of each schema column among the cells of the file, -1 where the file leaves it out. */
+    private final int[] placesInFile;
 
     TableParser(Schema schema, TableText source, List<TableProblem> problems) {
         this.schema = schema;
         this.source = source;
         this.problems = problems;
+        List<String> names = columnNames();
+        this.places = names.stream().collect(Collectors.toUnmodifiableMap(name -> name, names::indexOf));
+        this.placesInFile = new int[names.size()];
     }
 
     /** The rows that passed; the others are in the problems. */
@@ -43,9 +51,10 @@ final class TableParser {
                     continue;
                 }
                 if (header != null) {
-                    read(csv, header, line, rows);
+                    read(csv, header.size(), line, rows);
                 } else if (checkHeader(csv.toList(), line)) {
                     header = csv.toList();
+                    Arrays.setAll(placesInFile, column -> csv.toList().indexOf(schema.columns().get(column).name()));
                 } else {
                     return rows;
                 }
@@ -89,25 +98,24 @@ final class TableParser {
         return problems.size() == before;
     }
 
-    private void read(CSVRecord csv, List<String> header, int line, List<Row> rows) {
-        if (csv.size() != header.size()) {
-            problem(line, "", csv.size() + " cells", header.size() + " cells, as in the header");
+    private void read(CSVRecord csv, int width, int line, List<Row> rows) {
+        if (csv.size() != width) {
+            problem(line, "", csv.size() + " cells", width + " cells, as in the header");
             return;
         }
-        Map<String, String> cells = new LinkedHashMap<>();
+        List<String> cells = new ArrayList<>(placesInFile.length);
         boolean sound = true;
-        for (Column column : schema.columns()) {
-            int place = header.indexOf(column.name());
-            String cell = place < 0 ? "" : csv.get(place);
-            cells.put(column.name(), cell);
-            sound &= check(column, cell, line);
+        for (int column = 0; column < placesInFile.length; column++) {
+            String cell = placesInFile[column] < 0 ? "" : csv.get(placesInFile[column]);
+            cells.add(cell);
+            sound &= check(schema.columns().get(column), cell, line);
         }
-        String id = cells.get("id");
+        String id = cells.get(places.get("id"));
         Integer first = id.isEmpty() ? null : lineOfId.putIfAbsent(id, line);
         if (first != null) {
             problem(line, "id", id, "an id of its own; line " + first + " has the same");
         } else if (sound) {
-            rows.add(new Row(source, line, cells));
+            rows.add(new Row(source, line, places, cells));
         }
     }
 

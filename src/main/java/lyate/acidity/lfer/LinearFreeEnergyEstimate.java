@@ -51,12 +51,22 @@ public final class LinearFreeEnergyEstimate implements SiteEstimate {
      * @throws TableException for a bad cell in any of them
      */
     public static LinearFreeEnergyEstimate load(TableFolders folders) {
+        return load(folders, Table.read(MeasuredAcidities.SCHEMA, folders));
+    }
+
+    /**
+     * The same with one table that is read already.
+     *
+     * @param measuredTable {@code measured-acidities.csv}, which states the values of the relatives
+     * @throws TableException for a bad cell in any of them
+     */
+    public static LinearFreeEnergyEstimate load(TableFolders folders, Table measuredTable) {
         SiteDescriber describer = SiteDescriber.load(folders);
         Coefficients coefficients = Coefficients.load(folders, Published.load(folders));
         EstimateModel model = new EstimateModel(Pools.load(folders), coefficients,
                 AnchorTable.load(folders, describer)::of);
         Map<String, Row> measured = new HashMap<>();
-        Table.read(MeasuredAcidities.SCHEMA, folders).rows().forEach(row -> measured.put(row.id(), row));
+        measuredTable.rows().forEach(row -> measured.put(row.id(), row));
         return new LinearFreeEnergyEstimate(describer, model, Spread.load(folders), measured);
     }
 
