@@ -118,7 +118,7 @@ final class CheckCommand implements Callable<Integer> {
         Protonation protonation = ProtonationReviewer.load(folders, stockroom).review(AcidStep.of(read, acid));
         switch (format) {
             case TEXT -> new ProtonationText(terminal.outWriter()).write(protonation);
-            case CSV -> new SheetCsv(terminal.outWriter(), step.row(acid.name()).header()).write(step.row(acid.name()), protonation);
+            case CSV -> new SheetCsv(terminal.outWriter(), step.row(acid.name()).header()).begin().write(step.row(acid.name()), protonation);
             case JSON -> {
                 ResultWriter<Protonation> json = new JsonList<>(terminal.outWriter(), ProtonationJson::describe);
                 json.write(protonation);
