@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
 import java.util.stream.Collectors;
+import lyate.review.DoseResponse;
 
 /** Per cent of each proton taken against equivalents of base; every line is named at its end, the dose of the step is marked. */
 final class DoseFigure {
@@ -19,12 +20,12 @@ final class DoseFigure {
     private static final double WORTH_A_LINE = 0.5;
     private static final List<String> DASHES = List.of("6 3", "2 3", "8 3 2 3");
 
-    private final DoseSweep sweep;
+    private final DoseResponse doses;
     private final List<LetteredSite> sites;
     private final double dose;
 
-    DoseFigure(DoseSweep sweep, List<LetteredSite> sites, double dose) {
-        this.sweep = sweep;
+    DoseFigure(DoseResponse doses, List<LetteredSite> sites, double dose) {
+        this.doses = doses;
         this.sites = sites.stream().filter(site -> taken(site).stream().anyMatch(percent -> percent > WORTH_A_LINE)).toList();
         this.dose = dose;
     }
@@ -33,7 +34,7 @@ final class DoseFigure {
         Svg svg = new Svg(WIDTH, HEIGHT);
         axes(svg);
         svg.line(x(dose), TOP - 6, x(dose), BOTTOM, Ink.BASE, 1.6, "stroke-dasharray", "3 2");
-        boolean late = dose > 0.6 * sweep.span();
+        boolean late = dose > 0.6 * doses.highest();
         svg.text(x(dose) + (late ? -4 : 4), TOP - 8, Words.equivalents(dose), FONT, Ink.BASE, late ? "end" : "start", true);
         for (int i = 0; i < sites.size(); i++) {
             line(svg, sites.get(i), i);
@@ -47,8 +48,8 @@ final class DoseFigure {
             svg.line(LEFT, y(percent), RIGHT, y(percent), Ink.LINE, percent == 0 ? 1.2 : 0.5);
             svg.text(LEFT - 6, y(percent) + 4, Integer.toString(percent), FONT, Ink.SOFT, "end", false);
         }
-        int step = Math.max(1, (int) Math.ceil(sweep.span() / 6));
-        for (int equivalents = 0; equivalents <= sweep.span(); equivalents += step) {
+        int step = Math.max(1, (int) Math.ceil(doses.highest() / 6));
+        for (int equivalents = 0; equivalents <= doses.highest(); equivalents += step) {
             svg.line(x(equivalents), BOTTOM, x(equivalents), BOTTOM + 4, Ink.SOFT, 1);
             svg.text(x(equivalents), BOTTOM + 17, Integer.toString(equivalents), FONT, Ink.SOFT, "middle", false);
         }
@@ -60,7 +61,7 @@ final class DoseFigure {
         StringBuilder path = new StringBuilder();
         List<Double> percent = taken(site);
         for (int i = 0; i < percent.size(); i++) {
-            path.append(String.format(Locale.ROOT, "%s%.1f %.1f", i == 0 ? "M" : "L", x(sweep.equivalents().get(i)), y(percent.get(i))));
+            path.append(String.format(Locale.ROOT, "%s%.1f %.1f", i == 0 ? "M" : "L", x(doses.equivalents().get(i)), y(percent.get(i))));
         }
         if (site.intended()) {
             svg.path(path.toString(), "none", site.ink(), 2.4);
@@ -86,8 +87,7 @@ final class DoseFigure {
     }
 
     private String sayAt(LetteredSite site, int equivalents) {
-        int nearest = (int) Math.round(equivalents / sweep.span() * (sweep.equivalents().size() - 1));
-        return Words.percent(taken(site).get(nearest)) + " at " + equivalents + " equivalent" + (equivalents == 1 ? "" : "s");
+        return Words.percent(doses.percentAt(site.transfer().donor(), equivalents)) + " at " + equivalents + " equivalent" + (equivalents == 1 ? "" : "s");
     }
 
     private double last(LetteredSite site) {
@@ -96,11 +96,11 @@ final class DoseFigure {
     }
 
     private List<Double> taken(LetteredSite site) {
-        return sweep.percentTaken().getOrDefault(site.transfer().donor(), List.of());
+        return doses.percentTaken().getOrDefault(site.transfer().donor(), List.of());
     }
 
     private double x(double equivalents) {
-        return LEFT + (RIGHT - LEFT) * equivalents / sweep.span();
+        return LEFT + (RIGHT - LEFT) * equivalents / doses.highest();
     }
 
     private static double y(double percent) {

@@ -29,7 +29,7 @@ public final class DoseText {
         line("% gone at", SHOWN.stream().map(value -> String.format(Locale.ROOT, "%.1f", value)).toList());
         for (Map.Entry<String, List<Double>> site : dose.percentTaken().entrySet()) {
             if (site.getValue().stream().anyMatch(percent -> percent > WORTH_A_LINE_PERCENT)) {
-                line(site.getKey(), SHOWN.stream().map(value -> String.format(Locale.ROOT, "%.0f", at(value, dose, site.getValue()))).toList());
+                line(site.getKey(), SHOWN.stream().map(value -> String.format(Locale.ROOT, "%.0f", dose.percentAt(site.getKey(), value))).toList());
             }
         }
     }
@@ -43,16 +43,5 @@ public final class DoseText {
     private static String reaches(String what, OptionalDouble equivalents) {
         return equivalents.isPresent() ? String.format(Locale.ROOT, "%s from %.2f equivalents", what, equivalents.getAsDouble())
                 : String.format(Locale.ROOT, "%s at no dose up to %.0f equivalents", what, DoseResponse.MOST_EQUIVALENTS);
-    }
-
-    /** The point at that dose; doses shown lie on points of the curve, the nearest one stands for them. */
-    private static double at(double equivalents, DoseResponse dose, List<Double> percent) {
-        int nearest = 0;
-        for (int i = 1; i < dose.equivalents().size(); i++) {
-            if (Math.abs(dose.equivalents().get(i) - equivalents) < Math.abs(dose.equivalents().get(nearest) - equivalents)) {
-                nearest = i;
-            }
-        }
-        return percent.get(nearest);
     }
 }

@@ -1,6 +1,7 @@
 package lyate.report;
 
 import java.awt.geom.Point2D;
+import java.util.Comparator;
 import java.util.List;
 import java.util.Locale;
 import java.util.stream.Collectors;
@@ -21,24 +22,27 @@ final class LadderFigure {
     private static final double MARK = 5;
 
     private final LetteredSite anchor;
-    private final List<LadderRung> rungs;
+    private final Ladder ladder;
+    /** Highest first. */
+    private final List<Rung> rungs;
     private final double low;
     private final double high;
 
-    LadderFigure(LetteredSite anchor, List<LadderRung> rungs) {
+    LadderFigure(LetteredSite anchor, Ladder ladder) {
         this.anchor = anchor;
-        this.rungs = rungs;
-        this.low = Math.floor(rungs.stream().mapToDouble(rung -> rung.pKa() - rung.sigma()).min().orElse(0) - 1);
-        this.high = Math.max(low + 8, Math.ceil(rungs.stream().mapToDouble(rung -> rung.pKa() + rung.sigma()).max().orElse(14) + 1));
+        this.ladder = ladder;
+        this.rungs = ladder.rungs().stream().sorted(Comparator.comparingDouble(Rung::pKa).reversed()).toList();
+        this.low = Math.floor(ladder.low() - 1);
+        this.high = Math.max(low + 8, Math.ceil(ladder.high() + 1));
     }
 
     String write(String id) {
         Svg svg = new Svg(WIDTH, HEIGHT);
         axis(svg);
         bracket(svg);
-        labels(svg, rungs.stream().filter(rung -> rung.site().isPresent()).toList(), -1, LEFT_RAIL);
-        labels(svg, rungs.stream().filter(rung -> rung.site().isEmpty()).toList(), 1, RIGHT_RAIL);
-        String names = rungs.stream().map(rung -> rung.name() + " " + rung.value()).collect(Collectors.joining("; "));
+        labels(svg, rungs.stream().filter(Rung::left).toList(), -1, LEFT_RAIL);
+        labels(svg, rungs.stream().filter(rung -> !rung.left()).toList(), 1, RIGHT_RAIL);
+        String names = rungs.stream().map(rung -> name(rung) + " " + rung.text()).collect(Collectors.joining("; "));
         return svg.write(id, "Acidity ladder, pKa in " + medium(), "Highest pKa first. " + names + ". log K from the intended site to the base: "
                 + Words.signed(anchor.transfer().logK()) + ".");
     }
@@ -58,7 +62,7 @@ final class LadderFigure {
 
     private void bracket(Svg svg) {
         double from = y(anchor.transfer().acidity().pKa());
-        double to = rungs.stream().filter(LadderRung::base).mapToDouble(rung -> y(rung.pKa())).findFirst().orElse(from);
+        double to = y(ladder.basePKa());
         double x = LEFT_RAIL + 14;
         svg.line(LEFT_RAIL, from, x, from, Ink.INTENDED, 1, "stroke-dasharray", "3 3");
         svg.line(x, to, RIGHT_RAIL, to, Ink.INTENDED, 1, "stroke-dasharray", "3 3");
@@ -73,23 +77,23 @@ final class LadderFigure {
         svg.text(x - 4, middle + 4, text, FONT, Ink.INTENDED, "start", false);
     }
 
-    private void labels(Svg svg, List<LadderRung> side, int direction, double rail) {
+    private void labels(Svg svg, List<Rung> side, int direction, double rail) {
         double[] wanted = side.stream().mapToDouble(rung -> y(rung.pKa())).toArray();
         double[] placed = LabelSpread.spread(wanted, side.size() > 9 ? 14 : 27, TOP - 8, BOTTOM + 10);
         for (int i = 0; i < placed.length; i++) {
-            LadderRung rung = side.get(i);
+            Rung rung = side.get(i);
             double x = rail + direction * 26;
             svg.path(String.format(Locale.ROOT, "M%.1f %.1fL%.1f %.1fL%.1f %.1f", rail, wanted[i], rail + direction * 12, wanted[i], x - direction * 3, placed[i]),
                     "none", Ink.LINE, 0.8);
             mark(svg, rung, rail, wanted[i]);
             String anchorWord = direction < 0 ? "end" : "start";
             boolean oneLine = side.size() > 9;
-            String name = shortened(rung.name());
+            String name = shortened(name(rung));
             if (oneLine) {
-                svg.text(x, placed[i] + 4, name + "  " + Words.oneDecimal(rung.pKa()), FONT, rung.ink(), anchorWord, false);
+                svg.text(x, placed[i] + 4, name + "  " + rung.brief(), FONT, ink(rung), anchorWord, false);
             } else {
-                svg.text(x, placed[i] - 1, name, FONT, rung.ink(), anchorWord, true);
-                svg.text(x, placed[i] + 11, rung.value(), FONT, Ink.TEXT, anchorWord, false);
+                svg.text(x, placed[i] - 1, name, FONT, ink(rung), anchorWord, true);
+                svg.text(x, placed[i] + 11, rung.text(), FONT, Ink.TEXT, anchorWord, false);
             }
         }
     }
@@ -100,29 +104,37 @@ final class LadderFigure {
     }
 
     /** Disc for a site, triangle for the base, square for the rest. */
-    private void mark(Svg svg, LadderRung rung, double x, double y) {
+    private void mark(Svg svg, Rung rung, double x, double y) {
         double top = Math.max(TOP, y(rung.pKa() + rung.sigma()));
         double bottom = Math.min(BOTTOM, y(rung.pKa() - rung.sigma()));
-        svg.line(x, top, x, bottom, rung.ink(), 2);
-        svg.line(x - 3, top, x + 3, top, rung.ink(), 1.4);
-        svg.line(x - 3, bottom, x + 3, bottom, rung.ink(), 1.4);
+        svg.line(x, top, x, bottom, ink(rung), 2);
+        svg.line(x - 3, top, x + 3, top, ink(rung), 1.4);
+        svg.line(x - 3, bottom, x + 3, bottom, ink(rung), 1.4);
         if (rung.site().isPresent()) {
-            svg.disc(new Point2D.Double(x, y), MARK, Ink.PAPER, rung.ink());
+            svg.disc(new Point2D.Double(x, y), MARK, Ink.PAPER, ink(rung));
             if (rung.site().get().intended()) {
-                svg.ring(new Point2D.Double(x, y), MARK + 3, rung.ink(), 1);
+                svg.ring(new Point2D.Double(x, y), MARK + 3, ink(rung), 1);
             }
             if (rung.site().get().fraction() > 0.005) {
-                svg.arc(new Point2D.Double(x, y), MARK, rung.site().get().fraction(), rung.ink(), 3);
+                svg.arc(new Point2D.Double(x, y), MARK, rung.site().get().fraction(), ink(rung), 3);
             }
-        } else if (rung.base()) {
-            svg.path(String.format(Locale.ROOT, "M%.1f %.1fL%.1f %.1fL%.1f %.1fZ", x - MARK, y, x + MARK, y - MARK, x + MARK, y + MARK), rung.ink(), rung.ink(), 1);
+        } else if (rung.kind() == Rung.Kind.BASE) {
+            svg.path(String.format(Locale.ROOT, "M%.1f %.1fL%.1f %.1fL%.1f %.1fZ", x - MARK, y, x + MARK, y - MARK, x + MARK, y + MARK), ink(rung), ink(rung), 1);
         } else {
-            svg.box(x - MARK + 1, y - MARK + 1, 2 * MARK - 2, 2 * MARK - 2, 0, rung.ink(), rung.ink(), 1);
+            svg.box(x - MARK + 1, y - MARK + 1, 2 * MARK - 2, 2 * MARK - 2, 0, ink(rung), ink(rung), 1);
         }
     }
 
+    private static String name(Rung rung) {
+        return rung.site().map(site -> site.letter() + " ").orElse("") + rung.name();
+    }
+
+    private static String ink(Rung rung) {
+        return rung.kind() == Rung.Kind.BASE ? Ink.BASE : rung.site().map(LetteredSite::ink).orElse(Ink.SOLVENT);
+    }
+
     private String medium() {
-        return Words.medium(anchor.transfer().acidity().medium());
+        return Words.medium(ladder.medium());
     }
 
     private double y(double pKa) {

@@ -12,13 +12,14 @@ import lyate.review.Transfer;
  * @param transfer its proton against the base
  * @param intended whether it is the site that is meant
  */
-record LetteredSite(String letter, Transfer transfer, boolean intended) {
+public record LetteredSite(String letter, Transfer transfer, boolean intended) {
 
     private static final int ALPHABET = 26;
     /** A site this far beyond the base, log10 units, is not worth many words. */
     private static final double OUT_OF_REACH = -5;
 
-    static List<LetteredSite> of(Review review) {
+    /** The sites of the substrate, the first to go first. */
+    public static List<LetteredSite> of(Review review) {
         List<LetteredSite> sites = new ArrayList<>();
         for (Transfer transfer : review.transfers()) {
             if (!transfer.atoms().isEmpty()) {
@@ -34,12 +35,12 @@ record LetteredSite(String letter, Transfer transfer, boolean intended) {
     }
 
     /** Whether it matters here: meant, or within reach of the base. */
-    boolean counts() {
+    public boolean counts() {
         return intended || transfer.logK() > OUT_OF_REACH;
     }
 
     /** Share of its protons taken, 0 to 1. */
-    double fraction() {
+    public double fraction() {
         return Math.max(0, Math.min(1, transfer.percentTaken() / 100));
     }
 
@@ -47,9 +48,24 @@ record LetteredSite(String letter, Transfer transfer, boolean intended) {
         return intended ? Ink.INTENDED : counts() ? Ink.SITE : Ink.SOFT;
     }
 
+    /** Label of its atom, for example {@code N7}. */
+    public String label() {
+        return transfer.donor();
+    }
+
+    /** Index of the atom that stands for it. */
+    public int atom() {
+        return transfer.atoms().get(0);
+    }
+
+    /** Its pKa as written. */
+    public String value() {
+        return Words.withSigma(transfer.acidity());
+    }
+
     /** All there is to say in one line, for those who do not see the picture. */
-    String sentence() {
-        return letter + ": " + transfer.donor() + (intended ? " (intended)" : "") + ", pKa " + Words.withSigma(transfer.acidity()) + " in "
-                + Words.medium(transfer.acidity().medium()) + ", " + Words.percent(transfer.percentTaken()) + " taken";
+    public String sentence() {
+        return letter + ": " + label() + (intended ? " (intended)" : "") + ", pKa " + value() + " in " + Words.medium(transfer.acidity().medium())
+                + " (" + transfer.acidity().basis().word() + "), " + Words.percent(transfer.percentTaken()) + " taken";
     }
 }

@@ -2,7 +2,7 @@ package lyate.report;
 
 import java.util.List;
 import lyate.bench.Enthalpies;
-import lyate.review.Reviewer;
+import lyate.review.StepReviewer;
 import lyate.table.TableFolders;
 import lyate.table.TableListing;
 
@@ -15,7 +15,7 @@ import lyate.table.TableListing;
  * @param reviewer   the one that judged the rows; asked again for the dose curves
  * @param enthalpies for gas and heat
  */
-public record ReportContext(String title, String program, List<TableListing.Copy> tables, Reviewer reviewer, Enthalpies enthalpies) {
+public record ReportContext(String title, String program, List<TableListing.Copy> tables, StepReviewer reviewer, Enthalpies enthalpies) {
 
     /** Amounts are given for so much substrate; the sheet does not say how much is used. */
     static final double MILLIMOLE = 10;
@@ -25,7 +25,7 @@ public record ReportContext(String title, String program, List<TableListing.Copy
     }
 
     /** Loads what is needed from the tables the reviewer was loaded from. */
-    public static ReportContext of(String title, String program, TableFolders folders, Reviewer reviewer) {
+    public static ReportContext of(String title, String program, TableFolders folders, StepReviewer reviewer) {
         return new ReportContext(title, program, TableListing.of(folders), reviewer, Enthalpies.load(folders));
     }
 }

@@ -5,6 +5,7 @@ import java.util.Optional;
 import lyate.bench.Amounts;
 import lyate.bench.Batch;
 import lyate.bench.GasAndHeat;
+import lyate.review.DoseResponse;
 import lyate.review.Review;
 import lyate.review.ReviewException;
 import lyate.sheet.ReviewedRow;
@@ -20,7 +21,7 @@ import lyate.sheet.StepScale;
  * @param amounts   for what the row states, else for {@link ReportContext#MILLIMOLE} of substrate
  * @param gasAndHeat for the same amounts
  */
-record StepFacts(ReviewedRow row, Review review, List<LetteredSite> sites, Optional<DoseSweep> doses, Amounts amounts,
+record StepFacts(ReviewedRow row, Review review, List<LetteredSite> sites, Optional<DoseResponse> doses, Amounts amounts,
                  GasAndHeat gasAndHeat) {
 
     static StepFacts of(ReviewedRow row, Review review, ReportContext context) {
@@ -31,9 +32,9 @@ record StepFacts(ReviewedRow row, Review review, List<LetteredSite> sites, Optio
                 GasAndHeat.of(review, amounts, context.enthalpies()));
     }
 
-    private static Optional<DoseSweep> doses(Review review, ReportContext context) {
+    private static Optional<DoseResponse> doses(Review review, ReportContext context) {
         try {
-            return Optional.of(DoseSweep.of(review.step(), context.reviewer()));
+            return Optional.of(context.reviewer().doseResponse(review.step(), DoseResponse.span(review.step())));
         } catch (ReviewException e) {
             return Optional.empty();
         }

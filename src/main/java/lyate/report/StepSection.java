@@ -5,6 +5,7 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Locale;
 import java.util.Map;
+import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.stream.Collectors;
 import lyate.bench.Amounts;
@@ -80,7 +81,8 @@ final class StepSection {
                 + " Double ring: the intended site.").close();
         html.open("div", "class", "pair");
         facts.anchor().ifPresent(anchor -> {
-            html.open("figure").markup(new LadderFigure(anchor, LadderRung.of(review, facts.sites(), anchor)).write(id + "-ladder"));
+            Ladder ladder = Ladder.of(review, facts.sites(), List.of(), Optional.empty()).orElseThrow();
+            html.open("figure").markup(new LadderFigure(anchor, ladder).write(id + "-ladder"));
             html.element("figcaption", "Acidity ladder: sites left; base (triangle) and solvent (square) right; bars are standard uncertainties.").close();
         });
         facts.doses().ifPresent(doses -> {

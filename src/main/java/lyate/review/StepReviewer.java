@@ -83,8 +83,13 @@ public final class StepReviewer implements Reviewer {
      * @throws ReviewException as {@link #review(Step)}
      */
     public DoseResponse doseResponse(Step step) throws ReviewException {
+        return doseResponse(step, DoseResponse.MOST_EQUIVALENTS);
+    }
+
+    /** The same up to a dose of one's own. */
+    public DoseResponse doseResponse(Step step, double mostEquivalents) throws ReviewException {
         Contest contest = contest(step);
-        return DoseResponse.of(contest.flask(), contest.sites(), contest.intended());
+        return DoseResponse.of(contest.flask(), contest.sites(), contest.intended(), mostEquivalents);
     }
 
     /** Who competes for the base in a step: the sites, the one meant first to ask about, and the flask they are in. */

@@ -15,6 +15,12 @@ public interface Named {
     /** Other names and abbreviations. */
     List<String> aliases();
 
+    /** Name for a narrow place: a long one gives way to the first abbreviation. */
+    default String shortName() {
+        boolean tooLong = name().length() > 8 && !aliases().isEmpty();
+        return tooLong ? aliases().get(0) : name();
+    }
+
     /** Every name it is found by. */
     default Stream<String> names() {
         return Stream.concat(Stream.of(name(), id()), aliases().stream());

@@ -15,6 +15,9 @@ import java.util.stream.Stream;
 import javax.swing.JPanel;
 import javax.swing.ToolTipManager;
 import javax.swing.UIManager;
+import lyate.report.Ladder;
+import lyate.report.LetteredSite;
+import lyate.report.Rung;
 import lyate.report.Words;
 import lyate.stock.Base;
 import lyate.stock.Medium;
@@ -92,7 +95,7 @@ final class AcidityLadder extends JPanel {
     }
 
     private void refresh() {
-        ladder = shown == null ? Optional.empty() : Ladder.of(shown, compared, water.get());
+        ladder = shown == null ? Optional.empty() : Ladder.of(shown.review(), shown.tags().sites(), compared, Optional.of(water.get()));
         ladder.ifPresent(known -> getAccessibleContext().setAccessibleDescription(String.join(". ", known.rungs().stream().map(AcidityLadder::sentence).toList())));
         picture = null;
         repaint();
@@ -153,7 +156,7 @@ final class AcidityLadder extends JPanel {
     }
 
     private static String sentence(Rung rung) {
-        return rung.site().map(SiteTag::sentence).orElse(rung.name() + ", pKa " + rung.text() + (rung.note().isEmpty() ? "" : ". " + rung.note()));
+        return rung.site().map(LetteredSite::sentence).orElse(rung.name() + ", pKa " + rung.text() + (rung.note().isEmpty() ? "" : ". " + rung.note()));
     }
 
     private final class Mouse extends MouseAdapter {

@@ -53,7 +53,7 @@ final class BaseChoiceModel extends RowsModel<RankedBase> {
         RankedBase choice = row(row);
         return switch (Column.values()[column]) {
             case RANK -> row + 1;
-            case BASE -> choice.base().name().length() > Column.BASE.head.letters() ? StockWords.shortName(choice.base()) : choice.base().name();
+            case BASE -> choice.base().name().length() > Column.BASE.head.letters() ? choice.base().shortName() : choice.base().name();
             case VERDICT -> choice.review().verdict();
             case PROBABILITY -> choice.review().probability();
             case LOG_K -> choice.review().logK();

@@ -8,6 +8,7 @@ import java.util.List;
 import java.util.Locale;
 import java.util.Map;
 import javax.swing.UIManager;
+import lyate.review.DoseResponse;
 import org.jfree.chart.ChartFactory;
 import org.jfree.chart.JFreeChart;
 import org.jfree.chart.axis.NumberAxis;
@@ -21,7 +22,7 @@ import org.jfree.chart.ui.TextAnchor;
 import org.jfree.data.xy.XYSeries;
 import org.jfree.data.xy.XYSeriesCollection;
 
-/** Draws a dose sweep: per cent of each proton taken against equivalents, every line named, the dose chosen as a vertical line. */
+/** Draws a dose curve: per cent of each proton taken against equivalents, every line named, the dose chosen as a vertical line. */
 final class DoseChart {
 
     /** Donors that never lose more than this stay out of the picture. */
@@ -33,21 +34,21 @@ final class DoseChart {
         this.palette = palette;
     }
 
-    JFreeChart chart(DoseSweep sweep, Shown shown) {
+    JFreeChart chart(DoseResponse doses, Shown shown) {
         XYSeriesCollection data = new XYSeriesCollection();
-        JFreeChart chart = ChartFactory.createXYLineChart(null, "equivalents of " + StockWords.shortName(shown.review().step().base()),
+        JFreeChart chart = ChartFactory.createXYLineChart(null, "equivalents of " + shown.review().step().base().shortName(),
                 "% taken", data);
         XYPlot plot = chart.getXYPlot();
         XYLineAndShapeRenderer renderer = new XYLineAndShapeRenderer(true, false);
         plot.setRenderer(renderer);
-        for (Map.Entry<String, List<Double>> donor : sweep.percentTaken().entrySet()) {
-            if (donor.getValue().stream().anyMatch(percent -> percent > WORTH_A_LINE) && donor.getValue().size() == sweep.equivalents().size()) {
-                add(donor.getKey(), donor.getValue(), sweep, shown, data, renderer);
+        for (Map.Entry<String, List<Double>> donor : doses.percentTaken().entrySet()) {
+            if (donor.getValue().stream().anyMatch(percent -> percent > WORTH_A_LINE)) {
+                add(donor.getKey(), donor.getValue(), doses, shown, data, renderer);
             }
         }
         dress(chart, plot);
         plot.getRangeAxis().setRange(0, 120);
-        double span = sweep.equivalents().get(sweep.equivalents().size() - 1);
+        double span = doses.highest();
         plot.getDomainAxis().setRange(0, span);
         ((NumberAxis) plot.getDomainAxis()).setTickUnit(new NumberTickUnit(span > 6 ? 1 : 0.5, NumberFormat.getInstance(Locale.ROOT)));
         ((NumberAxis) plot.getRangeAxis()).setTickUnit(new NumberTickUnit(25, NumberFormat.getInstance(Locale.ROOT)));
@@ -55,10 +56,10 @@ final class DoseChart {
         return chart;
     }
 
-    private void add(String donor, List<Double> percent, DoseSweep sweep, Shown shown, XYSeriesCollection data, XYLineAndShapeRenderer renderer) {
+    private void add(String donor, List<Double> percent, DoseResponse doses, Shown shown, XYSeriesCollection data, XYLineAndShapeRenderer renderer) {
         XYSeries series = new XYSeries(shown.tags().labelled(donor).map(site -> site.letter() + "  " + donor).orElse(donor));
         for (int i = 0; i < percent.size(); i++) {
-            series.add(sweep.equivalents().get(i), percent.get(i));
+            series.add(doses.equivalents().get(i), percent.get(i));
         }
         int index = data.getSeriesCount();
         data.addSeries(series);

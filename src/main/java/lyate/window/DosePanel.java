@@ -6,7 +6,7 @@ import java.awt.event.MouseEvent;
 import java.util.Locale;
 import java.util.Optional;
 import java.util.function.DoubleConsumer;
-import lyate.review.Reviewer;
+import lyate.review.DoseResponse;
 import org.jfree.chart.ChartPanel;
 import org.jfree.chart.plot.XYPlot;
 
@@ -16,15 +16,15 @@ final class DosePanel extends LazyTab {
     private static final double KEY_STEP = 0.05;
 
     private final Theme theme;
-    private final transient Reviewer reviewer;
+    private final transient Engine engine;
     private final transient DoubleConsumer onEquivalents;
     private final ChartPanel panel = Charts.panel("Protons taken against equivalents of base");
-    private transient DoseSweep sweep;
+    private transient DoseResponse doses;
 
-    DosePanel(Theme theme, Reviewer reviewer, DoubleConsumer onEquivalents) {
+    DosePanel(Theme theme, Engine engine, DoubleConsumer onEquivalents) {
         super("dose curve");
         this.theme = theme;
-        this.reviewer = reviewer;
+        this.engine = engine;
         this.onEquivalents = onEquivalents;
         panel.setFocusable(true);
         Keys.bind(panel, "LEFT", () -> move(shown().review().step().equivalents() - KEY_STEP));
@@ -43,13 +43,13 @@ final class DosePanel extends LazyTab {
 
     @Override
     Object key(Shown next) {
-        return StepKey.of(next.review().step()).withoutDose(DoseSweep.span(next.review().step()));
+        return StepKey.of(next.review().step()).withoutDose(DoseResponse.span(next.review().step()));
     }
 
     @Override
     void work(Shown wanted) {
-        start("working out the curve \u2026", goOn -> DoseSweep.of(wanted.review().step(), reviewer, goOn), result -> {
-            sweep = result;
+        start("working out the curve \u2026", goOn -> engine.reviewer().doseResponse(wanted.review().step(), DoseResponse.span(wanted.review().step())), result -> {
+            doses = result;
             draw();
         });
     }
@@ -60,8 +60,8 @@ final class DosePanel extends LazyTab {
     }
 
     private void draw() {
-        if (sweep != null && !sweep.equivalents().isEmpty()) {
-            panel.setChart(new DoseChart(theme.palette()).chart(sweep, shown()));
+        if (doses != null) {
+            panel.setChart(new DoseChart(theme.palette()).chart(doses, shown()));
         }
     }
 

@@ -31,7 +31,7 @@ final class Drawer extends JTabbedPane implements AutoCloseable {
     Drawer(Theme theme, Engine engine, Wishes wishes) {
         transfers = new TransfersTable(theme, wishes::highlight, wishes::intend);
         choice = new BaseChoicePanel(theme, engine, wishes::take, wishes::compare);
-        dose = new DosePanel(theme, step -> engine.reviewer().review(step), wishes::equivalents);
+        dose = new DosePanel(theme, engine, wishes::equivalents);
         amounts = new AmountsPanel(theme, engine);
         workUp = new WorkUpPanel(theme, engine, amounts::amounts);
         addTab("Transfers", null, transfers, "every donor against the base");

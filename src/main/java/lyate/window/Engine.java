@@ -7,7 +7,6 @@ import java.util.function.Consumer;
 import javax.swing.SwingUtilities;
 import lyate.bench.Enthalpies;
 import lyate.molecule.MoleculeReader;
-import lyate.review.Reviewer;
 import lyate.review.StepReviewer;
 import lyate.sheet.StepReader;
 import lyate.stock.Base;
@@ -27,11 +26,11 @@ final class Engine {
     private final CompletableFuture<MoleculeReader> molecules;
     private final CompletableFuture<Stockroom> stockroom;
     private final CompletableFuture<StepReader> steps;
-    private final CompletableFuture<Reviewer> reviewer;
+    private final CompletableFuture<StepReviewer> reviewer;
     private final CompletableFuture<Enthalpies> enthalpies;
 
     private Engine(TableFolders folders, CompletableFuture<MoleculeReader> molecules, CompletableFuture<Stockroom> stockroom,
-                   CompletableFuture<Reviewer> reviewer, CompletableFuture<Enthalpies> enthalpies) {
+                   CompletableFuture<StepReviewer> reviewer, CompletableFuture<Enthalpies> enthalpies) {
         this.folders = folders;
         this.molecules = molecules;
         this.stockroom = stockroom;
@@ -41,7 +40,7 @@ final class Engine {
     }
 
     /** An engine whose parts are there already. */
-    Engine(TableFolders folders, Stockroom stockroom, Reviewer reviewer, Enthalpies enthalpies) {
+    Engine(TableFolders folders, Stockroom stockroom, StepReviewer reviewer, Enthalpies enthalpies) {
         this(folders, CompletableFuture.completedFuture(MoleculeReader.load(folders)), CompletableFuture.completedFuture(stockroom), CompletableFuture.completedFuture(reviewer),
                 CompletableFuture.completedFuture(enthalpies));
     }
@@ -83,7 +82,7 @@ final class Engine {
     }
 
     /** What judges a step. */
-    Reviewer reviewer() {
+    StepReviewer reviewer() {
         return reviewer.join();
     }
 

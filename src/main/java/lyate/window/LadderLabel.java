@@ -7,6 +7,7 @@ import java.util.List;
 import java.util.stream.Collectors;
 import java.util.stream.Stream;
 import lyate.report.LabelSpread;
+import lyate.report.Rung;
 
 /**
  * A label of the ladder and where its middle goes.

@@ -9,6 +9,7 @@ import java.awt.geom.Ellipse2D;
 import java.awt.geom.Line2D;
 import java.awt.geom.Path2D;
 import java.awt.geom.Rectangle2D;
+import lyate.report.Rung;
 
 /** Marks of the ladder: ring for a site (filled by the fraction taken, double where intended), triangle for a base, square for solvent and water. */
 final class LadderMarks {
@@ -22,7 +23,7 @@ final class LadderMarks {
     void paint(Graphics2D g, Rung rung, double x, LadderAxis axis) {
         double y = axis.y(rung.pKa());
         double r = palette.space("mark");
-        Color accent = palette.color(rung.accent());
+        Color accent = palette.color(accent(rung));
         g.setColor(accent);
         bar(g, x, Math.max(axis.top(), axis.y(rung.pKa() + rung.sigma())), Math.min(axis.bottom(), axis.y(rung.pKa() - rung.sigma())), r);
         Shape shape = shape(rung.kind(), x, y, r);
@@ -45,6 +46,15 @@ final class LadderMarks {
         g.draw(new Line2D.Double(x, top, x, bottom));
         g.draw(new Line2D.Double(x - r / 2, top, x + r / 2, top));
         g.draw(new Line2D.Double(x - r / 2, bottom, x + r / 2, bottom));
+    }
+
+    /** Name of the colour of a rung in the palette. */
+    static String accent(Rung rung) {
+        return switch (rung.kind()) {
+            case SITE -> rung.intended() ? "intended" : "site";
+            case BASE, COMPARED -> "base";
+            case SOLVENT, WATER, PARTNER -> "solvent";
+        };
     }
 
     private static Shape shape(Rung.Kind kind, double x, double y, double r) {

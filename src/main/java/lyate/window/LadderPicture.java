@@ -13,6 +13,8 @@ import java.awt.geom.Rectangle2D;
 import java.util.Comparator;
 import java.util.List;
 import java.util.Optional;
+import lyate.report.Ladder;
+import lyate.report.Rung;
 import lyate.report.Words;
 
 /** The acidity ladder laid out for one size: axis in the middle, sites left, everything that takes or offers a proton right. */

@@ -2,6 +2,7 @@ package lyate.window;
 
 import java.awt.Font;
 import java.awt.Graphics2D;
+import lyate.report.Rung;
 
 /**
  * The words of a ladder label: letter and name in bold, value in plain type.
@@ -35,7 +36,7 @@ record LadderText(String name, String value, Font bold, Font plain, double nameW
 
     private static LadderText of(Rung rung, String name, String value, Font bold, Font plain, Graphics2D g) {
         double nameWidth = g.getFontMetrics(bold).stringWidth(name);
-        return new LadderText(name, value, bold, plain, nameWidth, nameWidth + g.getFontMetrics(plain).stringWidth(value), rung.accent());
+        return new LadderText(name, value, bold, plain, nameWidth, nameWidth + g.getFontMetrics(plain).stringWidth(value), LadderMarks.accent(rung));
     }
 
     void paint(Graphics2D g, Palette palette, double x, double baseline, boolean focused) {

@@ -3,6 +3,7 @@ package lyate.window;
 import java.util.List;
 import java.util.Optional;
 import lyate.molecule.MoleculeDrawing;
+import lyate.report.LetteredSite;
 import lyate.review.FindingKind;
 import lyate.review.Review;
 
@@ -16,7 +17,7 @@ record Shown(Review review, MoleculeDrawing drawing, SiteTags tags) {
     }
 
     /** The tag of the site that is meant. */
-    Optional<SiteTag> intended() {
+    Optional<LetteredSite> intended() {
         return tags.labelled(review.intendedSite());
     }
 

@@ -2,8 +2,9 @@ package lyate.window;
 
 import com.formdev.flatlaf.util.UIScale;
 import lyate.acidity.Acidity;
-import lyate.report.Recipe;
+import lyate.report.LetteredSite;
 import lyate.report.Recipe.Line;
+import lyate.report.Recipe;
 import lyate.report.Words;
 
 /** The card shown over a site: its pKa taken apart. */
@@ -13,7 +14,7 @@ final class SiteCard {
 
     private SiteCard() {}
 
-    static String html(Shown shown, SiteTag site) {
+    static String html(Shown shown, LetteredSite site) {
         Acidity acidity = site.transfer().acidity();
         StringBuilder html = new StringBuilder("<html><div style='width:" + UIScale.scale(WIDTH) + "px'>");
         html.append("<b>").append(site.letter()).append(" &nbsp; ").append(escape(site.label())).append("</b> &nbsp; pKa <b>")

@@ -19,16 +19,9 @@ final class StockWords {
 
     private static final List<Medium> ORDER = List.of(Medium.WATER, Medium.DMSO, Medium.ACETONITRILE, Medium.THF);
 
-    private static final int LABEL_LETTERS = 8;
     private static final int FIELD_LETTERS = 26;
 
     private StockWords() {}
-
-    /** A name too long for a label gives way to the first abbreviation. */
-    static String shortName(Named thing) {
-        boolean tooLong = thing.name().length() > LABEL_LETTERS && !thing.aliases().isEmpty();
-        return tooLong ? thing.aliases().get(0) : thing.name();
-    }
 
     static Hit hit(Base base) {
         return hit(base, pKas(base));

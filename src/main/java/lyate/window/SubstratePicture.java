@@ -17,6 +17,7 @@ import java.util.Optional;
 import lyate.molecule.DrawingMark;
 import lyate.molecule.Molecule;
 import lyate.molecule.MoleculeDrawing;
+import lyate.report.LetteredSite;
 import lyate.window.TagPlacer.Placed;
 import lyate.window.TagPlacer.Wish;
 
@@ -49,7 +50,7 @@ final class SubstratePicture {
         this.placed = new TagPlacer(area, atoms, bonds(), symbols(), ring + palette.space("small")).place(wishes(measure, size));
     }
 
-    void paint(Graphics2D g, List<Integer> highlighted, Optional<SiteTag> focused) {
+    void paint(Graphics2D g, List<Integer> highlighted, Optional<LetteredSite> focused) {
         g.setRenderingHint(RenderingHints.KEY_ANTIALIASING, RenderingHints.VALUE_ANTIALIAS_ON);
         g.setRenderingHint(RenderingHints.KEY_STROKE_CONTROL, RenderingHints.VALUE_STROKE_PURE);
         g.setColor(palette.ground("caution"));
@@ -72,7 +73,7 @@ final class SubstratePicture {
     }
 
     /** The site at a point: its tag, or the ring round one of its atoms. */
-    Optional<SiteTag> siteAt(Point2D point) {
+    Optional<LetteredSite> siteAt(Point2D point) {
         for (Placed tag : placed) {
             if (tag.box().contains(point)) {
                 return Optional.of(tag.tag());
@@ -83,7 +84,7 @@ final class SubstratePicture {
     }
 
     /** Where the tag of a site came to be. */
-    Optional<Rectangle2D> placeOf(SiteTag site) {
+    Optional<Rectangle2D> placeOf(LetteredSite site) {
         return placed.stream().filter(tag -> tag.tag().equals(site)).map(Placed::box).findFirst();
     }
 
@@ -135,13 +136,13 @@ final class SubstratePicture {
      * the last ones where there is not room for all values.
      */
     private List<Wish> wishes(Graphics2D g, Dimension size) {
-        List<SiteTag> ordered = shown.tags().sites().stream().sorted(Comparator.comparing((SiteTag tag) -> !tag.intended())).toList();
+        List<LetteredSite> ordered = shown.tags().sites().stream().sorted(Comparator.comparing((LetteredSite tag) -> !tag.intended())).toList();
         List<Wish> wishes = new ArrayList<>();
         double room = size.getWidth() * size.getHeight() / ROOM_PER_VALUE;
-        for (SiteTag tag : ordered) {
+        for (LetteredSite tag : ordered) {
             Dimension2D full = painter.fullSize(g, tag);
             room -= full.getWidth() * full.getHeight();
-            boolean value = tag.intended() || TagPainter.counts(tag) && room > 0;
+            boolean value = tag.intended() || tag.counts() && room > 0;
             wishes.add(new Wish(tag, value ? full : null, painter.letterSize(g, tag)));
         }
         return wishes;

@@ -2,8 +2,8 @@ package lyate.window;
 
 import java.awt.Cursor;
 import java.awt.Dimension;
-import java.awt.Graphics;
 import java.awt.Graphics2D;
+import java.awt.Graphics;
 import java.awt.Point;
 import java.awt.RenderingHints;
 import java.awt.event.FocusAdapter;
@@ -23,6 +23,7 @@ import javax.swing.PopupFactory;
 import javax.swing.SwingUtilities;
 import javax.swing.ToolTipManager;
 import javax.swing.UIManager;
+import lyate.report.LetteredSite;
 
 /** The substrate; a click on a tag, or arrow keys and Enter, set the intended site. Wheel zooms, drag pans, double click fits. */
 final class SubstrateView extends JPanel {
@@ -102,7 +103,7 @@ final class SubstrateView extends JPanel {
     }
 
     private static String describe(Shown shown) {
-        return String.join(". ", shown.tags().sites().stream().map(SiteTag::sentence).toList());
+        return String.join(". ", shown.tags().sites().stream().map(LetteredSite::sentence).toList());
     }
 
     private void refresh() {
@@ -132,7 +133,7 @@ final class SubstrateView extends JPanel {
         return picture;
     }
 
-    private Optional<SiteTag> focused() {
+    private Optional<LetteredSite> focused() {
         return focusedSite < 0 || focusedSite >= shown.tags().sites().size() ? Optional.empty() : Optional.of(shown.tags().sites().get(focusedSite));
     }
 
@@ -179,7 +180,7 @@ final class SubstrateView extends JPanel {
         return picture == null ? Optional.empty() : shown.tags().labelled(label).flatMap(picture::placeOf);
     }
 
-    private Optional<SiteTag> siteAt(Point point) {
+    private Optional<LetteredSite> siteAt(Point point) {
         return picture == null ? Optional.empty() : picture.siteAt(point);
     }
 
@@ -210,7 +211,7 @@ final class SubstrateView extends JPanel {
 
         @Override
         public void mouseClicked(MouseEvent event) {
-            Optional<SiteTag> site = siteAt(event.getPoint());
+            Optional<LetteredSite> site = siteAt(event.getPoint());
             if (site.isPresent()) {
                 onSite.accept(site.get().label());
             } else if (event.getClickCount() == 2) {

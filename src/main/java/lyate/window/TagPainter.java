@@ -13,6 +13,7 @@ import java.awt.geom.Path2D;
 import java.awt.geom.Point2D;
 import java.awt.geom.Rectangle2D;
 import java.awt.geom.RoundRectangle2D;
+import lyate.report.LetteredSite;
 
 /** Paints site tags and rings: letter in a chip, value beside it, ring filled by the fraction taken, double for the intended site. */
 final class TagPainter {
@@ -28,31 +29,26 @@ final class TagPainter {
     }
 
     /** Room a tag needs with its value. */
-    Dimension2D fullSize(Graphics2D g, SiteTag tag) {
+    Dimension2D fullSize(Graphics2D g, LetteredSite tag) {
         int width = chipWidth(g, tag) + g.getFontMetrics(font).stringWidth(tag.value()) + 2 * palette.space("small");
         return new Dimension(width, height(g));
     }
 
     /** Room a tag needs as a letter alone. */
-    Dimension2D letterSize(Graphics2D g, SiteTag tag) {
+    Dimension2D letterSize(Graphics2D g, LetteredSite tag) {
         return new Dimension(chipWidth(g, tag), height(g));
     }
 
     /** The accent of a site: what is meant, what else can go, what stays. */
-    Color accent(SiteTag tag) {
-        return palette.color(tag.intended() ? "intended" : counts(tag) ? "site" : "ink.soft");
+    Color accent(LetteredSite tag) {
+        return palette.color(tag.intended() ? "intended" : tag.counts() ? "site" : "ink.soft");
     }
 
-    private Color ground(SiteTag tag) {
-        return tag.intended() ? palette.ground("intended") : counts(tag) ? palette.ground("site") : palette.color("ground.soft");
+    private Color ground(LetteredSite tag) {
+        return tag.intended() ? palette.ground("intended") : tag.counts() ? palette.ground("site") : palette.color("ground.soft");
     }
 
-    /** Whether the site matters for this base: it is meant, or its proton is within reach. */
-    static boolean counts(SiteTag tag) {
-        return tag.intended() || tag.transfer().logK() > -5;
-    }
-
-    void paintTag(Graphics2D g, SiteTag tag, Rectangle2D box, boolean full, boolean focused) {
+    void paintTag(Graphics2D g, LetteredSite tag, Rectangle2D box, boolean full, boolean focused) {
         double arc = palette.space("gap");
         RoundRectangle2D outline = new RoundRectangle2D.Double(box.getX(), box.getY(), box.getWidth(), box.getHeight(), arc, arc);
         g.setColor(ground(tag));
@@ -60,7 +56,7 @@ final class TagPainter {
         double chip = full ? chipWidth(g, tag) : box.getWidth();
         Graphics2D inner = (Graphics2D) g.create();
         inner.clip(outline);
-        inner.setColor(counts(tag) ? accent(tag) : ground(tag));
+        inner.setColor(tag.counts() ? accent(tag) : ground(tag));
         inner.fill(new Rectangle2D.Double(box.getX(), box.getY(), chip, box.getHeight()));
         inner.dispose();
         g.setColor(focused ? palette.color("focus") : accent(tag));
@@ -69,7 +65,7 @@ final class TagPainter {
         g.setFont(letterFont);
         FontMetrics metrics = g.getFontMetrics();
         float baseline = (float) (box.getCenterY() + (metrics.getAscent() - metrics.getDescent()) / 2.0);
-        g.setColor(palette.color(counts(tag) ? "ground" : "ink.soft"));
+        g.setColor(palette.color(tag.counts() ? "ground" : "ink.soft"));
         g.drawString(tag.letter(), (float) (box.getX() + (chip - metrics.stringWidth(tag.letter())) / 2), baseline);
         if (full) {
             g.setFont(font);
@@ -78,7 +74,7 @@ final class TagPainter {
         }
     }
 
-    void paintRing(Graphics2D g, SiteTag tag, Point2D centre, double radius) {
+    void paintRing(Graphics2D g, LetteredSite tag, Point2D centre, double radius) {
         g.setColor(accent(tag));
         g.setStroke(new BasicStroke(palette.space("hair")));
         g.draw(circle(centre, radius));
@@ -106,7 +102,7 @@ final class TagPainter {
     }
 
     /** A thin line from a tag to its ring, where there is a gap between them. */
-    void paintLeader(Graphics2D g, SiteTag tag, Rectangle2D box, Point2D atom, double radius) {
+    void paintLeader(Graphics2D g, LetteredSite tag, Rectangle2D box, Point2D atom, double radius) {
         double x = Math.max(box.getMinX(), Math.min(atom.getX(), box.getMaxX()));
         double y = Math.max(box.getMinY(), Math.min(atom.getY(), box.getMaxY()));
         double distance = atom.distance(x, y);
@@ -121,7 +117,7 @@ final class TagPainter {
         }
     }
 
-    private int chipWidth(Graphics2D g, SiteTag tag) {
+    private int chipWidth(Graphics2D g, LetteredSite tag) {
         FontMetrics metrics = g.getFontMetrics(letterFont);
         return Math.max(height(g), metrics.stringWidth(tag.letter()) + 2 * palette.space("small"));
     }

@@ -7,6 +7,7 @@ import java.awt.geom.Rectangle2D;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import lyate.report.LetteredSite;
 
 /**
  * Finds a place near its atom for every tag, most important tag first: inside the area, off atoms, bonds and other tags.
@@ -27,10 +28,10 @@ record TagPlacer(Rectangle2D area, List<Point2D> atoms, List<Line2D> bonds, List
     private static final double TURN_COST = 0.6;
 
     /** What is to be placed: a tag at an atom, in full size and as a letter; a letter alone where {@code full} is null. */
-    record Wish(SiteTag tag, Dimension2D full, Dimension2D letter) {}
+    record Wish(LetteredSite tag, Dimension2D full, Dimension2D letter) {}
 
     /** Where it came to be. */
-    record Placed(SiteTag tag, Rectangle2D box, boolean full) {}
+    record Placed(LetteredSite tag, Rectangle2D box, boolean full) {}
 
     List<Placed> place(List<Wish> wishes) {
         List<Placed> placed = new ArrayList<>();

@@ -74,7 +74,7 @@ final class WorkUpKit {
         }
         Optional<KnownPKa> inWater = plan.step().base().pKa(Medium.WATER);
         if (plan.step().base().counterIon().equals("none") && inWater.isPresent()) {
-            others.add(AqueousForm.base(StockWords.shortName(plan.step().base()), inWater.get().pKa()));
+            others.add(AqueousForm.base(plan.step().base().shortName(), inWater.get().pKa()));
         }
         return others;
     }

@@ -11,26 +11,27 @@ import java.awt.geom.Point2D;
 import java.awt.image.BufferedImage;
 import java.util.List;
 import java.util.Optional;
-import lyate.stock.Solvent;
+import lyate.report.Ladder;
+import lyate.report.LetteredSite;
+import lyate.report.Rung;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.ValueSource;
 
 class LadderTest {
 
-    private static final Solvent WATER = Panels.inventedEngine().water();
     private static final Palette PALETTE = Palette.load(false);
     private final Shown demo = Panels.shown(StepText.demo());
 
     @Test
     void theGapBetweenSiteAndBaseOnTheAxisIsLogKAtRoomTemperature() {
-        Ladder ladder = Ladder.of(demo, List.of(), WATER).orElseThrow();
+        Ladder ladder = Panels.ladder(demo).orElseThrow();
         assertEquals(demo.review().logK() * 273.15 / 298.15, ladder.basePKa() - ladder.intended().orElseThrow().pKa(), 1e-9);
     }
 
     @Test
     void siteLettersRiseWithPKa() {
-        List<SiteTag> sites = demo.tags().sites();
+        List<LetteredSite> sites = demo.tags().sites();
         assertEquals("A", sites.get(0).letter());
         for (int i = 1; i < sites.size(); i++) {
             assertTrue(sites.get(i).transfer().acidity().pKa() >= sites.get(i - 1).transfer().acidity().pKa());
@@ -67,7 +68,7 @@ class LadderTest {
 
     private LadderPicture picture(Dimension size, Font font) {
         Graphics2D g = new BufferedImage(size.width, size.height, BufferedImage.TYPE_INT_RGB).createGraphics();
-        LadderPicture picture = new LadderPicture(Ladder.of(demo, List.of(), WATER).orElseThrow(), PALETTE, font, size, g);
+        LadderPicture picture = new LadderPicture(Panels.ladder(demo).orElseThrow(), PALETTE, font, size, g);
         picture.paint(g, Optional.empty());
         return picture;
     }

@@ -13,6 +13,7 @@ import java.util.List;
 import java.util.Optional;
 import javax.imageio.ImageIO;
 import javax.xml.parsers.DocumentBuilderFactory;
+import lyate.report.Ladder;
 import org.apache.pdfbox.Loader;
 import org.apache.pdfbox.pdmodel.PDDocument;
 import org.apache.pdfbox.rendering.PDFRenderer;
@@ -63,7 +64,7 @@ class PicturesTest {
     }
 
     private Picture ladder() {
-        Ladder ladder = Ladder.of(Panels.shown(StepText.demo()), List.of(), Panels.inventedEngine().water()).orElseThrow();
+        Ladder ladder = Panels.ladder(Panels.shown(StepText.demo())).orElseThrow();
         return new Picture("acidity-ladder", SIZE, Color.WHITE,
                 g -> new LadderPicture(ladder, palette, g.getFont(), SIZE, g).paint(g, Optional.empty()));
     }

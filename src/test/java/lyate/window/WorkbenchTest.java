@@ -47,7 +47,7 @@ class WorkbenchTest {
             Theme theme = new Theme(false);
             theme.install();
             document = Panels.document(StepText.demo());
-            bench = new Workbench(theme, Panels.inventedEngine(), document);
+            bench = new Workbench(theme, Panels.engine(), document);
             frame = new JFrame();
             frame.setContentPane(bench);
             frame.setSize(1500, 920);

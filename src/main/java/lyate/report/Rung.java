@@ -1,4 +1,4 @@
-package lyate.window;
+package lyate.report;
 
 import java.util.Optional;
 import lyate.stock.Base;
@@ -15,35 +15,29 @@ import lyate.stock.Base;
  * @param base  the stockroom's base, for a compared one
  * @param note  what to know about its place, for tooltips; may be empty
  */
-record Rung(Kind kind, String name, double pKa, double sigma, String text, Optional<SiteTag> site,
+public record Rung(Kind kind, String name, double pKa, double sigma, String text, Optional<LetteredSite> site,
             Optional<Base> base, String note) {
 
-    enum Kind { SITE, BASE, COMPARED, SOLVENT, WATER, PARTNER }
+    /** What a rung is. */
+    public enum Kind { SITE, BASE, COMPARED, SOLVENT, WATER, PARTNER }
 
     /** The value without its uncertainty. */
-    String brief() {
+    public String brief() {
         return text.replaceFirst(".\u00b1.[0-9.]+", "");
     }
 
-    boolean left() {
+    /** Whether it stands on the left, with the sites of the substrate. */
+    public boolean left() {
         return kind == Kind.SITE;
     }
 
-    boolean intended() {
-        return site.map(SiteTag::intended).orElse(false);
-    }
-
-    /** Name of its colour in the palette. */
-    String accent() {
-        return switch (kind) {
-            case SITE -> intended() ? "intended" : "site";
-            case BASE, COMPARED -> "base";
-            case SOLVENT, WATER, PARTNER -> "solvent";
-        };
+    /** Whether it is the site that is meant. */
+    public boolean intended() {
+        return site.map(LetteredSite::intended).orElse(false);
     }
 
     /** Labels that go first when there is not room for all. */
-    int importance() {
+    public int importance() {
         return intended() || kind == Kind.BASE ? 0 : kind == Kind.SITE ? 2 : 1;
     }
 }
