@@ -20,7 +20,7 @@ import lyate.molecule.AtomPattern;
 import lyate.molecule.Molecule;
 import lyate.molecule.MoleculeException;
 import lyate.molecule.MoleculeReader;
-import lyate.sheet.ReactionReader;
+import lyate.sheet.reaction.ReactionReader;
 import lyate.sheet.RouteSheet;
 import lyate.sheet.SheetException;
 import lyate.stock.Stockroom;

@@ -9,7 +9,15 @@ import org.openscience.cdk.tools.manipulator.AtomContainerManipulator;
 /** Hydrogens drawn as atoms become a count on the atom they are bound to. */
 final class Hydrogens {
 
+    private static final String ISOTOPES = "lyate.isotopesOfHydrogen";
+
     private Hydrogens() {}
+
+    /** How many of an atom's hydrogens were drawn as deuterium or tritium. */
+    static int isotopes(IAtom atom) {
+        Integer count = atom.getProperty(ISOTOPES);
+        return count == null ? 0 : count;
+    }
 
     /**
      * Folds every drawn hydrogen into its heavy atom; deuterium and tritium count as hydrogen.
@@ -25,7 +33,10 @@ final class Hydrogens {
                     throw new MoleculeException(InputNumbers.label(atom) + " has " + atom.getBondCount()
                             + " bonds; bridging hydrogens cannot be judged", InputNumbers.of(atom));
                 }
-                isotope |= atom.getMassNumber() != null;
+                if (atom.getMassNumber() != null && atom.getMassNumber() > 1) {
+                    isotope = true;
+                    atom.neighbors().forEach(heavy -> heavy.setProperty(ISOTOPES, isotopes(heavy) + 1));
+                }
                 atom.setMassNumber(null);
                 atom.setMapIdx(0);
                 drawn = true;

@@ -65,6 +65,16 @@ public final class Molecule {
         return facts.hydrogens[atom];
     }
 
+    /** How many of the hydrogens bound to the atom are deuterium or tritium. */
+    public int isotopicHydrogens(int atom) {
+        return Hydrogens.isotopes(container.getAtom(atom));
+    }
+
+    /** The number that ties an atom to its place on the other side of a reaction; 0 where the input gives none. */
+    public int mapNumber(int atom) {
+        return container.getAtom(atom).getMapIdx();
+    }
+
     /** Formal charge. */
     public int charge(int atom) {
         return facts.charges[atom];

@@ -55,6 +55,11 @@ public final class MoleculeReader {
         return line.startsWith("InChI=") ? new InchiText(line).read(text, normaliser) : smilesOrName(text, line);
     }
 
+    /** Reads SMILES and nothing else. */
+    Molecule readSmiles(String text) throws MoleculeException {
+        return new SmilesText(text).read(text, normaliser, List.of());
+    }
+
     /** Reads a molfile; the data that follow its structure in an SD file are passed over. */
     Molecule readMolfile(String text) throws MoleculeException {
         if (!MolfileText.looksLike(text)) {

@@ -12,6 +12,8 @@ import lyate.molecule.MoleculeException;
 import lyate.molecule.MoleculeReader;
 import lyate.review.Step;
 import lyate.sheet.RowException.Problem;
+import lyate.sheet.reaction.Reaction;
+import lyate.sheet.reaction.ReactionReader;
 import lyate.stock.Base;
 import lyate.stock.Solvent;
 import lyate.stock.Stockroom;
