@@ -15,7 +15,9 @@ final class Assumptions {
     static List<String> of(SheetRow row, Review review) {
         Step step = review.step();
         List<String> said = new ArrayList<>();
-        if (row.text(SheetColumn.SITE).isEmpty()) {
+        if (row.text(SheetColumn.SITE).isEmpty() && step.intendedSite().isPresent()) {
+            said.add("No intended site given: " + review.intendedSite() + " was taken from the reaction.");
+        } else if (row.text(SheetColumn.SITE).isEmpty()) {
             said.add("No intended site given: " + review.intendedSite() + ", the first to go, was taken.");
         }
         if (row.text(SheetColumn.BASE_EQUIV).isEmpty()) {

@@ -6,6 +6,7 @@ import java.util.Map;
 import lyate.molecule.Molecule;
 import lyate.review.Finding;
 import lyate.review.Review;
+import lyate.review.SiteOrigin;
 import lyate.review.Step;
 import lyate.review.Transfer;
 import lyate.review.Verdict;
@@ -48,6 +49,7 @@ public final class ReviewJson {
         object.put("set_aside", step.substrate().counterIons());
         object.put("warnings", step.substrate().warnings());
         object.put("site", step.intendedSite().orElse(null));
+        object.put("reaction_site", step.origin().map(ReviewJson::origin).orElse(null));
         object.put("base", step.base().id());
         object.put("base_equiv", Numbers.rounded(step.equivalents(), 6));
         object.put("solvent", step.solvent().id());
@@ -55,6 +57,16 @@ public final class ReviewJson {
         object.put("concentration_M", Numbers.rounded(step.concentrationMolar(), 6));
         object.put("water_ppm", Numbers.rounded(step.waterPpm(), 3));
         object.put("electrophile", step.partner().map(Molecule::smiles).orElse(null));
+        return object;
+    }
+
+    private static Map<String, Object> origin(SiteOrigin origin) {
+        Map<String, Object> object = new LinkedHashMap<>();
+        object.put("site", origin.site().orElse(null));
+        object.put("sure", origin.sure());
+        object.put("confidence", origin.confidence());
+        object.put("alternatives", origin.alternatives());
+        object.put("remarks", origin.remarks());
         return object;
     }
 

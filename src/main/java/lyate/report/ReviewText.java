@@ -35,7 +35,7 @@ public final class ReviewText implements ResultWriter<Review> {
         for (String warning : step.substrate().warnings()) {
             out.line("                 %s", warning);
         }
-        out.line("  intended site  %s", review.intendedSite());
+        out.line("  intended site  %s%s", review.intendedSite(), step.origin().map(origin -> " (" + Words.origin(origin) + ")").orElse(""));
         out.line("  first to go    %s", review.sideReactionWins() && review.firstSite().equals("none") ? "none: a side reaction takes the base" : review.firstSite());
         out.line("  base           %s, %s equiv", step.base().name(), Numbers.fixed(step.equivalents(), 2));
         out.line("  working base   %s", review.workingBase());

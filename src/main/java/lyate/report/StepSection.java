@@ -103,7 +103,7 @@ final class StepSection {
             pair("set aside", String.join(", ", substrate.counterIons()));
         }
         substrate.warnings().forEach(warning -> pair("note", warning));
-        pair("Intended site", review.intendedSite());
+        pair("Intended site", review.intendedSite() + step.origin().map(origin -> " (" + Words.origin(origin) + ")").orElse(""));
         pair("Base", step.base().name() + ", " + Words.chosen(step.equivalents()) + " equivalents");
         if (!review.workingBase().equals(step.base().name())) {
             pair("Working base", review.workingBase());

@@ -2,6 +2,7 @@ package lyate.report;
 
 import java.util.Locale;
 import lyate.acidity.Acidity;
+import lyate.review.SiteOrigin;
 import lyate.review.Verdict;
 import lyate.stock.Medium;
 
@@ -120,5 +121,10 @@ public final class Words {
 
     static String minus(String text) {
         return text.replace("-", MINUS);
+    }
+
+    /** What a drawn reaction says of the site, and how sure it is. */
+    static String origin(SiteOrigin origin) {
+        return "reaction: " + origin.site().orElse("no site") + ", " + origin.confidence();
     }
 }

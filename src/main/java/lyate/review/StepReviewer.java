@@ -127,6 +127,7 @@ public final class StepReviewer implements Reviewer {
         Step step = situation.step();
         List<Finding> findings = new ArrayList<>();
         EquilibriumFindings.rules().forEach(rule -> findings.addAll(rule.find(situation)));
+        SiteOriginFindings.rules().forEach(rule -> findings.addAll(rule.find(situation)));
         SiteFindings.rules().forEach(rule -> findings.addAll(rule.find(situation)));
         ScaleFindings.rules().forEach(rule -> findings.addAll(rule.find(situation)));
         SolventFindings.rules().forEach(rule -> findings.addAll(rule.find(situation)));

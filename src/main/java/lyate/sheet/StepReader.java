@@ -10,6 +10,7 @@ import java.util.stream.IntStream;
 import lyate.molecule.Molecule;
 import lyate.molecule.MoleculeException;
 import lyate.molecule.MoleculeReader;
+import lyate.review.SiteOrigin;
 import lyate.review.Step;
 import lyate.sheet.RowException.Problem;
 import lyate.sheet.reaction.Reaction;
@@ -54,25 +55,27 @@ public final class StepReader {
         }
         List<Problem> problems = new ArrayList<>();
         Optional<Reaction> reaction = reaction(row, problems);
-        Molecule substrate = reaction.map(Reaction::substrate).orElseGet(() -> substrate(row, problems));
+        Molecule substrate = substrate(row, reaction, problems);
         Base base = base(row, reaction, problems);
         Solvent solvent = solvent(row, reaction, problems);
-        Optional<String> site = site(row, substrate, problems);
+        Optional<SiteOrigin> origin = DrawnSite.of(row, reaction, substrate, problems);
+        Optional<String> site = site(row, substrate, problems).or(() -> origin.flatMap(SiteOrigin::site));
         double equivalents = number(row, SheetColumn.BASE_EQUIV, Quantity.EQUIVALENTS, USUAL_EQUIVALENTS, problems);
         double temperature = number(row, SheetColumn.TEMPERATURE, Quantity.TEMPERATURE, USUAL_TEMPERATURE, problems);
         double concentration = number(row, SheetColumn.CONCENTRATION, Quantity.CONCENTRATION, USUAL_CONCENTRATION, problems);
         double water = number(row, SheetColumn.WATER, Quantity.WATER_PPM, UsualWater.ppm(solvent), problems);
-        Optional<Molecule> partner = partner(row, problems);
+        Optional<Molecule> partner = partner(row, problems).or(() -> reaction.flatMap(Reaction::partner));
         StepScale.check(row, problems);
         if (!problems.isEmpty()) {
             throw new RowException(problems);
         }
-        return new Step(row.name(), substrate, site, base, equivalents, solvent, temperature, concentration, water, partner);
+        return new Step(row.name(), substrate, site, base, equivalents, solvent, temperature, concentration, water, partner,
+                reaction.map(drawn -> DrawnSite.compared(origin.orElseThrow(), drawn, base, partner)));
     }
 
     private Optional<Reaction> reaction(SheetRow row, List<Problem> problems) {
         String text = row.text(SheetColumn.REACTION);
-        if (text.isEmpty() || !row.text(SheetColumn.SUBSTRATE).isEmpty()) {
+        if (text.isEmpty()) {
             return Optional.empty();
         }
         try {
@@ -83,9 +86,9 @@ public final class StepReader {
         }
     }
 
-    private Molecule substrate(SheetRow row, List<Problem> problems) {
+    private Molecule substrate(SheetRow row, Optional<Reaction> reaction, List<Problem> problems) {
         if (!row.text(SheetColumn.REACTION).isEmpty() && row.text(SheetColumn.SUBSTRATE).isEmpty()) {
-            return null;
+            return reaction.map(Reaction::substrate).orElse(null);
         }
         try {
             return molecules.read(row.text(SheetColumn.SUBSTRATE));
@@ -105,7 +108,8 @@ public final class StepReader {
             if (!name.isEmpty()) {
                 return stockroom.base(name);
             }
-            problems.add(new Problem(SheetColumn.BASE, "there is no base"));
+            problems.add(new Problem(SheetColumn.BASE, "there is no base" + reaction.flatMap(Reaction::acid)
+                    .map(acid -> "; " + acid.name() + ", which is drawn, is an acid").orElse("")));
         } catch (UnknownNameException e) {
             problems.add(new Problem(SheetColumn.BASE, e.getMessage()));
         }

@@ -100,9 +100,9 @@ class StepReaderTest {
     @CsvSource(delimiter = '|', value = {
         "CC(C)=O|not a reaction SMILES: expected reactants>agents>products, found 'CC(C)=O'",
         ">[Na+].[H-]>C|the reaction has no reactant",
-        "[Na+].[H-]>C1CCOC1>C|the reaction has no reactant besides base and solvent",
-        "[Na+].[Cl-]>>C|there are only counter-ions in it ([Cl-]), no substrate",
-        "CC(C>>C|not SMILES: unclosed branch detected, SMILES may be truncated",
+        "[Na+].[H-]>C1CCOC1>C|the reaction has no reactant besides base, solvent and ions",
+        "[Na+].[Cl-]>>C|the reaction has no reactant besides base, solvent and ions",
+        "CC(C>>C|reactant 1: not SMILES: unclosed branch detected, SMILES may be truncated",
     })
     void reactionsThatCannotBeUsed(String reaction, String reason) {
         RowException refused = assertThrows(RowException.class, () -> read("reaction,base,solvent", reaction + ",LDA,THF"));

@@ -101,11 +101,32 @@ public final class DrawnShelf {
         return present(parts).stream().map(DrawnBase::base).toList();
     }
 
+    /** Each part belongs to one base: those drawn in one piece are told apart first, of others the strongest. */
     private List<DrawnBase> present(List<ReactionPart> parts) {
-        List<String> there = parts.stream().flatMap(part -> part.keys().stream()).toList();
-        List<DrawnBase> found = bases.stream().filter(base -> holds(there, base.parts())).toList();
-        return found.stream().filter(base -> found.stream().noneMatch(other -> other.parts().size() > base.parts().size() && holds(other.parts(), base.parts())))
-                .sorted(Comparator.comparingDouble(DrawnBase::strength).reversed()).toList();
+        List<String> left = new ArrayList<>(parts.stream().flatMap(part -> part.keys().stream()).toList());
+        List<DrawnBase> inOnePiece = bases.stream().filter(base -> inOnePiece(left, base.parts())).toList();
+        List<DrawnBase> candidates = bases.stream().filter(base -> holds(left, base.parts()))
+                .sorted(Comparator.comparing((DrawnBase base) -> -base.parts().size()).thenComparing(base -> !inOnePiece.contains(base))
+                        .thenComparing(base -> -base.strength())).toList();
+        List<DrawnBase> found = new ArrayList<>();
+        for (DrawnBase base : candidates) {
+            if (holds(left, base.parts())) {
+                base.parts().forEach(left::remove);
+                found.add(base);
+            }
+        }
+        found.sort(Comparator.comparingDouble(DrawnBase::strength).reversed());
+        return found;
+    }
+
+    private static boolean inOnePiece(List<String> present, List<String> wanted) {
+        List<String> sorted = wanted.stream().sorted().toList();
+        for (int at = 0; at + wanted.size() <= present.size(); at++) {
+            if (present.subList(at, at + wanted.size()).stream().sorted().toList().equals(sorted)) {
+                return true;
+            }
+        }
+        return false;
     }
 
     /** The parts that salts among the bases are made of: reagents, not what the step is about. */

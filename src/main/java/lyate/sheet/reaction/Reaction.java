@@ -1,6 +1,7 @@
 package lyate.sheet.reaction;
 
 import java.util.Optional;
+import java.util.OptionalInt;
 import lyate.molecule.Molecule;
 import lyate.review.SiteOrigin;
 import lyate.stock.Acid;
@@ -21,8 +22,25 @@ import lyate.stock.Solvent;
 public record Reaction(Molecule substrate, int reactant, Optional<Base> base, Optional<Solvent> solvent, Optional<Acid> acid,
                        Optional<Molecule> partner, SiteOrigin origin) {
 
-    /** Label of the atom that loses its proton; empty where the reaction does not tell, or where one arrives instead. */
-    public Optional<String> site() {
-        return origin.site().filter(label -> !origin.arrives());
+    /**
+     * The same with the atoms of the substrate numbered as in another text for it; empty where that is another molecule.
+     * Alternatives keep their meaning.
+     */
+    public Optional<Reaction> numberedAs(Molecule other) {
+        if (other == substrate) {
+            return Optional.of(this);
+        }
+        if (!other.sameConstitution(substrate)) {
+            return Optional.empty();
+        }
+        SiteOrigin there = new SiteOrigin(origin.site().map(label -> label(label, other)), origin.arrives(), origin.basis(), origin.doubts(),
+                origin.alternatives().stream().map(label -> label(label, other)).toList(), origin.remarks());
+        return Optional.of(new Reaction(other, reactant, base, solvent, acid, partner, there));
+    }
+
+    /** Labels of atoms in other reactants stay as they are. */
+    private String label(String label, Molecule other) {
+        OptionalInt atom = substrate.atomLabelled(label);
+        return atom.isEmpty() ? label : other.label(SiteInference.counterpart(substrate, atom.getAsInt(), other).orElseThrow());
     }
 }

@@ -62,7 +62,7 @@ final class ReactionRoles {
     private Optional<ReactionPart> firstReactant() {
         Set<ReactionPart> reagents = new HashSet<>(reaction.ionic());
         reaction.left().stream().filter(part -> shelf.isBase(part) || shelf.solvent(part).isPresent()).forEach(reagents::add);
-        return reaction.firstReactant(reagents).or(() -> reaction.firstReactant(reaction.ionic()).filter(part -> shelf.isBase(part) && bases().isEmpty()));
+        return reaction.firstReactant(reagents).or(() -> reaction.firstReactant(reaction.ionic()));
     }
 
     /** Bases drawn, the substrate not counted, those that leave no atom in the product first. */
