@@ -25,7 +25,7 @@ class TextbookStepsTest {
     private static final Set<Verdict> LOST = Set.of(Verdict.INCOMPATIBLE, Verdict.LEVELLED);
 
     @ParameterizedTest(name = "{0} with {2}")
-    @CsvFileSource(resources = "steps-that-work.csv", delimiter = '|', numLinesToSkip = 2)
+    @CsvFileSource(resources = "steps-that-work.csv", delimiter = '|', numLinesToSkip = 1)
     void noRuleStopsAStepThatWorks(ArgumentsAccessor row) throws Exception {
         Review review = review(row);
         assertAll(() -> assertTrue(!LOST.contains(review.verdict()), review.verdict() + ": " + review.findings()),
@@ -34,7 +34,7 @@ class TextbookStepsTest {
     }
 
     @ParameterizedTest(name = "{0} with {2}")
-    @CsvFileSource(resources = "steps-that-fail.csv", delimiter = '|', numLinesToSkip = 2)
+    @CsvFileSource(resources = "steps-that-fail.csv", delimiter = '|', numLinesToSkip = 1)
     void aStepThatFailsIsStoppedAndTheReasonNamed(ArgumentsAccessor row) throws Exception {
         Review review = review(row);
         assertAll(() -> assertTrue(LOST.contains(review.verdict()), review.verdict().code()),
