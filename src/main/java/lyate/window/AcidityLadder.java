@@ -30,12 +30,13 @@ final class AcidityLadder extends JPanel {
     private final Consumer<String> onSite;
     private final Consumer<Base> onBase;
     private final Supplier<Solvent> water;
+    private transient Runnable compareListener = () -> {};
     private Shown shown;
     private List<Base> compared = List.of();
     private Optional<Ladder> ladder = Optional.empty();
     private LadderPicture picture;
     private Dimension pictureSize;
-    private int focusedRung = -1;
+    private final FocusWalk walk = new FocusWalk();
 
     /** @param water the row for water, which stands on the ladder where the solvent is not dry */
     AcidityLadder(Theme theme, Supplier<Solvent> water, Consumer<String> onSite, Consumer<Base> onBase) {
@@ -73,6 +74,7 @@ final class AcidityLadder extends JPanel {
         if (!compared.contains(base)) {
             compared = Stream.concat(compared.stream(), Stream.of(base)).toList();
             refresh();
+            compareListener.run();
         }
         return Optional.empty();
     }
@@ -83,10 +85,17 @@ final class AcidityLadder extends JPanel {
                 g -> new LadderPicture(known, theme.palette(), g.getFont(), getSize(), g).paint(g, Optional.empty())));
     }
 
-    private void leaveOut(Base base) {
+    /** No longer shows a base beside the one chosen. */
+    void leaveOut(Base base) {
         compared = compared.stream().filter(other -> !other.equals(base)).toList();
-        focusedRung = -1;
+        walk.leave();
         refresh();
+        compareListener.run();
+    }
+
+    /** Called whenever another base is compared, or one no longer. */
+    void onCompared(Runnable listener) {
+        compareListener = listener;
     }
 
     /** The bases shown beside the one chosen. */
@@ -123,14 +132,12 @@ final class AcidityLadder extends JPanel {
     }
 
     private Optional<Rung> focused() {
-        return ladder.map(Ladder::rungs).filter(rungs -> focusedRung >= 0 && focusedRung < rungs.size()).map(rungs -> rungs.get(focusedRung));
+        return ladder.map(Ladder::rungs).flatMap(walk::of);
     }
 
     private void moveFocus(int by) {
-        ladder.map(Ladder::rungs).filter(rungs -> !rungs.isEmpty()).ifPresent(rungs -> {
-            focusedRung = focusedRung < 0 ? by > 0 ? 0 : rungs.size() - 1 : Math.floorMod(focusedRung + by, rungs.size());
-            repaint();
-        });
+        walk.move(by, ladder.map(known -> known.rungs().size()).orElse(0));
+        repaint();
     }
 
     private void chooseFocused() {

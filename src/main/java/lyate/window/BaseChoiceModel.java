@@ -2,6 +2,8 @@ package lyate.window;
 
 import java.util.Arrays;
 import java.util.List;
+import java.util.function.Consumer;
+import java.util.function.Predicate;
 import lyate.report.Words;
 import lyate.review.RankedBase;
 import lyate.review.Verdict;
@@ -13,7 +15,7 @@ final class BaseChoiceModel extends RowsModel<RankedBase> {
     /** Columns, in order. */
     enum Column {
         RANK("Rank", Integer.class, -4), BASE("Base", String.class, 24), VERDICT("Verdict", Verdict.class, 14), PROBABILITY("Probability", Double.class, -10),
-        LOG_K("log K", Double.class, -8), AGAINST("Stops / cautions", String.class, 17), WHY("Why", String.class, 90);
+        LOG_K("log K", Double.class, -8), AGAINST("Stops / cautions", String.class, 17), LADDER("Ladder", Boolean.class, 6), WHY("Why", String.class, 90);
 
         private final Head head;
 
@@ -22,10 +24,18 @@ final class BaseChoiceModel extends RowsModel<RankedBase> {
         }
     }
 
+    private final transient Predicate<Base> onLadder;
+    private final transient Consumer<Base> toggle;
     private String chosen = "";
 
-    BaseChoiceModel() {
+    /**
+     * @param onLadder whether a base is compared on the ladder
+     * @param toggle   puts it there, or takes it away
+     */
+    BaseChoiceModel(Predicate<Base> onLadder, Consumer<Base> toggle) {
         super(Arrays.stream(Column.values()).map(column -> column.head).toList());
+        this.onLadder = onLadder;
+        this.toggle = toggle;
     }
 
     void show(List<RankedBase> ranked) {
@@ -49,6 +59,18 @@ final class BaseChoiceModel extends RowsModel<RankedBase> {
     }
 
     @Override
+    public boolean isCellEditable(int row, int column) {
+        return column == Column.LADDER.ordinal() && !isStressed(row);
+    }
+
+    @Override
+    public void setValueAt(Object value, int row, int column) {
+        if (!value.equals(getValueAt(row, column))) {
+            toggle.accept(row(row).base());
+        }
+    }
+
+    @Override
     public Object getValueAt(int row, int column) {
         RankedBase choice = row(row);
         return switch (Column.values()[column]) {
@@ -58,6 +80,7 @@ final class BaseChoiceModel extends RowsModel<RankedBase> {
             case PROBABILITY -> choice.review().probability();
             case LOG_K -> choice.review().logK();
             case AGAINST -> choice.stops() + " / " + choice.cautions();
+            case LADDER -> isStressed(row) || onLadder.test(choice.base());
             case WHY -> choice.why();
         };
     }

@@ -19,18 +19,19 @@ import lyate.review.Verdict;
 import lyate.stock.Base;
 import lyate.stock.Solvent;
 
-/** The stockroom ranked for the step: Enter or a double click takes a base, L or dragging puts it on the ladder. */
+/** The stockroom ranked for the step: Enter or a double click takes a base, L, a tick or dragging puts it on the ladder. */
 final class BaseChoicePanel extends LazyTab {
 
     private final transient Engine engine;
     private final transient Consumer<Base> onBase;
-    private final BaseChoiceModel model = new BaseChoiceModel();
+    private final BaseChoiceModel model;
     private final RowsTable table;
 
-    BaseChoicePanel(Theme theme, Engine engine, Consumer<Base> onBase, Consumer<Base> onCompare) {
+    BaseChoicePanel(Theme theme, Engine engine, Drawer.Wishes wishes) {
         super("base choice");
         this.engine = engine;
-        this.onBase = onBase;
+        this.onBase = wishes::take;
+        this.model = new BaseChoiceModel(wishes::isCompared, wishes::toggle);
         this.table = new RowsTable(model, "Base choice", theme) {
             @Override
             void decorate(DefaultTableCellRenderer cell, Object value) {
@@ -42,7 +43,7 @@ final class BaseChoicePanel extends LazyTab {
         Keys.bind(table, "ENTER", this::take);
         Keys.bind(table, "L", () -> {
             if (table.getSelectedRow() >= 0) {
-                onCompare.accept(selected());
+                wishes.toggle(selected());
             }
         });
         table.addMouseListener(new MouseAdapter() {
@@ -108,6 +109,11 @@ final class BaseChoicePanel extends LazyTab {
             table.setRowSelectionInterval(viewRow, viewRow);
         }
         table.repaint();
+    }
+
+    /** The bases in order. */
+    RowsTable table() {
+        return table;
     }
 
     private Base selected() {

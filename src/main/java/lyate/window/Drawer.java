@@ -23,14 +23,17 @@ final class Drawer extends JTabbedPane implements AutoCloseable {
 
         void take(Base base);
 
-        void compare(Base base);
+        /** Puts a base on the ladder beside the one chosen, or takes it away. */
+        void toggle(Base base);
+
+        boolean isCompared(Base base);
 
         void equivalents(double equivalents);
     }
 
     Drawer(Theme theme, Engine engine, Wishes wishes) {
         transfers = new TransfersTable(theme, wishes::highlight, wishes::intend);
-        choice = new BaseChoicePanel(theme, engine, wishes::take, wishes::compare);
+        choice = new BaseChoicePanel(theme, engine, wishes);
         dose = new DosePanel(theme, engine, wishes::equivalents);
         amounts = new AmountsPanel(theme, engine);
         workUp = new WorkUpPanel(theme, engine, amounts::amounts);
@@ -51,6 +54,18 @@ final class Drawer extends JTabbedPane implements AutoCloseable {
     /** The chart in view, if there is one. */
     Optional<Picture> asPicture() {
         return getSelectedComponent() instanceof LazyTab tab ? tab.asPicture() : Optional.empty();
+    }
+
+    TransfersTable transfers() {
+        return transfers;
+    }
+
+    BaseChoicePanel choice() {
+        return choice;
+    }
+
+    WorkUpPanel workUp() {
+        return workUp;
     }
 
     DosePanel dose() {

@@ -24,8 +24,8 @@ class RowsTable extends JTable {
         setAutoCreateRowSorter(true);
         setFillsViewportHeight(true);
         setDefaultRenderer(Object.class, new Cell());
-        for (int column = 0; column < model.getColumnCount(); column++) {
-            setDefaultRenderer(model.getColumnClass(column), new Cell());
+        for (Class<?> kind : List.of(String.class, Number.class, Double.class)) {
+            setDefaultRenderer(kind, new Cell());
         }
         setTransferHandler(new TextCopy(this::selectedText));
         getAccessibleContext().setAccessibleName(name);

@@ -2,54 +2,48 @@ package lyate.window;
 
 import java.awt.Component;
 import java.awt.Font;
-import java.awt.Graphics;
 import java.awt.Graphics2D;
-import java.awt.RenderingHints;
 import java.awt.Shape;
 import java.awt.geom.Ellipse2D;
 import java.awt.geom.Path2D;
-import javax.swing.Icon;
 import lyate.review.Finding.Severity;
 
 /** Octagon for stop, triangle for caution, disc for a note. */
-final class SeverityIcon implements Icon {
+final class SeverityIcon extends SquareIcon {
 
     private final Severity severity;
     private final Palette palette;
-    private final int size;
 
     SeverityIcon(Severity severity, Palette palette, int size) {
+        super(size);
         this.severity = severity;
         this.palette = palette;
-        this.size = size;
     }
 
     @Override
-    public void paintIcon(Component component, Graphics graphics, int x, int y) {
-        Graphics2D g = (Graphics2D) graphics.create(x, y, size, size);
-        g.setRenderingHint(RenderingHints.KEY_ANTIALIASING, RenderingHints.VALUE_ANTIALIAS_ON);
+    void paint(Graphics2D g, Component component) {
+        int size = size();
         g.setColor(palette.color(severity.word()));
         g.fill(shape());
         g.setColor(palette.color("ground"));
         g.setFont(component.getFont().deriveFont(Font.BOLD, size * 0.66f));
         String sign = severity == Severity.NOTE ? "i" : "!";
         g.drawString(sign, (size - g.getFontMetrics().stringWidth(sign)) / 2f, size * (severity == Severity.CAUTION ? 0.84f : 0.74f));
-        g.dispose();
     }
 
     private Shape shape() {
         return switch (severity) {
-            case STOP -> octagon(size);
+            case STOP -> octagon(size());
             case CAUTION -> triangle();
-            case NOTE -> new Ellipse2D.Double(0, 0, size, size);
+            case NOTE -> new Ellipse2D.Double(0, 0, size(), size());
         };
     }
 
     private Path2D triangle() {
         Path2D path = new Path2D.Double();
-        path.moveTo(size / 2.0, 0);
-        path.lineTo(size, size);
-        path.lineTo(0, size);
+        path.moveTo(size() / 2.0, 0);
+        path.lineTo(size(), size());
+        path.lineTo(0, size());
         path.closePath();
         return path;
     }
@@ -68,15 +62,5 @@ final class SeverityIcon implements Icon {
         }
         path.closePath();
         return path;
-    }
-
-    @Override
-    public int getIconWidth() {
-        return size;
-    }
-
-    @Override
-    public int getIconHeight() {
-        return size;
     }
 }

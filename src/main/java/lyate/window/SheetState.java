@@ -28,6 +28,16 @@ record SheetState(RouteSheet sheet, int selected) {
         return new SheetState(StepCells.write(sheet, selected, text), selected);
     }
 
+    /** The selected row with another substrate, and rows that say the same of further ones after it. */
+    SheetState withSubstrates(List<String> structures) {
+        SheetState state = write(text().with(StepField.SUBSTRATE, structures.get(0)).withSite(""));
+        for (String structure : structures.subList(1, structures.size())) {
+            SheetState next = state.duplicated();
+            state = next.write(next.text().with(StepField.SUBSTRATE, structure));
+        }
+        return new SheetState(state.sheet(), selected);
+    }
+
     /** A blank row after the selected one, selected. */
     SheetState added() {
         return inserted(Collections.nCopies(sheet.header().names().size(), ""));

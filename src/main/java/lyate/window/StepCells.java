@@ -54,9 +54,9 @@ final class StepCells {
         return cleared.withCell(row, SheetColumn.SUBSTRATE.header(), reaction ? "" : text);
     }
 
-    /** Whether a text is reaction SMILES: one line with exactly two arrows' worth of {@code >}. */
+    /** Whether a text is a reaction: an RXN file, or one line with exactly two arrows' worth of {@code >}. */
     static boolean isReaction(String text) {
-        return !text.contains("\n") && text.chars().filter(letter -> letter == '>').count() == 2;
+        return text.startsWith("$RXN") || !text.contains("\n") && text.chars().filter(letter -> letter == '>').count() == 2;
     }
 
     /** A sheet of one step. */

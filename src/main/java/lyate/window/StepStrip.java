@@ -3,6 +3,7 @@ package lyate.window;
 import java.awt.GridBagConstraints;
 import java.awt.GridBagLayout;
 import java.awt.Insets;
+import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.EnumMap;
 import java.util.List;
@@ -26,7 +27,7 @@ final class StepStrip extends JPanel {
     private final HintRow hints;
     private StepText text;
 
-    StepStrip(Theme theme, Engine engine, StepText first, Consumer<StepText> onEdit) {
+    StepStrip(Theme theme, Engine engine, StepText first, Consumer<StepText> onEdit, Consumer<Path> onFile) {
         super(new GridBagLayout());
         this.onEdit = onEdit;
         this.text = first;
@@ -34,7 +35,7 @@ final class StepStrip extends JPanel {
             int width = theme.space(field == StepField.SUBSTRATE ? "strip.substrate" : field.isNumber() ? "strip.number" : "strip.name");
             boxes.put(field, new FieldBox(field, theme, width, this::edited));
         }
-        boxes.get(StepField.SUBSTRATE).field().setTransferHandler(new StructureDrop(boxes.get(StepField.SUBSTRATE).field()));
+        boxes.get(StepField.SUBSTRATE).field().setTransferHandler(new StructureDrop(onFile));
         suggestions.put(StepField.BASE, new Suggestions(boxes.get(StepField.BASE).field(), theme,
                 typed -> engine.searchBases(typed, HITS).stream().map(StockWords::hit).toList(), () -> {}));
         suggestions.put(StepField.SOLVENT, new Suggestions(boxes.get(StepField.SOLVENT).field(), theme,
@@ -112,6 +113,11 @@ final class StepStrip extends JPanel {
         }
         remarks.addAll(molecule.warnings());
         return String.join("; ", remarks);
+    }
+
+    /** What is offered below a field while it is typed in; for base and solvent. */
+    Suggestions suggestions(StepField field) {
+        return suggestions.get(field);
     }
 
     FieldBox box(StepField field) {

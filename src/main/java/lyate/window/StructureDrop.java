@@ -1,30 +1,31 @@
 package lyate.window;
 
 import java.awt.datatransfer.DataFlavor;
+import java.awt.datatransfer.StringSelection;
+import java.awt.datatransfer.Transferable;
 import java.awt.datatransfer.UnsupportedFlavorException;
 import java.io.File;
 import java.io.IOException;
-import java.nio.file.Files;
+import java.nio.file.Path;
 import java.util.List;
+import java.util.function.Consumer;
 import javax.swing.JComponent;
-import javax.swing.JTextField;
 import javax.swing.TransferHandler;
+import javax.swing.text.JTextComponent;
 
-/** Takes a dropped or pasted structure file besides text; copying text works as in any field. */
+/** Takes a dropped or pasted file; in a text field, text works as in any other. */
 final class StructureDrop extends TransferHandler {
 
-    /** A structure file larger than this is not one molecule. */
-    private static final long MOST_BYTES = 1_000_000;
+    private final transient Consumer<Path> onFile;
 
-    private final JTextField field;
-
-    StructureDrop(JTextField field) {
-        this.field = field;
+    StructureDrop(Consumer<Path> onFile) {
+        this.onFile = onFile;
     }
 
     @Override
     public boolean canImport(TransferSupport support) {
-        return support.isDataFlavorSupported(DataFlavor.javaFileListFlavor) || support.isDataFlavorSupported(DataFlavor.stringFlavor);
+        return support.isDataFlavorSupported(DataFlavor.javaFileListFlavor)
+                || support.getComponent() instanceof JTextComponent && support.isDataFlavorSupported(DataFlavor.stringFlavor);
     }
 
     @Override
@@ -32,21 +33,20 @@ final class StructureDrop extends TransferHandler {
         try {
             if (support.isDataFlavorSupported(DataFlavor.javaFileListFlavor)) {
                 List<?> files = (List<?>) support.getTransferable().getTransferData(DataFlavor.javaFileListFlavor);
-                return !files.isEmpty() && files.get(0) instanceof File file && take(file);
+                if (files.isEmpty() || !(files.get(0) instanceof File file)) {
+                    return false;
+                }
+                onFile.accept(file.toPath());
+                return true;
             }
-            field.replaceSelection((String) support.getTransferable().getTransferData(DataFlavor.stringFlavor));
-            return true;
+            if (support.getComponent() instanceof JTextComponent field) {
+                field.replaceSelection((String) support.getTransferable().getTransferData(DataFlavor.stringFlavor));
+                return true;
+            }
+            return false;
         } catch (UnsupportedFlavorException | IOException e) {
             return false;
         }
-    }
-
-    private boolean take(File file) throws IOException {
-        if (file.length() > MOST_BYTES) {
-            return false;
-        }
-        field.setText(Files.readString(file.toPath()));
-        return true;
     }
 
     @Override
@@ -55,13 +55,14 @@ final class StructureDrop extends TransferHandler {
     }
 
     @Override
-    protected java.awt.datatransfer.Transferable createTransferable(JComponent component) {
-        return field.getSelectedText() == null ? null : new java.awt.datatransfer.StringSelection(field.getSelectedText());
+    protected Transferable createTransferable(JComponent component) {
+        boolean selection = component instanceof JTextComponent field && field.getSelectedText() != null;
+        return selection ? new StringSelection(((JTextComponent) component).getSelectedText()) : null;
     }
 
     @Override
-    protected void exportDone(JComponent source, java.awt.datatransfer.Transferable data, int action) {
-        if (action == MOVE) {
+    protected void exportDone(JComponent source, Transferable data, int action) {
+        if (action == MOVE && source instanceof JTextComponent field) {
             field.replaceSelection("");
         }
     }

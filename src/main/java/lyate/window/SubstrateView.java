@@ -37,7 +37,7 @@ final class SubstrateView extends JPanel {
     private final AffineTransform view = new AffineTransform();
     private Shown shown;
     private List<Integer> highlighted = List.of();
-    private int focusedSite = -1;
+    private final FocusWalk walk = new FocusWalk();
     private Popup card;
     private SubstratePicture picture;
     private Dimension pictureSize;
@@ -77,7 +77,7 @@ final class SubstrateView extends JPanel {
     void show(Shown next) {
         if (shown == null || next.drawing() != shown.drawing()) {
             view.setToIdentity();
-            focusedSite = -1;
+            walk.leave();
         }
         shown = next;
         getAccessibleContext().setAccessibleDescription(describe(next));
@@ -134,7 +134,7 @@ final class SubstrateView extends JPanel {
     }
 
     private Optional<LetteredSite> focused() {
-        return focusedSite < 0 || focusedSite >= shown.tags().sites().size() ? Optional.empty() : Optional.of(shown.tags().sites().get(focusedSite));
+        return shown == null ? Optional.empty() : walk.of(shown.tags().sites());
     }
 
     /** The card of the site that has the keyboard. */
@@ -153,6 +153,11 @@ final class SubstrateView extends JPanel {
         }));
     }
 
+    /** Whether the card of a site is open. */
+    boolean showsCard() {
+        return card != null;
+    }
+
     private void hideCard() {
         if (card != null) {
             card.hide();
@@ -162,17 +167,12 @@ final class SubstrateView extends JPanel {
 
     private void moveFocus(int by) {
         hideCard();
-        if (shown != null && !shown.tags().sites().isEmpty()) {
-            int count = shown.tags().sites().size();
-            focusedSite = focusedSite < 0 ? by > 0 ? 0 : count - 1 : Math.floorMod(focusedSite + by, count);
-            repaint();
-        }
+        walk.move(by, shown == null ? 0 : shown.tags().sites().size());
+        repaint();
     }
 
     private void chooseFocused() {
-        if (shown != null) {
-            focused().ifPresent(site -> onSite.accept(site.label()));
-        }
+        focused().ifPresent(site -> onSite.accept(site.label()));
     }
 
     /** Where the tag of a site is, once it has been painted. */

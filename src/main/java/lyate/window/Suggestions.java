@@ -9,6 +9,7 @@ import java.awt.event.FocusAdapter;
 import java.awt.event.FocusEvent;
 import java.awt.event.MouseAdapter;
 import java.awt.event.MouseEvent;
+import java.util.Collections;
 import java.util.List;
 import java.util.function.Function;
 import javax.swing.Action;
@@ -116,6 +117,11 @@ final class Suggestions {
 
     boolean isOpen() {
         return popup.isVisible();
+    }
+
+    /** What is offered. */
+    List<Hit> offered() {
+        return Collections.list(hits.elements());
     }
 
     private void move(int by) {

@@ -4,26 +4,22 @@ import java.awt.BasicStroke;
 import java.awt.Color;
 import java.awt.Component;
 import java.awt.Font;
-import java.awt.Graphics;
 import java.awt.Graphics2D;
-import java.awt.RenderingHints;
 import java.awt.geom.Arc2D;
 import java.awt.geom.Ellipse2D;
 import java.awt.geom.Path2D;
-import javax.swing.Icon;
 import lyate.review.Verdict;
 
 /** A shape for each kind of outcome: tick, half-filled circle, crossed octagon, question mark. */
-final class VerdictIcon implements Icon {
+final class VerdictIcon extends SquareIcon {
 
     private final Verdict verdict;
     private final Palette palette;
-    private final int size;
 
     VerdictIcon(Verdict verdict, Palette palette, int size) {
+        super(size);
         this.verdict = verdict;
         this.palette = palette;
-        this.size = size;
     }
 
     /** The palette's accent for a verdict. */
@@ -37,9 +33,8 @@ final class VerdictIcon implements Icon {
     }
 
     @Override
-    public void paintIcon(Component component, Graphics graphics, int x, int y) {
-        Graphics2D g = (Graphics2D) graphics.create(x, y, size, size);
-        g.setRenderingHint(RenderingHints.KEY_ANTIALIASING, RenderingHints.VALUE_ANTIALIAS_ON);
+    void paint(Graphics2D g, Component component) {
+        int size = size();
         Color accent = palette.color(accent(verdict));
         g.setColor(accent);
         double line = size / 9.0;
@@ -66,25 +61,14 @@ final class VerdictIcon implements Icon {
                 g.draw(path(0.68, 0.32, 0.32, 0.68));
             }
         }
-        g.dispose();
     }
 
     private Path2D path(double... points) {
         Path2D path = new Path2D.Double();
-        path.moveTo(points[0] * size, points[1] * size);
+        path.moveTo(points[0] * size(), points[1] * size());
         for (int i = 2; i < points.length; i += 2) {
-            path.lineTo(points[i] * size, points[i + 1] * size);
+            path.lineTo(points[i] * size(), points[i + 1] * size());
         }
         return path;
-    }
-
-    @Override
-    public int getIconWidth() {
-        return size;
-    }
-
-    @Override
-    public int getIconHeight() {
-        return size;
     }
 }

@@ -3,7 +3,9 @@ package lyate.window;
 import java.awt.BorderLayout;
 import java.awt.CardLayout;
 import java.awt.Dimension;
+import java.io.IOException;
 import java.math.BigDecimal;
+import java.nio.file.Path;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
@@ -54,10 +56,12 @@ final class Workbench extends JPanel implements Drawer.Wishes, AutoCloseable {
         FieldReader reader = new FieldReader(engine::steps);
         Reviewer reviewer = step -> engine.reviewer().review(step);
         presenter = new StepPresenter(reader, reviewer, this::receive);
-        strip = new StepStrip(theme, engine, document.state().text(), document::edit);
+        strip = new StepStrip(theme, engine, document.state().text(), document::edit, this::dropped);
+        setTransferHandler(new StructureDrop(this::dropped));
         substrate = new SubstrateView(theme, this::intend);
         substratePane = new Pane("Substrate", substrate, theme);
         ladder = new AcidityLadder(theme, engine::water, this::intend, this::take);
+        ladder.onCompared(() -> drawer().repaint());
         ladder.setTransferHandler(new BaseDrop(engine, this::compare));
         ladderPane = new Pane("Acidity ladder", ladder, new CompareField(theme, engine, this::compare), theme);
         findings = new FindingsPanel(theme, substrate::highlight);
@@ -120,6 +124,15 @@ final class Workbench extends JPanel implements Drawer.Wishes, AutoCloseable {
         }
     }
 
+    /** Takes the structures of a file: the first into the step on screen, every further one into a step of its own. */
+    private void dropped(Path file) {
+        try {
+            document.change(document.state().withSubstrates(StructureFile.read(file)));
+        } catch (IOException e) {
+            JOptionPane.showMessageDialog(this, e.getMessage(), "The file was not taken", JOptionPane.ERROR_MESSAGE);
+        }
+    }
+
     /** Makes a site the intended one. */
     @Override
     public void intend(String site) {
@@ -142,7 +155,20 @@ final class Workbench extends JPanel implements Drawer.Wishes, AutoCloseable {
     }
 
     @Override
-    public void compare(Base base) {
+    public boolean isCompared(Base base) {
+        return ladder.compared().contains(base);
+    }
+
+    @Override
+    public void toggle(Base base) {
+        if (isCompared(base)) {
+            ladder.leaveOut(base);
+        } else {
+            compare(base);
+        }
+    }
+
+    private void compare(Base base) {
         ladder.compare(base).ifPresent(reason -> JOptionPane.showMessageDialog(this, reason, "Acidity ladder", JOptionPane.INFORMATION_MESSAGE));
     }
 

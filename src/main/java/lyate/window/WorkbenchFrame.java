@@ -105,6 +105,11 @@ public final class WorkbenchFrame extends JFrame {
         return bench != null && bench.shown().isPresent();
     }
 
+    /** What the window shows. */
+    Workbench bench() {
+        return bench;
+    }
+
     private static String title(SheetDocument document) {
         String name = document.file().map(file -> file.getFileName().toString()).orElse("new sheet");
         return (document.isModified() ? "*" : "") + name + " \u2013 Lyate";

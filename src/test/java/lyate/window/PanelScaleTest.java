@@ -33,7 +33,7 @@ class PanelScaleTest {
     void noLabelOfTheStepStripIsCut(float scale, boolean dark) throws Exception {
         SwingUtilities.invokeAndWait(() -> {
             Theme theme = theme(scale, dark);
-            StepStrip strip = new StepStrip(theme, Panels.engine(), StepText.demo(), text -> {});
+            StepStrip strip = new StepStrip(theme, Panels.engine(), StepText.demo(), text -> {}, file -> {});
             strip.setSize((int) (WIDTH * scale), strip.getPreferredSize().height);
             layOut(strip);
             paint(strip);
