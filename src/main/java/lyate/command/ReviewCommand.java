@@ -34,7 +34,10 @@ import picocli.CommandLine.Spec;
     + " amount_mmol or amount_g, base_titrated_M, notes; reaction (reaction SMILES) may stand in place of substrate. Other columns pass through.",
     "Columns added: verdict, probability, log_k, first_site, intended_percent, other_percent, findings.",
     "A row that cannot be used is named on standard error; the others are still reviewed.", "",
-    "A .smi or .sdf file is a list of substrates, all set against the conditions given as options.", ""})
+    "From a reaction come the substrate, the site and, where they are drawn, base, solvent and electrophile; a column reaction adds"
+    + " reaction_site and reaction_confidence.",
+    "A .smi or .sdf file is a list of substrates, all set against the conditions given as options. A .rxn or .rdf file is a list of"
+    + " reactions; options stand in for what a reaction and its data items leave open.", ""})
 final class ReviewCommand implements Callable<Integer> {
 
     private final Terminal terminal;
@@ -42,7 +45,7 @@ final class ReviewCommand implements Callable<Integer> {
     @Spec
     private CommandSpec spec;
 
-    @Parameters(paramLabel = "SHEET", description = "A CSV, .smi or .sdf file; - reads a CSV from standard input.")
+    @Parameters(paramLabel = "SHEET", description = "A CSV, .smi, .sdf, .rxn or .rdf file; - reads a CSV from standard input.")
     private String sheet;
 
     @Option(names = {"-o", "--output"}, paramLabel = "FILE", description = "Where the result goes, .csv or .json (default: CSV on standard output).")
@@ -57,10 +60,10 @@ final class ReviewCommand implements Callable<Integer> {
     @Option(names = "--threads", paramLabel = "N", description = "How many rows are reviewed at a time (default: one per core).")
     private Integer threads;
 
-    @Option(names = "--base", paramLabel = "B", defaultValue = "", description = "For .smi and .sdf: by name or abbreviation, for example LDA.")
+    @Option(names = "--base", paramLabel = "B", defaultValue = "", description = "For .smi, .sdf, .rxn and .rdf: by name or abbreviation, for example LDA.")
     private String base;
 
-    @Option(names = "--solvent", paramLabel = "S", defaultValue = "", description = "For .smi and .sdf: by name or abbreviation, for example THF.")
+    @Option(names = "--solvent", paramLabel = "S", defaultValue = "", description = "For .smi, .sdf, .rxn and .rdf: by name or abbreviation, for example THF.")
     private String solvent;
 
     @Mixin
@@ -115,8 +118,8 @@ final class ReviewCommand implements Callable<Integer> {
         cells.put(SheetColumn.BASE, base);
         cells.put(SheetColumn.SOLVENT, solvent);
         if (RowInput.Kind.of(sheet) == RowInput.Kind.SHEET) {
-            check(cells.values().stream().allMatch(String::isEmpty), "conditions as options go with .smi and .sdf files; a sheet has them in its cells");
-        } else {
+            check(cells.values().stream().allMatch(String::isEmpty), "conditions as options go with .smi, .sdf, .rxn and .rdf files; a sheet has them in its cells");
+        } else if (RowInput.Kind.of(sheet) != RowInput.Kind.REACTIONS) {
             check(!base.isEmpty() && !solvent.isEmpty(), "a .smi or .sdf file needs --base and --solvent");
         }
         return new Conditions(cells);

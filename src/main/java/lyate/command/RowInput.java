@@ -9,6 +9,7 @@ import java.nio.file.Path;
 import java.util.Locale;
 import lyate.molecule.MoleculeReader;
 import lyate.sheet.Conditions;
+import lyate.sheet.ReactionList;
 import lyate.sheet.RowSource;
 import lyate.sheet.SheetException;
 import lyate.sheet.SheetReader;
@@ -19,11 +20,12 @@ final class RowInput implements AutoCloseable {
 
     /** What a file holds, by the end of its name. */
     enum Kind {
-        SHEET, SMILES, SDF;
+        SHEET, SMILES, SDF, REACTIONS;
 
         static Kind of(String name) {
             String lower = name.toLowerCase(Locale.ROOT);
-            return lower.endsWith(".smi") ? SMILES : lower.endsWith(".sdf") ? SDF : SHEET;
+            boolean reactions = lower.endsWith(".rxn") || lower.endsWith(".rdf");
+            return reactions ? REACTIONS : lower.endsWith(".smi") ? SMILES : lower.endsWith(".sdf") ? SDF : SHEET;
         }
     }
 
@@ -48,6 +50,7 @@ final class RowInput implements AutoCloseable {
                 case SHEET -> new SheetReader(text);
                 case SMILES -> SubstrateList.ofSmiles(text, conditions);
                 case SDF -> SubstrateList.ofSdf(text, molecules, conditions);
+                case REACTIONS -> new ReactionList(text, conditions);
             };
         } catch (IOException | SheetException | RuntimeException e) {
             bytes.close();

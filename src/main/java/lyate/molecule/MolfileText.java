@@ -32,6 +32,21 @@ record MolfileText(String text) {
 
     /** @throws MoleculeException in words, with the line number where one line is at fault */
     Molecule read(Normaliser normaliser) throws MoleculeException {
+        return normaliser.normalise(text, parsed(), List.of());
+    }
+
+    /**
+     * The structure as SMILES with its configuration and atom map, nothing normalised.
+     *
+     * @throws MoleculeException as {@link #read}
+     */
+    String smiles() throws MoleculeException {
+        IAtomContainer parsed = parsed();
+        Refusals.check(parsed);
+        return SmilesWriter.mapped(parsed);
+    }
+
+    private IAtomContainer parsed() throws MoleculeException {
         if (text.length() > LONGEST) {
             throw new MoleculeException("the molfile has " + text.length() + " characters; at most " + LONGEST + " are read");
         }
@@ -46,7 +61,7 @@ record MolfileText(String text) {
         refuseStrangeBonds(read);
         InputNumbers.assign(read);
         AromaticBonds.settle(read);
-        return normaliser.normalise(text, read, List.of());
+        return read;
     }
 
     private static void refuseStrangeBonds(IAtomContainer read) throws MoleculeException {

@@ -14,7 +14,7 @@ import org.openscience.cdk.smiles.SmilesGenerator;
 import uk.ac.ebi.beam.Functions;
 import uk.ac.ebi.beam.Graph;
 
-/** The two SMILES a molecule is written as. */
+/** The SMILES a molecule is written as. */
 final class SmilesWriter {
 
     private SmilesWriter() {}
@@ -34,6 +34,11 @@ final class SmilesWriter {
     static String full(IAtomContainer molecule) {
         String smiles = write(inCanonicalOrder(molecule), SmiFlavor.UseAromaticSymbols | SmiFlavor.Stereo | SmiFlavor.AtomicMass);
         return smiles.contains("\\") || smiles.contains("/") ? withOneChoiceOfSlashes(smiles) : smiles;
+    }
+
+    /** SMILES with configuration, isotopes and atom map, as drawn. */
+    static String mapped(IAtomContainer molecule) {
+        return write(molecule, SmiFlavor.Isomeric | SmiFlavor.AtomAtomMap);
     }
 
     /** {@code C/C=C/C} and {@code C\C=C\C} say the same. */

@@ -16,9 +16,10 @@ final class DrawnSite {
     /**
      * The site in the numbering of the row's substrate.
      *
-     * @param substrate null where it could not be read
+     * @param substrate   null where it could not be read
+     * @param protonation whether the row is to be read as one
      */
-    static Optional<SiteOrigin> of(SheetRow row, Optional<Reaction> reaction, Molecule substrate, List<Problem> problems) {
+    static Optional<SiteOrigin> of(Optional<Reaction> reaction, Molecule substrate, boolean protonation, List<Problem> problems) {
         if (reaction.isEmpty() || substrate == null) {
             return Optional.empty();
         }
@@ -29,9 +30,9 @@ final class DrawnSite {
             return Optional.empty();
         }
         SiteOrigin origin = here.get().origin();
-        if (origin.arrives()) {
+        if (origin.arrives() && !protonation) {
             problems.add(new Problem(SheetColumn.REACTION, "a proton arrives at " + origin.site().orElse("the substrate")
-                    + here.get().acid().map(acid -> " (from " + acid.name() + ")").orElse("") + ": this is a protonation, and no base takes a proton in it"));
+                    + here.get().acid().map(acid -> " (from " + acid.name() + ")").orElse("") + ": this is a protonation; 'lyate check --reaction' judges it"));
         }
         return Optional.of(origin);
     }

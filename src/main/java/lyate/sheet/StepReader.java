@@ -10,11 +10,13 @@ import java.util.stream.IntStream;
 import lyate.molecule.Molecule;
 import lyate.molecule.MoleculeException;
 import lyate.molecule.MoleculeReader;
+import lyate.review.AcidStep;
 import lyate.review.SiteOrigin;
 import lyate.review.Step;
 import lyate.sheet.RowException.Problem;
 import lyate.sheet.reaction.Reaction;
 import lyate.sheet.reaction.ReactionReader;
+import lyate.stock.Acid;
 import lyate.stock.Base;
 import lyate.stock.Solvent;
 import lyate.stock.Stockroom;
@@ -50,15 +52,42 @@ public final class StepReader {
      * @throws RowException naming every column at fault
      */
     public Step read(SheetRow row) throws RowException {
+        return read(row, false);
+    }
+
+    /**
+     * Reads a row whose base an acid takes the place of; its reaction, if there is one, may be a protonation.
+     *
+     * @param acid empty: the one that is drawn
+     * @throws RowException naming every column at fault
+     */
+    public AcidStep read(SheetRow row, Optional<Acid> acid) throws RowException {
+        Optional<Acid> meant = acid.or(() -> drawn(row).flatMap(Reaction::acid));
+        if (meant.isEmpty()) {
+            throw new RowException(List.of(new Problem(SheetColumn.REACTION, "a proton arrives, but no acid of the tables is drawn: name it")));
+        }
+        return AcidStep.of(read(row, true), meant.get());
+    }
+
+    /** Whether the row's reaction is a protonation. */
+    public boolean isProtonation(SheetRow row) {
+        return drawn(row).filter(reaction -> reaction.origin().arrives()).isPresent();
+    }
+
+    private Optional<Reaction> drawn(SheetRow row) {
+        return reaction(row, new ArrayList<>());
+    }
+
+    private Step read(SheetRow row, boolean protonation) throws RowException {
         if (!row.problem().isEmpty()) {
             throw new RowException(List.of(new Problem("", row.problem())));
         }
         List<Problem> problems = new ArrayList<>();
         Optional<Reaction> reaction = reaction(row, problems);
         Molecule substrate = substrate(row, reaction, problems);
-        Base base = base(row, reaction, problems);
+        Base base = protonation ? stockroom.bases().get(0) : base(row, reaction, problems);
         Solvent solvent = solvent(row, reaction, problems);
-        Optional<SiteOrigin> origin = DrawnSite.of(row, reaction, substrate, problems);
+        Optional<SiteOrigin> origin = DrawnSite.of(reaction, substrate, protonation, problems);
         Optional<String> site = site(row, substrate, problems).or(() -> origin.flatMap(SiteOrigin::site));
         double equivalents = number(row, SheetColumn.BASE_EQUIV, Quantity.EQUIVALENTS, USUAL_EQUIVALENTS, problems);
         double temperature = number(row, SheetColumn.TEMPERATURE, Quantity.TEMPERATURE, USUAL_TEMPERATURE, problems);

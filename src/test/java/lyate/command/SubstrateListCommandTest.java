@@ -82,7 +82,7 @@ class SubstrateListCommandTest {
     @CsvSource(delimiter = '|', value = {
         "list.smi|--base LDA|a .smi or .sdf file needs --base and --solvent",
         "list.smi|--solvent THF|a .smi or .sdf file needs --base and --solvent",
-        "list.csv|--solvent THF|conditions as options go with .smi and .sdf files; a sheet has them in its cells",
+        "list.csv|--solvent THF|conditions as options go with .smi, .sdf, .rxn and .rdf files; a sheet has them in its cells",
         "list.csv|--resume|--resume: expected -o with a name that ends in .csv",
         "list.csv|--resume -o x.json|--resume: expected -o with a name that ends in .csv",
         "list.csv|--resume -o x.csv --report x.html|--resume: a report needs every step; make it in a run of its own",

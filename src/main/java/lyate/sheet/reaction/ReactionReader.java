@@ -3,6 +3,7 @@ package lyate.sheet.reaction;
 import java.util.Optional;
 import lyate.molecule.MoleculeException;
 import lyate.molecule.MoleculeReader;
+import lyate.molecule.ReactionFile;
 import lyate.molecule.ReactionPart;
 import lyate.stock.Stockroom;
 
@@ -21,12 +22,14 @@ public final class ReactionReader {
     }
 
     /**
-     * Reads reaction SMILES, {@code reactants>agents>products}; agents may be given by name.
+     * Reads reaction SMILES, {@code reactants>agents>products}, or the text of an RXN file, or the first reaction of an RD
+     * file. Agents may be given by name.
      *
      * @throws MoleculeException where it is not a reaction, a component cannot be read, or no reactant can be the substrate
      */
     public Reaction read(String text) throws MoleculeException {
-        DrawnReaction drawn = DrawnReaction.of(text, molecules, shelf);
+        String smiles = ReactionFile.looksLike(text) ? ReactionFile.firstSmiles(text) : text;
+        DrawnReaction drawn = DrawnReaction.of(smiles, molecules, shelf);
         if (drawn.left().isEmpty()) {
             throw new MoleculeException("the reaction has no reactant");
         }
