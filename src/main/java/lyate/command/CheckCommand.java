@@ -15,7 +15,6 @@ import lyate.report.ResultWriter;
 import lyate.report.ReviewJson;
 import lyate.report.ReviewText;
 import lyate.report.SheetCsv;
-import lyate.review.AcidStep;
 import lyate.review.DoseResponse;
 import lyate.review.Protonation;
 import lyate.review.ProtonationReviewer;
@@ -31,7 +30,6 @@ import lyate.stock.Acid;
 import lyate.stock.Stockroom;
 import lyate.stock.UnknownNameException;
 import lyate.table.TableFolders;
-import picocli.CommandLine.ArgGroup;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Model.CommandSpec;
@@ -42,29 +40,17 @@ import picocli.CommandLine.Spec;
 /** {@code lyate check}. */
 @Command(name = "check", mixinStandardHelpOptions = true, sortOptions = false, description = {
     "Says what becomes of one deprotonation: which proton goes, how far, and what else the base does.",
-    "With an acid in place of the base: whether it makes a salt of a basic site.", ""})
+    "With an acid in place of the base: whether it makes a salt of a basic site.",
+    "From a reaction the site is worked out, and how sure that is is said beside it.", ""})
 final class CheckCommand implements Callable<Integer> {
 
     private final Terminal terminal;
-
-    @ArgGroup(exclusive = true, multiplicity = "1")
-    private Reagent reagent;
-
-    /** A base for a deprotonation or an acid for a protonation. */
-    private static final class Reagent {
-
-        @Option(names = "--base", paramLabel = "B", description = "By name or abbreviation, for example LDA.")
-        private String base;
-
-        @Option(names = "--acid", paramLabel = "A", description = "In place of a base: judges how far this acid protonates a basic site.")
-        private String acid;
-    }
 
     @Spec
     private CommandSpec spec;
 
     @Mixin
-    private StepOptions step;
+    private CheckInput input;
 
     @Option(names = "--format", paramLabel = "FORMAT", defaultValue = "text", converter = CheckFormat.Converter.class,
             description = "text, json, csv or html (default: text).")
@@ -81,12 +67,14 @@ final class CheckCommand implements Callable<Integer> {
     public Integer call() throws IOException {
         TableFolders folders = tables.folders();
         Stockroom stockroom = Stockroom.load(folders);
+        StepReader steps = new StepReader(MoleculeReader.load(folders), stockroom);
+        SheetRow row = input.row();
         try {
             Optional<Acid> acid = acid(stockroom);
-            if (acid.isPresent()) {
-                protonation(folders, stockroom, acid.get());
+            if (acid.isPresent() || input.base().isEmpty() && steps.isProtonation(row)) {
+                protonation(row, ProtonationReviewer.load(folders, stockroom).review(steps.read(row, acid)));
             } else {
-                deprotonation(folders, stockroom);
+                deprotonation(row, steps.read(row), StepReviewer.load(folders, stockroom), folders);
             }
             return 0;
         } catch (RowException e) {
@@ -99,26 +87,21 @@ final class CheckCommand implements Callable<Integer> {
         return Failures.SOME_INPUT_NOT_USED;
     }
 
-    /** The acid meant; also where an acid was named as the base and no base goes by that name. */
+    /** The acid named; also where an acid was named as the base and no base goes by that name. */
     private Optional<Acid> acid(Stockroom stockroom) throws UnknownNameException {
-        return reagent.acid != null ? Optional.of(stockroom.acid(reagent.acid)) : stockroom.acidNamedAsBase(reagent.base);
+        return input.acid() != null ? Optional.of(stockroom.acid(input.acid())) : stockroom.acidNamedAsBase(input.base());
     }
 
-    private void deprotonation(TableFolders folders, Stockroom stockroom) throws IOException, RowException, ReviewException {
-        SheetRow row = step.row(reagent.base);
-        StepReviewer reviewer = StepReviewer.load(folders, stockroom);
-        Review review = reviewer.review(new StepReader(MoleculeReader.load(folders), stockroom).read(row));
+    private void deprotonation(SheetRow row, Step read, StepReviewer reviewer, TableFolders folders) throws IOException, ReviewException {
+        Review review = reviewer.review(read);
         String title = review.step().base().name() + " in " + review.step().solvent().name();
         write(row, review, reviewer.doseResponse(review.step()), () -> ReportContext.of(title, ProgramVersion.text(), folders, reviewer));
     }
 
-    private void protonation(TableFolders folders, Stockroom stockroom, Acid acid) throws IOException, RowException, ReviewException {
-        // Both kinds of step are read by the same rules; the base is a placeholder that the acid takes the place of.
-        Step read = new StepReader(MoleculeReader.load(folders), stockroom).read(step.row(stockroom.bases().get(0).name()));
-        Protonation protonation = ProtonationReviewer.load(folders, stockroom).review(AcidStep.of(read, acid));
+    private void protonation(SheetRow row, Protonation protonation) throws IOException {
         switch (format) {
             case TEXT -> new ProtonationText(terminal.outWriter()).write(protonation);
-            case CSV -> new SheetCsv(terminal.outWriter(), step.row(acid.name()).header()).begin().write(step.row(acid.name()), protonation);
+            case CSV -> new SheetCsv(terminal.outWriter(), row.header()).begin().write(row, protonation);
             case JSON -> {
                 ResultWriter<Protonation> json = new JsonList<>(terminal.outWriter(), ProtonationJson::describe);
                 json.write(protonation);

@@ -16,7 +16,7 @@ import picocli.CommandLine.Option;
 final class StepOptions {
 
     private static final List<String> NAMES = List.of("--substrate", "--site", "--base", "--equiv", "--solvent", "--temperature",
-            "--concentration", "--water-ppm", "--electrophile");
+            "--concentration", "--water-ppm", "--electrophile", "--reaction");
 
     @Option(names = "--substrate", required = true, paramLabel = "X", description = "SMILES, InChI or systematic name.")
     private String substrate;
