@@ -105,6 +105,15 @@ public final class WorkbenchFrame extends JFrame {
         return bench != null && bench.shown().isPresent();
     }
 
+    /** What opens and saves its sheet. */
+    SheetFiles files() {
+        return files;
+    }
+
+    Theme theme() {
+        return theme;
+    }
+
     /** What the window shows. */
     Workbench bench() {
         return bench;
