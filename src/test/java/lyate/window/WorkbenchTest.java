@@ -10,6 +10,7 @@ import java.awt.Container;
 import java.awt.GraphicsEnvironment;
 import java.awt.event.MouseEvent;
 import java.awt.geom.Rectangle2D;
+import java.awt.image.BufferedImage;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.ArrayList;
@@ -18,6 +19,8 @@ import java.util.Optional;
 import java.util.concurrent.Callable;
 import java.util.concurrent.FutureTask;
 import java.util.function.Predicate;
+import java.util.stream.IntStream;
+import javax.imageio.ImageIO;
 import javax.swing.AbstractButton;
 import javax.swing.JComboBox;
 import javax.swing.JFrame;
@@ -28,6 +31,8 @@ import javax.swing.SwingUtilities;
 import javax.swing.text.JTextComponent;
 import lyate.review.Verdict;
 import lyate.sheet.RouteSheet;
+import org.apache.pdfbox.Loader;
+import org.apache.pdfbox.pdmodel.PDDocument;
 import org.junit.jupiter.api.AfterEach;
 import org.junit.jupiter.api.BeforeEach;
 import org.junit.jupiter.api.Test;
@@ -139,6 +144,44 @@ class WorkbenchTest {
         });
         waitFor(bench -> bench.shown().orElseThrow().review().step().equivalents() == 2.0);
         assertEquals("2", onEventThread(() -> bench.strip().box(StepField.EQUIVALENTS).text()));
+    }
+
+    @Test
+    void everyPictureIsSavedAsPngSvgAndPdf(@TempDir Path folder) throws Exception {
+        waitFor(bench -> bench.picture(WindowMenu.Drawn.SUBSTRATE).isPresent() && bench.picture(WindowMenu.Drawn.LADDER).isPresent());
+        for (WindowMenu.Drawn what : List.of(WindowMenu.Drawn.SUBSTRATE, WindowMenu.Drawn.LADDER)) {
+            saveInEveryKind(what, folder.resolve(what.name()));
+        }
+        for (LazyTab tab : List.of(bench.drawer().dose(), bench.drawer().workUp())) {
+            onEventThread(() -> {
+                bench.drawer().setSelectedComponent(tab);
+                return null;
+            });
+            waitFor(bench -> bench.isSettled() && bench.picture(WindowMenu.Drawn.CHART).isPresent());
+            saveInEveryKind(WindowMenu.Drawn.CHART, folder.resolve(tab.getAccessibleContext().getAccessibleName()));
+        }
+    }
+
+    private void saveInEveryKind(WindowMenu.Drawn what, Path name) throws Exception {
+        Picture picture = onEventThread(() -> bench.picture(what).orElseThrow());
+        Path png = name.resolveSibling(name.getFileName() + ".png");
+        Path svg = name.resolveSibling(name.getFileName() + ".svg");
+        Path pdf = name.resolveSibling(name.getFileName() + ".pdf");
+        onEventThread(() -> {
+            Pictures.save(picture, png);
+            Pictures.save(picture, svg);
+            Pictures.save(picture, pdf);
+            return null;
+        });
+        BufferedImage image = ImageIO.read(png.toFile());
+        int ground = picture.ground().getRGB();
+        long drawn = IntStream.range(0, image.getWidth() * image.getHeight())
+                .filter(i -> image.getRGB(i % image.getWidth(), i / image.getWidth()) != ground).count();
+        assertTrue(drawn > 1000, what + " is drawn on the picture");
+        assertTrue(Files.readString(svg).split("<path").length > 10, what + " is drawn as paths");
+        try (PDDocument document = Loader.loadPDF(pdf.toFile())) {
+            assertEquals(picture.size().width, document.getPage(0).getMediaBox().getWidth(), 0.5);
+        }
     }
 
     @Test
