@@ -101,12 +101,12 @@ public record Amounts(Batch batch, double solventMilliLitre, double waterMilliMo
         double onWater = spending.stream().filter(spent -> spent.what().equals("water")).mapToDouble(Spent::milliMole).sum();
         double spareWhenDry = excess() + onWater;
         if (onWater > NOTABLE_WATER * batch.milliMole() && onWater > Math.abs(spareWhenDry)) {
-            found.add(say("The water in the solvent takes %.3g mmol of base, more than the %.3g mmol by which the base"
-                    + " differs from what the protons need: drying matters more than the stoichiometry.", onWater,
-                    Math.abs(spareWhenDry)));
+            found.add(say("The water in the solvent takes %s mmol of base, more than the %s mmol by which the base"
+                    + " differs from what the protons need: drying matters more than the stoichiometry.", Figures.of(onWater),
+                    Figures.of(Math.abs(spareWhenDry))));
         }
-        if (excess() < 0) {
-            found.add(say("The base is %.3g mmol short of what it meets up to and including the intended site.", -excess()));
+        if (Figures.notable(-excess(), protonsTakenUp)) {
+            found.add(say("The base is %s mmol short of what it meets up to and including the intended site.", Figures.of(-excess())));
         }
         if (base.milliLitre().isEmpty() && !step.base().form().equals("solid") && !step.base().form().equals("dispersion")) {
             found.add("No density in the table for " + step.base().name() + " as supplied: measure it by mass.");

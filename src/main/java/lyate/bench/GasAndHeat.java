@@ -9,6 +9,8 @@ import java.util.stream.Collectors;
 import lyate.review.BaseHazards;
 import lyate.review.Review;
 import lyate.review.Step;
+import lyate.stock.Base;
+import lyate.stock.Medium;
 import lyate.stock.Solvent;
 
 /**
@@ -48,13 +50,33 @@ public record GasAndHeat(Optional<GivenOffGas> gas, List<HeatShare> heat, List<S
     public static GasAndHeat of(Review review, Amounts amounts, Enthalpies enthalpies, double ventCelsius, double kiloPascal) {
         Step step = review.step();
         HeatOfStep donors = HeatOfStep.of(review, amounts, enthalpies);
-        Optional<GivenOffGas> gas = step.base().gas().isEmpty() ? Optional.empty()
-                : Optional.of(new GivenOffGas(step.base().gas(), donors.milliMoleTaken(),
-                        Math.max(0, amounts.protonsTakenUp() - donors.milliMoleTaken()), ventCelsius, kiloPascal));
+        Optional<GivenOffGas> gas = gas(review, amounts, donors).map(milliMole -> new GivenOffGas(step.base().gas(), milliMole,
+                Math.max(0, all(step.base(), amounts) - milliMole), ventCelsius, kiloPascal));
         OptionalDouble rise = rise(step.solvent(), amounts, donors);
         OptionalDouble highest = rise.isPresent() ? OptionalDouble.of(step.temperatureCelsius() + rise.getAsDouble()) : rise;
         return new GasAndHeat(gas, donors.known(), donors.unknown(), rise, highest,
                 cautions(step, gas, donors, rise, highest));
+    }
+
+    /**
+     * Gas given off in the step, mmol. Where only the last of several stages gives it, as with carbonate, protons acidic enough
+     * for that stage are taken to use whole molecules of the solid one after the other: rather too much than too little.
+     */
+    private static Optional<Double> gas(Review review, Amounts amounts, HeatOfStep donors) {
+        Base base = review.step().base();
+        if (base.gas().isEmpty() || base.furtherStages().isEmpty()) {
+            return base.gas().isEmpty() ? Optional.empty() : Optional.of(donors.milliMoleTaken());
+        }
+        int stages = base.furtherStages().size();
+        double reach = base.pKa(Medium.WATER).map(first -> first.pKa() - base.furtherStages().get(stages - 1).pKa()).orElse(0.0);
+        double protons = review.transfers().stream().filter(transfer -> !transfer.atoms().isEmpty() && transfer.logK() >= reach)
+                .mapToDouble(transfer -> amounts.batch().milliMole() * Amounts.protons(review.step(), transfer)).sum();
+        return Optional.of(Math.min(amounts.base().milliMole(), protons / (stages + 1)));
+    }
+
+    /** Gas that all of the base can give off, mmol. */
+    static double all(Base base, Amounts amounts) {
+        return base.furtherStages().isEmpty() ? amounts.protonsTakenUp() : amounts.base().milliMole();
     }
 
     /** Heat of all donors together, kJ; empty where one is not known. */
@@ -75,7 +97,7 @@ public record GasAndHeat(Optional<GivenOffGas> gas, List<HeatShare> heat, List<S
     private static List<String> cautions(Step step, Optional<GivenOffGas> gas, HeatOfStep donors, OptionalDouble rise,
                                          OptionalDouble highest) {
         List<String> said = new ArrayList<>();
-        gas.ifPresent(given -> said.add(gasLine(given)));
+        gas.ifPresent(given -> said.add(gasLine(given, step.base().furtherStages().isEmpty() ? "" : "up to ")));
         if (!donors.unknown().isEmpty()) {
             said.add(say("No heat is known for %s with %s: treat the addition as strongly exothermic.", step.base().name(),
                     String.join(", ", donors.unknown())));
@@ -91,8 +113,9 @@ public record GasAndHeat(Optional<GivenOffGas> gas, List<HeatShare> heat, List<S
             said.add(say("That reaches the boiling point of %s (%.0f degrees C): add slowly, with cooling and room to vent.",
                     step.solvent().name(), step.solvent().boilingPoint()));
         }
-        String estimated = donors.known().stream().filter(share -> !share.tabulated()).map(HeatShare::donor)
-                .collect(Collectors.joining(", "));
+        double all = donors.milliMoleTaken();
+        String estimated = donors.known().stream().filter(share -> !share.tabulated() && Figures.notable(share.milliMole(), all))
+                .map(HeatShare::donor).collect(Collectors.joining(", "));
         if (!estimated.isEmpty()) {
             said.add("The heat of " + estimated + " is an estimate, not calorimetry.");
         }
@@ -101,10 +124,16 @@ public record GasAndHeat(Optional<GivenOffGas> gas, List<HeatShare> heat, List<S
         return said;
     }
 
-    private static String gasLine(GivenOffGas gas) {
-        String later = gas.litresAtQuench() < WORTH_SAYING ? "" : say(" and up to %.3g L more when the rest is destroyed", gas.litresAtQuench());
-        return say("Gives off %.3g L of %s (%.0f degrees C, %.1f kPa) as the base reacts%s: keep the vessel vented, let the rate of"
-                + " addition set the rate of the gas, and lead it away.", gas.litresInStep(), gas.name(), gas.celsius(), gas.kiloPascal(), later);
+    private static String gasLine(GivenOffGas gas, String atMost) {
+        double all = gas.litresInStep() + gas.litresAtQuench();
+        String counted = say("(%.0f degrees C, %.1f kPa)", gas.celsius(), gas.kiloPascal());
+        String inStep = Figures.notable(gas.litresInStep(), all)
+                ? say("Gives off %s%s L of %s %s as the base reacts", atMost, Figures.of(gas.litresInStep()), gas.name(), counted)
+                : say("Gives off no %s to speak of as the base reacts", gas.name());
+        String atQuench = Figures.notable(gas.litresAtQuench(), all)
+                ? say(" and up to %s L%s when the rest is destroyed", Figures.of(gas.litresAtQuench()),
+                        Figures.notable(gas.litresInStep(), all) ? " more" : " " + counted) : "";
+        return inStep + atQuench + ": keep the vessel vented, let the rate of addition set the rate of the gas, and lead it away.";
     }
 
     private static String say(String format, Object... values) {

@@ -34,15 +34,17 @@ final class HeatOfStep {
     private final Enthalpies enthalpies;
     private final List<HeatShare> known = new ArrayList<>();
     private final List<String> unknown = new ArrayList<>();
+    private final double offered;
     private double taken;
 
-    private HeatOfStep(Review review, Enthalpies enthalpies) {
+    private HeatOfStep(Review review, Amounts amounts, Enthalpies enthalpies) {
         this.review = review;
+        this.offered = amounts.protonsTakenUp();
         this.enthalpies = enthalpies;
     }
 
     static HeatOfStep of(Review review, Amounts amounts, Enthalpies enthalpies) {
-        HeatOfStep heat = new HeatOfStep(review, enthalpies);
+        HeatOfStep heat = new HeatOfStep(review, amounts, enthalpies);
         if (review.findings().stream().anyMatch(finding -> finding.kind() == FindingKind.LEVELLED)) {
             heat.addSolvent(amounts.protonsTakenUp());
         } else {
@@ -86,8 +88,8 @@ final class HeatOfStep {
         }
     }
 
-    private void addDonor(String donor, double offered, Amounts amounts) {
-        double given = Math.min(amounts.protonsTakenUp() - taken, offered);
+    private void addDonor(String donor, double protons, Amounts amounts) {
+        double given = Math.min(amounts.protonsTakenUp() - taken, protons);
         taken += given;
         add(donor, given, donor.equals("water") ? withWater(review.step().base()) : withSite(donor));
     }
@@ -129,7 +131,8 @@ final class HeatOfStep {
     }
 
     private void add(String donor, double milliMole, Optional<HeatShare> heat) {
-        if (milliMole <= 0) {
+        // A trace neither adds to the heat nor, where nothing is known about it, hides the heat of the rest.
+        if (!Figures.notable(milliMole, offered)) {
             return;
         }
         heat.ifPresentOrElse(share -> known.add(new HeatShare(donor, milliMole, share.kiloJoulePerMole(), share.tabulated(),

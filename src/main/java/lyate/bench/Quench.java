@@ -20,11 +20,12 @@ import lyate.stock.Base;
  * and a tenth of that for every unit towards neutral.
  *
  * @param pH        where it is to end
- * @param acid      acid needed, as supplied
+ * @param acidName  which acid
+ * @param acid      how much of it, as supplied
  * @param heat      heat of neutralising all the base from the start, where tabulated: what a neglected quench could give
  * @param sentences what the user should know, the standing line last
  */
-public record Quench(double pH, Portion acid, Optional<HeatShare> heat, List<String> sentences) {
+public record Quench(double pH, String acidName, Portion acid, Optional<HeatShare> heat, List<String> sentences) {
 
     /** Below this share of its protons an acid gives off at the pH, it is the wrong acid for it. */
     private static final double LEAST_GIVEN = 0.5;
@@ -52,7 +53,7 @@ public record Quench(double pH, Portion acid, Optional<HeatShare> heat, List<Str
         double wanted = contents.stream().mapToDouble(holder -> protonsWanted(holder, pH)).sum();
         Portion portion = Portion.of(acid, Math.max(0, wanted) / given(acid, pH));
         Optional<HeatShare> heat = heat(step.base(), amounts, enthalpies);
-        return new Quench(pH, portion, heat, sentences(step.base(), amounts, pH, wanted, heat, enthalpies));
+        return new Quench(pH, acid.name(), portion, heat, sentences(step.base(), amounts, pH, wanted, heat, enthalpies));
     }
 
     /** Protons a holder takes up on its way to the pH; negative where it gives some. */
@@ -83,14 +84,14 @@ public record Quench(double pH, Portion acid, Optional<HeatShare> heat, List<Str
             said.add(say("Nothing has to be neutralised: the mixture is at or below pH %.1f.", pH));
         }
         heat.ifPresentOrElse(share -> said.add(share.kiloJoule() > 0
-                        ? say("If none of the base had reacted before, its neutralisation would give off %.3g kJ: add the acid"
-                                + " slowly to the cold mixture.", share.kiloJoule())
+                        ? say("If none of the base had reacted before, its neutralisation would give off %s kJ: add the acid"
+                                + " slowly to the cold mixture.", Figures.of(share.kiloJoule()))
                         : "The neutralisation itself takes up heat; mixing and dissolving the acid may give some off."),
                 () -> said.add(say("No heat of neutralisation in the tables for %s: treat the quench as strongly exothermic.",
                         base.name())));
-        gases(base, amounts, enthalpies).forEach((gas, milliMole) -> said.add(say("Acid sets free %s, up to %.3g mmol"
-                + " (%.3g L at 25 degrees C): add it slowly and keep the vessel vented.", gas, milliMole,
-                new GivenOffGas(gas, milliMole, 0, 25, 101.325).litresInStep())));
+        gases(base, amounts, enthalpies).forEach((gas, milliMole) -> said.add(say("Acid sets free %s, up to %s mmol"
+                + " (%s L at 25 degrees C): add it slowly and keep the vessel vented.", gas, Figures.of(milliMole),
+                Figures.of(new GivenOffGas(gas, milliMole, 0, 25, 101.325).litresInStep()))));
         said.add(BaseHazards.STANDING_LINE);
         return said;
     }
@@ -101,7 +102,7 @@ public record Quench(double pH, Portion acid, Optional<HeatShare> heat, List<Str
         enthalpies.of(base, Donor.ACID).ifPresent(known -> known.gases().forEach((gas, count) ->
                 gases.put(gas, count * amounts.base().milliMole())));
         if (gases.isEmpty() && !base.gas().isEmpty()) {
-            gases.put(base.gas(), amounts.protonsTakenUp());
+            gases.put(base.gas(), GasAndHeat.all(base, amounts));
         }
         return gases;
     }

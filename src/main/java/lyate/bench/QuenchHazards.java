@@ -8,12 +8,14 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
 import java.util.Optional;
-import java.util.OptionalDouble;
 import java.util.stream.IntStream;
 import lyate.molecule.AtomPattern;
 import lyate.molecule.Molecule;
 import lyate.molecule.MoleculeException;
+import lyate.review.Finding;
 import lyate.review.Finding.Severity;
+import lyate.review.SideReactions;
+import lyate.stock.Stockroom;
 import lyate.table.Row;
 import lyate.table.Schema;
 import lyate.table.Table;
@@ -22,42 +24,43 @@ import lyate.table.TableFolders;
 import lyate.table.TableProblem;
 
 /**
- * Groups hurt by acid or base in a work-up: the rows of {@code quench-hazards.csv}. Loaded once; immutable; safe to share
+ * Groups hurt by the water of a work-up: by base the rows of {@code quench-hazards.csv}, by acid those of
+ * {@code side-reactions.csv} about acid, with the pH in place of the acid's pKa. Loaded once; immutable; safe to share
  * between threads.
  */
 public final class QuenchHazards {
 
-    static final Schema SCHEMA = Schema.of("quench-hazards.csv", text("id"), text("group"), text("smarts"),
-            number("below_ph").optional(), number("above_ph").optional(), word("severity", "stop", "caution", "note"),
-            text("sentence"), text("source"), text("hit"), text("miss"));
+    static final Schema SCHEMA = Schema.of("quench-hazards.csv", text("id"), text("group"), text("smarts"), number("above_ph"),
+            word("severity", "stop", "caution", "note"), text("sentence"), text("source"), text("hit"), text("miss"));
+
+    private static final double ROOM_CELSIUS = 25;
 
     /** One row. */
-    record Rule(String id, String group, AtomPattern pattern, double pH, boolean acid, Severity severity, String sentence,
-                String source, String hit, String miss) {
+    record Rule(String id, AtomPattern pattern, double abovePH, Severity severity, String sentence, String source, String hit,
+                String miss) {
 
-        Optional<GroupHazard> in(Molecule molecule, double lowestPH, double highestPH) {
-            if (acid ? lowestPH >= pH : highestPH <= pH) {
-                return Optional.empty();
-            }
-            List<Integer> atoms = IntStream.range(0, molecule.atomCount())
+        Optional<GroupHazard> in(Molecule molecule, double highestPH) {
+            List<Integer> atoms = highestPH <= abovePH ? List.of() : IntStream.range(0, molecule.atomCount())
                     .filter(atom -> pattern.matches(molecule, atom)).boxed().toList();
-            return atoms.isEmpty() ? Optional.empty()
-                    : Optional.of(new GroupHazard(group, atoms, pH, acid, severity, sentence, source));
+            return atoms.isEmpty() ? Optional.empty() : Optional.of(new GroupHazard(atoms, false, severity, sentence, source));
         }
     }
 
     private final List<Rule> rules;
+    private final SideReactions underAcid;
 
-    private QuenchHazards(List<Rule> rules) {
+    private QuenchHazards(List<Rule> rules, SideReactions underAcid) {
         this.rules = List.copyOf(rules);
+        this.underAcid = underAcid;
     }
 
     /**
      * Loads the rules.
      *
+     * @param stockroom shelf whose bases and solvents the side reactions name
      * @throws TableException for a bad cell
      */
-    public static QuenchHazards load(TableFolders folders) {
+    public static QuenchHazards load(TableFolders folders, Stockroom stockroom) {
         List<TableProblem> problems = new ArrayList<>();
         List<Rule> rules = new ArrayList<>();
         for (Row row : Table.read(SCHEMA, folders).rows()) {
@@ -66,12 +69,17 @@ public final class QuenchHazards {
         if (!problems.isEmpty()) {
             throw new TableException(problems);
         }
-        return new QuenchHazards(rules);
+        return new QuenchHazards(rules, SideReactions.load(folders, stockroom));
     }
 
-    /** Groups of the molecule that water between two pH values would hurt, in the order of the table. */
+    /** Groups of the molecule that water between two pH values would hurt: by acid first, then by base. */
     public List<GroupHazard> of(Molecule molecule, double lowestPH, double highestPH) {
-        return rules.stream().flatMap(rule -> rule.in(molecule, lowestPH, highestPH).stream()).toList();
+        List<GroupHazard> hazards = new ArrayList<>();
+        for (Finding finding : underAcid.underAcid(molecule, lowestPH, ROOM_CELSIUS)) {
+            hazards.add(new GroupHazard(finding.atoms(), true, finding.severity(), finding.sentence(), finding.source()));
+        }
+        rules.forEach(rule -> rule.in(molecule, highestPH).ifPresent(hazards::add));
+        return hazards;
     }
 
     List<Rule> rules() {
@@ -79,17 +87,12 @@ public final class QuenchHazards {
     }
 
     private static Optional<Rule> rule(Row row, List<TableProblem> problems) {
-        OptionalDouble below = row.number("below_ph");
-        OptionalDouble above = row.number("above_ph");
-        if (below.isPresent() == above.isPresent()) {
-            problems.add(row.problem("below_ph", "a pH either here or in above_ph"));
-            return Optional.empty();
-        }
         try {
-            return Optional.of(new Rule(row.id(), row.text("group"), AtomPattern.compile(row.text("smarts")),
-                    below.orElseGet(above::getAsDouble), below.isPresent(),
-                    Severity.valueOf(row.text("severity").toUpperCase(Locale.ROOT)), row.text("sentence"), row.text("source"),
-                    row.text("hit"), row.text("miss")));
+            double abovePH = row.number("above_ph").getAsDouble();
+            String where = abovePH > 0 ? String.format(Locale.ROOT, " above pH %s", Double.toString(abovePH).replaceAll("\\.0$", "")) : "";
+            return Optional.of(new Rule(row.id(), AtomPattern.compile(row.text("smarts")), abovePH,
+                    Severity.valueOf(row.text("severity").toUpperCase(Locale.ROOT)),
+                    "The " + row.text("group") + " " + row.text("sentence") + where + ".", row.text("source"), row.text("hit"), row.text("miss")));
         } catch (MoleculeException e) {
             problems.add(row.problem("smarts", "a SMARTS pattern: " + e.getMessage()));
             return Optional.empty();

@@ -32,7 +32,7 @@ final class TablesCommand implements Callable<Integer> {
 
     /** Together they read every table once. */
     private static final List<Consumer<TableFolders>> READERS = List.of(StepReviewer::load, MoleculeReader::load,
-            Enthalpies::load, QuenchHazards::load, folders -> AcidHazards.load(folders, Stockroom.load(folders)));
+            Enthalpies::load, folders -> QuenchHazards.load(folders, Stockroom.load(folders)), folders -> AcidHazards.load(folders, Stockroom.load(folders)));
 
     private final Terminal terminal;
 

@@ -24,7 +24,8 @@ import java.util.OptionalDouble;
  * @param strength           strength of that stock as a number, where it is not the pure substance
  * @param molarMass          g/mol of the formula given
  * @param density            g/mL of the liquid or the stock solution at 20 to 25 degrees C
- * @param gas                gas given off as its first stage is protonated, for example {@code hydrogen}; empty for none
+ * @param gas                gas given off as its last stage, for most the only one, is protonated: {@code hydrogen} from a
+ *                           hydride, {@code carbon dioxide} from a carbonate; empty for none
  * @param highestTemperatures degrees C up to which it is usually kept, by solvent id
  * @param notes              remarks for the user
  * @param source             citation for form, stock and density; each pKa has its own

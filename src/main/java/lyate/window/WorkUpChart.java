@@ -8,6 +8,7 @@ import java.util.function.DoubleUnaryOperator;
 import lyate.bench.AqueousForm;
 import lyate.bench.ExtractionWindow;
 import lyate.bench.WorkUp.Parting;
+import lyate.bench.WorkUpKit;
 import org.jfree.chart.ChartFactory;
 import org.jfree.chart.JFreeChart;
 import org.jfree.chart.axis.NumberAxis;

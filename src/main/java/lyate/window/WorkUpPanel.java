@@ -3,7 +3,6 @@ package lyate.window;
 import java.awt.BorderLayout;
 import java.awt.Dimension;
 import java.awt.FlowLayout;
-import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
@@ -18,17 +17,15 @@ import javax.swing.JTextField;
 import javax.swing.event.DocumentEvent;
 import javax.swing.event.DocumentListener;
 import lyate.bench.Amounts;
-import lyate.bench.GroupHazard;
-import lyate.bench.Quench;
-import lyate.bench.WorkUp.Parting;
+import lyate.bench.WorkUpKit;
+import lyate.bench.WorkUpKit.Answer;
+import lyate.bench.WorkUpKit.Plan;
 import lyate.molecule.Molecule;
 import lyate.molecule.MoleculeException;
-import lyate.report.Words;
+import lyate.report.WorkUpWords;
 import lyate.sheet.Quantity;
 import lyate.stock.Acid;
 import lyate.stock.Medium;
-import lyate.window.WorkUpKit.Answer;
-import lyate.window.WorkUpKit.Plan;
 import org.jfree.chart.ChartPanel;
 
 /** How to quench the step, and at which pH to extract. */
@@ -124,7 +121,7 @@ final class WorkUpPanel extends LazyTab {
         Optional<Plan> plan = plan(wanted);
         plan.ifPresent(known -> start("working out the quench \u2026", goOn -> {
             if (kit == null) {
-                kit = WorkUpKit.load(engine);
+                kit = WorkUpKit.load(engine.folders(), engine.stockroom(), engine.enthalpies());
             }
             return kit.ask(known);
         }, result -> {
@@ -175,40 +172,12 @@ final class WorkUpPanel extends LazyTab {
         words.setBackground(theme.color("ground"));
         int gap = theme.space("gap");
         words.setBorder(BorderFactory.createEmptyBorder(gap, gap, gap, gap));
-        for (String line : lines(answer)) {
+        for (String line : WorkUpWords.lines(answer)) {
             WrappedText text = new WrappedText(line);
             text.setForeground(theme.color("ink"));
             words.add(text);
         }
         words.revalidate();
         words.repaint();
-    }
-
-    static List<String> lines(Answer answer) {
-        List<String> lines = new ArrayList<>();
-        lines.add(answer.workUp().productSentence());
-        answer.workUp().partings().stream().map(Parting::sentence).forEach(lines::add);
-        if (!answer.refusal().isEmpty()) {
-            lines.add("No quench: " + answer.refusal() + ".");
-        }
-        answer.quench().ifPresent(quench -> {
-            lines.add(acidLine(quench));
-            lines.addAll(quench.sentences());
-        });
-        for (GroupHazard hazard : answer.hazards()) {
-            lines.add(Words.sentence(hazard.severity().word()) + ": " + hazard.sentence() + " (" + hazard.source() + ")");
-        }
-        if (!answer.workUp().product().withoutPKa().isEmpty()) {
-            lines.add("No pKa in water is known for " + String.join(", ", answer.workUp().product().withoutPKa()) + "; left out.");
-        }
-        lines.add(answer.workUp().assumption());
-        return lines;
-    }
-
-    private static String acidLine(Quench quench) {
-        StringBuilder line = new StringBuilder("Acid to pH " + Words.oneDecimal(quench.pH()) + ": " + Words.number(quench.acid().milliMole()) + " mmol");
-        quench.acid().grams().ifPresent(grams -> line.append(", ").append(Words.number(grams)).append(" g"));
-        quench.acid().milliLitre().ifPresent(volume -> line.append(", ").append(Words.number(volume)).append(" mL"));
-        return line.append(" (").append(quench.acid().form()).append(").").toString();
     }
 }
