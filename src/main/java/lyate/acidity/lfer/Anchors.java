@@ -1,28 +1,18 @@
 package lyate.acidity.lfer;
 
-import java.util.ArrayList;
 import java.util.Arrays;
-import java.util.HashMap;
 import java.util.List;
-import java.util.Map;
 
 /** The anchors of one pool, indexed so that a site is compared with all of them in one pass. Immutable. */
 public final class Anchors {
 
     private final Pool pool;
     private final List<Anchor> anchors;
-    private final Map<Long, Posting> byCode = new HashMap<>();
-    private final Map<String, Posting> byDescriptor = new HashMap<>();
+    private final Postings<Long> byCode;
+    private final Postings<String> byDescriptor;
+    private final double[] totals;
     private final double[] squares;
-
-    /** Which anchors have a feature, and how much of it. */
-    private record Posting(int[] anchors, double[] amounts) {
-
-        static Posting of(List<double[]> entries) {
-            return new Posting(entries.stream().mapToInt(entry -> (int) entry[0]).toArray(),
-                    entries.stream().mapToDouble(entry -> entry[1]).toArray());
-        }
-    }
+    private final double[] weights;
 
     /**
      * A site compared with the anchors.
@@ -51,24 +41,24 @@ public final class Anchors {
     public Anchors(Pool pool, List<Anchor> anchors) {
         this.pool = pool;
         this.anchors = List.copyOf(anchors);
+        this.totals = anchors.stream().mapToDouble(anchor -> anchor.site().environment().total()).toArray();
         this.squares = new double[anchors.size()];
-        Map<Long, List<double[]>> codes = new HashMap<>();
-        Map<String, List<double[]>> descriptors = new HashMap<>();
+        this.weights = anchors.stream().mapToDouble(Anchor::weight).toArray();
+        Postings.Builder<Long> codes = new Postings.Builder<>();
+        Postings.Builder<String> descriptors = new Postings.Builder<>();
         for (int i = 0; i < anchors.size(); i++) {
-            int anchor = i;
-            SiteDescription site = anchors.get(i).site();
-            Environment environment = site.environment();
+            Environment environment = anchors.get(i).site().environment();
             for (int k = 0; k < environment.codes().length; k++) {
-                codes.computeIfAbsent(environment.codes()[k], key -> new ArrayList<>())
-                        .add(new double[] {anchor, environment.weights()[k]});
+                codes.add(environment.codes()[k], i, environment.weights()[k]);
             }
-            site.scaled().forEach((name, value) -> {
-                squares[anchor] += value * value;
-                descriptors.computeIfAbsent(name, key -> new ArrayList<>()).add(new double[] {anchor, value});
-            });
+            for (Term term : anchors.get(i).site().terms()) {
+                double scaled = term.scaled();
+                squares[i] += scaled * scaled;
+                descriptors.add(term.name(), i, scaled);
+            }
         }
-        codes.forEach((code, entries) -> byCode.put(code, Posting.of(entries)));
-        descriptors.forEach((name, entries) -> byDescriptor.put(name, Posting.of(entries)));
+        this.byCode = codes.build();
+        this.byDescriptor = descriptors.build();
     }
 
     /** The anchors, in the order of their indices. */
@@ -78,14 +68,36 @@ public final class Anchors {
 
     /** Compares a site with every anchor; names the {@code count} most similar ones. */
     public Comparison compare(SiteDescription site, int count) {
-        double[] similarity = similarities(site.environment());
-        double[] distances = squaredDistances(site.scaled());
+        double[] shared = new double[weights.length];
+        Environment environment = site.environment();
+        double unseen = 0;
+        for (int k = 0; k < environment.codes().length; k++) {
+            boolean seen = byCode.addShared(environment.codes()[k], environment.weights()[k], shared);
+            unseen += seen ? 0 : environment.weights()[k];
+        }
+        double[] distances = squaredDistances(site.terms());
         double correction = 0;
+        double[] similarity = new double[shared.length];
         for (int i = 0; i < similarity.length; i++) {
-            correction += anchors.get(i).weight() * pool.residual(similarity[i], distances[i]);
+            similarity[i] = shared[i] / (environment.total() + totals[i] - shared[i]);
+            correction += weights[i] * pool.residual(similarity[i], distances[i]);
         }
         List<Integer> nearest = nearest(similarity, count);
-        return new Comparison(correction, nearest, similarity, novelty(site.environment()), misfit(nearest, similarity));
+        return new Comparison(correction, nearest, similarity, unseen / environment.total(), misfit(nearest, similarity));
+    }
+
+    private double[] squaredDistances(List<Term> site) {
+        double[] distances = squares.clone();
+        double own = 0;
+        for (Term term : site) {
+            double scaled = term.scaled();
+            own += scaled * scaled;
+            byDescriptor.addProduct(term.name(), -2 * scaled, distances);
+        }
+        for (int i = 0; i < distances.length; i++) {
+            distances[i] = Math.max(0, distances[i] + own);
+        }
+        return distances;
     }
 
     /** Indices of the highest similarities, highest first. */
@@ -116,49 +128,5 @@ public final class Anchors {
             total += similarity[anchor];
         }
         return total == 0 ? 0 : weighted / total;
-    }
-
-    private double novelty(Environment site) {
-        double unseen = 0;
-        for (int k = 0; k < site.codes().length; k++) {
-            unseen += byCode.containsKey(site.codes()[k]) ? 0 : site.weights()[k];
-        }
-        return unseen / site.total();
-    }
-
-    private double[] similarities(Environment site) {
-        double[] shared = new double[anchors.size()];
-        for (int k = 0; k < site.codes().length; k++) {
-            Posting posting = byCode.get(site.codes()[k]);
-            if (posting != null) {
-                double own = site.weights()[k];
-                for (int j = 0; j < posting.anchors().length; j++) {
-                    shared[posting.anchors()[j]] += Math.min(own, posting.amounts()[j]);
-                }
-            }
-        }
-        for (int i = 0; i < shared.length; i++) {
-            shared[i] /= site.total() + anchors.get(i).site().environment().total() - shared[i];
-        }
-        return shared;
-    }
-
-    private double[] squaredDistances(Map<String, Double> site) {
-        double[] distances = squares.clone();
-        double own = 0;
-        for (Map.Entry<String, Double> descriptor : site.entrySet()) {
-            double value = descriptor.getValue();
-            own += value * value;
-            Posting posting = byDescriptor.get(descriptor.getKey());
-            if (posting != null) {
-                for (int j = 0; j < posting.anchors().length; j++) {
-                    distances[posting.anchors()[j]] -= 2 * value * posting.amounts()[j];
-                }
-            }
-        }
-        for (int i = 0; i < distances.length; i++) {
-            distances[i] = Math.max(0, distances[i] + own);
-        }
-        return distances;
     }
 }

@@ -28,6 +28,12 @@ public record Pool(Medium medium, String name, List<String> groups, double baseP
         groups = List.copyOf(groups);
     }
 
+    /** Pools are keys of maps asked for every site; their names tell them apart. */
+    @Override
+    public int hashCode() {
+        return name.hashCode();
+    }
+
     /** Covariance of what is left of two sites beyond the coefficients. */
     public double residual(double similarityOfSurroundings, double squaredDistance) {
         return similarity * similarity * similarityOfSurroundings

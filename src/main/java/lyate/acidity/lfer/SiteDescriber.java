@@ -1,21 +1,27 @@
 package lyate.acidity.lfer;
 
+import java.util.HashMap;
+import java.util.Map;
 import java.util.Optional;
-import java.util.concurrent.atomic.AtomicReference;
 import lyate.molecule.Molecule;
 import lyate.site.Role;
 import lyate.table.TableException;
 import lyate.table.TableFolders;
 
 /**
- * Describes proton sites by the terms of the linear free-energy relationships. Safe to share between threads; what the sites
- * of one molecule share is kept for the next site of the same molecule.
+ * Describes proton sites by the terms of the linear free-energy relationships. Safe to share between threads; each keeps
+ * what it last worked out, since the sites of one molecule are asked for one after another, and once for each medium.
  */
 public final class SiteDescriber {
 
     private final SeriesTable series;
     private final Substituents substituents;
-    private final AtomicReference<Facts> latest = new AtomicReference<>();
+    private final ThreadLocal<Latest> latest = new ThreadLocal<>();
+
+    /** A molecule and the descriptions of its sites so far. */
+    private record Latest(Facts facts, Map<Site, Optional<SiteDescription>> described) {}
+
+    private record Site(Role role, int atom) {}
 
     private SiteDescriber(SeriesTable series, Substituents substituents) {
         this.series = series;
@@ -38,20 +44,20 @@ public final class SiteDescriber {
 
     /** The description of a site, or empty where it belongs to no series. */
     public Optional<SiteDescription> describe(Molecule molecule, Role role, int atom) {
-        return series.of(molecule, role, atom).map(row -> {
-            Facts facts = facts(molecule);
-            Terms terms = Descriptors.of(facts, atom);
-            return new SiteDescription(row, equivalent(molecule, atom), terms.list(), Environment.of(facts, atom), terms.missing());
-        });
-    }
-
-    private Facts facts(Molecule molecule) {
-        Facts known = latest.get();
-        if (known == null || known.molecule() != molecule) {
-            known = Facts.of(molecule, substituents);
+        Latest known = latest.get();
+        if (known == null || known.facts().molecule() != molecule) {
+            known = new Latest(Facts.of(molecule, substituents), new HashMap<>());
             latest.set(known);
         }
-        return known;
+        Facts facts = known.facts();
+        return known.described().computeIfAbsent(new Site(role, atom), site -> describe(facts, role, atom));
+    }
+
+    private Optional<SiteDescription> describe(Facts facts, Role role, int atom) {
+        return series.of(facts.molecule(), role, atom).map(row -> {
+            Terms terms = Descriptors.of(facts, atom);
+            return new SiteDescription(row, equivalent(facts.molecule(), atom), terms.list(), Environment.of(facts, atom), terms.missing());
+        });
     }
 
     private static int equivalent(Molecule molecule, int atom) {

@@ -1,8 +1,6 @@
 package lyate.acidity.lfer;
 
 import java.util.List;
-import java.util.Map;
-import java.util.stream.Collectors;
 import lyate.site.Role;
 
 /**
@@ -24,10 +22,5 @@ public record SiteDescription(Series series, int equivalent, List<Term> terms, E
     /** What the number of equivalent places adds to the pKa of one of them. */
     public double statistics() {
         return (series.role() == Role.ACID ? -1 : 1) * Math.log10(equivalent);
-    }
-
-    /** The descriptors by name, each divided by the size that counts as one step ({@link Scales}). */
-    public Map<String, Double> scaled() {
-        return terms.stream().collect(Collectors.toMap(Term::name, term -> term.value() / Scales.of(term.name())));
     }
 }

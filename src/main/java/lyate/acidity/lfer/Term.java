@@ -12,4 +12,10 @@ import lyate.acidity.Acidity.Effect;
  * @param atoms  atoms it comes from
  * @param note   what was found there, for example {@code nitro}; empty where the name says it all
  */
-public record Term(String name, Effect effect, double value, List<Integer> atoms, String note) {}
+public record Term(String name, Effect effect, double value, List<Integer> atoms, String note) {
+
+    /** The size in steps that are typical of the descriptor ({@link Scales}). */
+    double scaled() {
+        return value / Scales.of(name);
+    }
+}
