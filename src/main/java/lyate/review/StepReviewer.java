@@ -6,6 +6,8 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalInt;
+import java.util.concurrent.ForkJoinPool;
+import java.util.concurrent.ForkJoinTask;
 import lyate.acidity.AcidityEstimator;
 import lyate.acidity.IonisationEnthalpies;
 import lyate.acidity.SiteCoupling;
@@ -56,8 +58,10 @@ public final class StepReviewer implements Reviewer {
 
     /** The same with a stockroom that is loaded already. */
     public static StepReviewer load(TableFolders folders, Stockroom stockroom) {
-        return new StepReviewer(folders, stockroom, new SiteFinder(SiteClasses.load(folders)),
-                AcidityEstimator.load(folders));
+        // Nothing else takes as long to load as these two, and neither needs the other.
+        ForkJoinTask<SiteFinder> finder = ForkJoinPool.commonPool().submit(() -> new SiteFinder(SiteClasses.load(folders)));
+        AcidityEstimator acidity = AcidityEstimator.load(folders);
+        return new StepReviewer(folders, stockroom, finder.join(), acidity);
     }
 
     @Override

@@ -47,8 +47,9 @@ final class Engine {
 
     /** Starts reading the tables and returns at once. */
     static Engine load(TableFolders folders) {
-        return new Engine(folders, CompletableFuture.supplyAsync(() -> MoleculeReader.load(folders)), CompletableFuture.supplyAsync(() -> Stockroom.load(folders)),
-                CompletableFuture.supplyAsync(() -> StepReviewer.load(folders)), CompletableFuture.supplyAsync(() -> Enthalpies.load(folders)));
+        CompletableFuture<Stockroom> stockroom = CompletableFuture.supplyAsync(() -> Stockroom.load(folders));
+        return new Engine(folders, CompletableFuture.supplyAsync(() -> MoleculeReader.load(folders)), stockroom,
+                stockroom.thenApplyAsync(room -> StepReviewer.load(folders, room)), stockroom.thenApplyAsync(room -> Enthalpies.load(folders)));
     }
 
     /** Tells, on the event thread, why the tables cannot be read; never called where they can. */
