@@ -18,8 +18,13 @@ public final class MoleculeException extends Exception {
      * @param inputNumber the atom it is about, 1-based in the order of the input; 0 where no one atom is
      */
     MoleculeException(String message, int inputNumber) {
-        super(message);
+        super(printable(message));
         this.inputNumber = inputNumber;
+    }
+
+    /** What the user gave is quoted in messages; its control characters must not reach a terminal. */
+    private static String printable(String message) {
+        return message.replace('\t', ' ').replaceAll("[\\p{Cntrl}&&[^\n]]", "\uFFFD");
     }
 
     /** The atom it is about, 1-based in the order of the input. */

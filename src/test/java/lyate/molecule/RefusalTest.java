@@ -120,6 +120,21 @@ class RefusalTest {
     }
 
     @Test
+    void controlCharactersAreNotPassedOn() {
+        String refusal = refusal("[C\t\u001B[31m]C");
+        assertTrue(refusal.contains("\uFFFD[31m"), refusal);
+        assertTrue(refusal.chars().noneMatch(letter -> Character.isISOControl(letter) && letter != '\n'), refusal);
+    }
+
+    @Test
+    void longTextsAndOddConnectionTables() {
+        assertEquals("the name has 1002 characters; at most 1000 are read", refusal("quxyzzy ".repeat(125) + "zz"));
+        assertEquals("the molfile has no line 'M  V30 COUNTS'", refusal(MoleculeReaderTest.resource("nitrophenol-v3000.mol").replace("COUNTS", "KOUNTS")));
+        assertEquals("there is no atom in it", refusal("\n\n\n  0  0  0     0  0            999 V2000\nM  END\n"));
+        assertEquals("not an InChI that is understood", refusal("InChI=1S/C2H6O/c1-2-9/h3H,2H2,1H3").split(":")[0]);
+    }
+
+    @Test
     void refusalNamesTheAtomByNumber() {
         MoleculeException refused = assertThrows(MoleculeException.class, () -> reader.read("ClC(C)(C)(C)C"));
         assertEquals(2, refused.inputNumber().orElseThrow());
