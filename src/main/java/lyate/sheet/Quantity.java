@@ -1,5 +1,6 @@
 package lyate.sheet;
 
+import java.math.BigDecimal;
 import java.util.Locale;
 import java.util.OptionalDouble;
 
@@ -36,6 +37,6 @@ public record Quantity(String unit, double low, double high) {
     }
 
     private static String plain(double limit) {
-        return limit == Math.rint(limit) ? String.format(Locale.ROOT, "%.0f", limit) : Double.toString(limit);
+        return limit == Math.rint(limit) ? String.format(Locale.ROOT, "%.0f", limit) : BigDecimal.valueOf(limit).toPlainString();
     }
 }

@@ -21,8 +21,8 @@ public interface Named {
         return tooLong ? aliases().get(0) : name();
     }
 
-    /** Every name it is found by. */
+    /** Every name it is found by, those people write first. */
     default Stream<String> names() {
-        return Stream.concat(Stream.of(name(), id()), aliases().stream());
+        return Stream.of(Stream.of(name()), aliases().stream(), Stream.of(id())).flatMap(names -> names);
     }
 }

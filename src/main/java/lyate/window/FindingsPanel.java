@@ -4,6 +4,7 @@ import java.awt.BorderLayout;
 import java.awt.Dimension;
 import java.awt.Font;
 import java.awt.Point;
+import java.util.Arrays;
 import java.util.EnumSet;
 import java.util.List;
 import java.util.Set;
@@ -24,6 +25,9 @@ final class FindingsPanel extends JPanel {
 
     private static final Set<FindingKind> SAFETY = EnumSet.of(FindingKind.GAS_EVOLVED, FindingKind.HEAT_RELEASED,
             FindingKind.THERMAL_HAZARD, FindingKind.PYROPHORIC, FindingKind.WATER_REACTIVE, FindingKind.TOXIC, FindingKind.PEROXIDE_FORMER);
+    /** Verdict, heading and first finding. */
+    private static final int FIRST_TO_SEE = 3;
+    private static final int LEAST_LINES = 5;
     private static final String WHO_DECIDES = "This is not a risk assessment. The safety data sheets, the local rules and a qualified person decide.";
 
     private final Theme theme;
@@ -122,13 +126,16 @@ final class FindingsPanel extends JPanel {
         return scroll;
     }
 
-    /** At most a third of the height goes to the safety notes before they scroll. */
+    /** Safety notes scroll beyond a third of the height, sooner where verdict and first finding would not be seen; a note is always in sight. */
     @Override
     public void doLayout() {
         if (safetyScroll.isVisible()) {
             safety.setSize(getWidth(), Math.max(1, safety.getHeight()));
             int wanted = safety.getPreferredSize().height;
-            safetyScroll.setPreferredSize(new Dimension(getWidth(), Math.min(wanted, getHeight() / 3)));
+            int first = Arrays.stream(column.getComponents()).limit(FIRST_TO_SEE).mapToInt(part -> part.getPreferredSize().height).sum();
+            int least = LEAST_LINES * getFontMetrics(UIManager.getFont("Label.font")).getHeight();
+            int room = Math.max(least, Math.min(getHeight() / 3, getHeight() - first));
+            safetyScroll.setPreferredSize(new Dimension(getWidth(), Math.min(wanted, room)));
         }
         super.doLayout();
     }

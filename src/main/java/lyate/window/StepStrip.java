@@ -83,9 +83,13 @@ final class StepStrip extends JPanel {
 
     /** Says below each field what is wrong with it, or what it was understood as. */
     void report(Outcome outcome) {
+        boolean blank = outcome.text().get(StepField.SUBSTRATE).isEmpty();
         boxes.forEach((field, box) -> {
             String problem = outcome.problems().get(field);
-            if (problem != null) {
+            if (problem != null && blank && box.text().isBlank()) {
+                // A new step is no mistake.
+                box.line().hint(problem);
+            } else if (problem != null) {
                 box.line().problem(problem);
             } else {
                 box.line().hint(outcome.shown().map(shown -> understood(field, shown.review().step())).orElse(""));

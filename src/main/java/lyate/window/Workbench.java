@@ -193,6 +193,10 @@ final class Workbench extends JPanel implements Drawer.Wishes, AutoCloseable {
 
     /** Marks everything on screen as belonging to an earlier text than the fields now hold, or takes the mark away. */
     private void outdated(boolean is) {
+        if (is && shown.isEmpty()) {
+            substratePane.note("nothing to show yet");
+            return;
+        }
         List.of(substratePane, verdictPane).forEach(pane -> pane.note(is ? OUTDATED : ""));
         verdictPane.veil(is);
         drawerVeil.set(is);

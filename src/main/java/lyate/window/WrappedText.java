@@ -10,7 +10,7 @@ import javax.swing.UIManager;
 final class WrappedText extends JTextArea {
 
     WrappedText(String text) {
-        super(text);
+        super(text.replace("log K", "log\u00a0K"));
         setLineWrap(true);
         setWrapStyleWord(true);
         setEditable(false);

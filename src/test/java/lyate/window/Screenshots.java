@@ -52,9 +52,9 @@ final class Screenshots {
                 bench.ladder().compare(stockroom.bases().stream().filter(base -> base.id().equals(id)).findFirst().orElseThrow())));
         take("sheet", false, 1, 1500, 920, demo, Screenshots::fortySteps);
         take("dark", true, 1, 1500, 920, demo);
-        take("empty", false, 1, 1500, 920, demo.with(StepField.SUBSTRATE, ""));
+        take("empty", false, 1, 1500, 920, demo.with(StepField.SUBSTRATE, "").withSite(""));
         take("double", false, 2, 2400, 1500, demo);
-        take("workup", false, 1, 1500, 920, demo.with(StepField.BASE, "Et3N").with(StepField.SOLVENT, "dichloromethane").with(StepField.SUBSTRATE, "OC(=O)c1ccccc1CNC(=O)C"), bench -> bench.drawer().setSelectedIndex(4));
+        take("workup", false, 1, 1500, 920, demo.with(StepField.BASE, "Et3N").with(StepField.SOLVENT, "dichloromethane").with(StepField.SUBSTRATE, "OC(=O)c1ccccc1CNC(=O)C").withSite(""), bench -> bench.drawer().setSelectedIndex(4));
         String big = "CC(C)CC(NC(=O)C(CC(N)=O)NC(=O)C(Cc1ccc(O)cc1)NC(=O)C(C)N)C(=O)NC(CO)C(=O)NC(Cc1c[nH]cn1)C(=O)NC(CS)C(=O)NCC(=O)O";
         take("sixty", false, 1, 1500, 920, demo.with(StepField.SUBSTRATE, big).withSite(""));
         take("low", false, 1, 1300, 640, demo.with(StepField.SUBSTRATE, "OCC1OC(O)C(O)C(O)C1NC(=O)CC(=O)c1ccc[nH]1").withSite(""));
