@@ -9,13 +9,15 @@ import lyate.review.DoseResponse;
 /** Per cent of each proton taken against equivalents of base; every line is named at its end, the dose of the step is marked. */
 final class DoseFigure {
 
-    private static final double WIDTH = 310;
-    private static final double HEIGHT = 300;
-    private static final double LEFT = 40;
-    private static final double RIGHT = 264;
+    private static final double WIDTH = 270;
+    private static final double HEIGHT = 214;
+    private static final double LEFT = 32;
+    private static final double RIGHT = 226;
     private static final double TOP = 24;
-    private static final double BOTTOM = 256;
+    private static final double BOTTOM = 174;
     private static final double FONT = 11;
+    /** Points closer together than this, px, are one on paper. */
+    private static final double LEAST_STEP = 0.6;
     /** Donors that never lose more than this, per cent, stay out of the picture. */
     private static final double WORTH_A_LINE = 0.5;
     private static final List<String> DASHES = List.of("6 3", "2 3", "8 3 2 3");
@@ -60,8 +62,13 @@ final class DoseFigure {
     private void line(Svg svg, LetteredSite site, int index) {
         StringBuilder path = new StringBuilder();
         List<Double> percent = taken(site);
+        double lastX = -1;
         for (int i = 0; i < percent.size(); i++) {
-            path.append(String.format(Locale.ROOT, "%s%.1f %.1f", i == 0 ? "M" : "L", x(doses.equivalents().get(i)), y(percent.get(i))));
+            double x = x(doses.equivalents().get(i));
+            if (x - lastX >= LEAST_STEP || i == percent.size() - 1) {
+                path.append(String.format(Locale.ROOT, "%s%.1f %.1f", path.isEmpty() ? "M" : "L", x, y(percent.get(i))));
+                lastX = x;
+            }
         }
         if (site.intended()) {
             svg.path(path.toString(), "none", site.ink(), 2.4);

@@ -22,9 +22,9 @@ public final class DoseText {
 
     /** Writes what becomes of each site as more base goes in. */
     public void write(DoseResponse dose, String intended) throws IOException {
-        out.append("  Equivalents\n    ").append(reaches(intended + " is 95 % gone", dose.intendedReaches95())).append('\n');
-        if (dose.nextSite().isPresent()) {
-            out.append("    ").append(reaches(dose.nextSite().get() + ", the next to go, passes 5 %", dose.nextPasses5())).append('\n');
+        out.append("  Equivalents\n");
+        for (String line : reached(dose, intended)) {
+            out.append("    ").append(line).append('\n');
         }
         line("% gone at", SHOWN.stream().map(value -> String.format(Locale.ROOT, "%.1f", value)).toList());
         for (Map.Entry<String, List<Double>> site : dose.percentTaken().entrySet()) {
@@ -34,14 +34,24 @@ public final class DoseText {
         }
     }
 
+    /** The two doses that matter, in one sentence. */
+    static String milestones(DoseResponse dose, String intended) {
+        return String.join("; ", reached(dose, intended)) + ".";
+    }
+
+    private static List<String> reached(DoseResponse dose, String intended) {
+        String meant = reaches(intended + " is 95 % gone", dose.intendedReaches95(), dose);
+        return dose.nextSite().map(next -> List.of(meant, reaches(next + ", the next to go, passes 5 %", dose.nextPasses5(), dose))).orElse(List.of(meant));
+    }
+
     private void line(String name, List<String> cells) throws IOException {
         StringBuilder line = new StringBuilder(String.format(Locale.ROOT, "    %-10s", name));
         cells.forEach(cell -> line.append(String.format(Locale.ROOT, "%6s", cell)));
         out.append(line).append('\n');
     }
 
-    private static String reaches(String what, OptionalDouble equivalents) {
+    private static String reaches(String what, OptionalDouble equivalents, DoseResponse dose) {
         return equivalents.isPresent() ? String.format(Locale.ROOT, "%s from %.2f equivalents", what, equivalents.getAsDouble())
-                : String.format(Locale.ROOT, "%s at no dose up to %.0f equivalents", what, DoseResponse.MOST_EQUIVALENTS);
+                : String.format(Locale.ROOT, "%s at no dose up to %.0f equivalents", what, dose.highest());
     }
 }

@@ -20,11 +20,11 @@ import lyate.molecule.MoleculeSvg;
  */
 final class DrawingFigure {
 
-    private static final double WIDTH = 680;
-    private static final double MARGIN_X = 104;
+    private static final double WIDTH = 500;
+    private static final double MARGIN_X = 92;
     private static final double MARGIN_Y = 46;
-    private static final double LARGEST_BOND = 38;
-    private static final double LARGEST_HEIGHT = 380;
+    private static final double LARGEST_BOND = 34;
+    private static final double LARGEST_HEIGHT = 320;
     private static final double FONT = 11.5;
     private static final double LINE = 15;
     private static final double EDGE = 6;

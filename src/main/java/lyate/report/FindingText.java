@@ -3,6 +3,7 @@ package lyate.report;
 import java.io.IOException;
 import java.util.List;
 import java.util.Locale;
+import lyate.review.BaseHazards;
 import lyate.review.Finding;
 
 /** Findings and other lists of a review for reading. */
@@ -23,15 +24,21 @@ final class FindingText {
         }
     }
 
-    /** Each finding with its evidence and source. */
+    /** Each finding with its evidence and source; the line that stands under every safety finding closes them, once. */
     void findings(List<Finding> findings) throws IOException {
         for (Finding finding : findings) {
             line("");
             line("  %s  %s: %s", finding.severity().word(), finding.kind().code(), finding.sentence());
             for (String evidence : finding.evidence()) {
-                line("      %s", evidence);
+                if (!evidence.equals(BaseHazards.STANDING_LINE)) {
+                    line("      %s", evidence);
+                }
             }
             line("      source: %s", finding.source());
+        }
+        if (findings.stream().anyMatch(finding -> finding.evidence().contains(BaseHazards.STANDING_LINE))) {
+            line("");
+            line("  %s", BaseHazards.STANDING_LINE);
         }
     }
 

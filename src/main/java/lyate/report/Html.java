@@ -2,6 +2,7 @@ package lyate.report;
 
 import java.util.ArrayDeque;
 import java.util.Deque;
+import java.util.List;
 
 /**
  * Writes markup that is both HTML and well-formed XML, so that browsers and the PDF renderer read the same text.
@@ -31,6 +32,36 @@ final class Html {
     Html element(String name, String text, String... attributes) {
         tag(name, attributes).append('>').append(escape(text)).append("</").append(name).append(">\n");
         return this;
+    }
+
+    /** A list; nothing where there is nothing in it. */
+    Html bullets(List<String> lines) {
+        if (!lines.isEmpty()) {
+            open("ul");
+            lines.forEach(line -> element("li", line));
+            close();
+        }
+        return this;
+    }
+
+    /** Pieces of markup in two columns of about the same length, in order. */
+    Html halves(String element, List<String> pieces) {
+        int all = pieces.stream().mapToInt(String::length).sum();
+        int cut = 0;
+        for (int length = 0; cut < pieces.size() && (cut == 0 || 2 * length + pieces.get(cut).length() < all); cut++) {
+            length += pieces.get(cut).length();
+        }
+        open("div", "class", "row halves");
+        for (List<String> half : List.of(pieces.subList(0, cut), pieces.subList(cut, pieces.size()))) {
+            open("div", "class", "cell");
+            if (!half.isEmpty()) {
+                open(element, "class", "pieces");
+                half.forEach(this::markup);
+                close();
+            }
+            close();
+        }
+        return close();
     }
 
     Html text(String text) {

@@ -16,6 +16,11 @@ import lyate.table.TableListing;
  */
 public final class HtmlReport implements ResultWriter<ReviewedRow>, AutoCloseable {
 
+    private static final String HOW_TO_READ = "How to read the pictures of a step. Drawing: every proton site has its letter, pKa \u00b1 standard"
+            + " uncertainty, a thick arc for the share of protons taken at equilibrium, and a double ring where it is the intended one. Acidity"
+            + " ladder: sites left, base (triangle) and solvent (square) right; bars are standard uncertainties. Dose curve: share of protons taken"
+            + " at equilibrium; solid line: the intended site.";
+
     private final Appendable out;
     private final ReportContext context;
     private final Supplier<String> headExtras;
@@ -60,7 +65,7 @@ public final class HtmlReport implements ResultWriter<ReviewedRow>, AutoCloseabl
         }
         out.append("</tr></thead>\n<tbody>\n");
         lines.copyTo(out);
-        out.append("</tbody>\n</table>\n</section>\n");
+        out.append("</tbody>\n</table>\n").append(new Html().element("p", HOW_TO_READ, "class", "source").toString()).append("</section>\n");
         sections.copyTo(out);
         out.append("</main>\n").append(foot()).append("</body>\n</html>\n");
         close();

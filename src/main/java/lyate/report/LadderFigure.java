@@ -12,14 +12,16 @@ import java.util.stream.Collectors;
  */
 final class LadderFigure {
 
-    private static final double WIDTH = 340;
-    private static final double HEIGHT = 300;
-    private static final double TOP = 34;
-    private static final double BOTTOM = 280;
+    private static final double WIDTH = 310;
+    private static final double HEIGHT = 214;
+    private static final double TOP = 30;
+    private static final double BOTTOM = 200;
     private static final double LEFT_RAIL = 116;
-    private static final double RIGHT_RAIL = 216;
+    private static final double RIGHT_RAIL = 204;
     private static final double FONT = 11;
     private static final double MARK = 5;
+    /** More labels than this on one side have one line each. */
+    private static final int MOST_TALL = 6;
 
     private final LetteredSite anchor;
     private final Ladder ladder;
@@ -79,7 +81,7 @@ final class LadderFigure {
 
     private void labels(Svg svg, List<Rung> side, int direction, double rail) {
         double[] wanted = side.stream().mapToDouble(rung -> y(rung.pKa())).toArray();
-        double[] placed = LabelSpread.spread(wanted, side.size() > 9 ? 14 : 27, TOP - 8, BOTTOM + 10);
+        double[] placed = LabelSpread.spread(wanted, side.size() > MOST_TALL ? 14 : 27, TOP - 8, BOTTOM + 10);
         for (int i = 0; i < placed.length; i++) {
             Rung rung = side.get(i);
             double x = rail + direction * 26;
@@ -87,7 +89,7 @@ final class LadderFigure {
                     "none", Ink.LINE, 0.8);
             mark(svg, rung, rail, wanted[i]);
             String anchorWord = direction < 0 ? "end" : "start";
-            boolean oneLine = side.size() > 9;
+            boolean oneLine = side.size() > MOST_TALL;
             String name = shortened(name(rung));
             if (oneLine) {
                 svg.text(x, placed[i] + 4, name + "  " + rung.brief(), FONT, ink(rung), anchorWord, false);

@@ -1,9 +1,12 @@
 package lyate.report;
 
 import java.util.ArrayList;
+import java.util.Collection;
 import java.util.Comparator;
+import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.stream.Collectors;
 import lyate.acidity.Acidity.Relative;
 import lyate.review.Review;
 import lyate.review.Transfer;
@@ -20,18 +23,19 @@ final class StepSources {
      * @param value  the value as written; may be empty
      * @param source citation
      */
-    record Use(String what, String value, String source) {}
+    private record Use(String what, String value, String source) {}
 
     /** Heat of fewer protons than this, mmol, is nobody's concern. */
     private static final double WORTH_A_LINE = 0.001;
 
     private StepSources() {}
 
-    static List<Use> of(StepFacts facts) {
+    private static List<Use> of(StepFacts facts) {
         Review review = facts.review();
         List<Use> uses = new ArrayList<>();
-        for (Transfer transfer : review.transfers()) {
-            uses.add(new Use("pKa of " + transfer.donor() + ", " + transfer.acidity().basis().word(),
+        for (List<Transfer> same : alike(review.transfers())) {
+            Transfer transfer = same.get(0);
+            uses.add(new Use("pKa of " + String.join(", ", same.stream().map(Transfer::donor).toList()) + ", " + transfer.acidity().basis().word(),
                     Words.withSigma(transfer.acidity()) + " in " + Words.medium(transfer.acidity().medium()), transfer.acidity().source()));
             for (Relative relative : transfer.acidity().relatives()) {
                 uses.add(new Use("measured relative of " + transfer.donor(),
@@ -46,5 +50,19 @@ final class StepSources {
         facts.gasAndHeat().heat().stream().filter(share -> share.milliMole() > WORTH_A_LINE).forEach(share -> uses.add(new Use("heat of " + share.donor(),
                 Words.number(share.kiloJoulePerMole()) + " kJ/mol, " + share.how(), share.source())));
         return uses.stream().distinct().toList();
+    }
+
+    /** Donors whose value is one and the same, in order. */
+    private static Collection<List<Transfer>> alike(List<Transfer> transfers) {
+        return transfers.stream().collect(Collectors.groupingBy(transfer -> List.of(Words.withSigma(transfer.acidity()), transfer.acidity().medium(),
+                transfer.acidity().basis(), transfer.acidity().source(), transfer.acidity().relatives()), LinkedHashMap::new, Collectors.toList())).values();
+    }
+
+    /** The same, every source once with what was taken from it. */
+    static Map<String, List<String>> bySource(StepFacts facts) {
+        Map<String, List<String>> sources = new LinkedHashMap<>();
+        of(facts).forEach(use -> sources.computeIfAbsent(use.source(), source -> new ArrayList<>())
+                .add(use.what() + (use.value().isEmpty() ? "" : ", " + use.value())));
+        return sources;
     }
 }

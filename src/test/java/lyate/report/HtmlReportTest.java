@@ -10,6 +10,7 @@ import java.util.List;
 import java.util.Locale;
 import java.util.Set;
 import java.util.TreeSet;
+import java.util.regex.Pattern;
 import lyate.review.BaseHazards;
 import lyate.sheet.DemoRoute;
 import lyate.sheet.ReviewedRow;
@@ -103,7 +104,7 @@ class HtmlReportTest {
         DEMO.forEach(row -> row.review().orElseThrow().findings().forEach(finding -> {
             assertTrue(words.contains(finding.sentence()), finding.sentence());
             assertTrue(words.contains("Source: " + finding.source()), finding.source());
-            finding.evidence().forEach(fact -> assertTrue(words.contains(fact), fact));
+            finding.evidence().forEach(fact -> assertTrue(words.contains(fact) || words.contains(Words.sentence(fact)), fact));
         }));
     }
 
@@ -112,6 +113,21 @@ class HtmlReportTest {
         List<Element> notes = Reports.elements(DOCUMENT, "div").stream().filter(div -> div.getAttribute("class").equals("safety")).toList();
         assertEquals(DEMO.size(), notes.size());
         notes.forEach(note -> assertTrue(note.getTextContent().strip().endsWith(BaseHazards.STANDING_LINE)));
+    }
+
+    @Test
+    void thePersonsWhoDecideAreNamedOnceAStep() {
+        String step = DOCUMENT.getElementsByTagName("section").item(2).getTextContent();
+        assertEquals(2, step.split(Pattern.quote(BaseHazards.STANDING_LINE), -1).length);
+    }
+
+    @Test
+    void amountsAreThoseOfTheSheet() {
+        String words = Reports.html("Scale", Reports.reviewed("substrate,base,solvent,amount_g,base_titrated_M\nCC(C)=O,n-BuLi,THF,5.808,1.48\n"));
+        // 5.808 g of propanone are 100 mmol; 100 mmol in 1.48 mol/L are 67.6 mL
+        assertTrue(words.contains("For 100 mmol of substrate"));
+        assertTrue(words.contains("1.480 mol/L, titrated") && words.contains(">67.6<"));
+        assertFalse(words.contains("No amount given"));
     }
 
     @Test

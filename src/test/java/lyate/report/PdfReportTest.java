@@ -108,6 +108,24 @@ class PdfReportTest {
     }
 
     @Test
+    void aUsualStepTakesOnePageAndNoneMoreThanTwo() throws IOException {
+        List<Integer> starts = new ArrayList<>();
+        for (int page = 1; page <= document.getNumberOfPages(); page++) {
+            List<String> top = text(page).lines().limit(4).toList();
+            if (DEMO.stream().anyMatch(row -> top.contains("Step " + row.row().name())) || top.contains("Made with")) {
+                starts.add(page);
+            }
+        }
+        assertEquals(DEMO.size() + 1, starts.size());
+        List<Integer> pages = new ArrayList<>();
+        for (int step = 0; step < DEMO.size(); step++) {
+            pages.add(starts.get(step + 1) - starts.get(step));
+        }
+        assertTrue(pages.stream().allMatch(count -> count <= 2), pages.toString());
+        assertTrue(pages.stream().filter(count -> count == 1).count() >= 9, pages.toString());
+    }
+
+    @Test
     void takesNothingThatUsersTypeForMarkup() throws IOException {
         byte[] bytes = Reports.pdf("\"; } @import url(file:/etc/passwd); <b>", Reports.reviewed(
                 "step,substrate,base,solvent,notes\n<script>alert(1)</script>,CC(C)=O,LDA,THF,<img src='file:/etc/passwd'>\n"));
