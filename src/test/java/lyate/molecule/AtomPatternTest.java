@@ -97,7 +97,8 @@ class AtomPatternTest {
 
     @ParameterizedTest
     @CsvSource(delimiter = '|', value = {"''|the pattern, or one nested in it, is empty", "[$(C),$()]|the pattern, or one nested in it, is empty",
-        "C1CC1CC11|the pattern has a ring bond from an atom to itself"})
+        "C1CC1CC11|the pattern has a ring bond from an atom to itself",
+        "[0@OH1]|the pattern has a configuration other than that of a tetrahedral atom or a double bond (@, @@, /, \\)"})
     void patternThatNothingCanMatchIsRefused(String smarts, String reason) {
         assertEquals(reason, assertThrows(MoleculeException.class, () -> AtomPattern.compile(smarts)).getMessage());
     }
