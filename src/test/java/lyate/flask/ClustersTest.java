@@ -65,6 +65,50 @@ class ClustersTest {
         assertTrue(largest <= 0.3 + 1e-9 && largest > 0.1, "off by " + largest);
     }
 
+    /**
+     * Sixteen equal places, each feeling each other: the exact mean follows from the number of ways to lose k protons. All
+     * together the clusters hold the right number of protons to within one; a single place can be far off.
+     */
+    @Test
+    void whereAllFeelAllTheSumIsRightToWithinAProtonButNoSinglePlaceIs() {
+        int n = 16;
+        double raise = 0.6;
+        List<ProtonPlace> places = new ArrayList<>();
+        List<Coupling> couplings = new ArrayList<>();
+        for (int place = 0; place < n; place++) {
+            places.add(new ProtonPlace("O" + place, 10));
+            for (int other = 0; other < place; other++) {
+                couplings.add(new Coupling(other, place, raise));
+            }
+        }
+        ProtonHolder holder = new ProtonHolder("all with all", 1, places, couplings, n);
+        double worstSum = 0;
+        double worstPlace = 0;
+        for (double level = 5; level < 25; level += 0.25) {
+            double exact = meanHeld(n, 10, raise, level);
+            HolderState state = HolderState.at(holder, level);
+            worstSum = Math.max(worstSum, Math.abs(exact - state.meanProtons()));
+            for (int place = 0; place < n; place++) {
+                worstPlace = Math.max(worstPlace, Math.abs(exact / n - state.protonated(place)));
+            }
+        }
+        assertTrue(worstSum < 0.8 && worstSum > 0.5, "protons off by " + worstSum);
+        assertTrue(worstPlace > 0.3, "a place off by " + worstPlace);
+    }
+
+    private static double meanHeld(int n, double pKa, double raise, double level) {
+        double all = 0;
+        double held = 0;
+        double lnWays = 0;
+        for (int lost = 0; lost <= n; lost++) {
+            double weight = Math.exp(lnWays + Math.log(10) * (lost * (level - pKa) - raise * lost * (lost - 1) / 2));
+            all += weight;
+            held += (n - lost) * weight;
+            lnWays += Math.log((n - lost) / (lost + 1.0));
+        }
+        return held / all;
+    }
+
     private static double logOdds(double held) {
         return Math.log10(held / (1 - held));
     }
