@@ -103,7 +103,7 @@ public record Amounts(Batch batch, double solventMilliLitre, double waterMilliMo
         if (onWater > NOTABLE_WATER * batch.milliMole() && onWater > Math.abs(spareWhenDry)) {
             found.add(say("The water in the solvent takes %s mmol of base, more than the %s mmol by which the base"
                     + " differs from what the protons need: drying matters more than the stoichiometry.", Figures.of(onWater),
-                    Figures.of(Math.abs(spareWhenDry))));
+                    Figures.notable(Math.abs(spareWhenDry), protonsTakenUp) ? Figures.of(Math.abs(spareWhenDry)) : "0"));
         }
         if (Figures.notable(-excess(), protonsTakenUp)) {
             found.add(say("The base is %s mmol short of what it meets up to and including the intended site.", Figures.of(-excess())));

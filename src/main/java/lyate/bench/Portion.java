@@ -52,14 +52,19 @@ public record Portion(double milliMole, OptionalDouble grams, OptionalDouble mil
             double milliLitre = milliMole / known.value();
             OptionalDouble grams = density.isPresent() ? OptionalDouble.of(milliLitre * density.getAsDouble()) : density;
             return new Portion(milliMole, grams, OptionalDouble.of(milliLitre),
-                    String.format(Locale.ROOT, "%.4g mol/L, %s", known.value(), how));
+                    String.format(Locale.ROOT, "%s mol/L, %s", plain(known.value()), how));
         }
         double grams = milliMole * molarMass / 1000 / (known.value() / 100);
         return new Portion(milliMole, OptionalDouble.of(grams), over(grams, density),
-                String.format(Locale.ROOT, "%.4g %% by mass, %s", known.value(), how));
+                String.format(Locale.ROOT, "%s %% by mass, %s", plain(known.value()), how));
     }
 
     private static OptionalDouble over(double grams, OptionalDouble density) {
         return density.isPresent() ? OptionalDouble.of(grams / density.getAsDouble()) : density;
+    }
+
+    /** A strength as a label has it, without idle zeros. */
+    private static String plain(double value) {
+        return String.format(Locale.ROOT, "%.3f", value).replaceAll("\\.?0+$", "");
     }
 }

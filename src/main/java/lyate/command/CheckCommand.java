@@ -1,9 +1,11 @@
 package lyate.command;
 
 import java.io.IOException;
+import java.util.Map;
 import java.util.Optional;
 import java.util.concurrent.Callable;
 import java.util.function.Supplier;
+import lyate.command.BenchOptions.Answers;
 import lyate.molecule.MoleculeReader;
 import lyate.report.DoseText;
 import lyate.report.HtmlReport;
@@ -15,18 +17,19 @@ import lyate.report.ResultWriter;
 import lyate.report.ReviewJson;
 import lyate.report.ReviewText;
 import lyate.report.SheetCsv;
+import lyate.review.BaseChoice;
 import lyate.review.DoseResponse;
 import lyate.review.Protonation;
 import lyate.review.ProtonationReviewer;
 import lyate.review.Review;
 import lyate.review.ReviewException;
-import lyate.review.Step;
 import lyate.review.StepReviewer;
 import lyate.sheet.ReviewedRow;
 import lyate.sheet.RowException;
 import lyate.sheet.SheetRow;
 import lyate.sheet.StepReader;
 import lyate.stock.Acid;
+import lyate.stock.Solvent;
 import lyate.stock.Stockroom;
 import lyate.stock.UnknownNameException;
 import lyate.table.TableFolders;
@@ -57,6 +60,9 @@ final class CheckCommand implements Callable<Integer> {
     private CheckFormat format;
 
     @Mixin
+    private BenchOptions bench;
+
+    @Mixin
     private TablesOption tables;
 
     CheckCommand(Terminal terminal) {
@@ -67,14 +73,21 @@ final class CheckCommand implements Callable<Integer> {
     public Integer call() throws IOException {
         TableFolders folders = tables.folders();
         Stockroom stockroom = Stockroom.load(folders);
-        StepReader steps = new StepReader(MoleculeReader.load(folders), stockroom);
+        MoleculeReader molecules = MoleculeReader.load(folders);
+        StepReader steps = new StepReader(molecules, stockroom);
         SheetRow row = input.row();
         try {
             Optional<Acid> acid = acid(stockroom);
             if (acid.isPresent() || input.base().isEmpty() && steps.isProtonation(row)) {
                 protonation(row, ProtonationReviewer.load(folders, stockroom).review(steps.read(row, acid)));
             } else {
-                deprotonation(row, steps.read(row), StepReviewer.load(folders, stockroom), folders);
+                StepReviewer reviewer = StepReviewer.load(folders, stockroom);
+                Review review = reviewer.review(steps.read(row));
+                Answers answers = bench.ask(review, folders, stockroom, molecules);
+                String title = review.step().base().name() + " in " + review.step().solvent().name();
+                Optional<Solvent> better = new BaseChoice(reviewer, stockroom).betterSolvent(review.step());
+                write(row, review, answers, better, reviewer.doseResponse(review.step()),
+                        () -> ReportContext.of(title, ProgramVersion.text(), folders, reviewer));
             }
             return 0;
         } catch (RowException e) {
@@ -92,12 +105,6 @@ final class CheckCommand implements Callable<Integer> {
         return input.acid() != null ? Optional.of(stockroom.acid(input.acid())) : stockroom.acidNamedAsBase(input.base());
     }
 
-    private void deprotonation(SheetRow row, Step read, StepReviewer reviewer, TableFolders folders) throws IOException, ReviewException {
-        Review review = reviewer.review(read);
-        String title = review.step().base().name() + " in " + review.step().solvent().name();
-        write(row, review, reviewer.doseResponse(review.step()), () -> ReportContext.of(title, ProgramVersion.text(), folders, reviewer));
-    }
-
     private void protonation(SheetRow row, Protonation protonation) throws IOException {
         switch (format) {
             case TEXT -> new ProtonationText(terminal.outWriter()).write(protonation);
@@ -111,15 +118,23 @@ final class CheckCommand implements Callable<Integer> {
         }
     }
 
-    private void write(SheetRow row, Review review, DoseResponse dose, Supplier<ReportContext> context) throws IOException {
+    private void write(SheetRow row, Review review, Answers answers, Optional<Solvent> better, DoseResponse dose,
+                       Supplier<ReportContext> context) throws IOException {
         switch (format) {
             case TEXT -> {
                 new ReviewText(terminal.outWriter()).write(review);
                 new DoseText(terminal.outWriter()).write(dose, review.intendedSite());
+                better.ifPresent(solvent -> terminal.outWriter().println("  The solvent is the problem: in " + solvent.name() + " "
+                        + review.step().base().name() + " would do."));
+                answers.write(review, terminal.outWriter());
             }
             case CSV -> new SheetCsv(terminal.outWriter(), row.header()).begin().write(ReviewedRow.of(row, review));
             case JSON -> {
-                ResultWriter<Review> json = new JsonList<>(terminal.outWriter(), ReviewJson::describe);
+                ResultWriter<Review> json = new JsonList<>(terminal.outWriter(), asked -> {
+                    Map<String, Object> object = ReviewJson.describe(asked);
+                    object.putAll(answers.describe());
+                    return object;
+                });
                 json.write(review);
                 json.finish();
             }

@@ -7,13 +7,13 @@ import lyate.bench.Amounts;
 import lyate.bench.Portion;
 
 /** What to weigh and measure out, as a JSON object. */
-final class AmountsJson {
+public final class AmountsJson {
 
     private static final int DECIMALS = 6;
 
     private AmountsJson() {}
 
-    static Map<String, Object> describe(Amounts amounts) {
+    public static Map<String, Object> describe(Amounts amounts) {
         Map<String, Object> object = new LinkedHashMap<>();
         object.put("substrate_mmol", rounded(amounts.batch().milliMole()));
         object.put("substrate_g", rounded(amounts.batch().grams()));
@@ -27,7 +27,7 @@ final class AmountsJson {
         return object;
     }
 
-    private static Map<String, Object> portion(Portion portion) {
+    static Map<String, Object> portion(Portion portion) {
         Map<String, Object> object = new LinkedHashMap<>();
         object.put("mmol", rounded(portion.milliMole()));
         object.put("g", rounded(portion.grams()));

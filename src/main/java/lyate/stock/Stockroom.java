@@ -95,6 +95,12 @@ public final class Stockroom {
         return partners.find(name);
     }
 
+    /** SMILES of the acid, partner or base that goes by a name. */
+    public Optional<String> structureOf(String name) {
+        return acids.lookUp(name).map(Acid::smiles).or(() -> partners.lookUp(name).map(Partner::smiles))
+                .or(() -> bases.lookUp(name).map(Base::smiles));
+    }
+
     /** At most {@code limit} bases that a text typed so far may mean, likeliest first. */
     public List<Base> searchBases(String text, int limit) {
         return bases.search(text, limit);

@@ -80,6 +80,12 @@ class JsonSchemaTest {
     }
 
     @Test
+    void whatTheBenchSaysIsWrittenAsTheSchemaSays() {
+        assertSound("review", run("check", "--substrate", "OC(=O)c1ccccc1", "--base", "K2CO3", "--solvent", "DMF", "--format", "json",
+                "--amount", "2 g", "--product", "COC(=O)c1ccccc1", "--separate-from", "benzoic acid"));
+    }
+
+    @Test
     void protonationsAndTheirRankingAreWrittenAsTheSchemaSays() {
         assertSound("protonation", run("check", "--acid", "TFA", "--format", "json", "--solvent", "acetone", "--substrate", "CCN(CC)CC"));
         assertSound("acid_ranking", run("acids", "--format", "json", "--top", "3", "--solvent", "acetone", "--substrate", "CCN(CC)CC"));
