@@ -6,8 +6,10 @@ import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.Deque;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
 import java.util.function.LongSupplier;
+import java.util.function.Supplier;
 import lyate.sheet.RouteSheet;
 
 /** The sheet that is open, with undo and redo. For the event thread. */
@@ -18,6 +20,7 @@ final class SheetDocument {
     private static final int MOST_STEPS_BACK = 500;
 
     private final LongSupplier clock;
+    private final Supplier<StepText> newStep;
     private final Deque<SheetState> past = new ArrayDeque<>();
     private final Deque<SheetState> future = new ArrayDeque<>();
     private final List<Runnable> listeners = new ArrayList<>();
@@ -27,8 +30,15 @@ final class SheetDocument {
     private Optional<StepField> lastField = Optional.empty();
     private long lastEdit;
 
+    /** A sheet whose added steps begin blank. */
     SheetDocument(RouteSheet sheet, LongSupplier clock) {
+        this(sheet, clock, () -> new StepText(Map.of(), ""));
+    }
+
+    /** @param newStep what an added step begins with */
+    SheetDocument(RouteSheet sheet, LongSupplier clock, Supplier<StepText> newStep) {
         this.clock = clock;
+        this.newStep = newStep;
         this.state = new SheetState(sheet, 0);
         this.savedText = sheet.text();
     }
@@ -92,6 +102,11 @@ final class SheetDocument {
         future.clear();
         lastField = Optional.empty();
         become(next);
+    }
+
+    /** Adds a step after the selected one. */
+    void add() {
+        change(state.added().write(newStep.get()));
     }
 
     void undo() {

@@ -68,7 +68,7 @@ final class StepsPanel extends JPanel {
 
     private JPanel buttons() {
         JPanel panel = new JPanel(new FlowLayout(FlowLayout.LEADING, theme.space("tiny"), theme.space("tiny")));
-        panel.add(button("+", "Add a step", () -> document.change(document.state().added())));
+        panel.add(button("+", "Add a step", document::add));
         panel.add(button("2\u00d7", "Duplicate the step", () -> document.change(document.state().duplicated())));
         panel.add(button("\u2191", "Move the step up (Alt+Up)", () -> document.change(document.state().moved(-1))));
         panel.add(button("\u2193", "Move the step down (Alt+Down)", () -> document.change(document.state().moved(1))));
@@ -145,14 +145,18 @@ final class StepsPanel extends JPanel {
             int size = owner.getFont().getSize();
             name.setIcon(judged == null ? null : judged.verdict().<Icon>map(known -> new VerdictIcon(known, theme.palette(), size))
                     .orElse(new SeverityIcon(Severity.CAUTION, theme.palette(), size)));
-            String substrate = StepCells.text(row).get(StepField.SUBSTRATE).lines().findFirst().orElse("no substrate yet");
-            what.setText(row.text(SheetColumn.BASE) + " in " + row.text(SheetColumn.SOLVENT) + ": " + substrate);
+            String substrate = StepCells.text(row).get(StepField.SUBSTRATE).lines().findFirst().orElse("");
+            what.setText(or(row.text(SheetColumn.BASE), "no base yet") + " in " + or(row.text(SheetColumn.SOLVENT), "no solvent yet") + ": " + or(substrate, "no substrate yet"));
             setToolTipText(judged != null && judged.verdict().isEmpty() ? judged.sentence() : null);
             setBackground(selected ? owner.getSelectionBackground() : owner.getBackground());
             name.setForeground(selected ? owner.getSelectionForeground() : owner.getForeground());
             what.setForeground(selected ? owner.getSelectionForeground() : theme.color("ink.soft"));
             getAccessibleContext().setAccessibleName(name.getText());
             return this;
+        }
+
+        private static String or(String text, String otherwise) {
+            return text.isEmpty() ? otherwise : text;
         }
 
         @Override

@@ -81,7 +81,7 @@ final class WindowCommands implements WindowMenu.Commands {
 
     @Override
     public void addStep() {
-        document.change(document.state().added());
+        document.add();
         bench.strip().box(StepField.SUBSTRATE).field().requestFocusInWindow();
     }
 

@@ -39,6 +39,7 @@ final class Workbench extends JPanel implements Drawer.Wishes, AutoCloseable {
     private final Pane verdictPane;
     private final Veil drawerVeil;
     private final Drawer drawer;
+    private final EmptyView empty;
     private final StepPresenter presenter;
     private final CardLayout cards = new CardLayout();
     private final JPanel middle = new JPanel(cards);
@@ -69,7 +70,8 @@ final class Workbench extends JPanel implements Drawer.Wishes, AutoCloseable {
         drawer = new Drawer(theme, engine, this);
         drawerVeil = new Veil(drawer, theme);
         middle.add(pictures(theme), PICTURES);
-        middle.add(new EmptyView(theme, example -> document.edit(strip.text().with(StepField.SUBSTRATE, example).withSite(""))), EMPTY);
+        empty = new EmptyView(theme, example -> document.edit(strip.text().with(StepField.SUBSTRATE, example).withSite("")));
+        middle.add(empty, EMPTY);
         add(strip, BorderLayout.NORTH);
         steps = new StepsPanel(theme, document, reader, reviewer);
         stepsPane = new Pane("Steps", steps, theme);
@@ -178,25 +180,23 @@ final class Workbench extends JPanel implements Drawer.Wishes, AutoCloseable {
         strip.report(outcome);
         substratePane.note("");
         boolean blank = outcome.text().get(StepField.SUBSTRATE).isEmpty();
-        if (outcome.shown().isEmpty() && !blank) {
+        if (blank) {
+            shown = Optional.empty();
+        }
+        if (outcome.shown().isEmpty() && shown.isEmpty()) {
+            empty.ask(outcome.problems(), blank);
+            cards.show(middle, EMPTY);
+        } else if (outcome.shown().isEmpty()) {
             doubt.restart();
             return;
         }
         doubt.stop();
         outdated(false);
-        if (blank) {
-            shown = Optional.empty();
-            cards.show(middle, EMPTY);
-        }
         outcome.shown().ifPresent(this::show);
     }
 
     /** Marks everything on screen as belonging to an earlier text than the fields now hold, or takes the mark away. */
     private void outdated(boolean is) {
-        if (is && shown.isEmpty()) {
-            substratePane.note("nothing to show yet");
-            return;
-        }
         List.of(substratePane, verdictPane).forEach(pane -> pane.note(is ? OUTDATED : ""));
         verdictPane.veil(is);
         drawerVeil.set(is);

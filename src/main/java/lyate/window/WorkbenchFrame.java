@@ -87,7 +87,7 @@ public final class WorkbenchFrame extends JFrame {
 
     private void fill(Engine engine) {
         getContentPane().removeAll();
-        SheetDocument document = new SheetDocument(StepCells.sheetOf(StepText.demo()), System::nanoTime);
+        SheetDocument document = new SheetDocument(StepCells.sheetOf(StepText.demo()), System::nanoTime, memory::newStep);
         files = new SheetFiles(this, document, memory);
         bench = new Workbench(theme, engine, document);
         recovery = new Recovery(memory.recoveryFolder(), document);

@@ -13,6 +13,7 @@ import java.util.ArrayList;
 import java.util.List;
 import javax.swing.JLabel;
 import javax.swing.SwingUtilities;
+import javax.swing.UIManager;
 import org.junit.jupiter.api.AfterEach;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
@@ -56,6 +57,70 @@ class PanelScaleTest {
             assertTrue(share(image, theme.color("stop")) > 0.001, "the accent of a wrong site is on screen");
             assertEquals(List.of(), textsOutside(findings));
         });
+    }
+
+    @ParameterizedTest
+    @CsvSource({"1,false", "1.5,true", "2,false", "3,true"})
+    void theFirstStopIsInSightAboveTheSafetyNotesOnASmallScreen(float scale, boolean dark) throws Exception {
+        SwingUtilities.invokeAndWait(() -> {
+            Theme theme = theme(scale, dark);
+            FindingsPanel findings = new FindingsPanel(theme, atoms -> {});
+            findings.setSize((int) (320 * scale), (int) (450 * scale));
+            findings.show(Panels.shown(StepText.demo()).review());
+            for (int pass = 0; pass < 3; pass++) {
+                layOut(findings);
+            }
+            FindingRow first = rows(findings).get(0);
+            Rectangle place = SwingUtilities.convertRectangle(first.getParent(), first.getBounds(), findings);
+            int safety = SwingUtilities.convertPoint(rows(findings).get(rows(findings).size() - 1).getParent(), 0, 0, findings).y;
+            int line = first.getFontMetrics(UIManager.getFont("Label.font")).getHeight();
+            assertTrue(safety - place.y > 3 * line, "heading and sentence of the finding end above the safety notes");
+            assertTrue(findings.getHeight() - safety > 3 * line, "a safety note is in sight");
+        });
+    }
+
+    @ParameterizedTest
+    @CsvSource({"1,false", "1.5,true", "2,false", "3,true"})
+    void noHeadOfTheTransfersIsCut(float scale, boolean dark) throws Exception {
+        SwingUtilities.invokeAndWait(() -> {
+            Theme theme = theme(scale, dark);
+            TransfersTable transfers = new TransfersTable(theme, atoms -> {}, site -> {});
+            transfers.show(Panels.shown(StepText.demo()));
+            transfers.setSize((int) (WIDTH * scale), (int) (200 * scale));
+            layOut(transfers);
+            RowsTable table = transfers.table();
+            for (int column = 0; column < table.getColumnCount(); column++) {
+                int head = table.getTableHeader().getFontMetrics(table.getTableHeader().getFont()).stringWidth(table.getColumnName(column));
+                assertTrue(head < table.getColumnModel().getColumn(column).getPreferredWidth(), table.getColumnName(column));
+            }
+        });
+    }
+
+    @ParameterizedTest
+    @CsvSource({"1,false", "1.5,true", "2,false", "3,true"})
+    void anEmptyWindowOffersExamplesThatAreNotCut(float scale, boolean dark) throws Exception {
+        SwingUtilities.invokeAndWait(() -> {
+            Theme theme = theme(scale, dark);
+            EmptyView empty = new EmptyView(theme, example -> {});
+            empty.setSize((int) (700 * scale), (int) (400 * scale));
+            layOut(empty);
+            assertEquals(List.of(), cutLabels(empty));
+            for (Component child : empty.getComponents()) {
+                assertTrue(new Rectangle(empty.getSize()).contains(child.getBounds()), child.toString());
+            }
+        });
+    }
+
+    private static List<FindingRow> rows(Container parent) {
+        List<FindingRow> found = new ArrayList<>();
+        for (Component child : parent.getComponents()) {
+            if (child instanceof FindingRow row) {
+                found.add(row);
+            } else if (child instanceof Container container) {
+                found.addAll(rows(container));
+            }
+        }
+        return found;
     }
 
     private static Theme theme(float scale, boolean dark) {

@@ -6,6 +6,7 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import java.nio.file.Path;
 import java.util.List;
+import java.util.Map;
 import java.util.concurrent.atomic.AtomicLong;
 import lyate.sheet.RouteSheet;
 import lyate.sheet.SheetRow;
@@ -97,5 +98,15 @@ class SheetDocumentTest {
         assertFalse(document.isModified());
         document.undo();
         assertTrue(document.isModified());
+    }
+
+    @Test
+    void anAddedStepBeginsWithWhatThePreferencesSay() {
+        StepText usual = new StepText(Map.of(StepField.SOLVENT, "THF"), "");
+        SheetDocument document = new SheetDocument(StepCells.sheetOf(StepText.demo()), System::nanoTime, () -> usual);
+        document.add();
+        assertEquals(usual, document.state().text());
+        document.undo();
+        assertEquals(StepText.demo(), document.state().text());
     }
 }

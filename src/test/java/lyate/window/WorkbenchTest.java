@@ -14,6 +14,7 @@ import java.awt.image.BufferedImage;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.List;
 import java.util.Optional;
 import java.util.concurrent.Callable;
@@ -24,6 +25,7 @@ import javax.imageio.ImageIO;
 import javax.swing.AbstractButton;
 import javax.swing.JComboBox;
 import javax.swing.JFrame;
+import javax.swing.JLabel;
 import javax.swing.JList;
 import javax.swing.JScrollBar;
 import javax.swing.JTable;
@@ -94,6 +96,23 @@ class WorkbenchTest {
         waitFor(bench -> bench.shown().orElseThrow().review().step().substrate().input().equals("CCO"));
         assertFalse(onEventThread(bench::isOutdated));
         assertFalse(onEventThread(() -> bench.strip().box(StepField.SUBSTRATE).line().isProblem()));
+    }
+
+    @Test
+    void aNewStepIsAskedForWhatIsMissingWithoutBeingScolded() throws Exception {
+        type(StepField.BASE, "");
+        type(StepField.SUBSTRATE, "");
+        waitFor(bench -> says(bench, "Type, paste or drop a structure above"));
+        assertFalse(onEventThread(() -> bench.strip().box(StepField.SUBSTRATE).line().isProblem()));
+        type(StepField.SUBSTRATE, "CCO");
+        waitFor(bench -> says(bench, "Now choose a base"));
+        type(StepField.BASE, "NaH");
+        waitFor(bench -> bench.shown().isPresent());
+    }
+
+    private static boolean says(Container parent, String words) {
+        return Arrays.stream(parent.getComponents()).anyMatch(child -> child.isShowing()
+                && (child instanceof JLabel label && words.equals(label.getText()) || child instanceof Container container && says(container, words)));
     }
 
     @Test
