@@ -53,7 +53,7 @@ record RxnText(List<String> lines, int firstLine) {
             int column = 3 * ORDER.indexOf(side);
             int count = counts.length() < column + 3 ? 0 : Integer.parseInt(counts.substring(column, column + 3).strip());
             for (int number = 1; number <= count; number++) {
-                if (!line(at).startsWith(MOL)) {
+                if (!line(at).strip().equals(MOL)) {
                     throw at(at, "'" + MOL + "' before " + side.word() + " " + number + " of " + count);
                 }
                 int end = next(at + 1, MOL);
