@@ -103,7 +103,7 @@ final class AssignmentSearch {
             return;
         }
         int p = order[depth];
-        for (Candidate candidate : candidates(p)) {
+        for (Candidate candidate : candidates(p, limit - cost)) {
             if (work > MOST_WORK) {
                 return;
             }
@@ -134,41 +134,39 @@ final class AssignmentSearch {
 
     private record Candidate(int source, int cost) {}
 
-    private List<Candidate> candidates(int p) {
+    /** What may be the source of a product atom within some cost, cheapest first. */
+    private List<Candidate> candidates(int p, int most) {
         List<Candidate> candidates = new ArrayList<>();
-        int[] colour = null;
-        Set<Integer> tried = new HashSet<>();
-        boolean[] repeated = repeatedColours(p);
         for (int r = 0; r < before.size(); r++) {
             work++;
-            if (use[r] != UNDECIDED || before.element[r] != after.element[p]) {
-                continue;
+            if (use[r] == UNDECIDED && before.element[r] == after.element[p]) {
+                add(candidates, p, r, most);
             }
-            if (repeated[before.colour[r]]) {
-                colour = colour == null ? refined() : colour;
-                if (!tried.add(colour[r])) {
-                    continue;
-                }
-            }
-            candidates.add(new Candidate(r, cost(p, r)));
         }
+        withoutRepeats(candidates);
         if (spare.getOrDefault(after.element[p], 0) > 0) {
-            candidates.add(new Candidate(NOWHERE, cost(p, NOWHERE)));
+            add(candidates, p, NOWHERE, most);
         }
         candidates.sort(Comparator.comparingInt(Candidate::cost));
         return candidates;
     }
 
-    private boolean[] repeatedColours(int p) {
-        boolean[] once = new boolean[before.size() + 1];
-        boolean[] repeated = new boolean[before.size() + 1];
-        for (int r = 0; r < before.size(); r++) {
-            if (use[r] == UNDECIDED && before.element[r] == after.element[p]) {
-                repeated[before.colour[r]] |= once[before.colour[r]];
-                once[before.colour[r]] = true;
-            }
+    private void add(List<Candidate> candidates, int p, int r, int most) {
+        int cost = cost(p, r);
+        if (cost <= most) {
+            candidates.add(new Candidate(r, cost));
         }
-        return repeated;
+    }
+
+    /** Leaves one of those that cannot be told apart; what cannot be told apart costs the same. */
+    private void withoutRepeats(List<Candidate> candidates) {
+        Set<Integer> seen = new HashSet<>();
+        candidates.forEach(candidate -> seen.add(before.colour[candidate.source()]));
+        if (seen.size() < candidates.size()) {
+            int[] colour = refined();
+            Set<Integer> tried = new HashSet<>();
+            candidates.removeIf(candidate -> !tried.add(colour[candidate.source()]));
+        }
     }
 
     /** Colours of the reactant atoms once those in use are told apart. */

@@ -27,6 +27,8 @@ public final class DrawnShelf {
     private final MoleculeReader molecules;
     private final Stockroom stockroom;
     private final List<DrawnBase> bases;
+    /** Keys of everything that bases are made of. */
+    private final Set<String> basePieces = new HashSet<>();
     private final Map<String, Solvent> solvents = new HashMap<>();
     private final Map<String, Acid> acids = new HashMap<>();
     private final Map<String, Partner> partners = new HashMap<>();
@@ -52,6 +54,7 @@ public final class DrawnShelf {
         this.molecules = molecules;
         this.stockroom = stockroom;
         this.bases = stockroom.bases().stream().map(base -> new DrawnBase(base, keys(base.smiles()))).toList();
+        bases.forEach(base -> basePieces.addAll(base.parts()));
         stockroom.solvents().forEach(solvent -> solvents.putIfAbsent(key(solvent.smiles()), solvent));
         stockroom.acids().forEach(acid -> acids.putIfAbsent(key(acid.smiles()), acid));
         stockroom.partners().forEach(partner -> partners.putIfAbsent(key(partner.smiles()), partner));
@@ -93,7 +96,7 @@ public final class DrawnShelf {
     }
 
     boolean isKnown(ReactionPart part) {
-        return isBase(part) || solvent(part).isPresent() || acid(part).isPresent() || partner(part).isPresent();
+        return basePieces.containsAll(part.keys()) || solvent(part).isPresent() || acid(part).isPresent() || partner(part).isPresent();
     }
 
     /** Every base all of whose parts are there, the strongest first; what is only a part of another is not named. */
