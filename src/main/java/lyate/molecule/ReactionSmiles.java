@@ -11,7 +11,8 @@ public final class ReactionSmiles {
 
     /** Components a reaction may have; nobody draws more. */
     private static final int MOST_PARTS = 60;
-    private static final Pattern LONE_ATOM = Pattern.compile("\\[[^\\]]*\\]");
+    /** A bare ion, or hydrogen. */
+    private static final Pattern LONE_ATOM = Pattern.compile("\\[[^\\]]*\\]|(\\[\\d*H\\]){2}");
 
     private ReactionSmiles() {}
 

@@ -29,7 +29,7 @@ public record Renumbering(Molecule molecule, int[] placeThen) {
             IAtom[] shuffled = order.stream().map(copy::getAtom).toArray(IAtom[]::new);
             copy.setAtoms(shuffled);
             int[] writtenAt = new int[shuffled.length];
-            String smiles = new SmilesGenerator(SmiFlavor.Stereo | SmiFlavor.AtomicMass).create(copy, writtenAt);
+            String smiles = new SmilesGenerator(SmiFlavor.Stereo | SmiFlavor.AtomicMass | SmiFlavor.AtomAtomMap).create(copy, writtenAt);
             int[] placeThen = new int[shuffled.length];
             for (int i = 0; i < shuffled.length; i++) {
                 placeThen[order.get(i)] = writtenAt[i];

@@ -21,7 +21,9 @@ final class AssignmentSearch {
     static final int NOWHERE = -1;
     private static final int UNDECIDED = -2;
     /** Atoms looked at before the search gives up: well under a second. */
-    private static final long MOST_WORK = 40_000_000;
+    private static final long MOST_WORK = 20_000_000;
+    /** Telling an atom's colour costs as much as looking at so many. */
+    private static final int WORK_OF_A_COLOUR = 20;
     private static final int MOST_SOLUTIONS = 64;
     private static final int[] LIMITS = {14, 26, 38, 50, 64, 80, 100, 130, 170};
 
@@ -175,8 +177,9 @@ final class AssignmentSearch {
         for (int r = 0; r < start.length; r++) {
             start[r] = use[r] == UNDECIDED ? before.colour[r] : before.size() + use[r];
         }
-        work += 4L * start.length;
-        return Colours.refine(before, start);
+        Colours.Stable stable = Colours.refined(before, start);
+        work += (long) WORK_OF_A_COLOUR * stable.rounds() * start.length;
+        return stable.of();
     }
 
     /** What placing {@code p} on {@code r} adds, seen from the product atoms decided so far. */

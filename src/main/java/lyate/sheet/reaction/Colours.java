@@ -17,6 +17,19 @@ final class Colours {
      * @return colours from 0, in an order that depends on the structure alone
      */
     static int[] refine(AtomGraph graph, int[] start) {
+        return refined(graph, start).of();
+    }
+
+    /**
+     * A stable colouring.
+     *
+     * @param of     colour of each atom
+     * @param rounds how often all atoms were looked at
+     */
+    record Stable(int[] of, int rounds) {}
+
+    /** As {@link #refine}, with what it took. */
+    static Stable refined(AtomGraph graph, int[] start) {
         int size = start.length;
         long[] signature = new long[size];
         for (int i = 0; i < size; i++) {
@@ -24,6 +37,7 @@ final class Colours {
         }
         int[] colour = ranks(signature);
         int classes = count(colour);
+        int rounds = 1;
         while (classes < size) {
             for (int i = 0; i < size; i++) {
                 long around = 0;
@@ -33,13 +47,14 @@ final class Colours {
                 signature[i] = mix(around * 31 + mix(colour[i] + 1L) * 17);
             }
             colour = ranks(signature);
+            rounds++;
             int now = count(colour);
             if (now == classes) {
                 break;
             }
             classes = now;
         }
-        return colour;
+        return new Stable(colour, rounds);
     }
 
     private static int[] ranks(long[] signature) {

@@ -22,8 +22,12 @@ import lyate.molecule.ReactionSmiles;
  */
 record DrawnReaction(List<ReactionPart> left, List<ReactionPart> agents, List<ReactionPart> right, Set<ReactionPart> ionic) {
 
-    /** Assignments that cost more are tried again with everything that is drawn. */
+    /** Assignments that cost more are tried again with more atoms to take from. */
     private static final int DEAR = 50;
+    /** What it costs to leave a product atom unexplained, to need a second molecule of the reactants, and to use up reagents. */
+    private static final int UNEXPLAINED = 8;
+    private static final int SECOND_MOLECULE = 6;
+    private static final int REAGENTS = 12;
     private static final int CARBON = 6;
 
     /** @throws MoleculeException as {@link ReactionSmiles#parts} */
@@ -71,7 +75,7 @@ record DrawnReaction(List<ReactionPart> left, List<ReactionPart> agents, List<Re
         }
     }
 
-    /** Looks among the reactants proper first, then among all that is drawn, then among two of every reactant. */
+    /** Takes the atoms of the products from the reactants proper, else from two of each of them, or from all that is drawn. */
     Found infer(DrawnShelf shelf) {
         List<Molecule> products = products();
         List<ReactionPart> proper = new ArrayList<>(left.stream().filter(this::mayGiveAtoms).toList());
@@ -79,30 +83,29 @@ record DrawnReaction(List<ReactionPart> left, List<ReactionPart> agents, List<Re
         if (products.isEmpty() || proper.isEmpty()) {
             return new Found(proper, Inferred.none(products.isEmpty() ? "no product is drawn" : "no reactant is drawn besides base and ions"), 0);
         }
-        SiteInference first = inference(proper, proper.size(), products);
-        Attempt best = new Attempt(proper, first);
-        if (first.unexplained() == 0 && first.cost() <= DEAR) {
-            return best.found();
-        }
-        List<ReactionPart> all = reagents().stream().filter(part -> part.molecule().isPresent()).toList();
-        if (all.size() > proper.size()) {
-            best = best.orBetter(new Attempt(all, inference(all, all.size(), products)));
+        Attempt first = new Attempt(proper, inference(proper, proper.size(), products), 0);
+        if (first.inference().unexplained() == 0 && first.inference().cost() <= DEAR) {
+            return first.found(ionic);
         }
         List<ReactionPart> twice = new ArrayList<>(proper);
         twice.addAll(left.stream().filter(this::mayGiveAtoms).toList());
-        return best.orBetter(new Attempt(twice, inference(twice, proper.size(), products))).found();
+        List<ReactionPart> all = reagents().stream().filter(part -> part.molecule().isPresent()).toList();
+        return first.orCheaper(new Attempt(twice, inference(twice, proper.size(), products), SECOND_MOLECULE))
+                .orCheaper(new Attempt(all, inference(all, all.size(), products), REAGENTS)).found(ionic);
     }
 
-    private record Attempt(List<ReactionPart> pool, SiteInference inference) {
+    private record Attempt(List<ReactionPart> pool, SiteInference inference, int extra) {
 
-        Attempt orBetter(Attempt other) {
-            boolean better = other.inference.unexplained() < inference.unexplained()
-                    || other.inference.unexplained() == inference.unexplained() && other.inference.cost() < inference.cost();
-            return better ? other : this;
+        Attempt orCheaper(Attempt other) {
+            return other.price() < price() ? other : this;
         }
 
-        Found found() {
-            return new Found(pool, inference.infer(), inference.unexplained());
+        private long price() {
+            return (long) inference.cost() + UNEXPLAINED * inference.unexplained() + extra;
+        }
+
+        Found found(Set<ReactionPart> reagents) {
+            return new Found(pool, inference.infer(index -> !reagents.contains(pool.get(index))), inference.unexplained());
         }
     }
 

@@ -11,9 +11,10 @@ import java.util.List;
  * @param donors     reactant atoms that lost one, what most likely is meant first
  * @param acceptors  reactant atoms that gained one together with positive charge
  * @param oxidised   whether two neighbours lost hydrogen and drew closer: hydrogen left, but not as a proton
+ * @param coupled    whether both ends of a new bond lost hydrogen
  * @param changes    heavy-atom bonds made and broken
  */
-record ProtonMoves(List<Donor> donors, List<Integer> acceptors, boolean oxidised, int changes) {
+record ProtonMoves(List<Donor> donors, List<Integer> acceptors, boolean oxidised, boolean coupled, int changes) {
 
     /** What became of an atom that lost a proton, plainest first. */
     enum Fate {
@@ -61,7 +62,7 @@ record ProtonMoves(List<Donor> donors, List<Integer> acceptors, boolean oxidised
             }
             donors.sort(Comparator.comparing(Donor::fate).thenComparing(donor -> before.element[donor.atom()])
                     .thenComparing(donor -> before.colour[donor.atom()]));
-            return new ProtonMoves(List.copyOf(donors), List.copyOf(acceptors), oxidised, changes());
+            return new ProtonMoves(List.copyOf(donors), List.copyOf(acceptors), oxidised, donors.stream().anyMatch(donor -> joinedToAnother(donor.atom())), changes());
         }
 
         private boolean lost(int r) {
@@ -71,6 +72,15 @@ record ProtonMoves(List<Donor> donors, List<Integer> acceptors, boolean oxidised
         private boolean lostBesideAnother(int r) {
             for (int s : before.neighbours[r]) {
                 if (lost(s) && order(after.bond(use[r], use[s])) > order(before.bond(r, s))) {
+                    return true;
+                }
+            }
+            return false;
+        }
+
+        private boolean joinedToAnother(int r) {
+            for (int q : after.neighbours[use[r]]) {
+                if (source[q] >= 0 && before.bond(r, source[q]) == 0 && lost(source[q])) {
                     return true;
                 }
             }

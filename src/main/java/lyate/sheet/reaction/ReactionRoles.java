@@ -120,7 +120,7 @@ final class ReactionRoles {
     private List<String> remarks() {
         List<String> remarks = new ArrayList<>();
         if (found.unexplained() > 0 && place.isPresent()) {
-            remarks.add(found.unexplained() + (found.unexplained() == 1 ? " atom" : " atoms") + " of the products come from nothing that is drawn");
+            remarks.add(found.unexplained() + (found.unexplained() == 1 ? " atom of the products comes" : " atoms of the products come") + " from nothing that is drawn");
         }
         if (place.isPresent()) {
             reaction.reagents().stream().filter(part -> !found.used().contains(part) && shelf.solvent(part).isEmpty() && !shelf.isBase(part))

@@ -9,6 +9,7 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalInt;
+import java.util.function.IntPredicate;
 import java.util.stream.IntStream;
 import lyate.molecule.Molecule;
 
@@ -21,7 +22,6 @@ final class SiteInference {
     /** Steps that make and break more bonds are several steps, and their assignment is a guess. */
     private static final int MANY_CHANGES = 8;
 
-    private final List<Molecule> reactants;
     private final AtomGraph before;
     private final AtomGraph after;
     private final boolean[] tied;
@@ -33,7 +33,6 @@ final class SiteInference {
      * @param products  not empty
      */
     SiteInference(List<Molecule> reactants, int mapped, List<Molecule> products) {
-        this.reactants = List.copyOf(reactants);
         this.before = AtomGraph.of(reactants, mapped);
         this.after = AtomGraph.of(products, products.size());
         this.tied = new boolean[before.size()];
@@ -77,8 +76,12 @@ final class SiteInference {
         return assignments.sources().isEmpty() ? Integer.MAX_VALUE : assignments.cost();
     }
 
-    /** What the assignments say. */
-    Inferred infer() {
+    /**
+     * What the assignments say.
+     *
+     * @param mayLoseProton which molecules are asked about: not the parts of a base
+     */
+    Inferred infer(IntPredicate mayLoseProton) {
         if (!assignments.complete()) {
             return Inferred.none("too many ways to assign the atoms");
         }
@@ -90,7 +93,7 @@ final class SiteInference {
             ProtonMoves moves = ProtonMoves.of(before, after, source);
             different.putIfAbsent(colours(moves), moves);
         }
-        return new Verdict(different.values().stream().toList()).inferred();
+        return new Verdict(different.values().stream().toList(), mayLoseProton).inferred();
     }
 
     private List<Integer> colours(ProtonMoves moves) {
@@ -103,9 +106,11 @@ final class SiteInference {
     private final class Verdict {
 
         private final List<ProtonMoves> moves;
+        private final IntPredicate mayLoseProton;
 
-        Verdict(List<ProtonMoves> moves) {
+        Verdict(List<ProtonMoves> moves, IntPredicate mayLoseProton) {
             this.moves = moves;
+            this.mayLoseProton = mayLoseProton;
         }
 
         Inferred inferred() {
@@ -123,6 +128,9 @@ final class SiteInference {
             } else if (leaving.isEmpty() && arriving.size() > 1) {
                 doubts.add(arriving.size() + " sites gain a proton");
             }
+            if (moves.get(0).coupled()) {
+                doubts.add("both ends of a new bond lose hydrogen, which is an oxidation");
+            }
             if (moves.get(0).changes() > MANY_CHANGES) {
                 doubts.add(moves.get(0).changes() + " bonds are made or broken, more than in one step");
             }
@@ -137,7 +145,8 @@ final class SiteInference {
             for (ProtonMoves each : moves) {
                 List<Integer> atoms = leaving ? each.donors().stream().map(ProtonMoves.Donor::atom).toList() : each.acceptors();
                 for (int atom : atoms) {
-                    if (!seen.contains(before.colour[atom])) {
+                    boolean asked = !leaving || mayLoseProton.test(before.part[atom]);
+                    if (asked && !seen.contains(before.colour[atom])) {
                         seen.add(before.colour[atom]);
                         places.add(new Inferred.Place(before.part[atom], before.atom[atom], tied[atom], partner(atom)));
                     }
@@ -158,11 +167,6 @@ final class SiteInference {
         private List<Integer> sources() {
             return IntStream.of(assignments.sources().get(0)).filter(r -> r >= 0).map(r -> before.part[r]).distinct().sorted().boxed().toList();
         }
-    }
-
-    /** The molecules the parts of {@link Inferred} are counted in. */
-    List<Molecule> reactants() {
-        return reactants;
     }
 
     /** Atom of {@code known} that corresponds to an atom of {@code other}, where both have one constitution. */
