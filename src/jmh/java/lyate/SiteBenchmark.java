@@ -1,13 +1,18 @@
 package lyate;
 
+import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 import java.util.concurrent.TimeUnit;
+import lyate.acidity.Acidity;
+import lyate.acidity.AcidityEstimator;
 import lyate.molecule.Molecule;
 import lyate.molecule.MoleculeException;
 import lyate.molecule.MoleculeReader;
 import lyate.site.ProtonSite;
 import lyate.site.SiteClasses;
 import lyate.site.SiteFinder;
+import lyate.stock.Medium;
 import lyate.table.TableFolders;
 import org.openjdk.jmh.annotations.Benchmark;
 import org.openjdk.jmh.annotations.BenchmarkMode;
@@ -18,8 +23,10 @@ import org.openjdk.jmh.annotations.OutputTimeUnit;
 import org.openjdk.jmh.annotations.Scope;
 import org.openjdk.jmh.annotations.State;
 import org.openjdk.jmh.annotations.Warmup;
+import org.openscience.cdk.exception.CDKException;
+import org.openscience.cdk.interfaces.IAtomContainer;
 
-/** What classing every site of a molecule costs, against reading the molecule. */
+/** What classing every site of a molecule and estimating its pKa cost, against reading the molecule. */
 @State(Scope.Benchmark)
 @BenchmarkMode(Mode.AverageTime)
 @OutputTimeUnit(TimeUnit.MICROSECONDS)
@@ -28,8 +35,16 @@ import org.openjdk.jmh.annotations.Warmup;
 @Fork(1)
 public class SiteBenchmark {
 
+    private final BareReading bare = new BareReading();
     private final MoleculeReader reader = new MoleculeReader();
     private final SiteFinder finder = new SiteFinder(SiteClasses.load(TableFolders.packaged()));
+    private final AcidityEstimator estimator = AcidityEstimator.load(TableFolders.packaged()).withoutMeasured();
+
+    /** The toolkit alone: parse, rings, aromaticity. */
+    @Benchmark
+    public IAtomContainer readBare() throws CDKException {
+        return bare.read(FlaskBenchmark.SUBSTRATE);
+    }
 
     @Benchmark
     public Molecule read() throws MoleculeException {
@@ -40,5 +55,16 @@ public class SiteBenchmark {
     @Benchmark
     public List<ProtonSite> readAndFindSites() throws MoleculeException {
         return finder.sites(reader.read(FlaskBenchmark.SUBSTRATE));
+    }
+
+    /** With an estimate in water for every site, recipe and relatives included. */
+    @Benchmark
+    public List<Optional<Acidity>> readFindAndEstimate() throws MoleculeException {
+        Molecule molecule = reader.read(FlaskBenchmark.SUBSTRATE);
+        List<Optional<Acidity>> values = new ArrayList<>();
+        for (ProtonSite site : finder.sites(molecule)) {
+            values.add(estimator.acidity(molecule, site, Medium.WATER));
+        }
+        return values;
     }
 }
