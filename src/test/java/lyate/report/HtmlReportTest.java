@@ -126,7 +126,7 @@ class HtmlReportTest {
         String words = Reports.html("Scale", Reports.reviewed("substrate,base,solvent,amount_g,base_titrated_M\nCC(C)=O,n-BuLi,THF,5.808,1.48\n"));
         // 5.808 g of propanone are 100 mmol; 100 mmol in 1.48 mol/L are 67.6 mL
         assertTrue(words.contains("For 100 mmol of substrate"));
-        assertTrue(words.contains("1.480 mol/L, titrated") && words.contains(">67.6<"));
+        assertTrue(words.contains("1.48 mol/L, titrated") && words.contains(">67.6<"));
         assertFalse(words.contains("No amount given"));
     }
 
