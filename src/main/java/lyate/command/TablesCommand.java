@@ -2,17 +2,23 @@ package lyate.command;
 
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Locale;
+import java.util.Set;
 import java.util.SortedSet;
 import java.util.concurrent.Callable;
 import java.util.function.Consumer;
+import java.util.stream.Stream;
+import lyate.acidity.AcidityEstimator;
 import lyate.bench.Enthalpies;
 import lyate.bench.QuenchHazards;
 import lyate.molecule.MoleculeReader;
 import lyate.review.AcidHazards;
 import lyate.review.RuleExamples;
+import lyate.review.RuleTables;
 import lyate.review.StepReviewer;
+import lyate.site.SiteClasses;
 import lyate.stock.Stockroom;
 import lyate.table.NearestNames;
 import lyate.table.TableException;
@@ -30,9 +36,12 @@ import picocli.CommandLine.Spec;
     "Lists the tables in use, or checks a folder of your own tables.", ""})
 final class TablesCommand implements Callable<Integer> {
 
-    /** Together they read every table once. */
-    private static final List<Consumer<TableFolders>> READERS = List.of(StepReviewer::load, MoleculeReader::load,
-            Enthalpies::load, folders -> QuenchHazards.load(folders, Stockroom.load(folders)), folders -> AcidHazards.load(folders, Stockroom.load(folders)));
+    /** Together they read every table; those that name no other table first. */
+    private static final List<Consumer<TableFolders>> READERS = Stream.of(
+            Stream.<Consumer<TableFolders>>of(Stockroom::load, MoleculeReader::load, SiteClasses::load, AcidityEstimator::load, Enthalpies::load),
+            RuleTables.cellChecks().stream(),
+            Stream.<Consumer<TableFolders>>of(StepReviewer::load, folders -> QuenchHazards.load(folders, Stockroom.load(folders)),
+                    folders -> AcidHazards.load(folders, Stockroom.load(folders)))).flatMap(readers -> readers).toList();
 
     private final Terminal terminal;
 
@@ -77,14 +86,17 @@ final class TablesCommand implements Callable<Integer> {
             }
         }
         TableFolders folders = TableFolders.overlaidBy(checked);
+        // Several readers need the same table; what is wrong with it is told once.
+        Set<String> told = new LinkedHashSet<>();
         for (Consumer<TableFolders> reader : READERS) {
             try {
                 reader.accept(folders);
             } catch (TableException e) {
-                sound = false;
-                terminal.tell(e.getMessage());
+                e.problems().forEach(problem -> told.add(problem.toString()));
             }
         }
+        told.forEach(terminal::tell);
+        sound &= told.isEmpty();
         if (sound) {
             List<String> examples = RuleExamples.load(folders).problemsOfOwnRows();
             examples.forEach(terminal::tell);

@@ -51,7 +51,8 @@ final class SideReactionTable {
         for (Row row : Table.read(SCHEMA, folders).rows()) {
             Optional<AtomPattern> pattern = pattern(row, "smarts");
             Optional<AtomPattern> unless = pattern(row, "unless_smarts");
-            pattern.ifPresent(compiled -> rules.add(rule(row, compiled, unless)));
+            // The other cells are looked at even where the pattern is broken, so that one reading names every fault of the row.
+            rules.add(rule(row, pattern, unless));
         }
         if (!problems.isEmpty()) {
             throw new TableException(problems);
@@ -59,10 +60,10 @@ final class SideReactionTable {
         return rules;
     }
 
-    private SideReactionRule rule(Row row, AtomPattern pattern, Optional<AtomPattern> unless) {
+    private SideReactionRule rule(Row row, Optional<AtomPattern> pattern, Optional<AtomPattern> unless) {
         return new SideReactionRule(row.id(), RulePlace.of(row, SCHEMA), Agent.valueOf(upper(row.text("agent"))),
                 Target.valueOf(upper(row.text("target"))),
-                pattern, cells.base(row), row.number("acid_pka_at_most"), cells.surroundings(row),
+                pattern.orElse(null), cells.base(row), row.number("acid_pka_at_most"), cells.surroundings(row),
                 ProtonsFirst.valueOf(upper(row.text("protons_first"))), row.number("base_left").orElse(0),
                 new Range(row.number("log_k_from"), row.number("log_k_to")), conditions(row), unless,
                 RuleCells.kind(row), RuleCells.severity(row), row.text("wins").equals("yes"), row.text("sentence"),

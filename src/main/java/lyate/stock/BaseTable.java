@@ -70,9 +70,9 @@ final class BaseTable {
             if (family == null) {
                 problems.add(row.problem("family", "a family of base-families.csv, nearest: "
                         + String.join(", ", NearestNames.of(row.text("family"), families.keySet(), 3))));
-            } else {
-                bases.add(base(row, family));
             }
+            // The other cells are looked at all the same, so that one reading names every fault of the row.
+            bases.add(base(row, family));
         }
         if (!problems.isEmpty()) {
             throw new TableException(problems);

@@ -1,9 +1,12 @@
 package lyate.stock;
 
+import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import java.util.function.Supplier;
 import lyate.table.TableException;
 import lyate.table.TableFolders;
+import lyate.table.TableProblem;
 
 /**
  * Everything on the shelf, loaded once and passed in. Immutable; safe to share between threads.
@@ -17,12 +20,11 @@ public final class Stockroom {
     private final Shelf<Acid> acids;
     private final Shelf<Partner> partners;
 
-    private Stockroom(TableFolders folders) {
-        BaseTable baseTable = new BaseTable(folders);
-        this.bases = new Shelf<>("base", "bases.csv", baseTable.read());
-        this.solvents = new Shelf<>("solvent", "solvents.csv", SolventTable.read(folders));
-        this.acids = new Shelf<>("acid", "acids.csv", AcidTable.read(folders));
-        this.partners = new Shelf<>("partner", "partners.csv", PartnerTable.read(folders, baseTable.familyIds()));
+    private Stockroom(Shelf<Base> bases, Shelf<Solvent> solvents, Shelf<Acid> acids, Shelf<Partner> partners) {
+        this.bases = bases;
+        this.solvents = solvents;
+        this.acids = acids;
+        this.partners = partners;
     }
 
     /**
@@ -31,7 +33,27 @@ public final class Stockroom {
      * @throws TableException naming file, line and column of every bad cell, and both rows where two share a name
      */
     public static Stockroom load(TableFolders folders) {
-        return new Stockroom(folders);
+        List<TableProblem> problems = new ArrayList<>();
+        Optional<BaseTable> families = sound(() -> new BaseTable(folders), problems);
+        Optional<Shelf<Base>> bases = families.flatMap(table -> sound(() -> new Shelf<>("base", "bases.csv", table.read()), problems));
+        Optional<Shelf<Solvent>> solvents = sound(() -> new Shelf<>("solvent", "solvents.csv", SolventTable.read(folders)), problems);
+        Optional<Shelf<Acid>> acids = sound(() -> new Shelf<>("acid", "acids.csv", AcidTable.read(folders)), problems);
+        Optional<Shelf<Partner>> partners = families.flatMap(table -> sound(() -> new Shelf<>("partner", "partners.csv",
+                PartnerTable.read(folders, table.familyIds())), problems));
+        if (!problems.isEmpty()) {
+            throw new TableException(problems);
+        }
+        return new Stockroom(bases.orElseThrow(), solvents.orElseThrow(), acids.orElseThrow(), partners.orElseThrow());
+    }
+
+    /** What a table gives, or empty with its problems noted: the other tables are read all the same. */
+    private static <T> Optional<T> sound(Supplier<T> table, List<TableProblem> problems) {
+        try {
+            return Optional.of(table.get());
+        } catch (TableException e) {
+            problems.addAll(e.problems());
+            return Optional.empty();
+        }
     }
 
     /** Every base, in the order of the table. */
