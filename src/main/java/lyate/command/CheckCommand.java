@@ -78,8 +78,10 @@ final class CheckCommand implements Callable<Integer> {
         SheetRow row = input.row();
         try {
             Optional<Acid> acid = acid(stockroom);
-            if (acid.isPresent() || input.base().isEmpty() && steps.isProtonation(row)) {
+            Optional<SiteOrigin> drawn = steps.drawnSite(row);
+            if (acid.isPresent() || input.base().isEmpty() && drawn.filter(SiteOrigin::arrives).isPresent()) {
                 protonation(row, ProtonationReviewer.load(folders, stockroom).review(steps.read(row, acid)));
+                drawn.filter(origin -> !origin.sure()).ifPresent(origin -> terminal.tell("--reaction: " + origin.confidence()));
             } else {
                 StepReviewer reviewer = StepReviewer.load(folders, stockroom);
                 Review review = reviewer.review(steps.read(row));

@@ -69,9 +69,9 @@ public final class StepReader {
         return AcidStep.of(read(row, true), meant.get());
     }
 
-    /** Whether the row's reaction is a protonation. */
-    public boolean isProtonation(SheetRow row) {
-        return drawn(row).filter(reaction -> reaction.origin().arrives()).isPresent();
+    /** What the row's reaction says of the site; empty where there is no reaction that can be read. */
+    public Optional<SiteOrigin> drawnSite(SheetRow row) {
+        return drawn(row).map(Reaction::origin);
     }
 
     private Optional<Reaction> drawn(SheetRow row) {
@@ -137,12 +137,19 @@ public final class StepReader {
             if (!name.isEmpty()) {
                 return stockroom.base(name);
             }
-            problems.add(new Problem(SheetColumn.BASE, "there is no base" + reaction.flatMap(Reaction::acid)
-                    .map(acid -> "; " + acid.name() + ", which is drawn, is an acid").orElse("")));
+            if (mayLack(row, reaction)) {
+                problems.add(new Problem(SheetColumn.BASE, "there is no base" + reaction.flatMap(Reaction::acid)
+                        .map(acid -> "; " + acid.name() + ", which is drawn, is an acid").orElse("")));
+            }
         } catch (UnknownNameException e) {
             problems.add(new Problem(SheetColumn.BASE, e.getMessage()));
         }
         return null;
+    }
+
+    /** Nothing is missed of a reaction that could not be read, or that no base takes part in. */
+    private static boolean mayLack(SheetRow row, Optional<Reaction> reaction) {
+        return row.text(SheetColumn.REACTION).isEmpty() || reaction.filter(drawn -> !drawn.origin().arrives()).isPresent();
     }
 
     private Solvent solvent(SheetRow row, Optional<Reaction> reaction, List<Problem> problems) {
@@ -155,7 +162,9 @@ public final class StepReader {
             if (!name.isEmpty()) {
                 return stockroom.solvent(name);
             }
-            problems.add(new Problem(SheetColumn.SOLVENT, "there is no solvent"));
+            if (mayLack(row, reaction)) {
+                problems.add(new Problem(SheetColumn.SOLVENT, "there is no solvent"));
+            }
         } catch (UnknownNameException e) {
             problems.add(new Problem(SheetColumn.SOLVENT, e.getMessage()));
         }

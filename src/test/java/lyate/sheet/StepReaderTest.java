@@ -110,6 +110,49 @@ class StepReaderTest {
         assertEquals(reason, refused.problems().get(0).reason().lines().findFirst().orElseThrow());
     }
 
+    @Test
+    void siteAndElectrophileOfAReaction() throws RowException, SheetException {
+        Step step = read("reaction", "O=C1CCCCC1.CI>CC(C)[N-]C(C)C.[Li+].C1CCOC1>CC1CCCCC1=O");
+        assertEquals("C3", step.intendedSite().orElseThrow());
+        assertEquals("CH3I", step.partner().orElseThrow().formula());
+        assertEquals("sure: one assignment", step.origin().orElseThrow().confidence());
+    }
+
+    @Test
+    void theSiteNamedGoesBeforeTheOneDrawn() throws RowException, SheetException {
+        Step step = read("reaction,site,base,solvent", "NCCO.CC(Cl)=O>>CC(=O)NCCO,O4,Et3N,DCM");
+        assertEquals("O4", step.intendedSite().orElseThrow());
+        assertEquals("N1", step.origin().orElseThrow().site().orElseThrow());
+    }
+
+    @Test
+    void theColumnSubstrateNumbersTheAtoms() throws RowException, SheetException {
+        Step step = read("substrate,reaction,base,solvent", "COC1=CC=CC=C1O,Oc1ccccc1OC.CI>>COc1ccccc1OC,K2CO3,DMF");
+        assertEquals("O9", step.intendedSite().orElseThrow());
+        RowException refused = assertThrows(RowException.class,
+                () -> read("substrate,reaction,base,solvent", "CCO,Oc1ccccc1.CI>>COc1ccccc1,K2CO3,DMF"));
+        assertEquals("column reaction: its substrate is Oc1ccccc1, the column substrate has OCC", refused.getMessage());
+    }
+
+    @Test
+    void baseAndElectrophileNamedThatAreNotThoseDrawn() throws RowException, SheetException {
+        Step step = read("reaction,base,electrophile,solvent", "Oc1ccccc1.CI>[Na+].[H-]>COc1ccccc1,K2CO3,BnBr,DMF");
+        assertEquals(List.of("the reaction shows sodium hydride as base, the row names potassium carbonate",
+                "the reaction shows IC as electrophile, the row names BrCc1ccccc1"), step.origin().orElseThrow().remarks());
+    }
+
+    @ParameterizedTest
+    @CsvSource(delimiter = '|', value = {
+        "Oc1ccccc1.CI>HCl.DMF>COc1ccccc1|column base: there is no base; concentrated hydrochloric acid, which is drawn, is an acid",
+        "Oc1ccccc1.CI>DMF>COc1ccccc1|column base: there is no base",
+        "Oc1ccccc1.CI>NaH>COc1ccccc1|column solvent: there is no solvent",
+        "CNC.Cl>>C[NH2+]C|column reaction: a proton arrives at N2 (from concentrated hydrochloric acid): this is a protonation;"
+                + " 'lyate check --reaction' judges it",
+    })
+    void whatAReactionLacks(String reaction, String problem) {
+        assertEquals(problem, assertThrows(RowException.class, () -> read("reaction", '"' + reaction + '"')).getMessage());
+    }
+
     @ParameterizedTest
     @CsvSource({"1.05,1.05", "'1,05',1.05", "\u22123,-3", ".5,0.5", "2.,2", "+1e1,10"})
     void numbersAsPeopleWriteThem(String text, double value) {
