@@ -23,6 +23,7 @@ import lyate.review.Protonation;
 import lyate.review.ProtonationReviewer;
 import lyate.review.Review;
 import lyate.review.ReviewException;
+import lyate.review.SiteOrigin;
 import lyate.review.StepReviewer;
 import lyate.sheet.ReviewedRow;
 import lyate.sheet.RowException;
