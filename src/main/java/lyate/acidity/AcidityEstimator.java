@@ -28,15 +28,12 @@ public final class AcidityEstimator {
 
     private static final List<Medium> ESTIMATED_IN = List.of(Medium.WATER, Medium.DMSO);
 
-    /** An estimate less sure than this is extrapolated from acids of another kind; the class value knows the kind. */
-    private static final double NEAR_DATA_SIGMA = 1.5;
-
     private final MeasuredAcidities measured;
     private final MediaTransfer transfer;
     private final ClassShift shift;
     private final List<SiteEstimate> estimates;
 
-    /** Of the {@code estimates} that answer from near their data the surest wins; where none does, the last that answers. */
+    /** The {@code estimates} that answer are averaged, the surer ones counting more. */
     public AcidityEstimator(MeasuredAcidities measured, MediaTransfer transfer, List<SiteEstimate> estimates) {
         this.measured = measured;
         this.transfer = transfer;
@@ -75,13 +72,10 @@ public final class AcidityEstimator {
         return carried.or(() -> estimated).or(() -> estimateElsewhere(molecule, site, medium));
     }
 
-    /** A relationship used far from the acids it was fitted on says so by its uncertainty, and the class value may know better. */
+    /** The relationship knows the substituents, the class value the kind: together they miss less than either (docs/accuracy.md). */
     private Optional<Acidity> estimate(Molecule molecule, ProtonSite site, Medium medium) {
-        List<Acidity> answers = estimates.stream().map(estimate -> estimate.estimate(molecule, site, medium))
-                .flatMap(Optional::stream).toList();
-        return answers.stream().filter(answer -> answer.sigma() <= NEAR_DATA_SIGMA)
-                .reduce((first, second) -> first.sigma() <= second.sigma() ? first : surer(first, second))
-                .or(() -> answers.stream().reduce((first, later) -> later));
+        return estimates.stream().map(estimate -> estimate.estimate(molecule, site, medium)).flatMap(Optional::stream)
+                .reduce(WeightedMean::of);
     }
 
     private Optional<Acidity> estimateElsewhere(Molecule molecule, ProtonSite site, Medium medium) {

@@ -14,6 +14,7 @@ import lyate.acidity.lfer.Published;
 import lyate.acidity.lfer.SiteDescriber;
 import lyate.acidity.lfer.Spread.Curve;
 import lyate.fit.CrossValidation.Outcome;
+import lyate.site.SiteClasses;
 import lyate.stock.Medium;
 import lyate.table.TableFolders;
 
@@ -44,6 +45,7 @@ public final class Fit {
         TrainingFiles files = TrainingFiles.read(folder, describer);
         MeasuredAcidities measured = MeasuredAcidities.load(tables);
         files.add(measured);
+        files.add(SiteClasses.load(tables));
         Published published = Published.load(tables);
         ModelFit.Start start = new ModelFit.Start(Pools.load(tables), published, describer,
                 MeasuredRows.of(measured));
@@ -55,7 +57,8 @@ public final class Fit {
                 spread.put(medium, SpreadFit.of(here));
             }
         }
-        ModelFit fit = ModelFit.of(start, Stream.concat(files.placed.stream(), files.tabled.stream()).toList(), files.unplaced);
+        ModelFit fit = ModelFit.of(start, Stream.of(files.placed, files.tabled, files.ofClasses).flatMap(List::stream).toList(),
+                files.unplaced);
         Files.createDirectories(output);
         write(output, "estimate-coefficients.csv", FittedTables.coefficients(fit, published));
         write(output, "estimate-anchors.csv", FittedTables.anchors(fit, start.measured()));

@@ -19,6 +19,9 @@ import lyate.molecule.Molecule;
 import lyate.molecule.MoleculeException;
 import lyate.molecule.MoleculeReader;
 import lyate.site.Role;
+import lyate.site.SiteClass;
+import lyate.site.SiteClasses;
+import lyate.site.SiteFinder;
 import lyate.stock.Medium;
 import org.apache.commons.csv.CSVFormat;
 import org.apache.commons.csv.CSVParser;
@@ -44,11 +47,14 @@ final class TrainingFiles {
     /** Tabled values with a larger standard uncertainty count as uncertain, or are not used. */
     private static final double VAGUE = 0.3;
     private static final double TOO_VAGUE = 1;
+    /** Standard uncertainty of a reliable value in DMSO, against which the spread of a class is measured. */
+    private static final double RELIABLE = 0.4;
 
     private final SiteDescriber describer;
     private final MoleculeReader reader = new MoleculeReader();
     final List<TrainingRow> placed = new ArrayList<>();
     final List<TrainingRow> tabled = new ArrayList<>();
+    final List<TrainingRow> ofClasses = new ArrayList<>();
     final List<UnplacedRow> unplaced = new ArrayList<>();
     final List<String> passedOver = new ArrayList<>();
 
@@ -91,6 +97,36 @@ final class TrainingFiles {
             }
         }
         unplaced.removeIf(row -> named.contains(Medium.WATER.id() + row.role() + row.molecule().canonicalKey()));
+    }
+
+    /**
+     * Adds the values that site classes have in DMSO, each at the example of its class and as uncertain as the class is wide, but
+     * for compounds whose value is known. They say something of kinds of acids that nobody has measured a series of.
+     */
+    void add(SiteClasses classes) {
+        Set<String> known = Stream.concat(placed.stream(), tabled.stream()).map(TrainingFiles::identity).collect(Collectors.toSet());
+        SiteFinder finder = new SiteFinder(classes);
+        for (SiteClass siteClass : classes.rows()) {
+            siteClass.dmso().flatMap(value -> classRow(siteClass, value, finder)).filter(row -> known.add(identity(row)))
+                    .ifPresent(ofClasses::add);
+        }
+    }
+
+    private static String identity(TrainingRow row) {
+        return row.medium().id() + row.site().series().role() + row.compound() + row.label();
+    }
+
+    private Optional<TrainingRow> classRow(SiteClass siteClass, SiteClass.ClassValue value, SiteFinder finder) {
+        try {
+            Molecule molecule = reader.read(siteClass.hit());
+            return finder.sites(molecule, siteClass.role()).stream().filter(site -> site.siteClass().equals(siteClass)).findFirst()
+                    .flatMap(site -> describer.describe(molecule, siteClass.role(), site.atom())
+                            .map(described -> new TrainingRow("class " + siteClass.id(), siteClass.hit(), molecule.label(site.atom()),
+                                    molecule.canonicalKey(), "", true, Medium.DMSO, described, value.pKa(),
+                                    Math.max(1, value.sigma() / RELIABLE))));
+        } catch (MoleculeException e) {
+            throw new IllegalStateException("the example of " + siteClass.id() + " cannot be read", e);
+        }
     }
 
     private void read(Path path) throws IOException {

@@ -9,14 +9,16 @@ import lyate.acidity.Acidity.Effect;
  * Groups on the site that take up the charge of its anion, strongest first.
  *
  * <p>Each further group finds less left to do, the less the stronger the first one is: the second counts with
- * {@code 1.05 - 0.018 s1}, later ones with a fifth of their strength (read off the series CH3X, CH2XY, CHXYZ of
- * Bordwell, Acc. Chem. Res. 1988, 21, 456).
+ * {@code 1.05 - 0.018 s1}, later ones with a fifth of their strength, and more beside linear groups, which leave them room to turn into
+ * the plane (read off the series CH3X, CH2XY, CHXYZ of Bordwell, Acc. Chem. Res. 1988, 21, 456).
  */
 final class AnionTerms {
 
     private static final double SECOND = 1.05;
     private static final double SATURATION = 0.018;
     private static final double LATER = 0.2;
+    /** Read off phenylmalononitrile, ethyl phenylcyanoacetate and diphenylacetonitrile (the same source, from memory). */
+    private static final double LATER_PER_LINEAR = 0.17;
     /** Lowering by a cyclopentadienide ring (cyclopentadiene, DMSO), and what each fused benzo ring takes away. */
     private static final double CYCLOPENTADIENIDE = 38;
     private static final double BENZO = 2.3;
@@ -36,9 +38,10 @@ final class AnionTerms {
         List<Stabiliser> groups = stabilisers(facts, site);
         groups.sort(Comparator.comparingDouble(group -> -group.strength()));
         double total = 0;
+        double later = LATER + LATER_PER_LINEAR * linear(t, site);
         for (int i = 0; i < groups.size(); i++) {
             Stabiliser group = i == 0 ? groups.get(0) : afterOthers(t, groups.get(0), groups.get(i));
-            double share = i == 0 ? 1 : i == 1 ? SECOND - SATURATION * groups.get(0).strength() : LATER;
+            double share = i == 0 ? 1 : i == 1 ? SECOND - SATURATION * groups.get(0).strength() : later;
             total += share * group.strength();
             terms.add("anion.total", Effect.RESONANCE, share * group.strength() / 10, group.atom(), group.name());
             if (i > 0) {
@@ -57,6 +60,14 @@ final class AnionTerms {
                 terms.add("anion.fluorine", Effect.RESONANCE, 1, t.child[branch]);
             }
         }
+    }
+
+    private static int linear(Topology t, int site) {
+        int count = 0;
+        for (int branch = t.first[site]; branch < t.first[site + 1]; branch++) {
+            count += t.element[t.child[branch]] == 6 && BindingState.of(t, branch).equals("sp") ? 1 : 0;
+        }
+        return count;
     }
 
     /** A second aromatic ring cannot turn into the plane as well: what helps it from afar helps little. */

@@ -47,6 +47,7 @@ final class ChainTerms {
         if (t.element[child] != 6) {
             terms.add("chain.hetero", Effect.ATOM, 1, child, s.name());
             terms.add("chain.halogen", Effect.ATOM, Elements.halogen(t.element[child]) ? 1 : 0, child, s.name());
+            terms.add("chain.hetero.hydrogens", Effect.ATOM, t.hydrogens[child], child, s.name());
             terms.add("chain.hetero.induction", Effect.INDUCTION, s.induction(), child, s.name());
             terms.add("chain.hetero.resonance", Effect.RESONANCE, s.resonance(), child, s.name());
             return;

@@ -11,8 +11,11 @@ final class RemoteHelp {
 
     private static final int REACH = 4;
     private static final double PER_SIGMA = 15;
-    /** Taking up the charge itself (nitro, acyl) helps more than sigma minus of phenols says. */
-    private static final double ACCEPTANCE = 1.25;
+    /** Share of what a group that takes up the charge does next to it that is left across a benzene ring, across a double bond. */
+    private static final double PHENYLOGOUS = 0.52;
+    private static final double VINYLOGOUS = 0.6;
+    /** A group that lowers the pKa of CH3-X by this much takes up the charge itself. */
+    private static final double ACCEPTOR = 20;
     private static final double AZA_CONJUGATED = 7;
     private static final double AZA_OTHER = 3;
     private static final double ONIUM = 8;
@@ -42,23 +45,27 @@ final class RemoteHelp {
                     queue[tail++] = child;
                 } else if (t.order[next] == 1 && atom != root && t.charge[atom] == 0 && constants[next] != null) {
                     Substituent s = constants[next];
-                    help += PER_SIGMA * (s.induction() + (conjugated ? s.resonance() + ACCEPTANCE * s.acceptance() : 0.35 * s.resonance()));
+                    help += conjugated ? conjugated(s, PHENYLOGOUS) : PER_SIGMA * (s.induction() + 0.35 * s.resonance());
                 }
             }
         }
         return help;
     }
 
-    /** The same for a carbon-carbon double bond: what stands at its far end. */
-    static double helpAlongDoubleBond(Topology t, int branch, Substituent[] constants) {
+    private static double conjugated(Substituent s, double share) {
+        return s.carbanion() >= ACCEPTOR && s.acceptance() > 0 ? share * s.carbanion()
+                : PER_SIGMA * (s.induction() + s.resonance() + s.acceptance());
+    }
+
+    /** The same for a carbon-carbon double or triple bond: what stands at its far end. */
+    static double helpAlongMultipleBond(Topology t, int branch, Substituent[] constants) {
         double help = 0;
         int root = t.child[branch];
         for (int b = t.first[root]; b < t.first[root + 1]; b++) {
             int end = t.child[b];
-            for (int c = t.first[end]; t.order[b] == 2 && c < t.first[end + 1]; c++) {
+            for (int c = t.first[end]; (t.order[b] == 2 || t.order[b] == 3) && c < t.first[end + 1]; c++) {
                 if (t.child[c] != root && constants[c] != null) {
-                    Substituent s = constants[c];
-                    help += t.aromatic[t.child[c]] ? ARYL_AT_END : PER_SIGMA * (s.induction() + s.resonance() + s.acceptance());
+                    help += t.aromatic[t.child[c]] ? ARYL_AT_END : conjugated(constants[c], VINYLOGOUS);
                 }
             }
         }

@@ -25,6 +25,8 @@ final class RingTerms {
     private int smallestRing;
     private double inductionSum;
     private double inductionSquares;
+    /** Whether the site hangs on the ring by a ring bond: a neighbour in that ring holds it in the plane rather than crowds it. */
+    private boolean tiedBack;
 
     private RingTerms(Facts facts, String prefix, int anchor, Terms terms) {
         this.facts = facts;
@@ -49,6 +51,8 @@ final class RingTerms {
     }
 
     private void addAll(int from) {
+        int bond = from < 0 ? -1 : t.branchBetween(anchor, from);
+        tiedBack = bond >= 0 && t.ringBond[bond];
         if (smallestRing == 5) {
             terms.add(prefix + ".five-membered", Effect.ORBITAL, 1, anchor);
         }
@@ -109,7 +113,8 @@ final class RingTerms {
         terms.add(place + ".resonance", Effect.RESONANCE, s.resonance(), child, who);
         terms.add(place + ".acceptance", Effect.RESONANCE, s.acceptance(), child, who);
         terms.add(place + ".donation", Effect.RESONANCE, s.donation(), child, who);
-        if (place.endsWith("ortho") || place.endsWith("peri")) {
+        boolean crowding = !t.ringBond[branch] || !tiedBack;
+        if (crowding && (place.endsWith("ortho") || place.endsWith("peri"))) {
             terms.add(place + ".count", Effect.STERICS, 1, child, who);
             terms.add(place + ".bulk", Effect.STERICS, t.degree(child) - 1, child, who);
         }

@@ -21,9 +21,11 @@ final class ShapeTerms {
         int ringBonds = 0;
         int alphaRing = 0;
         int cyclopropyl = 0;
+        int heldAryls = 0;
         for (int branch = t.first[site]; branch < t.first[site + 1]; branch++) {
             int size = t.smallestRing(branch);
             ringBonds += t.ringBond[branch] ? 1 : 0;
+            heldAryls += size == 6 && t.aromatic[t.child[branch]] ? 1 : 0;
             if (size > 0 && (smallest == 0 || size < smallest)) {
                 smallest = size;
             }
@@ -35,6 +37,9 @@ final class ShapeTerms {
         if (ringBonds > 0 && !t.aromatic[site]) {
             terms.add("shape.ring-" + (smallest == 0 ? "large" : smallest), Effect.ORBITAL, 1, site);
             terms.add("shape.bridgehead", Effect.STERICS, Math.max(0, ringBonds - 2), site);
+        }
+        if (!t.aromatic[site] && terms.value("anion.aromatic") == 0) {
+            terms.add("shape.held-aryls", Effect.RESONANCE, Math.max(0, heldAryls - 1), site, "two aryl groups held in one plane by a six-membered ring");
         }
         terms.add("shape.on-ring", Effect.STERICS, alphaRing, site);
         terms.add("shape.on-cyclopropane", Effect.ORBITAL, cyclopropyl, site);

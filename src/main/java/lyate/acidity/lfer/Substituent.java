@@ -14,6 +14,11 @@ package lyate.acidity.lfer;
 record Substituent(String name, double induction, double resonance, double resonanceMinus, double resonancePlus,
                    double carbanion, boolean listed) {
 
+    /** The same group with this carbanion constant. */
+    Substituent withCarbanion(double value) {
+        return new Substituent(name, induction, resonance, resonanceMinus, resonancePlus, value, listed);
+    }
+
     /** By how much more the group takes electrons from a rich centre than from benzene; 0 or more. */
     double acceptance() {
         return Math.max(0, resonanceMinus - resonance);

@@ -8,6 +8,7 @@ import java.util.Arrays;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Set;
 import lyate.molecule.Molecule;
 import lyate.molecule.MoleculeException;
 import lyate.molecule.MoleculeReader;
@@ -127,26 +128,38 @@ final class Substituents {
         }
         for (int branch = 0; branch < constants.length; branch++) {
             Substituent root = roots[branch].constants();
-            if (constants[branch] == null) {
+            Substituent c = constants[branch];
+            if (c == null) {
                 constants[branch] = new Substituent(root.name(), induction[branch], root.resonance(), root.resonanceMinus(),
-                        root.resonancePlus(), carbanion(t, branch, root, induction[branch], constants), false);
-            } else if (Double.isNaN(constants[branch].carbanion())) {
-                Substituent c = constants[branch];
-                constants[branch] = new Substituent(c.name(), c.induction(), c.resonance(), c.resonanceMinus(),
-                        c.resonancePlus(), carbanion(t, branch, root, c.induction(), constants), true);
+                        root.resonancePlus(), carbanion(root, induction[branch]), false);
+            } else if (Double.isNaN(c.carbanion())) {
+                constants[branch] = c.withCarbanion(carbanion(root, c.induction()));
             }
         }
+        addRemoteHelp(t, constants, roots, keys);
         return constants;
     }
 
-    private static double carbanion(Topology t, int branch, Substituent root, double induction, Substituent[] constants) {
-        if (t.aromatic[t.child[branch]]) {
-            return root.carbanion() + RemoteHelp.help(t, branch, constants);
-        }
-        if (t.element[t.child[branch]] == 6 && BindingState.of(t, branch).equals("sp2")) {
-            return root.carbanion() + RemoteHelp.helpAlongDoubleBond(t, branch, constants);
-        }
+    private static double carbanion(Substituent root, double induction) {
         return root.carbanion() + CARBANION_PER_SIGMA * (induction - root.induction());
+    }
+
+    /** What takes up charge from afar can be said only when every group is known. */
+    private void addRemoteHelp(Topology t, Substituent[] constants, RootAtom[] roots, BranchKeys keys) {
+        Substituent[] near = constants.clone();
+        for (int branch = 0; branch < constants.length; branch++) {
+            boolean unsaturatedCarbon = t.element[t.child[branch]] == 6 && t.unsaturated(t.child[branch]);
+            Substituent known = unsaturatedCarbon || t.aromatic[t.child[branch]] ? listed(keys, branch, t.order[branch]) : near[branch];
+            if (known != null && !Double.isNaN(known.carbanion())) {
+                continue;
+            }
+            double own = roots[branch].constants().carbanion();
+            if (t.aromatic[t.child[branch]]) {
+                constants[branch] = near[branch].withCarbanion(own + RemoteHelp.help(t, branch, near));
+            } else if (Set.of("sp2", "sp").contains(BindingState.of(t, branch))) {
+                constants[branch] = near[branch].withCarbanion(own + RemoteHelp.helpAlongMultipleBond(t, branch, near));
+            }
+        }
     }
 
     private Substituent listed(BranchKeys keys, int branch, int order) {
