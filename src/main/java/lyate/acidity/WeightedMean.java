@@ -17,11 +17,19 @@ final class WeightedMean {
      * By how much the second estimate, the value of the class, is less sure of an acid nobody has measured than the spread of the
      * known members says (found on acids that neither the class values nor the fit had seen).
      */
-    private static final double UNSEEN_MEMBER = 2;
+    private static final double UNSEEN_MEMBER = 1.5;
+
+    /** A relationship less sure than this is extrapolated from acids of another kind; the class value knows the kind. */
+    private static final double FAR_FROM_DATA = 2;
 
     private WeightedMean() {}
 
     static Acidity of(Acidity first, Acidity second) {
+        return first.sigma() > FAR_FROM_DATA && second.sigma() < first.sigma()
+                ? second.beside(List.of(first.alternative())).withRelatives(first.relatives()) : mean(first, second);
+    }
+
+    private static Acidity mean(Acidity first, Acidity second) {
         double secondSigma = UNSEEN_MEMBER * second.sigma();
         double firstWeight = 1 / (first.sigma() * first.sigma());
         double secondWeight = 1 / (secondSigma * secondSigma);
@@ -32,7 +40,7 @@ final class WeightedMean {
         String way = String.format(Locale.ROOT, "%.0f %% of the way to %.1f, %s", 100 * share, second.pKa(), second.alternative().text());
         terms.add(new Contribution(way, Effect.RELATIVES, share * gap, List.of()));
         List<Alternative> ways = List.of(first.alternative(), second.alternative());
-        String spread = String.format(Locale.ROOT, "two estimates of %.2f (%s) and of %.2f (%s), counted twice as wide, that are %.1f apart",
+        String spread = String.format(Locale.ROOT, "two estimates of %.2f (%s) and of %.2f (%s), counted half as wide again, that are %.1f apart",
                 first.sigma(), first.spread(), second.sigma(), second.spread(), Math.abs(gap));
         return new Acidity(first.pKa() + share * gap, sigma, first.medium(), first.basis(), terms, first.missing(), first.relatives(),
                 spread, ways, first.source() + ", weighed with the class value: " + second.source());

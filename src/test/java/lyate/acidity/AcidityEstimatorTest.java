@@ -70,19 +70,22 @@ class AcidityEstimatorTest {
         assertTrue(acid.contributions().get(0).text().startsWith("class value"), acid.contributions()::toString);
     }
 
+    /** The second is the value of a class and counts as half as wide again: here both weigh alike. */
     @Test
-    void ofSeveralEstimatesTheSurestWins() {
+    void twoEstimatesAreWeighedAndTheirDistanceCounts() {
         AcidityEstimator estimator = new AcidityEstimator(MeasuredAcidities.none(), TRANSFER,
-                List.of(always(20, 0.1, Medium.DMSO), always(5, 1, Medium.WATER), always(6, 0.5, Medium.WATER), always(7, 0.5, Medium.WATER)));
+                List.of(always(20, 0.1, Medium.DMSO), always(5, 1, Medium.WATER), always(7, 1 / 1.5, Medium.WATER)));
         Acidity acid = acidity(estimator, "CC(=O)O", "O4", Medium.WATER).orElseThrow();
-        assertEquals(6, acid.pKa(), "the first of two equally sure ones");
-        assertTrue(acid.source().contains("preferred to the estimated value 5.0"), acid.source());
+        assertEquals(6, acid.pKa(), 1e-9);
+        assertEquals(6, acid.contributions().stream().mapToDouble(Contribution::value).sum(), 1e-9);
+        assertEquals(Math.hypot(Math.sqrt(0.5), 1), acid.sigma(), 1e-9);
+        assertTrue(acid.alternatives().stream().anyMatch(way -> way.pKa() == 5) && acid.alternatives().stream().anyMatch(way -> way.pKa() == 7));
     }
 
     @Test
-    void whereNoneIsNearItsDataTheLastAnswers() {
+    void aRelationshipFarFromItsDataLeavesItToTheClassValue() {
         AcidityEstimator estimator = new AcidityEstimator(MeasuredAcidities.none(), TRANSFER,
-                List.of(always(5, 1.9, Medium.WATER), always(6, 2, Medium.WATER)));
+                List.of(always(5, 2.5, Medium.WATER), always(6, 2, Medium.WATER)));
         assertEquals(6, acidity(estimator, "CC(=O)O", "O4", Medium.WATER).orElseThrow().pKa());
     }
 

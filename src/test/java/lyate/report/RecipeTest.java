@@ -71,7 +71,7 @@ class RecipeTest {
         List<Line> lines = lines(ESTIMATE_ONLY, "CCCCc1ccc(O)cc1", "O9", Medium.WATER);
         assertTrue(of(Part.RELATIVE, lines).stream().allMatch(line -> !line.source().isEmpty() && line.value().isPresent()));
         assertTrue(!of(Part.RELATIVE, lines).isEmpty(), lines::toString);
-        assertTrue(of(Part.UNCERTAINTY, lines).get(0).text().startsWith("cross-validation of "), lines::toString);
+        assertTrue(of(Part.UNCERTAINTY, lines).get(0).text().contains("cross-validation of phenol"), lines::toString);
     }
 
     @Test

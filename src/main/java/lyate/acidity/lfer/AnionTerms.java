@@ -101,6 +101,10 @@ final class AnionTerms {
             if (t.ringBond[branch] && (state.equals("ester") || state.equals("amide"))) {
                 terms.add("anion.lactone", Effect.ORBITAL, 1, t.child[branch]);
             }
+            // in a ring the substituent of an enolate lies in the plane already and does not crowd
+            if (t.ringBond[branch] && state.equals("acyl") && t.degree(site) == 3) {
+                terms.add("anion.ring-tertiary", Effect.STERICS, 1, t.child[branch]);
+            }
         }
         if (t.element[site] == 6 && t.inRing[site]) {
             for (int[] ring : SixRing.around(t, site)) {

@@ -39,7 +39,7 @@ final class BindingState {
     private static String acyl(Topology t, int atom) {
         for (int b = t.first[atom]; b < t.first[atom + 1]; b++) {
             if (t.order[b] == 1 && t.element[t.child[b]] == 7) {
-                return "amide";
+                return acylated(t, t.child[b], atom) ? "imide" : "amide";
             }
             if (t.order[b] == 1 && t.element[t.child[b]] == 8) {
                 return "ester";
@@ -50,6 +50,16 @@ final class BindingState {
             }
         }
         return "acyl";
+    }
+
+    /** Whether the lone pair of the nitrogen is held by another acyl or sulfonyl group. */
+    private static boolean acylated(Topology t, int nitrogen, int carbonyl) {
+        for (int b = t.first[nitrogen]; b < t.first[nitrogen + 1]; b++) {
+            if (t.child[b] != carbonyl && t.oxo(t.child[b])) {
+                return true;
+            }
+        }
+        return false;
     }
 
     private static String nitrogen(Topology t, int atom) {
