@@ -52,7 +52,7 @@ final class PreferencesWindow extends JDialog {
         for (StepField field : StepField.values()) {
             if (field != StepField.SUBSTRATE && field != StepField.PARTNER) {
                 JTextField text = new JTextField(blank.get(field), 28);
-                text.putClientProperty("JTextField.placeholderText", "left open");
+                text.putClientProperty("JTextField.placeholderText", field.isNumber() ? "the usual" : "left open");
                 usual.put(field, text);
                 row("New steps: " + field.label(), text);
             }

@@ -5,6 +5,7 @@ import java.util.Collections;
 import java.util.EnumMap;
 import java.util.List;
 import java.util.Map;
+import lyate.molecule.ReactionFile;
 import lyate.sheet.RouteSheet;
 import lyate.sheet.SheetColumn;
 import lyate.sheet.SheetRow;
@@ -54,9 +55,9 @@ final class StepCells {
         return cleared.withCell(row, SheetColumn.SUBSTRATE.header(), reaction ? "" : text);
     }
 
-    /** Whether a text is a reaction: an RXN file, or one line with exactly two arrows' worth of {@code >}. */
+    /** Whether a text is a reaction: an RXN or RD file, or one line with exactly two arrows' worth of {@code >}. */
     static boolean isReaction(String text) {
-        return text.startsWith("$RXN") || !text.contains("\n") && text.chars().filter(letter -> letter == '>').count() == 2;
+        return ReactionFile.looksLike(text) || !text.contains("\n") && text.chars().filter(letter -> letter == '>').count() == 2;
     }
 
     /** A sheet of one step. */

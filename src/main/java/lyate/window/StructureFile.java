@@ -1,6 +1,7 @@
 package lyate.window;
 
 import java.io.IOException;
+import java.io.StringReader;
 import java.nio.charset.CharacterCodingException;
 import java.nio.file.Files;
 import java.nio.file.Path;
@@ -8,8 +9,10 @@ import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
 import java.util.Locale;
+import lyate.molecule.ReactionFile;
+import lyate.molecule.ReactionRecord;
 
-/** Takes the structures out of a file that was dropped on the window: .mol, .sdf, .rxn, .smi, or any text that holds such. */
+/** Takes the structures out of a file that was dropped on the window: .mol, .sdf, .rxn, .rdf, .smi, or any text that holds such. */
 final class StructureFile {
 
     private static final long MOST_BYTES = 5_000_000;
@@ -45,9 +48,9 @@ final class StructureFile {
         }
     }
 
-    private static List<String> split(String text, String name) {
-        if (text.stripLeading().startsWith("$RXN")) {
-            return List.of(text.stripLeading());
+    private static List<String> split(String text, String name) throws IOException {
+        if (ReactionFile.looksLike(text)) {
+            return reactions(text);
         }
         if (text.contains("V2000") || text.contains("V3000") || name.endsWith(".mol") || name.endsWith(".sdf")) {
             return records(text);
@@ -58,6 +61,18 @@ final class StructureFile {
             structures.add(name.endsWith(".smi") || name.endsWith(".smiles") ? line.split("\\s", 2)[0] : line);
         }
         return structures;
+    }
+
+    /** Reactions as reaction SMILES, which a field of one line shows. */
+    private static List<String> reactions(String text) throws IOException {
+        List<String> reactions = new ArrayList<>();
+        for (ReactionRecord entry : ReactionFile.records(new StringReader(text)).toList()) {
+            if (!entry.problem().isEmpty()) {
+                throw new IOException("reaction " + entry.number() + ", line " + entry.line() + ": " + entry.problem());
+            }
+            reactions.add(entry.smiles());
+        }
+        return reactions;
     }
 
     /** The molfiles of an SD file, without the data behind them. */

@@ -6,10 +6,13 @@ import java.awt.Dimension;
 import java.io.IOException;
 import java.math.BigDecimal;
 import java.nio.file.Path;
+import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.List;
+import java.util.Locale;
 import java.util.Map;
 import java.util.Optional;
-import javax.swing.BorderFactory;
+import java.util.stream.Collectors;
 import javax.swing.JComponent;
 import javax.swing.JOptionPane;
 import javax.swing.JPanel;
@@ -40,6 +43,7 @@ final class Workbench extends JPanel implements Drawer.Wishes, AutoCloseable {
     private final Veil drawerVeil;
     private final Drawer drawer;
     private final EmptyView empty;
+    private final List<Split> splits = new ArrayList<>();
     private final StepPresenter presenter;
     private final CardLayout cards = new CardLayout();
     private final JPanel middle = new JPanel(cards);
@@ -69,7 +73,7 @@ final class Workbench extends JPanel implements Drawer.Wishes, AutoCloseable {
         verdictPane = new Pane("Verdict", findings, theme);
         drawer = new Drawer(theme, engine, this);
         drawerVeil = new Veil(drawer, theme);
-        middle.add(pictures(theme), PICTURES);
+        middle.add(pictures(), PICTURES);
         empty = new EmptyView(theme, example -> document.edit(strip.text().with(StepField.SUBSTRATE, example).withSite("")));
         middle.add(empty, EMPTY);
         add(strip, BorderLayout.NORTH);
@@ -88,28 +92,29 @@ final class Workbench extends JPanel implements Drawer.Wishes, AutoCloseable {
         patience.start();
     }
 
-    private JComponent pictures(Theme theme) {
-        JSplitPane right = split(JSplitPane.HORIZONTAL_SPLIT, ladderPane, verdictPane, 0.58);
-        JSplitPane top = split(JSplitPane.HORIZONTAL_SPLIT, substratePane, right, 0.38);
-        return split(JSplitPane.VERTICAL_SPLIT, top, drawerVeil, 0.68);
+    private JComponent pictures() {
+        Split right = new Split(JSplitPane.HORIZONTAL_SPLIT, ladderPane, verdictPane, 0.58);
+        Split top = new Split(JSplitPane.HORIZONTAL_SPLIT, substratePane, right, 0.38);
+        Split all = new Split(JSplitPane.VERTICAL_SPLIT, top, drawerVeil, 0.68);
+        splits.addAll(List.of(right, top, all));
+        return all;
     }
 
-    private static JSplitPane split(int orientation, JComponent first, JComponent second, double share) {
-        JSplitPane split = new JSplitPane(orientation, true, first, second) {
-            private boolean placed;
+    /** How the room is shared now, in words to be remembered. */
+    String arrangement() {
+        return splits.stream().map(split -> String.format(Locale.ROOT, "%.3f", split.share())).collect(Collectors.joining(" "))
+                + " " + drawer.getSelectedIndex();
+    }
 
-            @Override
-            public void doLayout() {
-                if (!placed && getWidth() > 0 && getHeight() > 0) {
-                    placed = true;
-                    setDividerLocation(share);
-                }
-                super.doLayout();
+    /** Shares the room as it was remembered; words that mean nothing change nothing. */
+    void arrange(String remembered) {
+        String[] words = remembered.split(" ");
+        if (words.length == splits.size() + 1 && Arrays.stream(words).limit(splits.size()).allMatch(word -> word.matches("0\\.\\d+")) && words[splits.size()].matches("\\d")) {
+            for (int i = 0; i < splits.size(); i++) {
+                splits.get(i).setShare(Double.parseDouble(words[i]));
             }
-        };
-        split.setResizeWeight(share);
-        split.setBorder(BorderFactory.createEmptyBorder());
-        return split;
+            drawer.setSelectedIndex(Math.min(Integer.parseInt(words[splits.size()]), drawer.getTabCount() - 1));
+        }
     }
 
     /** Shows what the document says now: after typing the fields say it already, after undo or another row they do not. */

@@ -90,6 +90,7 @@ public final class WorkbenchFrame extends JFrame {
         SheetDocument document = new SheetDocument(StepCells.sheetOf(StepText.demo()), System::nanoTime, memory::newStep);
         files = new SheetFiles(this, document, memory);
         bench = new Workbench(theme, engine, document);
+        bench.arrange(memory.get("arrangement", ""));
         recovery = new Recovery(memory.recoveryFolder(), document);
         setJMenuBar(new WindowMenu(new WindowCommands(this, bench, document, files, theme, looks, memory), theme));
         document.onChange(() -> setTitle(title(document)));
@@ -151,6 +152,9 @@ public final class WorkbenchFrame extends JFrame {
     @Override
     public void dispose() {
         memory.remember(this);
+        if (bench != null) {
+            memory.put("arrangement", bench.arrangement());
+        }
         super.dispose();
     }
 

@@ -47,11 +47,14 @@ class StructureFileTest {
     }
 
     @Test
-    void aReactionFileStaysWhole() throws Exception {
+    void aReactionFileBecomesReactionSmiles() throws Exception {
         String rxn = "$RXN\n\n\n\n  1  1\n$MOL\n" + molfile("CCO") + "$MOL\n" + molfile("CC=O");
         List<String> structures = StructureFile.read(file("step.rxn", rxn));
         assertEquals(1, structures.size());
         assertTrue(StepCells.isReaction(structures.get(0)));
+        assertTrue(StepCells.isReaction(rxn), "and is one when pasted whole");
+        StepReading reading = new FieldReader(Panels.engine()::steps).read(StepText.demo().withSite("").with(StepField.SUBSTRATE, structures.get(0)));
+        assertEquals("C2H6O", reading.step().orElseThrow().substrate().formula());
     }
 
     @Test

@@ -265,6 +265,27 @@ class WorkbenchTest {
         waitFor(bench -> bench.shown().orElseThrow().review().step().temperatureCelsius() == 25);
     }
 
+    @Test
+    void theRoomIsSharedAsItWasLastTime() throws Exception {
+        onEventThread(() -> {
+            bench.arrange("0.500 0.300 0.600 2");
+            bench.revalidate();
+            frame.validate();
+            return null;
+        });
+        waitFor(bench -> bench.drawer().getSelectedComponent() == bench.drawer().dose());
+        String[] now = onEventThread(bench::arrangement).split(" ");
+        double[] wanted = {0.5, 0.3, 0.6, 2};
+        for (int i = 0; i < wanted.length; i++) {
+            assertEquals(wanted[i], Double.parseDouble(now[i]), 0.01);
+        }
+        onEventThread(() -> {
+            bench.arrange("0.9 nonsense");
+            return null;
+        });
+        assertEquals(String.join(" ", now), onEventThread(bench::arrangement));
+    }
+
     private void type(StepField field, String text) throws Exception {
         onEventThread(() -> {
             bench.strip().box(field).field().setText(text);
