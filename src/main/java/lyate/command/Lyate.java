@@ -2,12 +2,17 @@ package lyate.command;
 
 import java.awt.GraphicsEnvironment;
 import java.io.IOException;
+import java.util.List;
+import java.util.concurrent.Callable;
 import lyate.table.TableFolders;
 import lyate.window.WorkbenchFrame;
 import picocli.CommandLine;
 
 /** The program. */
 public final class Lyate {
+
+    /** In the order of the help. */
+    private static final List<String> COMMANDS = List.of("sites", "check", "bases", "acids", "review", "compare", "accuracy", "tables");
 
     private Lyate() {}
 
@@ -23,17 +28,28 @@ public final class Lyate {
         }
     }
 
+    private static Callable<Integer> command(String name, Terminal terminal) {
+        return switch (name) {
+            case "sites" -> new SitesCommand(terminal);
+            case "check" -> new CheckCommand(terminal);
+            case "bases" -> new BasesCommand(terminal);
+            case "acids" -> new AcidsCommand(terminal);
+            case "review" -> new ReviewCommand(terminal);
+            case "compare" -> new CompareCommand(terminal);
+            case "accuracy" -> new AccuracyCommand(terminal);
+            case "tables" -> new TablesCommand(terminal);
+            default -> throw new IllegalArgumentException("no command " + name);
+        };
+    }
+
     /** Runs one command and returns its exit code: 0 done, 1 some input could not be used, 2 wrong usage. */
     static int run(Terminal terminal, String... arguments) {
-        CommandLine command = new CommandLine(new RootCommand())
-                .addSubcommand(new SitesCommand(terminal))
-                .addSubcommand(new CheckCommand(terminal))
-                .addSubcommand(new BasesCommand(terminal))
-                .addSubcommand(new AcidsCommand(terminal))
-                .addSubcommand(new ReviewCommand(terminal))
-                .addSubcommand(new CompareCommand(terminal))
-                .addSubcommand(new AccuracyCommand(terminal))
-                .addSubcommand(new TablesCommand(terminal));
+        CommandLine command = new CommandLine(new RootCommand());
+        // What options a command has is found out by reflection, which takes a noticeable time for all of them.
+        boolean named = arguments.length > 0 && COMMANDS.contains(arguments[0]);
+        for (String name : named ? List.of(arguments[0]) : COMMANDS) {
+            command.addSubcommand(name, command(name, terminal));
+        }
         command.setOut(terminal.outWriter()).setErr(terminal.errWriter())
                 .registerConverter(Format.class, new Format.Converter())
                 .setParameterExceptionHandler(Failures::wrongUsage)

@@ -21,6 +21,8 @@ public final class UncertaintyPropagation {
     private final int points;
     /** Normal deviate in the middle of each of the equally probable cells that a coordinate visits once each. */
     private final double[] deviates;
+    /** Deviates by coordinate and point, as many coordinates as were ever asked for: how many there are changes none of them. */
+    private volatile double[][] spread = {};
 
     /** With {@link #DEFAULT_POINTS} points. */
     public UncertaintyPropagation() {
@@ -56,17 +58,32 @@ public final class UncertaintyPropagation {
             return Map.of(outcome.apply(new double[errors.own().size()]), 1.0);
         }
         // The first Sobol coordinates are the most even ones: they go to the largest errors.
-        SobolSequenceGenerator sobol = new SobolSequenceGenerator(largestFirst.length);
+        double[][] coordinates = spread(largestFirst.length);
         Map<L, Integer> counts = new LinkedHashMap<>();
         for (int point = 0; point < points; point++) {
-            double[] even = sobol.nextVector();
             double[] deviations = new double[sizes.length];
             for (int coordinate = 0; coordinate < largestFirst.length; coordinate++) {
-                deviations[largestFirst[coordinate]] = deviates[(int) (even[coordinate] * points)];
+                deviations[largestFirst[coordinate]] = coordinates[coordinate][point];
             }
             counts.merge(outcome.apply(errors.shifts(deviations)), 1, Integer::sum);
         }
         return shares(counts);
+    }
+
+    private double[][] spread(int coordinates) {
+        double[][] known = spread;
+        if (known.length < coordinates) {
+            known = new double[coordinates][points];
+            SobolSequenceGenerator sobol = new SobolSequenceGenerator(coordinates);
+            for (int point = 0; point < points; point++) {
+                double[] even = sobol.nextVector();
+                for (int coordinate = 0; coordinate < coordinates; coordinate++) {
+                    known[coordinate][point] = deviates[(int) (even[coordinate] * points)];
+                }
+            }
+            spread = known;
+        }
+        return known;
     }
 
     private <L> Map<L, Double> shares(Map<L, Integer> counts) {

@@ -119,7 +119,7 @@ public final class RuleExamples {
         SideReactionContext context = new SideReactionContext(base, partner ? List.of() : transfers(molecule, base, step.solvent()),
                 site.map(molecule::atomLabelled).orElse(OptionalInt.empty()));
         return sideReactions.byRule(molecule, rule.target(),
-                (tried, atom) -> SideReactions.fits(tried, molecule, atom, step, context)).containsKey(rule);
+                new SideReactions.UnderBase(molecule, step, context)).containsKey(rule);
     }
 
     /** Whether a rule decides for {@code base|solvent|temperature}. */

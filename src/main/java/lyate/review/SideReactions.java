@@ -41,9 +41,9 @@ public final class SideReactions {
     /** What the base of a step does to the substrate and to the partner, most severe first. */
     public List<SideReaction> of(Step step, SideReactionContext context) {
         List<SideReaction> found = new ArrayList<>(decided(step.substrate(), Target.SUBSTRATE,
-                (rule, atom) -> fits(rule, step.substrate(), atom, step, context), context.workingBase(), step));
+                new UnderBase(step.substrate(), step, context), context.workingBase(), step));
         step.partner().ifPresent(partner -> found.addAll(decided(partner, Target.PARTNER,
-                (rule, atom) -> fits(rule, partner, atom, step, context), context.workingBase(), step)));
+                new UnderBase(partner, step, context), context.workingBase(), step)));
         found.sort(Comparator.comparing((SideReaction reaction) -> reaction.finding().severity()));
         return found;
     }
@@ -55,10 +55,7 @@ public final class SideReactions {
      * @param celsius temperature
      */
     public List<Finding> underAcid(Molecule molecule, double acidPKa, double celsius) {
-        return byRule(molecule, Target.SUBSTRATE, (rule, atom) -> rule.agent() == Agent.ACID
-                && acidPKa <= rule.acidPKaAtMost().orElse(Double.POSITIVE_INFINITY)
-                && celsius >= rule.surroundings().from().orElse(Double.NEGATIVE_INFINITY)
-                && plainFit(rule, molecule, atom)).entrySet().stream()
+        return byRule(molecule, Target.SUBSTRATE, new UnderAcid(molecule, acidPKa, celsius)).entrySet().stream()
                 .filter(entry -> entry.getKey().severity().isPresent())
                 .map(entry -> finding(entry.getKey(), entry.getKey().sentence(), entry.getValue(), List.of(), Target.SUBSTRATE))
                 .sorted(Comparator.comparing(Finding::severity)).toList();
@@ -72,8 +69,9 @@ public final class SideReactions {
     Map<SideReactionRule, List<Integer>> byRule(Molecule molecule, Target target, Fit fit) {
         Map<Integer, Map<FindingKind, SideReactionRule>> deciding = new LinkedHashMap<>();
         for (SideReactionRule rule : rules) {
-            for (int atom = 0; rule.target() == target && atom < molecule.atomCount(); atom++) {
-                if (fit.test(rule, atom)) {
+            boolean possible = rule.target() == target && fit.holds(rule);
+            for (int atom = 0; possible && atom < molecule.atomCount(); atom++) {
+                if (fit.at(rule, atom)) {
                     deciding.computeIfAbsent(atom, key -> new EnumMap<>(FindingKind.class)).put(rule.kind(), rule);
                 }
             }
@@ -84,19 +82,46 @@ public final class SideReactions {
         return atoms;
     }
 
-    /** Whether a rule fits an atom. */
+    /** Whether a rule fits: first what is the same for every atom, then an atom. */
     interface Fit {
-        boolean test(SideReactionRule rule, int atom);
+        boolean holds(SideReactionRule rule);
+
+        boolean at(SideReactionRule rule, int atom);
     }
 
-    static boolean fits(SideReactionRule rule, Molecule molecule, int atom, Step step, SideReactionContext context) {
-        return rule.agent() == Agent.BASE
-                && rule.base().holdsFor(context.workingBase())
-                && rule.surroundings().holdFor(step.solvent(), step.temperatureCelsius())
-                && enoughBase(rule, step, context)
-                && plainFit(rule, molecule, atom)
-                && reached(rule, atom, context)
-                && rule.unless().stream().noneMatch(condition -> holds(condition, molecule, atom, step, context));
+    /** What the base of a step does to a molecule. */
+    record UnderBase(Molecule molecule, Step step, SideReactionContext context) implements Fit {
+
+        @Override
+        public boolean holds(SideReactionRule rule) {
+            return rule.agent() == Agent.BASE
+                    && rule.base().holdsFor(context.workingBase())
+                    && rule.surroundings().holdFor(step.solvent(), step.temperatureCelsius())
+                    && enoughBase(rule, step, context);
+        }
+
+        @Override
+        public boolean at(SideReactionRule rule, int atom) {
+            return plainFit(rule, molecule, atom)
+                    && reached(rule, atom, context)
+                    && rule.unless().stream().noneMatch(condition -> SideReactions.holds(condition, molecule, atom, step, context));
+        }
+    }
+
+    /** What an acid does to a molecule. */
+    private record UnderAcid(Molecule molecule, double acidPKa, double celsius) implements Fit {
+
+        @Override
+        public boolean holds(SideReactionRule rule) {
+            return rule.agent() == Agent.ACID
+                    && acidPKa <= rule.acidPKaAtMost().orElse(Double.POSITIVE_INFINITY)
+                    && celsius >= rule.surroundings().from().orElse(Double.NEGATIVE_INFINITY);
+        }
+
+        @Override
+        public boolean at(SideReactionRule rule, int atom) {
+            return plainFit(rule, molecule, atom);
+        }
     }
 
     private static boolean plainFit(SideReactionRule rule, Molecule molecule, int atom) {
