@@ -1,6 +1,7 @@
 package lyate.bench;
 
 import java.util.ArrayList;
+import java.util.Comparator;
 import java.util.List;
 import java.util.Locale;
 import java.util.function.DoublePredicate;
@@ -58,8 +59,13 @@ public record WorkUp(AqueousForm product, List<CurvePoint> curve, List<Parting> 
     public String productSentence() {
         String organic = ranges(share -> share >= ExtractionWindow.CLEAN);
         String water = ranges(share -> share <= 1 - ExtractionWindow.CLEAN);
-        String first = organic.isEmpty() ? "At no pH is the product uncharged to 99 %" : "The product goes into the organic layer " + organic;
+        String first = organic.isEmpty() ? leastCharged() : "The product goes into the organic layer " + organic;
         return first + (water.isEmpty() ? "." : "; it stays in the water " + water + ".");
+    }
+
+    private String leastCharged() {
+        CurvePoint best = curve.stream().max(Comparator.comparingDouble(CurvePoint::uncharged)).orElseThrow();
+        return String.format(Locale.ROOT, "At no pH is the product uncharged to 99 %%; most of it, %.0f %%, at pH %.1f", 100 * best.uncharged(), best.pH());
     }
 
     private String ranges(DoublePredicate wanted) {

@@ -64,6 +64,27 @@ class WorkUpTest {
 
     /** Henderson–Hasselbalch, point for point. */
     @Test
+    void anAcidAloneGoesIntoTheOrganicLayerTwoUnitsBelowItsPKa() {
+        // Henderson and Hasselbalch: 99 % uncharged at pKa - 2.0, 99 % charged at pKa + 2.0.
+        assertEquals("The product goes into the organic layer from pH 0.0 to 2.2; it stays in the water from pH 6.2 to 14.0.",
+                WorkUp.of(BENZOIC, List.of()).productSentence());
+        assertEquals("The product goes into the organic layer from pH 0.0 to 14.0.", WorkUp.of(NAPHTHALENE, List.of()).productSentence());
+    }
+
+    @Test
+    void anAmineAloneGoesIntoTheOrganicLayerTwoUnitsAboveItsPKa() {
+        assertEquals("The product goes into the organic layer from pH 12.8 to 14.0; it stays in the water from pH 0.0 to 8.7.",
+                WorkUp.of(TRIETHYLAMINE, List.of()).productSentence());
+    }
+
+    @Test
+    void aProductChargedToSomeDegreeAtEveryPHIsExtractedWhereItIsLeastSo() {
+        // Henderson and Hasselbalch: 0.1 above its pKa, at pH 14, 56 % of the base are free.
+        AqueousForm strong = AqueousForm.base("strong base", 13.9);
+        assertTrue(WorkUp.of(strong, List.of()).productSentence().startsWith("At no pH is the product uncharged to 99 %; most of it, 56 %, at pH 14.0"));
+    }
+
+    @Test
     void theCurveIsThatOfHendersonAndHasselbalch() {
         WorkUp workUp = WorkUp.of(IBUPROFEN, List.of(TRIETHYLAMINE));
         assertEquals(141, workUp.curve().size());
