@@ -14,7 +14,8 @@ public final class RuleTables {
 
     /** One reader for each table; it throws a {@link lyate.table.TableException} naming every bad cell. */
     public static List<Consumer<TableFolders>> cellChecks() {
-        return Stream.of(SideReactionTable.SCHEMA, BaseSolventRules.SCHEMA, BaseHazards.SCHEMA, AcidHazards.SCHEMA, KineticPreferences.SCHEMA)
+        return Stream.of(SideReactionTable.SCHEMA, BaseSolventRules.SCHEMA, BaseHazards.SCHEMA, AcidHazards.SCHEMA, KineticPreferences.SCHEMA,
+                Trapping.SCHEMA)
                 .map(RuleTables::cellCheck).toList();
     }
 

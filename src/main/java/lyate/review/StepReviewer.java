@@ -35,6 +35,7 @@ public final class StepReviewer implements Reviewer {
     private final BaseHazards hazards;
     private final KineticControl kinetics;
     private final SiteCoupling coupling;
+    private final Trapping trapping;
 
     private StepReviewer(TableFolders folders, Stockroom stockroom, SiteFinder finder, AcidityEstimator acidity) {
         this.solventRules = BaseSolventRules.load(folders, stockroom);
@@ -44,6 +45,7 @@ public final class StepReviewer implements Reviewer {
         this.sideReactions = SideReactions.load(folders, stockroom);
         this.hazards = BaseHazards.load(folders, stockroom);
         this.coupling = SiteCoupling.load(folders);
+        this.trapping = Trapping.load(folders);
         this.kinetics = new KineticControl(KineticPreferences.load(folders, stockroom));
     }
 
@@ -135,6 +137,7 @@ public final class StepReviewer implements Reviewer {
         SiteFindings.rules().forEach(rule -> findings.addAll(rule.find(situation)));
         ScaleFindings.rules().forEach(rule -> findings.addAll(rule.find(situation)));
         SolventFindings.rules().forEach(rule -> findings.addAll(rule.find(situation)));
+        findings.addAll(trapping.of(situation));
         reactions.forEach(reaction -> findings.add(reaction.finding()));
         findings.addAll(inAcidSolvent(step));
         solventRules.of(step.base(), step.solvent(), step.temperatureCelsius()).stream()

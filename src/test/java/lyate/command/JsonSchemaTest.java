@@ -24,6 +24,7 @@ import java.util.TreeSet;
 import java.util.stream.Collectors;
 import java.util.stream.Stream;
 import lyate.report.ReviewJson;
+import lyate.review.FindingKind;
 import lyate.review.Verdict;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
@@ -122,6 +123,13 @@ class JsonSchemaTest {
         SCHEMA.get("$defs").forEach(object -> object.path("properties").fieldNames().forEachRemaining(names::add));
         assertTrue(names.size() > 40, names.toString());
         assertEquals(List.of(), names.stream().filter(name -> !page.contains("| `" + name + "` |")).toList());
+    }
+
+    @Test
+    void thePageExplainsEveryKindOfFinding() throws IOException {
+        String page = Files.readString(Path.of("docs/json.md"));
+        assertEquals(List.of(), Stream.of(FindingKind.values()).map(FindingKind::code)
+                .filter(code -> !page.contains("| `" + code + "` |")).toList());
     }
 
     private static void assertSound(String kind, JsonNode array) {
