@@ -15,12 +15,16 @@ import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.Collections;
 import java.util.List;
+import java.util.Map;
+import java.util.function.Supplier;
 import java.util.stream.Stream;
 import lyate.molecule.AtomPattern;
 import lyate.molecule.Molecule;
 import lyate.molecule.MoleculeException;
 import lyate.molecule.MoleculeReader;
 import lyate.sheet.reaction.ReactionReader;
+import lyate.sheet.Conditions;
+import lyate.sheet.ReactionList;
 import lyate.sheet.RouteSheet;
 import lyate.sheet.SheetException;
 import lyate.stock.Stockroom;
@@ -95,6 +99,18 @@ class HostileInputTest {
     }
 
     @Test
+    void textsThatFollowTheGrammar() {
+        batterByGrammar(FEW);
+    }
+
+    @Test
+    void reactionFiles() {
+        ReactionReader reactions = new ReactionReader(reader, Stockroom.load(TableFolders.packaged()));
+        batter(FEW / 5, reactionFile(), OTHER_LETTERS, reactions::read);
+        batter(FEW / 5, reactionFile(), OTHER_LETTERS, HostileInputTest::readReactionList);
+    }
+
+    @Test
     @Tag("slow")
     void aMillionInputs(@TempDir Path folder) {
         ReactionReader reactions = new ReactionReader(reader, Stockroom.load(TableFolders.packaged()));
@@ -104,14 +120,30 @@ class HostileInputTest {
         batter(MANY / 10, INCHIS, OTHER_LETTERS, this::readMolecule);
         batter(MANY, SHEETS, OTHER_LETTERS, HostileInputTest::readSheet);
         batter(MANY, PATTERNS, SMILES_LETTERS, this::readPattern);
-        batter(MANY, REACTIONS, SMILES_LETTERS, reactions::read);
+        batter(MANY / 3, REACTIONS, SMILES_LETTERS, reactions::read);
+        batter(MANY / 10, reactionFile(), OTHER_LETTERS, reactions::read);
+        batter(MANY / 10, reactionFile(), OTHER_LETTERS, HostileInputTest::readReactionList);
+        batterByGrammar(MANY / 3);
         batter(MANY / 10, TABLES, OTHER_LETTERS, text -> readTable(folder, text));
     }
 
+    private void batterByGrammar(int times) {
+        Grammar grammar = new Grammar(20261201);
+        ReactionReader reactions = new ReactionReader(reader, Stockroom.load(TableFolders.packaged()));
+        batter(times, grammar::smiles, this::readMolecule);
+        batter(times, grammar::pattern, this::readPattern);
+        batter(times, grammar::sheet, HostileInputTest::readSheet);
+        batter(times / 5, grammar::reaction, reactions::read);
+        batter(times / 10, grammar::name, this::readMolecule);
+    }
+
     private static void batter(int times, List<String> seeds, String letters, Bearer bearer) {
-        Damage damage = new Damage(seeds, letters, 20261201);
+        batter(times, new Damage(seeds, letters, 20261201)::next, bearer);
+    }
+
+    private static void batter(int times, Supplier<String> texts, Bearer bearer) {
         for (int i = 0; i < times; i++) {
-            String text = damage.next();
+            String text = texts.get();
             long start = CLOCK.getCurrentThreadCpuTime();
             try {
                 bearer.bear(text);
@@ -151,6 +183,19 @@ class HostileInputTest {
     private static void readTable(Path folder, String text) throws IOException {
         Files.writeString(folder.resolve("colours.csv"), text);
         Table.read(Schema.of("colours.csv", Column.text("id"), Column.text("name"), Column.number("ph")), TableFolders.overlaidBy(folder));
+    }
+
+    private static void readReactionList(String text) throws SheetException {
+        ReactionList list = new ReactionList(new StringReader(text), new Conditions(Map.of()));
+        while (list.hasNext()) {
+            assertEquals(list.header().names().size(), list.next().cells().size(), text);
+        }
+    }
+
+    /** Nitrophenol gives nitrophenol: what happens in it is not what is tested. */
+    private static List<String> reactionFile() {
+        String molfile = resource("nitrophenol-v2000.mol");
+        return List.of("$RXN\n\n      drawn by hand\n\n  1  1\n$MOL\n" + molfile + "$MOL\n" + molfile);
     }
 
     private static List<String> molfiles() {

@@ -27,6 +27,7 @@ final class Normaliser {
         List<String> warnings = new ArrayList<>(notes);
         InputNumbers.assign(read);
         Refusals.check(read);
+        StereoMarks.forgetMeaningless(read);
         Hydrogens.fold(read, warnings);
         StereoMarks.forgetMeaningless(read);
         Metals.split(read, warnings);

@@ -7,7 +7,7 @@ import org.openscience.cdk.interfaces.IAtomContainer;
 import org.openscience.cdk.interfaces.IBond;
 import org.openscience.cdk.interfaces.IStereoElement;
 
-/** Configurations stated where there can be none: the toolkit reads them, but cannot write them again. */
+/** Configurations stated where there can be none: the toolkit reads them, but stumbles over them later. */
 final class StereoMarks {
 
     private StereoMarks() {}
@@ -15,6 +15,9 @@ final class StereoMarks {
     /** Forgets a centre with two hydrogens (one may have been an isotope) and an axis that is no cumulated double bond. */
     @SuppressWarnings("rawtypes") // the toolkit asks for a list of the raw type
     static void forgetMeaningless(IAtomContainer molecule) {
+        if (!molecule.stereoElements().iterator().hasNext()) {
+            return;
+        }
         List<IStereoElement> kept = new ArrayList<>();
         molecule.stereoElements().forEach(element -> {
             if (!(element.getFocus() instanceof IAtom focus) || canHold(element, focus)) {

@@ -24,6 +24,7 @@ class RefusalTest {
         "[CH3]|C1 has 3 bonds, hydrogens counted, where 4 belong: radicals cannot be judged",
         "C[O]|O2 has 1 bond, hydrogens counted, where 2 belong: radicals cannot be judged",
         "C[CH]|C2 has 2 bonds, hydrogens counted, where 4 belong: an open valence cannot be judged",
+        "C(C)(C)[N@+][2H]|N4 (charge +1) has 2 bonds, hydrogens counted, where 4 belong: an open valence cannot be judged",
         "CC(C)(C)(C)C|C2 has 5 bonds, hydrogens counted, but at most 4 are possible",
         "CN(C)(C)C|N2 has 5 bonds, hydrogens counted, but at most 3 are possible",
         "C[O+](C)(C)C|O2 (charge +1) has 4 bonds, hydrogens counted, but at most 3 are possible",
