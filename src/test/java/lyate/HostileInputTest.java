@@ -120,9 +120,9 @@ class HostileInputTest {
         batter(MANY / 10, INCHIS, OTHER_LETTERS, this::readMolecule);
         batter(MANY, SHEETS, OTHER_LETTERS, HostileInputTest::readSheet);
         batter(MANY, PATTERNS, SMILES_LETTERS, this::readPattern);
-        batter(MANY / 3, REACTIONS, SMILES_LETTERS, reactions::read);
-        batter(MANY / 10, reactionFile(), OTHER_LETTERS, reactions::read);
-        batter(MANY / 10, reactionFile(), OTHER_LETTERS, HostileInputTest::readReactionList);
+        batter(MANY / 10, REACTIONS, SMILES_LETTERS, reactions::read);
+        batter(MANY / 30, reactionFile(), OTHER_LETTERS, reactions::read);
+        batter(MANY / 30, reactionFile(), OTHER_LETTERS, HostileInputTest::readReactionList);
         batterByGrammar(MANY / 3);
         batter(MANY / 10, TABLES, OTHER_LETTERS, text -> readTable(folder, text));
     }
@@ -133,7 +133,7 @@ class HostileInputTest {
         batter(times, grammar::smiles, this::readMolecule);
         batter(times, grammar::pattern, this::readPattern);
         batter(times, grammar::sheet, HostileInputTest::readSheet);
-        batter(times / 5, grammar::reaction, reactions::read);
+        batter(times / 20, grammar::reaction, reactions::read);
         batter(times / 10, grammar::name, this::readMolecule);
     }
 
