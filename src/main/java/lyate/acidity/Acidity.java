@@ -1,5 +1,6 @@
 package lyate.acidity;
 
+import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
 import lyate.stock.Medium;
@@ -90,6 +91,25 @@ public record Acidity(double pKa, double sigma, Medium medium, Basis basis, List
     /** The same value taken apart into these terms. */
     Acidity from(List<Contribution> terms) {
         return new Acidity(pKa, sigma, medium, basis, terms, missing, relatives, spread, alternatives, source);
+    }
+
+    /**
+     * The value where the anion is held by something else than the medium.
+     *
+     * @param lowering pKa units by which that makes the proton more acidic
+     * @param error    standard uncertainty of the lowering, pKa units
+     * @param cause    what holds the anion, for example {@code Li ion pair in tetrahydrofuran}
+     * @param citation where the size comes from
+     */
+    public Acidity lowered(double lowering, double error, String cause, String citation) {
+        List<Contribution> terms = new ArrayList<>(contributions);
+        if (terms.isEmpty()) {
+            terms.add(new Contribution(basis.word() + " in " + medium.symbol(), Effect.ATOM, pKa, List.of()));
+        }
+        terms.add(new Contribution(cause, Effect.CHARGE, -lowering, List.of()));
+        String words = String.format(Locale.ROOT, "%.2f (%s), and %.2f of the %s, in quadrature", sigma, spread, error, cause);
+        return new Acidity(pKa - lowering, Math.hypot(sigma, error), medium, Basis.TRANSFERRED, terms, missing, relatives, words,
+                alternatives, source + String.format(Locale.ROOT, "; lowered by %.1f for the %s: ", lowering, cause) + citation);
     }
 
     /** This value as one of several ways. */

@@ -22,8 +22,10 @@ final class Donors {
     private final SiteFinder finder;
     private final AcidityEstimator acidity;
     private final IonisationEnthalpies enthalpies;
+    private final IonPairs ionPairs;
 
-    Donors(SiteFinder finder, AcidityEstimator acidity, IonisationEnthalpies enthalpies) {
+    Donors(SiteFinder finder, AcidityEstimator acidity, IonisationEnthalpies enthalpies, IonPairs ionPairs) {
+        this.ionPairs = ionPairs;
         this.finder = finder;
         this.acidity = acidity;
         this.enthalpies = enthalpies;
@@ -48,7 +50,8 @@ final class Donors {
         double kelvin = step.temperatureCelsius() + 273.15;
         List<Donor> donors = new ArrayList<>();
         for (ProtonSite site : finder.sites(molecule, Role.ACID)) {
-            scale.compare(base.pKa(), base.strong(), medium -> acidity.acidity(molecule, site, medium), site.siteClass().family())
+            scale.compare(base.pKa(), base.strong(), medium -> acidity.acidity(molecule, site, medium)
+                            .map(value -> ionPairs.paired(value, molecule, site.atom(), base, step.solvent())), site.siteClass().family())
                     .ifPresent(comparison -> donors.add(new Donor(site, molecule.label(site.atom()), comparison,
                             atTemperature(comparison, site, base, kelvin), 0)));
         }

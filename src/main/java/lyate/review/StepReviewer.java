@@ -40,7 +40,7 @@ public final class StepReviewer implements Reviewer {
     private StepReviewer(TableFolders folders, Stockroom stockroom, SiteFinder finder, AcidityEstimator acidity) {
         this.solventRules = BaseSolventRules.load(folders, stockroom);
         this.workingBases = new WorkingBases(new BaseStrength(finder, acidity), solventRules, stockroom);
-        this.donors = new Donors(finder, acidity, IonisationEnthalpies.load(folders));
+        this.donors = new Donors(finder, acidity, IonisationEnthalpies.load(folders), IonPairs.load(folders));
         this.water = waterOf(stockroom);
         this.sideReactions = SideReactions.load(folders, stockroom);
         this.hazards = BaseHazards.load(folders, stockroom);
