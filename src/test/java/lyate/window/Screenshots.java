@@ -41,7 +41,7 @@ final class Screenshots {
     private void takeAll(StepText demo) throws Exception {
         take("light", false, 1, 1500, 920, demo);
         take("dose", true, 1, 1500, 920, demo, bench -> bench.drawer().setSelectedIndex(2));
-        take("choice", false, 1, 1500, 920, demo, bench -> bench.drawer().setSelectedIndex(1));
+        take("choice", false, 1, 1500, 920, demo.withSite("O14"), bench -> bench.drawer().setSelectedIndex(1));
         take("amounts", false, 1, 1500, 920, demo, bench -> bench.drawer().setSelectedIndex(3));
         take("error", false, 1, 1200, 760, demo, bench -> {
             bench.strip().box(StepField.SUBSTRATE).field().setText("O=C(C1CCC1)Nc1ccc(C)c(O)c");
