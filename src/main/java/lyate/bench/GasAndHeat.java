@@ -79,6 +79,18 @@ public record GasAndHeat(Optional<GivenOffGas> gas, List<HeatShare> heat, List<S
         return base.furtherStages().isEmpty() ? amounts.protonsTakenUp() : amounts.base().milliMole();
     }
 
+    /** That heat in words; empty where it is not known, and never none where it is only estimated to be small. */
+    public Optional<String> heatSentence() {
+        OptionalDouble all = kiloJoule();
+        if (all.isEmpty()) {
+            return Optional.empty();
+        }
+        boolean estimated = heat.isEmpty() || heat.stream().anyMatch(share -> !share.tabulated());
+        return Optional.of(all.getAsDouble() > 0 ? say("Heat if all the base went in at once: %s%s kJ.", estimated ? "about " : "",
+                Figures.of(all.getAsDouble()))
+                : "No heat could be estimated for the proton transfer; that does not mean that there is none.");
+    }
+
     /** Heat of all donors together, kJ; empty where one is not known. */
     public OptionalDouble kiloJoule() {
         return withoutHeat.isEmpty() ? OptionalDouble.of(heat.stream().mapToDouble(HeatShare::kiloJoule).sum())

@@ -31,9 +31,7 @@ public final class BenchText {
             out.line("    %s", warning);
         }
         List<String> lines = new ArrayList<>();
-        if (gasAndHeat.kiloJoule().isPresent()) {
-            lines.add("Heat if all the base went in at once: " + Words.number(gasAndHeat.kiloJoule().getAsDouble()) + " kJ.");
-        }
+        gasAndHeat.heatSentence().ifPresent(lines::add);
         lines.addAll(gasAndHeat.cautions());
         out.list("Gas and heat", lines);
     }

@@ -146,7 +146,7 @@ final class StepSection {
     private void safety() {
         html.element("h3", "Safety note").open("div", "class", "safety");
         List<String> lines = new ArrayList<>();
-        facts.gasAndHeat().kiloJoule().ifPresent(heat -> lines.add("Heat if all the base went in at once: " + Words.number(heat) + " kJ."));
+        facts.gasAndHeat().heatSentence().ifPresent(lines::add);
         List<String> cautions = facts.gasAndHeat().cautions();
         lines.addAll(cautions.subList(0, cautions.size() - 1));
         html.bullets(lines);

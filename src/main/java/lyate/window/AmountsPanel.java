@@ -19,7 +19,6 @@ import lyate.bench.Amounts;
 import lyate.bench.Batch;
 import lyate.bench.GasAndHeat;
 import lyate.molecule.Molecule;
-import lyate.report.Words;
 import lyate.review.Review;
 
 /** What to weigh and measure out for a batch, and the gas and heat it sets free. */
@@ -135,7 +134,7 @@ final class AmountsPanel extends JPanel {
 
     private void say(Amounts amounts, GasAndHeat gasAndHeat) {
         List<String> lines = new ArrayList<>(amounts.warnings());
-        gasAndHeat.kiloJoule().ifPresent(heat -> lines.add("Heat if all the base went in at once: " + Words.number(heat) + " kJ."));
+        gasAndHeat.heatSentence().ifPresent(lines::add);
         lines.addAll(gasAndHeat.cautions());
         words.removeAll();
         words.setLayout(new StackLayout(theme.space("small")));
