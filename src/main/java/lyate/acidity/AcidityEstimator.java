@@ -26,6 +26,7 @@ import lyate.table.TableFolders;
  */
 public final class AcidityEstimator {
 
+    private static final int CARBON = 6;
     private static final List<Medium> ESTIMATED_IN = List.of(Medium.WATER, Medium.DMSO);
 
     private final MeasuredAcidities measured;
@@ -74,8 +75,9 @@ public final class AcidityEstimator {
 
     /** The relationship knows the substituents, the class value the kind: together they miss less than either (docs/accuracy.md). */
     private Optional<Acidity> estimate(Molecule molecule, ProtonSite site, Medium medium) {
+        boolean heteroatom = molecule.atomicNumber(site.atom()) != CARBON;
         return estimates.stream().map(estimate -> estimate.estimate(molecule, site, medium)).flatMap(Optional::stream)
-                .reduce(WeightedMean::of);
+                .reduce((fine, plain) -> WeightedMean.of(fine, plain, heteroatom && medium.equals(Medium.WATER)));
     }
 
     private Optional<Acidity> estimateElsewhere(Molecule molecule, ProtonSite site, Medium medium) {

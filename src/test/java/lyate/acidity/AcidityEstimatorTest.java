@@ -74,8 +74,8 @@ class AcidityEstimatorTest {
     @Test
     void twoEstimatesAreWeighedAndTheirDistanceCounts() {
         AcidityEstimator estimator = new AcidityEstimator(MeasuredAcidities.none(), TRANSFER,
-                List.of(always(20, 0.1, Medium.DMSO), always(5, 1, Medium.WATER), always(7, 1 / 1.5, Medium.WATER)));
-        Acidity acid = acidity(estimator, "CC(=O)O", "O4", Medium.WATER).orElseThrow();
+                List.of(always(20, 0.1, Medium.WATER), always(5, 1, Medium.DMSO), always(7, 1 / 1.5, Medium.DMSO)));
+        Acidity acid = acidity(estimator, "CC(=O)O", "O4", Medium.DMSO).orElseThrow();
         assertEquals(6, acid.pKa(), 1e-9);
         assertEquals(6, acid.contributions().stream().mapToDouble(Contribution::value).sum(), 1e-9);
         assertEquals(Math.hypot(Math.sqrt(0.5), 1), acid.sigma(), 1e-9);
@@ -85,8 +85,18 @@ class AcidityEstimatorTest {
     @Test
     void aRelationshipFarFromItsDataLeavesItToTheClassValue() {
         AcidityEstimator estimator = new AcidityEstimator(MeasuredAcidities.none(), TRANSFER,
-                List.of(always(5, 2.5, Medium.WATER), always(6, 2, Medium.WATER)));
-        assertEquals(6, acidity(estimator, "CC(=O)O", "O4", Medium.WATER).orElseThrow().pKa());
+                List.of(always(5, 2.5, Medium.DMSO), always(6, 2, Medium.DMSO)));
+        assertEquals(6, acidity(estimator, "CC(=O)O", "O4", Medium.DMSO).orElseThrow().pKa());
+    }
+
+    /** There the spread of a class counts four times: here both weigh alike, however unsure the relationship is. */
+    @Test
+    void forHeteroatomsInWaterTheClassValueCountsLess() {
+        AcidityEstimator estimator = new AcidityEstimator(MeasuredAcidities.none(), TRANSFER,
+                List.of(always(5, 2.4, Medium.WATER), always(7, 0.6, Medium.WATER)));
+        Acidity acid = acidity(estimator, "CC(=O)O", "O4", Medium.WATER).orElseThrow();
+        assertEquals(6, acid.pKa(), 1e-9);
+        assertEquals(Math.hypot(2.4 * Math.sqrt(0.5), 1), acid.sigma(), 1e-9);
     }
 
     @Test

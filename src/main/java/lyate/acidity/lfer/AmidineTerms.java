@@ -40,6 +40,9 @@ final class AmidineTerms {
                     if (t.child[group] != head) {
                         addGroup(facts, group, terms);
                     }
+                    if (t.aromatic[t.child[group]] && nitrogen != site) {
+                        RingTerms.add(facts, "ring", t.child[group], nitrogen, terms);
+                    }
                 }
             }
         }
@@ -50,11 +53,12 @@ final class AmidineTerms {
         int atom = t.child[branch];
         String name = switch (BindingState.of(t, branch)) {
             case "aromatic" -> "aryl";
-            case "acyl", "ester", "amide", "acyl-hetero", "thiocarbonyl" -> ACYL;
+            case "acyl", "ester", "amide", "imide", "acyl-hetero", "thiocarbonyl" -> ACYL;
             case "imine" -> "imidoyl";
             case "sp" -> "cyano";
             case "nitro" -> "nitro";
             case "sulfonyl", "phosphoryl" -> "sulfonyl";
+            case "sp2" -> t.element[atom] == NITROGEN ? "imino" : "";
             default -> t.element[atom] == NITROGEN ? "amino" : t.element[atom] == 8 ? "oxy" : "";
         };
         if (!name.isEmpty()) {

@@ -101,7 +101,7 @@ final class RingTerms {
         int child = t.child[branch];
         String who = s.name();
         if (t.order[branch] == 2) {
-            terms.add(place + (t.element[child] == 7 ? ".imino" : t.element[child] == 6 ? ".ylidene" : ".oxo"), Effect.RESONANCE, 1, child, who);
+            terms.add(place + doubleBonded(t.element[child]), Effect.RESONANCE, 1, child, who);
             return;
         }
         if (!s.listed() && !(t.element[child] == 6 && !t.unsaturated(child))) {
@@ -118,6 +118,15 @@ final class RingTerms {
             terms.add(place + ".count", Effect.STERICS, 1, child, who);
             terms.add(place + ".bulk", Effect.STERICS, t.degree(child) - 1, child, who);
         }
+    }
+
+    private static String doubleBonded(int element) {
+        return switch (element) {
+            case 6 -> ".ylidene";
+            case 7 -> ".imino";
+            case 16 -> ".thioxo";
+            default -> ".oxo";
+        };
     }
 
     private String position(int atom) {
