@@ -16,6 +16,8 @@ record CouplingPath(Kind kind, int bonds, int ways) {
         SAME_ATOM("same-atom"), SATURATED("saturated"), CONJUGATED("conjugated"),
         /** Saturated, and two substituents on the middle carbon press the ends together, as in diethylmalonic acid. */
         CROWDED("crowded"),
+        /** Conjugated over a double bond, the ends on one side of it or on both. */
+        CIS("cis"), TRANS("trans"),
         /** Conjugated, and an anion at one end can hold a proton of the other end in a ring. */
         HYDROGEN_BONDED("hydrogen-bonded");
 
@@ -27,7 +29,7 @@ record CouplingPath(Kind kind, int bonds, int ways) {
 
         /** What the way is called where the ends do not meet. */
         Kind plain() {
-            return this == CROWDED ? SATURATED : this == HYDROGEN_BONDED ? CONJUGATED : this;
+            return this == CROWDED ? SATURATED : this == HYDROGEN_BONDED || this == CIS || this == TRANS ? CONJUGATED : this;
         }
 
         /** The word used in the table. */
@@ -73,7 +75,31 @@ record CouplingPath(Kind kind, int bonds, int ways) {
                     return crowded() ? Kind.CROWDED : Kind.SATURATED;
                 }
             }
-            return closes() ? Kind.HYDROGEN_BONDED : Kind.CONJUGATED;
+            return closes() ? Kind.HYDROGEN_BONDED : aroundDoubleBond();
+        }
+
+        /** As in maleic and fumaric acid. */
+        private Kind aroundDoubleBond() {
+            for (int atom = 0; atom < molecule.atomCount(); atom++) {
+                for (int next : molecule.neighbours(atom)) {
+                    if (on(atom) && on(next) && after[next] == after[atom] + 1 && atom != from && next != to
+                            && molecule.bondOrder(atom, next) == 2 && after[to] == 5) {
+                        return molecule.together(atom, next, step(atom, -1), step(next, 1))
+                                .map(together -> together ? Kind.CIS : Kind.TRANS).orElse(Kind.CONJUGATED);
+                    }
+                }
+            }
+            return Kind.CONJUGATED;
+        }
+
+        /** The neighbour one step on, or back, on the way. */
+        private int step(int atom, int by) {
+            for (int next : molecule.neighbours(atom)) {
+                if (on(next) && after[next] == after[atom] + by) {
+                    return next;
+                }
+            }
+            throw new IllegalStateException("the way ends at atom " + atom);
         }
 
         private boolean conjugated(int atom) {

@@ -31,7 +31,7 @@ record CouplingRow(List<String> media, String charge, String path, int bonds, in
     /** What {@code site-couplings.csv} looks like. */
     static final Schema SCHEMA = Schema.of("site-couplings.csv", text("id"), list("media"),
             word("charge", "anions", "cations", "opposite", "carbon", ANY),
-            word("path", "saturated", "crowded", "conjugated", "hydrogen-bonded", "same-atom"), number("bonds"), number("paths"),
+            word("path", "saturated", "crowded", "conjugated", "cis", "trans", "hydrogen-bonded", "same-atom"), number("bonds"), number("paths"),
             number("raise"), number("sigma"), number("n"), number("per_further_bond"), text("source"));
 
     static CouplingRow of(Row row) {

@@ -118,16 +118,24 @@ public final class MeasuredAcidities {
         }
         long formula = ProtonSkeleton.formula(molecule, site.role());
         List<Value> isomers = alike.stream().map(Lazy::get).filter(value -> value.place().formula() == formula).toList();
-        return isomers.isEmpty() ? List.of() : at(ProtonSkeleton.of(molecule, site.role(), site.atom()), isomers);
+        return isomers.isEmpty() ? List.of() : at(ProtonSkeleton.of(molecule, site.role(), site.atom()), molecule.doubleBondConfigurations(), isomers);
     }
 
-    private static List<Acidity> at(ProtonSkeleton place, List<Value> isomers) {
+    /** A row whose double bonds are drawn as asked goes before one that leaves them open; one drawn the other way is another acid. */
+    private static List<Acidity> at(ProtonSkeleton place, List<String> configurations, List<Value> isomers) {
         Map<String, Acidity> found = new TreeMap<>();
+        Map<String, Acidity> lessSure = new TreeMap<>();
         for (Value value : isomers) {
             if (value.place().sameAs(place)) {
-                found.putIfAbsent(value.acidity().medium().id(), value.acidity());
+                List<String> drawn = value.molecule().doubleBondConfigurations();
+                if (drawn.equals(configurations)) {
+                    found.putIfAbsent(value.acidity().medium().id(), value.acidity());
+                } else if (drawn.isEmpty() || configurations.isEmpty()) {
+                    lessSure.putIfAbsent(value.acidity().medium().id(), value.acidity());
+                }
             }
         }
+        lessSure.forEach(found::putIfAbsent);
         return List.copyOf(found.values());
     }
 

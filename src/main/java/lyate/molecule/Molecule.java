@@ -2,6 +2,7 @@ package lyate.molecule;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 import java.util.OptionalInt;
 import org.openscience.cdk.interfaces.IAtom;
 import org.openscience.cdk.interfaces.IAtomContainer;
@@ -147,6 +148,16 @@ public final class Molecule {
             }
         });
         return centres.stream().sorted().toList();
+    }
+
+    /** Whether two groups lie on one side of the double bond between {@code first} and {@code second}; empty where the input leaves it open. */
+    public Optional<Boolean> together(int first, int second, int onFirst, int onSecond) {
+        return DoubleBondSides.together(container, first, second, onFirst, onSecond);
+    }
+
+    /** {@code cis} or {@code trans} for every double bond whose configuration the input states, sorted; empty where it states none. */
+    public List<String> doubleBondConfigurations() {
+        return DoubleBondSides.marks(container);
     }
 
     /** Bonds on the shortest path between two atoms. */
