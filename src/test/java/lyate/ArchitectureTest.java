@@ -1,10 +1,16 @@
 package lyate;
 
+import static com.tngtech.archunit.base.DescribedPredicate.not;
+import static com.tngtech.archunit.core.domain.JavaClass.Predicates.belongToAnyOf;
+import static com.tngtech.archunit.core.domain.JavaClass.Predicates.resideInAPackage;
 import static com.tngtech.archunit.lang.syntax.ArchRuleDefinition.noClasses;
 
 import com.tngtech.archunit.core.domain.JavaClasses;
 import com.tngtech.archunit.core.importer.ClassFileImporter;
 import com.tngtech.archunit.core.importer.ImportOption;
+import java.net.URI;
+import java.net.URISyntaxException;
+import java.net.URL;
 import java.util.List;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
@@ -58,6 +64,16 @@ class ArchitectureTest {
         noClasses().that().resideOutsideOfPackage(named("window")).should().dependOnClassesThat()
                 .resideInAnyPackage("javax.swing..", "com.formdev..")
                 .because("engine and command line run without a display").check(PROGRAM);
+    }
+
+    /** Names of files are URIs here and there; nothing else of the package is used. */
+    @Test
+    void nothingOpensTheNetwork() {
+        noClasses().should().dependOnClassesThat(resideInAPackage("java.net..").and(not(belongToAnyOf(URI.class, URISyntaxException.class, URL.class))))
+                .orShould().dependOnClassesThat().resideInAnyPackage("javax.net..", "java.rmi..", "javax.naming..", "java.nio.channels.spi..")
+                .orShould().dependOnClassesThat().haveNameMatching("java\\.nio\\.channels\\.(Asynchronous)?(Server)?(Socket|Datagram).*")
+                .orShould().callMethod(URL.class, "openConnection").orShould().callMethod(URL.class, "openStream")
+                .because("what a chemist types stays on the chemist's machine").check(PROGRAM);
     }
 
     private static String named(String name) {

@@ -50,6 +50,8 @@ public final class Lyate {
         for (String name : named ? List.of(arguments[0]) : COMMANDS) {
             command.addSubcommand(name, command(name, terminal));
         }
+        // Sorting would follow the letters of the country.
+        command.getSubcommands().values().forEach(sub -> sub.getCommandSpec().usageMessage().sortSynopsis(false).sortOptions(false));
         command.setOut(terminal.outWriter()).setErr(terminal.errWriter())
                 .registerConverter(Format.class, new Format.Converter())
                 .setParameterExceptionHandler(Failures::wrongUsage)

@@ -77,8 +77,20 @@ final class ReviewResult implements ResultWriter<ReviewedRow>, AutoCloseable {
 
     @Override
     public void write(ReviewedRow row) throws IOException {
-        writer.write(row);
-        target.flush();
+        try {
+            writer.write(row);
+            target.flush();
+        } catch (IOException e) {
+            if (file.isEmpty()) {
+                throw e;
+            }
+            throw new IOException("the result cannot be written: " + e.getMessage() + "; finished rows" + kept(), e);
+        }
+    }
+
+    /** Where finished rows are, in words; empty where they went to standard output. */
+    private String kept() {
+        return file.map(unfinished -> " are in " + unfinished.part() + (isJson(unfinished.result()) ? "" : ", --resume goes on from there")).orElse("");
     }
 
     @Override
@@ -91,8 +103,7 @@ final class ReviewResult implements ResultWriter<ReviewedRow>, AutoCloseable {
     String leave() throws IOException {
         writer.finish();
         target.flush();
-        return file.map(unfinished -> "; " + unfinished.part() + " holds them"
-                + (isJson(unfinished.result()) ? "" : ", --resume goes on from there")).orElse("");
+        return file.isEmpty() ? "" : "; they" + kept();
     }
 
     @Override

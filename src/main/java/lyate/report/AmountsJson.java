@@ -4,6 +4,7 @@ import java.util.LinkedHashMap;
 import java.util.Map;
 import java.util.OptionalDouble;
 import lyate.bench.Amounts;
+import lyate.bench.Amounts.Spent;
 import lyate.bench.Portion;
 
 /** What to weigh and measure out, as a JSON object. */
@@ -22,8 +23,15 @@ public final class AmountsJson {
         object.put("base", portion(amounts.base()));
         object.put("base_needed", portion(amounts.baseNeeded()));
         object.put("excess_mmol", rounded(amounts.excess()));
-        object.put("protons", amounts.spending().stream().map(spent -> Map.of("what", spent.what(), "mmol", rounded(spent.milliMole()))).toList());
+        object.put("protons", amounts.spending().stream().map(AmountsJson::proton).toList());
         object.put("warnings", amounts.warnings());
+        return object;
+    }
+
+    private static Map<String, Object> proton(Spent spent) {
+        Map<String, Object> object = new LinkedHashMap<>();
+        object.put("what", spent.what());
+        object.put("mmol", rounded(spent.milliMole()));
         return object;
     }
 

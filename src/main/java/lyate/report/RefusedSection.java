@@ -16,7 +16,7 @@ final class RefusedSection {
         html.element("h3", "As given").open("table", "class", "pairs").open("tbody");
         List<String> names = row.row().header().names();
         for (int i = 0; i < names.size(); i++) {
-            if (!row.row().cells().get(i).isEmpty()) {
+            if (!row.row().cells().get(i).isBlank()) {
                 html.open("tr").element("th", names.get(i), "scope", "row").element("td", row.row().cells().get(i)).close();
             }
         }

@@ -132,7 +132,7 @@ final class StepSection {
         for (int i = 0; i < row.cells().size(); i++) {
             String name = row.header().names().get(i);
             boolean known = SheetColumn.headers().contains(name) && !name.equals(SheetColumn.NOTES.header());
-            if (!known && !ReviewCells.COLUMNS.contains(name) && !row.cells().get(i).isEmpty()) {
+            if (!known && !ReviewCells.COLUMNS.contains(name) && !row.cells().get(i).isBlank()) {
                 others.put(Words.sentence(name), row.cells().get(i));
             }
         }

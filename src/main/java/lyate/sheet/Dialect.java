@@ -46,12 +46,12 @@ record Dialect(char delimiter, String lineEnd) {
     }
 
     /**
-     * The trimmed cells of one record.
+     * The cells of one record, as they stand between delimiters.
      *
      * @throws IOException where its quotes are not in order
      */
     List<String> cells(String record) throws IOException {
-        CSVFormat format = CSVFormat.RFC4180.builder().setDelimiter(delimiter).setTrim(true).setIgnoreEmptyLines(true).get();
+        CSVFormat format = CSVFormat.RFC4180.builder().setDelimiter(delimiter).setIgnoreEmptyLines(true).get();
         try (CSVParser parser = CSVParser.parse(record, format)) {
             List<CSVRecord> records = parser.getRecords();
             return records.isEmpty() ? List.of() : new ArrayList<>(records.get(0).toList());

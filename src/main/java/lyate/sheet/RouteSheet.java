@@ -8,6 +8,7 @@ import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.List;
 
 /**
@@ -156,6 +157,16 @@ public record RouteSheet(SheetHeader header, List<Line> lines, Dialect dialect, 
         StringBuilder text = new StringBuilder(head);
         lines.forEach(line -> text.append(line.lead()).append(line.text()));
         return text.append(tail).toString();
+    }
+
+    /**
+     * Whether somebody else has written a file since.
+     *
+     * @param known its text as it was read or saved last
+     * @return false also where the file is gone, for then nothing is lost
+     */
+    public static boolean changedSince(Path file, String known) throws IOException {
+        return Files.exists(file) && !Arrays.equals(Files.readAllBytes(file), known.getBytes(StandardCharsets.UTF_8));
     }
 
     /** Saves; the file is either as it was before or completely the new one, whatever happens meanwhile. */

@@ -59,7 +59,7 @@ public final class SheetReader implements RowSource {
 
     private List<String> headerCells() throws SheetException {
         try {
-            return dialect.cells(headerRecord.text());
+            return dialect.cells(headerRecord.text()).stream().map(String::strip).toList();
         } catch (IOException e) {
             throw new SheetException("line " + headerRecord.line() + ": the quotes of the header are not in order");
         }
@@ -110,7 +110,7 @@ public final class SheetReader implements RowSource {
         number++;
         try {
             List<String> cells = dialect.cells(raw.text());
-            boolean excess = cells.stream().skip(header.names().size()).anyMatch(cell -> !cell.isEmpty());
+            boolean excess = cells.stream().skip(header.names().size()).anyMatch(cell -> !cell.isBlank());
             String problem = excess ? cells.size() + " cells, but the header has " + header.names().size() + " columns"
                     : raw.text().indexOf(NO_LETTER) >= 0 ? NOT_UTF_8 : "";
             return new SheetRow(header, number, raw.line(), cells, problem);

@@ -12,7 +12,7 @@ import java.util.stream.Stream;
  * @param header  the columns
  * @param number  1-based, comment and blank lines not counted
  * @param line    1-based line of the file on which it begins; 0 where it has none
- * @param cells   trimmed text of every column, in the order of the header
+ * @param cells   text of every column as it stands, in the order of the header
  * @param problem why the row cannot be taken apart into cells, in words; empty for a sound one
  */
 public record SheetRow(SheetHeader header, int number, int line, List<String> cells, String problem) {
@@ -23,10 +23,10 @@ public record SheetRow(SheetHeader header, int number, int line, List<String> ce
         cells = List.copyOf(padded.subList(0, header.names().size()));
     }
 
-    /** Text of a cell; empty where the cell is, or where there is no such column. */
+    /** Text of a cell without blanks at its ends; empty where the cell is, or where there is no such column. */
     public String text(SheetColumn column) {
         int index = header.indexOf(column.header());
-        return index < 0 ? "" : cells.get(index);
+        return index < 0 ? "" : cells.get(index).strip();
     }
 
     /** What the row is called: its {@code step} cell, or its number. */

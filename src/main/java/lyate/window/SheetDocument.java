@@ -1,5 +1,6 @@
 package lyate.window;
 
+import java.io.IOException;
 import java.nio.file.Path;
 import java.util.ArrayDeque;
 import java.util.ArrayList;
@@ -58,6 +59,11 @@ final class SheetDocument {
 
     boolean isModified() {
         return !state.sheet().text().equals(savedText);
+    }
+
+    /** Whether another program has written the file since it was read or saved here. */
+    boolean changedOnDisk() throws IOException {
+        return file.isPresent() && RouteSheet.changedSince(file.get(), savedText);
     }
 
     boolean canUndo() {

@@ -97,6 +97,10 @@ final class SheetFiles {
 
     private boolean write(Path file) {
         try {
+            boolean same = document.file().equals(Optional.of(file));
+            if (same && document.changedOnDisk() && !agreed(file.getFileName() + " was changed by another program since it was read. Replace it by yours?")) {
+                return false;
+            }
             document.state().sheet().save(file);
             document.saved(file);
             memory.used(file);

@@ -164,6 +164,17 @@ class LyateTest {
     }
 
     @Test
+    void columnsTheProgramDoesNotKnowPassThroughToTheLetter() throws IOException {
+        String kept = "  two blanks ,\"a \"\"b\"\";c\",\"line 1\nline 2 \",\u00e9\u6f22,1e5";
+        Run run = run("# mine\nz,substrate,y,x,base,w,solvent,v\n" + kept.replaceFirst(",", ", CC(C)=O ,").replace(",\u00e9", ",LDA,\u00e9").replace(",1e5", ",THF,1e5") + "\n",
+                "review", "-");
+        assertEquals(0, run.code());
+        assertTrue(run.out().startsWith("z,substrate,y,x,base,w,solvent,v,verdict,"), run.out());
+        CSVRecord row = csv(run.out()).get(0);
+        assertEquals(List.of("  two blanks ", "a \"b\";c", "line 1\nline 2 ", "\u00e9\u6f22", "1e5"), Stream.of("z", "y", "x", "w", "v").map(row::get).toList());
+    }
+
+    @Test
     void reviewStreamsFromStandardInput() throws IOException {
         Run run = run("reaction\nCC(C)=O>CC(C)[N-]C(C)C.[Li+].C1CCOC1>C\n", "review", "-");
         assertEquals(0, run.code());

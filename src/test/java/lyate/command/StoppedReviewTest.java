@@ -43,7 +43,7 @@ class StoppedReviewTest {
         String part = Files.readString(part());
         assertTrue(part.endsWith("\n"), part.substring(Math.max(0, part.length() - 80)));
         String said = Files.readString(words.toPath());
-        assertTrue(said.contains("rows; " + part() + " holds them, --resume goes on from there"), said);
+        assertTrue(said.contains("rows; they are in " + part() + ", --resume goes on from there"), said);
         finish();
         assertSameAsUninterrupted();
     }

@@ -1,6 +1,7 @@
 package lyate.sheet;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertFalse;
 import static org.junit.jupiter.api.Assertions.assertThrows;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
@@ -102,6 +103,19 @@ class RouteSheetTest {
         try (Stream<Path> files = Files.list(folder)) {
             assertEquals(List.of(directory), files.toList());
         }
+    }
+
+    @Test
+    void aFileThatSomebodyElseHasWrittenIsNoticed(@TempDir Path folder) throws IOException, SheetException {
+        Path file = folder.resolve("route.csv");
+        RouteSheet mine = RouteSheet.parse("\uFEFF" + SHEET);
+        mine.save(file);
+        assertFalse(RouteSheet.changedSince(file, mine.text()));
+        RouteSheet theirs = RouteSheet.read(file).withCell(0, "base", "LDA");
+        theirs.save(file);
+        assertTrue(RouteSheet.changedSince(file, mine.text()));
+        Files.delete(file);
+        assertFalse(RouteSheet.changedSince(file, mine.text()));
     }
 
     @Test
