@@ -20,7 +20,7 @@ final class BondCosts {
 
     private BondCosts() {}
 
-    /** A bond that breaks: to halogen easiest, between carbons hardest. */
+    /** A bond that breaks: to halogen easiest, between carbons hardest, from an aromatic ring harder than from a chain. */
     static int broken(AtomGraph graph, int one, int other) {
         int low = Math.min(graph.element[one], graph.element[other]);
         int high = Math.max(graph.element[one], graph.element[other]);
@@ -31,7 +31,7 @@ final class BondCosts {
             return 13;
         }
         boolean activated = isCentre(graph, one) || isCentre(graph, other);
-        return activated ? 10 : 11;
+        return activated ? 10 : isAromatic(graph, one) || isAromatic(graph, other) ? 12 : 11;
     }
 
     /** Whether an atom is what nucleophiles attack in acyl, sulfonyl, silyl and boryl compounds. */
@@ -43,6 +43,15 @@ final class BondCosts {
         for (int k = 0; k < graph.neighbours[atom].length; k++) {
             boolean hetero = graph.element[graph.neighbours[atom][k]] != CARBON;
             if (hetero && (graph.bonds[atom][k] == 2 || graph.bonds[atom][k] == 3)) {
+                return true;
+            }
+        }
+        return false;
+    }
+
+    private static boolean isAromatic(AtomGraph graph, int atom) {
+        for (int bond : graph.bonds[atom]) {
+            if (bond == AtomGraph.AROMATIC) {
                 return true;
             }
         }

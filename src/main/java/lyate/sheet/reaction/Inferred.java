@@ -11,8 +11,10 @@ import java.util.OptionalInt;
  * @param basis    how it was found, in a few words
  * @param doubts   why it may be something else; empty where it is sure
  * @param sources  molecules whose atoms are in the products, ascending
+ * @param changes  bonds between heavy atoms that are made or broken
  */
-record Inferred(List<Place> leaving, List<Place> arriving, String basis, List<String> doubts, List<Integer> sources) {
+record Inferred(List<Place> leaving, List<Place> arriving, String basis, List<String> doubts, List<Integer> sources,
+                int changes) {
 
     /**
      * An atom of a reactant.
@@ -25,10 +27,10 @@ record Inferred(List<Place> leaving, List<Place> arriving, String basis, List<St
     record Place(int molecule, int atom, boolean mapped, OptionalInt partner) {}
 
     static Inferred none(String reason) {
-        return new Inferred(List.of(), List.of(), reason, List.of(reason), List.of());
+        return new Inferred(List.of(), List.of(), reason, List.of(reason), List.of(), 0);
     }
 
     Inferred with(List<Integer> otherSources) {
-        return new Inferred(leaving, arriving, basis, doubts, otherSources);
+        return new Inferred(leaving, arriving, basis, doubts, otherSources, changes);
     }
 }

@@ -100,7 +100,15 @@ final class ReactionRoles {
     }
 
     SiteOrigin origin() {
-        return new SiteOrigin(place.map(this::label), arrives, found.inferred().basis(), found.inferred().doubts(), alternatives(), remarks());
+        return new SiteOrigin(place.map(this::label), arrives, found.inferred().basis(), doubts(), alternatives(), remarks());
+    }
+
+    private List<String> doubts() {
+        List<String> doubts = new ArrayList<>(found.inferred().doubts());
+        if (arrives && found.inferred().changes() > 0) {
+            doubts.add("bonds are made or broken as well, which is more than a protonation");
+        }
+        return doubts;
     }
 
     private String label(Place at) {

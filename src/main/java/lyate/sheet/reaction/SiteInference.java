@@ -136,7 +136,7 @@ final class SiteInference {
             }
             Inferred.Place first = leaving.isEmpty() ? arriving.get(0) : leaving.get(0);
             String basis = first.mapped() ? "mapped" : moves.size() > 1 ? moves.size() + " assignments tie" : "one assignment";
-            return new Inferred(leaving, arriving, basis, doubts, sources());
+            return new Inferred(leaving, arriving, basis, doubts, sources(), moves.get(0).changes());
         }
 
         private List<Inferred.Place> places(boolean leaving) {

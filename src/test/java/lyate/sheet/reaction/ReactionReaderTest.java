@@ -105,6 +105,13 @@ class ReactionReaderTest {
         assertEquals(alternatives, read.origin().alternatives().size());
     }
 
+    @Test
+    void aDeprotectionIsNoMereProtonation() throws MoleculeException {
+        Reaction read = READER.read("CC(C)(C)OC(=O)N1CCCCC1.OC(=O)C(F)(F)F>>C1CC[NH2+]CC1.[O-]C(=O)C(F)(F)F");
+        assertTrue(read.origin().arrives());
+        assertEquals("unsure: bonds are made or broken as well, which is more than a protonation", read.origin().confidence());
+    }
+
     /** One molecule drawn, two react. */
     @ParameterizedTest
     @CsvSource(delimiter = '|', value = {
