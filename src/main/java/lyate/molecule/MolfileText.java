@@ -7,6 +7,7 @@ import java.util.List;
 import java.util.Set;
 import java.util.regex.Pattern;
 import org.openscience.cdk.exception.CDKException;
+import org.openscience.cdk.interfaces.IAtom;
 import org.openscience.cdk.interfaces.IAtomContainer;
 import org.openscience.cdk.interfaces.IBond;
 import org.openscience.cdk.io.DefaultChemObjectReader;
@@ -43,6 +44,11 @@ record MolfileText(String text) {
     String smiles() throws MoleculeException {
         IAtomContainer parsed = parsed();
         Refusals.check(parsed);
+        for (IAtom atom : parsed.atoms()) {
+            if (atom.getMapIdx() < 0) {
+                throw new MoleculeException(InputNumbers.label(atom) + " has the map number " + atom.getMapIdx() + "; expected 0 or more", InputNumbers.of(atom));
+            }
+        }
         return SmilesWriter.mapped(parsed);
     }
 
