@@ -62,6 +62,12 @@ class ReactionFileTest {
     }
 
     @Test
+    void aNegativeMapNumberIsRefused() {
+        ReactionRecord read = records(new StringReader(text("methylation-v2000.rxn").replaceFirst("  0  1  0  0\n", "  0 -1  0  0\n"))).get(0);
+        assertEquals("reactant 1 (from line 7): O1 has the map number -1; expected 0 or more", read.problem());
+    }
+
+    @Test
     void anRdFileIsReadRecordByRecord() {
         List<ReactionRecord> read = records("four-records.rdf");
         assertEquals(4, read.size());
