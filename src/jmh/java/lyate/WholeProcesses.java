@@ -63,7 +63,7 @@ public final class WholeProcesses {
         programs.clear();
         programs.put("bare reading", with(archived("bare.jsa", bare), bare));
         programs.put("check", with(archived("check.jsa", check), check));
-        compare("cold check, both with archive and short-run options as in bin/lyate", programs);
+        compare("cold check, both with archive and short-run options as in src/launcher/lyate", programs);
     }
 
     private void window() throws IOException, InterruptedException {
@@ -86,7 +86,7 @@ public final class WholeProcesses {
         programs.put("bare frame", with(archived("frame.jsa", with(bare, List.of("archive"))), bare));
         programs.put("window stands and takes input", with(archive, window));
         programs.put("first review on screen", with(archive, reviewed));
-        compare("window, both with archive and short-run options as in bin/lyate", programs);
+        compare("window, both with archive and short-run options as in src/launcher/lyate", programs);
     }
 
     private void sheet() throws IOException, InterruptedException {

@@ -27,8 +27,6 @@ import lyate.stock.Solvent;
 public record GasAndHeat(Optional<GivenOffGas> gas, List<HeatShare> heat, List<String> withoutHeat,
                          OptionalDouble temperatureRise, OptionalDouble highestTemperature, List<String> cautions) {
 
-    /** Litres. */
-    private static final double WORTH_SAYING = 0.005;
     private static final double ROOM_CELSIUS = 25;
     private static final double ATMOSPHERE = 101.325;
     /** This close to the boiling point counts as boiling: hot spots, vapour carried off by the gas. */

@@ -71,6 +71,6 @@ public final class HeavyAtoms {
     }
 
     private static long number(int element) {
-        return element * element * 0x9E3779B97F4A7C15L >>> 7;
+        return (long) element * element * 0x9E3779B97F4A7C15L >>> 7;
     }
 }

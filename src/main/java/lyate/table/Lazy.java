@@ -16,7 +16,11 @@ public final class Lazy<T> implements Supplier<T> {
         this.work = work;
     }
 
-    /** @param work pure; never gives null */
+    /**
+     * One that is worked out when asked for.
+     *
+     * @param work pure; never gives null
+     */
     public static <T> Lazy<T> of(Supplier<T> work) {
         return new Lazy<>(work);
     }

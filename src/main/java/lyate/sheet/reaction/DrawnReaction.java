@@ -101,7 +101,7 @@ record DrawnReaction(List<ReactionPart> left, List<ReactionPart> agents, List<Re
         }
 
         private long price() {
-            return (long) inference.cost() + UNEXPLAINED * inference.unexplained() + extra;
+            return (long) inference.cost() + UNEXPLAINED * (long) inference.unexplained() + extra;
         }
 
         Found found(Set<ReactionPart> reagents) {

@@ -172,8 +172,8 @@ public final class DrawnShelf {
                 text -> stockroom.acid(text).smiles(), text -> stockroom.partner(text).smiles())) {
             try {
                 return Optional.of(lookup.smiles(name));
-            } catch (UnknownNameException e) {
-                continue;
+            } catch (UnknownNameException notThatShelf) {
+                // the next shelf may have it
             }
         }
         return Optional.empty();
