@@ -3,8 +3,8 @@ package lyate.window;
 import com.formdev.flatlaf.util.UIScale;
 import lyate.acidity.Acidity;
 import lyate.report.LetteredSite;
-import lyate.report.Recipe.Line;
 import lyate.report.Recipe;
+import lyate.report.Recipe.Line;
 import lyate.report.Words;
 
 /** The card shown over a site: its pKa taken apart. */
