@@ -66,8 +66,18 @@ record MolfileText(String text) {
         IAtomContainer read = parse(old, String.join("\n", lines) + "\n");
         refuseStrangeBonds(read);
         InputNumbers.assign(read);
+        refuseStrangeMap(read);
         AromaticBonds.settle(read);
         return read;
+    }
+
+    private static void refuseStrangeMap(IAtomContainer read) throws MoleculeException {
+        for (IAtom atom : read.atoms()) {
+            if (atom.getMapIdx() < 0) {
+                throw new MoleculeException("the molfile numbers " + InputNumbers.label(atom) + " " + atom.getMapIdx()
+                        + " in its atom map; expected 1 or more, or 0 for none", InputNumbers.of(atom));
+            }
+        }
     }
 
     private static void refuseStrangeBonds(IAtomContainer read) throws MoleculeException {

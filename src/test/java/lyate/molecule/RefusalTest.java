@@ -131,6 +131,8 @@ class RefusalTest {
     void longTextsAndOddConnectionTables() {
         assertEquals("the name has 1002 characters; at most 1000 are read", refusal("quxyzzy ".repeat(125) + "zz"));
         assertEquals("the molfile has no line 'M  V30 COUNTS'", refusal(MoleculeReaderTest.resource("nitrophenol-v3000.mol").replace("COUNTS", "KOUNTS")));
+        assertEquals("the molfile numbers C1 -3 in its atom map; expected 1 or more, or 0 for none", refusal("\n\n\n  1  0  0     0  0            999 V2000\n"
+                + "    0.0000    0.0000    0.0000 C   0  0  0  0  0  0  0  0  0 -3  0  0\nM  END\n"));
         assertEquals("there is no atom in it", refusal("\n\n\n  0  0  0     0  0            999 V2000\nM  END\n"));
         assertEquals("not an InChI that is understood", refusal("InChI=1S/C2H6O/c1-2-9/h3H,2H2,1H3").split(":")[0]);
     }
