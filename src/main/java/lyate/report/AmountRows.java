@@ -20,7 +20,7 @@ public final class AmountRows {
         lines.add(new Line("substrate", Words.number(amounts.batch().milliMole()), Words.number(amounts.batch().grams()), "", "counter-ions included"));
         lines.add(new Line(step.solvent().name(), "", "", Words.number(amounts.solventMilliLitre()), "for " + Words.chosen(step.concentrationMolar()) + " mol/L"));
         lines.add(new Line(step.base().name(), Words.number(amounts.base().milliMole()), number(amounts.base().grams()),
-                number(amounts.base().milliLitre()), Words.chosen(step.equivalents()) + " equivalents; " + amounts.base().form()));
+                number(amounts.base().milliLitre()), Words.chosen(step.equivalents()) + (step.equivalents() == 1 ? " equivalent; " : " equivalents; ") + amounts.base().form()));
         amounts.spending().forEach(spent -> lines.add(new Line("protons of " + spent.what(), Words.number(spent.milliMole()), "", "",
                 "met before or at the intended site")));
         lines.add(new Line("base that just covers these", Words.number(amounts.baseNeeded().milliMole()), number(amounts.baseNeeded().grams()),
