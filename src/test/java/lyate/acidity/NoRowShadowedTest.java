@@ -2,12 +2,12 @@ package lyate.acidity;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
 
+import java.util.ArrayList;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.TreeSet;
 import java.util.function.Function;
-import java.util.ArrayList;
 import lyate.table.Row;
 import lyate.table.Table;
 import lyate.table.TableFolders;
