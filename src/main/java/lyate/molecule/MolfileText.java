@@ -44,11 +44,6 @@ record MolfileText(String text) {
     String smiles() throws MoleculeException {
         IAtomContainer parsed = parsed();
         Refusals.check(parsed);
-        for (IAtom atom : parsed.atoms()) {
-            if (atom.getMapIdx() < 0) {
-                throw new MoleculeException(InputNumbers.label(atom) + " has the map number " + atom.getMapIdx() + "; expected 0 or more", InputNumbers.of(atom));
-            }
-        }
         return SmilesWriter.mapped(parsed);
     }
 

@@ -37,6 +37,6 @@ public record Quantity(String unit, double low, double high) {
     }
 
     private static String plain(double limit) {
-        return limit == Math.rint(limit) ? String.format(Locale.ROOT, "%.0f", limit) : BigDecimal.valueOf(limit).toPlainString();
+        return limit == Math.rint(limit) ? String.format(Locale.ROOT, "%.0f", limit) : BigDecimal.valueOf(limit).stripTrailingZeros().toPlainString();
     }
 }

@@ -64,7 +64,7 @@ class ReactionFileTest {
     @Test
     void aNegativeMapNumberIsRefused() {
         ReactionRecord read = records(new StringReader(text("methylation-v2000.rxn").replaceFirst("  0  1  0  0\n", "  0 -1  0  0\n"))).get(0);
-        assertEquals("reactant 1 (from line 7): O1 has the map number -1; expected 0 or more", read.problem());
+        assertEquals("reactant 1 (from line 7): the molfile numbers O1 -1 in its atom map; expected 1 or more, or 0 for none", read.problem());
     }
 
     @Test

@@ -38,8 +38,8 @@ class StepScaleTest {
 
     @ParameterizedTest
     @CsvSource(delimiter = '|', value = {
-        "amount_g|0|column amount_g: found '0', expected a number from 1.0E-6 to 1000000000 (g)",
-        "amount_mmol|much|column amount_mmol: found 'much', expected a number from 1.0E-6 to 1000000000 (mmol)",
+        "amount_g|0|column amount_g: found '0', expected a number from 0.000001 to 1000000000 (g)",
+        "amount_mmol|much|column amount_mmol: found 'much', expected a number from 0.000001 to 1000000000 (mmol)",
         "base_titrated_M|-1|column base_titrated_M: found '-1', expected a number from 0.001 to 30 (mol/L)",
         "amount_mmol,amount_g|1,2|column amount_g: found an amount in mmol as well, expected one of the two",
     })
