@@ -51,6 +51,8 @@ class DialogsTest {
                 frame.dispose();
                 return null;
             });
+            // What the window writes when it is told that it was closed is written before the folder goes.
+            onEventThread(() -> null);
         }
     }
 
