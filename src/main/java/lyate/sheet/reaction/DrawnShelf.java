@@ -147,13 +147,14 @@ public final class DrawnShelf {
     }
 
     /**
-     * An agent given by name becomes the parts of its structure; any other part stays.
+     * An agent given by name becomes the parts of its structure; any other part stays. A name may read as SMILES of something odd:
+     * THF as tritium, hydrogen and fluorine.
      *
      * @throws MoleculeException for a text that is neither a structure nor a name on the shelf
      */
     List<ReactionPart> named(ReactionPart part) throws MoleculeException {
         boolean structure = part.problem().isEmpty();
-        if (part.side() != ReactionPart.Side.AGENT || structure && (part.molecule().isEmpty() || isKnown(part))) {
+        if (part.side() != ReactionPart.Side.AGENT || structure && part.molecule().isPresent() && isKnown(part)) {
             return List.of(part);
         }
         Optional<String> smiles = structureOf(part.text());

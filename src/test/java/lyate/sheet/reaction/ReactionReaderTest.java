@@ -26,7 +26,9 @@ import org.junit.jupiter.params.provider.ValueSource;
 /** Who is who in a reaction; what the reader says where a reaction is odd; how it bears hostile ones. */
 class ReactionReaderTest {
 
-    private static final ReactionReader READER = new ReactionReader(new MoleculeReader(), Stockroom.load(TableFolders.packaged()));
+    private static final Stockroom STOCKROOM = Stockroom.load(TableFolders.packaged());
+    private static final ReactionReader READER = new ReactionReader(new MoleculeReader(), STOCKROOM);
+    private static final List<String> BASE_NAMES = STOCKROOM.bases().stream().flatMap(Base::names).toList();
     private static final ThreadMXBean CLOCK = ManagementFactory.getThreadMXBean();
     private static final long LONGEST_NANOS = 5_000_000_000L;
 
@@ -44,6 +46,23 @@ class ReactionReaderTest {
         Reaction read = READER.read(reaction);
         assertEquals(Optional.of(base), read.base().map(Base::id));
         assertEquals(Optional.of(solvent), read.solvent().map(Solvent::id));
+    }
+
+    /** Many of the names read as SMILES of something odd as well: THF as tritium, hydrogen and fluorine. */
+    @Test
+    void everySolventIsKnownByEachOfItsNamesOverTheArrow() {
+        List<String> unknown = STOCKROOM.solvents().stream().flatMap(solvent -> solvent.names()
+                .filter(name -> !name.matches(".*[\\s.>].*") && BASE_NAMES.stream().noneMatch(name::equalsIgnoreCase))
+                .filter(name -> !solventOver("O=C1CCCCC1>" + name + ">C[Si](C)(C)OC1=CCCCC1").equals(Optional.of(solvent.id())))).toList();
+        assertEquals(List.of(), unknown);
+    }
+
+    private static Optional<String> solventOver(String reaction) {
+        try {
+            return READER.read(reaction).solvent().map(Solvent::id);
+        } catch (MoleculeException e) {
+            return Optional.of(e.getMessage());
+        }
     }
 
     @ParameterizedTest
