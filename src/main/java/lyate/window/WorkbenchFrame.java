@@ -4,6 +4,8 @@ import com.formdev.flatlaf.util.UIScale;
 import java.awt.BorderLayout;
 import java.awt.Dimension;
 import java.awt.Frame;
+import java.awt.GraphicsEnvironment;
+import java.awt.Rectangle;
 import java.awt.event.WindowAdapter;
 import java.awt.event.WindowEvent;
 import java.nio.file.Path;
@@ -141,7 +143,8 @@ public final class WorkbenchFrame extends JFrame {
     private void place() {
         setMinimumSize(new Dimension(theme.space("window.width") / 2, theme.space("window.height") / 2));
         memory.bounds().ifPresentOrElse(this::setBounds, () -> {
-            setSize(theme.space("window.width"), theme.space("window.height"));
+            Rectangle room = GraphicsEnvironment.getLocalGraphicsEnvironment().getMaximumWindowBounds();
+            setSize(Math.min(theme.space("window.width"), room.width), Math.min(theme.space("window.height"), room.height));
             setLocationRelativeTo(null);
         });
         if (Boolean.parseBoolean(memory.get("maximised", "false"))) {
