@@ -52,7 +52,7 @@ final class EquilibriumFindings {
         if (!situation.before().contains(donor)) {
             return CAUTION;
         }
-        return situation.verdict() == Verdict.SELECTIVE ? NOTE : STOP;
+        return situation.paysForAll() ? NOTE : STOP;
     }
 
     private static List<Finding> secondEquivalent(Situation situation) {
@@ -61,9 +61,8 @@ final class EquilibriumFindings {
         if (before.isEmpty() || !reachable || situation.verdict() == Verdict.LEVELLED) {
             return List.of();
         }
-        boolean paid = situation.verdict() == Verdict.SELECTIVE;
         String names = before.stream().map(Donor::label).collect(Collectors.joining(", "));
-        return List.of(finding(paid ? NOTE : STOP, FindingKind.SECOND_EQUIVALENT_NEEDED, situation.intended(),
+        return List.of(finding(situation.paysForAll() ? NOTE : STOP, FindingKind.SECOND_EQUIVALENT_NEEDED, situation.intended(),
                 say("%s goes first; taking %s as well needs %d equivalents, there are %.2f.", names,
                         situation.intended().label(), situation.protonsBefore() + 1, situation.protonEquivalents()),
                 before.stream().map(EquilibriumFindings::compared).toList()));

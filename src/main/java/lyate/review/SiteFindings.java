@@ -30,9 +30,10 @@ final class SiteFindings {
 
     private static Finding kineticSite(Situation situation, KineticControl.Order order) {
         boolean wanted = order.winner().equals(situation.intended().label());
+        boolean paid = situation.paysForAll() && situation.before().stream().anyMatch(donor -> donor.label().equals(order.winner()));
         String how = order.rule().control() == Control.RATE ? "goes first" : "prevails at equilibrium";
         String sentence = String.format(Locale.ROOT, "%s %s over %s: %s.", order.winner(), how, order.loser(), order.rule().sentence());
-        return new Finding(wanted ? Severity.NOTE : Severity.STOP, FindingKind.KINETIC_SITE, sentence,
+        return new Finding(wanted || paid ? Severity.NOTE : Severity.STOP, FindingKind.KINETIC_SITE, sentence,
                 List.of("rule " + order.rule().id()), situation.intended().site().equivalent(), order.rule().source());
     }
 

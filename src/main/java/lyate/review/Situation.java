@@ -38,6 +38,11 @@ record Situation(Step step, WorkingBase workingBase, List<Donor> donors, Donor i
         return before().stream().mapToInt(Donor::protons).sum();
     }
 
+    /** Whether the base weighed in pays for every proton that goes first and for the one meant, and what is left reaches it. */
+    boolean paysForAll() {
+        return protonEquivalents() >= protonsBefore() + 1 - VerdictRule.DOSE_TOLERANCE && verdict != Verdict.WRONG_SITE;
+    }
+
     /** Protons the base takes per mole that was weighed in. */
     double protonEquivalents() {
         return step.equivalents() * step.base().protonsPerFormula();

@@ -16,7 +16,7 @@ final class VerdictRule {
     /** Two sites this many pKa units apart share the proton 95 : 5. */
     static final double CLEAR = Math.log10(19);
     /** Equivalents short of one that still count as one: weighing error and titre. */
-    private static final double DOSE_TOLERANCE = 0.2;
+    static final double DOSE_TOLERANCE = 0.2;
 
     private VerdictRule() {}
 
