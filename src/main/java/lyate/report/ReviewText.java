@@ -18,7 +18,7 @@ public final class ReviewText implements ResultWriter<Review> {
 
     @Override
     public void write(Review review) throws IOException {
-        out.line("%s (%s): %s", review.verdict().code(), review.probabilityInWords(), review.verdict().meaning());
+        out.line("%s (%s): %s", review.verdict().code(), review.probabilityInWords(), review.meaning());
         out.stops(review.findings());
         out.line("");
         step(review);

@@ -49,7 +49,7 @@ final class StepSection {
         html.open("div", "class", "verdict");
         html.open("p", "class", "answer").markup(Signs.of(review.verdict())).element("strong", Words.verdict(review.verdict()))
                 .element("span", "probability " + Words.probability(review.probability())).close();
-        html.element("p", Words.sentence(review.verdict().meaning()) + ". " + whatGoes());
+        html.element("p", Words.sentence(review.meaning()) + ". " + whatGoes());
         String others = review.probabilities().entrySet().stream()
                 .filter(entry -> entry.getKey() != review.verdict() && entry.getValue() >= WORTH_A_WORD)
                 .sorted(Map.Entry.<Verdict, Double>comparingByValue().reversed())

@@ -155,7 +155,7 @@ public final class BaseChoice {
         String numbers = String.format(Locale.ROOT, "log K %.1f at %s, probability %s", review.logK(), review.intendedSite(),
                 review.probabilityInWords());
         String against = against(review).map(finding -> finding.sentence() + " ").orElse("");
-        return against + Character.toUpperCase(review.verdict().meaning().charAt(0)) + review.verdict().meaning().substring(1) + " (" + numbers + ").";
+        return against + RuleCells.capital(review.meaning()) + " (" + numbers + ").";
     }
 
     /** What speaks most against a base. */

@@ -53,6 +53,13 @@ public record Review(Step step, Verdict verdict, double probability, Map<Verdict
         return onOtherScale.isEmpty() ? deciding : (deciding + onOtherScale.getOrDefault(asked, 0.0)) / 2;
     }
 
+    /** What the verdict means here, in words: a selective base may go on to a further proton. */
+    public String meaning() {
+        boolean goesOn = verdict == Verdict.SELECTIVE && findings.stream().anyMatch(finding ->
+                finding.kind() == FindingKind.UNINTENDED_DEPROTONATION && finding.severity() != Finding.Severity.NOTE);
+        return goesOn ? "the intended proton is taken, but not it alone" : verdict.meaning();
+    }
+
     /** Whether the solvent leaves nothing of the base that could take a proton; log K is that of the base as it was. */
     public boolean baseDestroyed() {
         return workingBase.startsWith(WorkingBase.NOTHING);

@@ -33,7 +33,7 @@ final class VerdictHeader extends JPanel {
         JPanel words = new JPanel(new StackLayout(palette.space("small")));
         words.setOpaque(false);
         words.add(title(review, palette, plain));
-        WrappedText meaning = new WrappedText(Words.sentence(review.verdict().meaning()) + ".");
+        WrappedText meaning = new WrappedText(Words.sentence(review.meaning()) + ".");
         meaning.setForeground(palette.color("ink"));
         words.add(meaning);
         WrappedText facts = new WrappedText(facts(review));

@@ -22,6 +22,23 @@ class CoupledProtonsTest {
         assertEquals(Verdict.WRONG_SITE, review("CC(=O)CC(=O)OCC", "C1", "LDA", 1.05, "THF", -78).verdict());
     }
 
+    /** Stoichiometry: the first equivalent goes to the N-H, the second to the C-H, and nothing speaks against that. */
+    @Test
+    void aFirstProtonThatIsPaidForIsANoteAndOneThatIsNotAStop() throws Exception {
+        String carbamate = "CC(C)(C)OC(=O)NCC(=O)OC";
+        assertEquals(Finding.Severity.NOTE, severity(review(carbamate, "C9", "LDA", 2.2, "THF", -78), FindingKind.KINETIC_SITE));
+        assertEquals(Finding.Severity.NOTE, severity(review(carbamate, "C9", "LDA", 2.2, "THF", -78), FindingKind.SECOND_EQUIVALENT_NEEDED));
+        assertEquals(Finding.Severity.STOP, severity(review(carbamate, "C9", "LDA", 1.05, "THF", -78), FindingKind.KINETIC_SITE));
+    }
+
+    /** Stoichiometry: what is left after the N-H goes to the C-H. */
+    @Test
+    void aBaseThatGoesOnIsNotSaidToTakeTheIntendedProtonAlone() throws Exception {
+        String carbamate = "CC(C)(C)OC(=O)NCC(=O)OC";
+        assertTrue(review(carbamate, "N8", "LDA", 2.2, "THF", -78).meaning().endsWith("not it alone"));
+        assertTrue(review(carbamate, "N8", "LDA", 1.0, "THF", -78).meaning().endsWith("no other without need"));
+    }
+
     /** Common practice: two equivalents of butyllithium for propargyl alcohol. */
     @Test
     void theAcetylideOfPropargylAlcoholNeedsTwoEquivalents() throws Exception {
@@ -48,6 +65,10 @@ class CoupledProtonsTest {
     void aHydrideTakesItsProtonsMoleForMole() throws Exception {
         assertEquals(70, review("O=C1CCCCC1", "C3", "NaH", 0.7, "THF", 25).intendedPercent(), 1);
         assertEquals(100, review("Oc1ccccc1", "O1", "NaH", 1.0, "THF", 25).intendedPercent(), 1);
+    }
+
+    private static Finding.Severity severity(Review review, FindingKind kind) {
+        return review.findings().stream().filter(finding -> finding.kind() == kind).findFirst().orElseThrow().severity();
     }
 
     private static Review review(String substrate, String site, String base, double equivalents, String solvent, double celsius) throws Exception {
