@@ -35,10 +35,15 @@ final class KineticControl {
         List<Order> orders = new ArrayList<>();
         for (Donor winner : reached) {
             for (Donor loser : reached) {
-                preference(step, base, winner, loser).ifPresent(rule -> orders.add(new Order(rule, winner.label(), loser.label())));
+                preference(step, base, winner, loser).filter(rule -> decides(rule, winner)).ifPresent(rule -> orders.add(new Order(rule, winner.label(), loser.label())));
             }
         }
         return orders;
+    }
+
+    /** Rates decide only where the proton is taken once and for all; one that comes back leaves the matter to the equilibrium. */
+    private static boolean decides(KineticPreference rule, Donor winner) {
+        return rule.control() == Control.EQUILIBRIUM || winner.logK() >= VerdictRule.COMPLETE;
     }
 
     private Optional<KineticPreference> preference(Step step, WorkingBase base, Donor winner, Donor loser) {

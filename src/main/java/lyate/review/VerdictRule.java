@@ -30,12 +30,19 @@ final class VerdictRule {
      * @param equivalents base per substrate
      * @param levelled    whether the solvent made the working base out of the one added
      * @param destroyed   whether nothing like the base added is left
+     * @param advantage   what of the intended site's constant is a lead by rate: it says who goes first, not how far
      */
-    record World(double[] logK, int[] protons, int intended, double shift, double equivalents, boolean levelled, boolean destroyed) {
+    record World(double[] logK, int[] protons, int intended, double shift, double equivalents, boolean levelled, boolean destroyed,
+                 double advantage) {
+
+        /** A world in which equilibrium decides. */
+        World(double[] logK, int[] protons, int intended, double shift, double equivalents, boolean levelled, boolean destroyed) {
+            this(logK, protons, intended, shift, equivalents, levelled, destroyed, 0);
+        }
 
         /** The same world with other constants. */
         World withLogK(double[] others) {
-            return new World(others, protons, intended, shift, equivalents, levelled, destroyed);
+            return new World(others, protons, intended, shift, equivalents, levelled, destroyed, advantage);
         }
 
         /** The same world by the scale that does not decide, for those sites that have one. */
@@ -50,31 +57,33 @@ final class VerdictRule {
             double shift = sites.stream().filter(site -> site != intended && site.effectiveLogK() > intended.effectiveLogK()
                     && site.effectiveLogK() >= 0).mapToDouble(site -> substrate.raise(site, intended)).sum();
             double equivalents = step.equivalents() * step.base().protonsPerFormula();
-            return new World(logK, protons, sites.indexOf(intended), shift, equivalents, base.levelled(), base.destroyed());
+            return new World(logK, protons, sites.indexOf(intended), shift, equivalents, base.levelled(), base.destroyed(),
+                    intended.advantage());
         }
     }
 
     static Verdict judge(World world) {
         double intended = world.logK()[world.intended()];
-        if (world.levelled() && (intended < COMPLETE || world.destroyed())) {
+        double reached = intended - world.advantage();
+        if (world.levelled() && (reached < COMPLETE || world.destroyed())) {
             return Verdict.LEVELLED;
         }
         int before = 0;
         boolean rivalled = false;
         for (int site = 0; site < world.logK().length; site++) {
             double lead = world.logK()[site] - intended;
-            boolean reached = site != world.intended() && world.logK()[site] >= 0;
-            before += reached && lead > 0 ? world.protons()[site] : 0;
-            rivalled |= reached && Math.abs(lead) < CLEAR && lead <= 0;
+            boolean taken = site != world.intended() && world.logK()[site] >= 0;
+            before += taken && lead > 0 ? world.protons()[site] : 0;
+            rivalled |= taken && Math.abs(lead) < CLEAR && lead <= 0;
         }
         if (before > 0) {
             return world.equivalents() < before + 1 - DOSE_TOLERANCE ? Verdict.WRONG_SITE
-                    : afterOthers(intended - world.shift());
+                    : afterOthers(reached - world.shift());
         }
-        if (intended <= NONE) {
+        if (reached <= NONE) {
             return Verdict.TOO_WEAK;
         }
-        return intended < COMPLETE || rivalled ? Verdict.PARTIAL : Verdict.SELECTIVE;
+        return reached < COMPLETE || rivalled ? Verdict.PARTIAL : Verdict.SELECTIVE;
     }
 
     /** Why a verdict is given, in words; the numbers of a step say whether it holds. */

@@ -113,4 +113,18 @@ class KineticPreferencesTest {
     private static int atom(Molecule molecule, String label) {
         return molecule.atomLabelled(label).orElseThrow(() -> new IllegalArgumentException(label + " in " + molecule.input()));
     }
+
+    /** House, Modern Synthetic Reactions, 2nd ed. (from memory): rates decide where the proton does not come back. */
+    @Test
+    void aBaseTooWeakToTakeTheProtonForGoodLeavesTheOrderToTheEquilibrium() throws Exception {
+        Review weak = review("zinc bis(hexamethyldisilazide)");
+        assertTrue(weak.logK() < VerdictRule.COMPLETE && weak.intendedPercent() < 50, "taken " + weak.intendedPercent() + " %");
+        assertNotEquals(Verdict.SELECTIVE, weak.verdict());
+        assertEquals(Verdict.SELECTIVE, review("LDA").verdict());
+    }
+
+    private static Review review(String base) throws Exception {
+        return StepReviewer.load(TableFolders.packaged()).review(new Step("1", new MoleculeReader().read("CC1CCCCC1=O"), Optional.of("C6"),
+                STOCKROOM.base(base), 1.0, STOCKROOM.solvent("THF"), -78, 0.2, 20, Optional.empty()));
+    }
 }
