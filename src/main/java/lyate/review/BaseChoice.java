@@ -13,9 +13,10 @@ import lyate.stock.Solvent;
 import lyate.stock.Stockroom;
 
 /**
- * Ranks the whole stockroom for one deprotonation: by the probability that the base does just that, then by whether it
- * dissolves and by what speaks against it, then by how little stronger than needed it is. Where two pKa scales disagree the
- * probability counts both alike, so that a base that is strong enough on one of them alone does not come first.
+ * Ranks the whole stockroom for one deprotonation: by the probability that the base does just that (in full, or as a partial
+ * equilibrium that the electrophile named draws to its end), then by whether it dissolves and by what speaks against it, then by
+ * how little stronger than needed it is. Where two pKa scales disagree the probability counts both alike, so that a base that is
+ * strong enough on one of them alone does not come first.
  */
 public final class BaseChoice {
 
@@ -80,7 +81,7 @@ public final class BaseChoice {
 
     private static Comparator<RankedBase> bestFirst() {
         return Comparator.comparing(RankedBase::suits).reversed().thenComparing(RankedBase::isSlow)
-                .thenComparing(Comparator.comparingLong((RankedBase choice) -> Math.round(selective(choice) / SAME_PROBABILITY)).reversed())
+                .thenComparing(Comparator.comparingLong((RankedBase choice) -> Math.round(choice.probability() / SAME_PROBABILITY)).reversed())
                 .thenComparing(RankedBase::stops).thenComparing(RankedBase::cautions)
                 .thenComparing(choice -> choice.review().logK());
     }
@@ -147,15 +148,13 @@ public final class BaseChoice {
         return celsius < solvent.boilingPoint() && celsius > solvent.meltingPoint().orElse(Double.NEGATIVE_INFINITY);
     }
 
-    private static double selective(RankedBase choice) {
-        return choice.review().onEitherScale(Verdict.SELECTIVE);
-    }
-
     private static String why(Review review) {
         String numbers = String.format(Locale.ROOT, "log K %.1f at %s, probability %s", review.logK(), review.intendedSite(),
                 review.probabilityInWords());
         String against = against(review).map(finding -> finding.sentence() + " ").orElse("");
-        return against + RuleCells.capital(review.meaning()) + " (" + numbers + ").";
+        String meaning = review.findings().stream().filter(finding -> finding.kind() == FindingKind.TRAPPING).findFirst()
+                .map(drawn -> drawn.sentence().replaceFirst("\\.$", "")).orElse(review.meaning());
+        return against + RuleCells.capital(meaning) + " (" + numbers + ").";
     }
 
     /** What speaks most against a base. */

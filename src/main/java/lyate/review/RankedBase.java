@@ -22,10 +22,20 @@ public record RankedBase(Base base, Review review, String why) implements Ranked
         return review;
     }
 
-    /** Whether it would do the job. */
+    /** Whether it would do the job: in full, or as far as an electrophile that cannot be undone draws it. */
     @Override
     public boolean suits() {
-        return review.verdict() == Verdict.SELECTIVE && stops() == 0;
+        return (review.verdict() == Verdict.SELECTIVE || isDrawn()) && stops() == 0;
+    }
+
+    /** The probability of doing the job, both pKa scales counted alike. */
+    double probability() {
+        double full = review.onEitherScale(Verdict.SELECTIVE);
+        return isDrawn() ? full + review.onEitherScale(Verdict.PARTIAL) : full;
+    }
+
+    private boolean isDrawn() {
+        return review.verdict() == Verdict.PARTIAL && raises(FindingKind.TRAPPING);
     }
 
     /** Number of findings that speak against it outright. */
@@ -40,7 +50,11 @@ public record RankedBase(Base base, Review review, String why) implements Ranked
 
     /** Whether the tables say that the base hardly reacts there, for example because it does not dissolve. */
     public boolean isSlow() {
-        return review.findings().stream().anyMatch(finding -> finding.kind() == FindingKind.SLOW_TRANSFER);
+        return raises(FindingKind.SLOW_TRANSFER);
+    }
+
+    private boolean raises(FindingKind kind) {
+        return review.findings().stream().anyMatch(finding -> finding.kind() == kind);
     }
 
     private long count(Finding.Severity severity) {

@@ -42,6 +42,23 @@ class TrappingTest {
         assertEquals(trapped, kinds(review).contains(FindingKind.TRAPPING), kinds(review).toString());
     }
 
+    /** Phenols are alkylated with potassium carbonate in DMF or acetone (common practice). */
+    @Test
+    void aWeakBaseIsAChoiceWhereTheElectrophileDrawsTheEquilibrium() throws Exception {
+        BaseChoice choice = new BaseChoice(REVIEWER, STOCK);
+        Review alone = review("Oc1ccc(CC#N)cc1", "K2CO3", "DMF", Optional.empty());
+        Review drawn = review("Oc1ccc(CC#N)cc1", "K2CO3", "DMF", Optional.of("CCCCBr"));
+        assertFalse(place(choice.rank(alone.step()), "k2co3").suits());
+        RankedBase carbonate = place(choice.rank(drawn.step()), "k2co3");
+        assertTrue(carbonate.suits());
+        assertTrue(carbonate.why().contains("takes the anion of O1 away for good"), carbonate.why());
+        assertTrue(choice.rank(drawn.step()).indexOf(carbonate) < 10);
+    }
+
+    private static RankedBase place(List<RankedBase> ranked, String base) {
+        return ranked.stream().filter(choice -> choice.base().id().equals(base)).findFirst().orElseThrow();
+    }
+
     @Test
     void aCompleteEquilibriumNeedsNoTrap() throws Exception {
         assertFalse(kinds(review("Oc1ccc(C)cc1", "NaH", "THF", Optional.of("CI"))).contains(FindingKind.TRAPPING));
