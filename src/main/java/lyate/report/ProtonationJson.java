@@ -6,7 +6,6 @@ import lyate.molecule.Molecule;
 import lyate.review.AcidStep;
 import lyate.review.Protonation;
 import lyate.review.Protonation.Uptake;
-import lyate.review.Verdict;
 
 /** A protonation as a JSON object; {@code schema} names its version. */
 public final class ProtonationJson {
@@ -24,13 +23,7 @@ public final class ProtonationJson {
         object.put("step", step(protonation.step()));
         object.put("verdict", protonation.verdict().code());
         object.put("probability", Numbers.rounded(protonation.probability(), 4));
-        Map<String, Object> probabilities = new LinkedHashMap<>();
-        for (Verdict verdict : Verdict.values()) {
-            if (protonation.probabilities().containsKey(verdict)) {
-                probabilities.put(verdict.code(), Numbers.rounded(protonation.probabilities().get(verdict), 4));
-            }
-        }
-        object.put("probabilities", probabilities);
+        object.put("probabilities", ReviewJson.probabilities(protonation.probabilities()));
         object.put("intended_site", protonation.intendedSite());
         object.put("first_site", protonation.firstSite());
         object.put("log_k", Numbers.rounded(protonation.logK(), 3));

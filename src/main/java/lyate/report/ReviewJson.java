@@ -27,7 +27,7 @@ public final class ReviewJson {
         object.put("step", step(review.step()));
         object.put("verdict", review.verdict().code());
         object.put("probability", Numbers.rounded(review.probability(), 4));
-        object.put("probabilities", probabilities(review));
+        object.put("probabilities", probabilities(review.probabilities()));
         object.put("intended_site", review.intendedSite());
         object.put("first_site", review.firstSite());
         object.put("working_base", review.workingBase());
@@ -70,11 +70,12 @@ public final class ReviewJson {
         return object;
     }
 
-    private static Map<String, Object> probabilities(Review review) {
+    /** The probability of every verdict that is possible, by its code. */
+    static Map<String, Object> probabilities(Map<Verdict, Double> probabilities) {
         Map<String, Object> object = new LinkedHashMap<>();
         for (Verdict verdict : Verdict.values()) {
-            if (review.probabilities().containsKey(verdict)) {
-                object.put(verdict.code(), Numbers.rounded(review.probabilities().get(verdict), 4));
+            if (probabilities.containsKey(verdict)) {
+                object.put(verdict.code(), Numbers.rounded(probabilities.get(verdict), 4));
             }
         }
         return object;
